@@ -1,0 +1,5 @@
+/** The cli package. */
+@NullMarked
+package evensun.cli;
+
+import org.jspecify.annotations.NullMarked;

@@ -1,0 +1,114 @@
+package evensun.result;
+
+import java.util.List;
+import java.util.Map;
+import org.jspecify.annotations.Nullable;
+
+/**
+ * How a search went.
+ *
+ * @param aim name of the aim
+ * @param aimUnit unit of the aim
+ * @param aimAsDrawn the aim of the stack as drawn; null where it could not be evaluated
+ * @param aimFound the aim of the design found
+ * @param stopped why it stopped: {@code converged}, {@code evaluations}, {@code time} or {@code
+ *     interrupted}
+ * @param generations generations of the genetic algorithm
+ * @param evaluations designs evaluated
+ * @param failures designs that could not be evaluated
+ * @param refinementGain what the local refinement added to the aim
+ * @param history one entry per generation
+ * @param variables what varied
+ * @param optima distinct designs found, best first
+ * @param constraints limits kept
+ * @param front designs none of which is better in every aim, when several aims were given
+ * @param notes what the search says about its result, in words
+ */
+public record SearchRecord(
+    String aim,
+    String aimUnit,
+    @Nullable Double aimAsDrawn,
+    double aimFound,
+    String stopped,
+    int generations,
+    int evaluations,
+    int failures,
+    @Nullable Double refinementGain,
+    List<Generation> history,
+    List<VariableRecord> variables,
+    List<Optimum> optima,
+    List<ConstraintRecord> constraints,
+    @Nullable Front front,
+    List<String> notes) {
+
+  /**
+   * One generation.
+   *
+   * @param generation from 1
+   * @param evaluations designs evaluated so far
+   * @param best best aim so far
+   * @param mean mean aim of the generation
+   */
+  public record Generation(int generation, int evaluations, double best, double mean) {}
+
+  /**
+   * A varied quantity.
+   *
+   * @param key as in the scenario
+   * @param unit its unit
+   * @param low lower bound
+   * @param high upper bound
+   * @param step step of the deposition tool, 0 for any value
+   * @param drawn value as drawn
+   * @param found value found
+   * @param equallyGoodLow lower end of the range that is equally good, others re-optimised
+   * @param equallyGoodHigh upper end of that range
+   * @param bound {@code low} or {@code high} when the value stands on that bound, else null
+   */
+  public record VariableRecord(
+      String key,
+      String unit,
+      double low,
+      double high,
+      double step,
+      double drawn,
+      double found,
+      @Nullable Double equallyGoodLow,
+      @Nullable Double equallyGoodHigh,
+      @Nullable String bound) {}
+
+  /**
+   * A distinct good design.
+   *
+   * @param aim its aim
+   * @param values value of each varied quantity by key
+   */
+  public record Optimum(double aim, Map<String, Double> values) {}
+
+  /**
+   * A limit.
+   *
+   * @param text as in the scenario
+   * @param value value at the found design
+   * @param active whether the limit binds
+   */
+  public record ConstraintRecord(String text, double value, boolean active) {}
+
+  /**
+   * A Pareto front.
+   *
+   * @param aims names of the aims
+   * @param units their units
+   * @param points the designs
+   * @param knee index of the point with the best compromise
+   */
+  public record Front(List<String> aims, List<String> units, List<FrontPoint> points, int knee) {}
+
+  /**
+   * A design on the front.
+   *
+   * @param aims value of each aim
+   * @param values value of each varied quantity by key
+   */
+  public record FrontPoint(List<Double> aims, Map<String, Double> values) {}
+}

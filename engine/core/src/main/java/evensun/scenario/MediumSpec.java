@@ -1,0 +1,13 @@
+package evensun.scenario;
+
+import java.util.OptionalDouble;
+
+/**
+ * A half-space in front of or behind the stack.
+ *
+ * @param name layer name; the incident medium is named after its material
+ * @param material material name
+ * @param bandgapEv wanted bandgap of a tunable material, in eV
+ * @param place where it stands
+ */
+public record MediumSpec(String name, String material, OptionalDouble bandgapEv, Place place) {}

@@ -1,0 +1,42 @@
+package evensun.scenario;
+
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+
+/**
+ * What a scenario file says, checked as far as it can be without materials, spectra and solvers.
+ *
+ * @param source the text and where it came from
+ * @param title title of the work, shown in reports
+ * @param light the light
+ * @param grid the wavelengths
+ * @param materials materials of the scenario's own, by name; they hide the library's
+ * @param incidentMedium material of the first stack entry
+ * @param stack the finite layers, the light meets the first one first
+ * @param exit the last stack entry
+ * @param subcells in the order the light meets them
+ * @param connection how the subcells are connected
+ * @param solver the solver asked for, or empty for the one the stack needs
+ * @param search what to search, or empty
+ */
+public record Scenario(
+    Source source,
+    String title,
+    LightSpec light,
+    GridSpec grid,
+    Map<String, MaterialSpec> materials,
+    MediumSpec incidentMedium,
+    List<LayerSpec> stack,
+    MediumSpec exit,
+    List<SubcellSpec> subcells,
+    Connection connection,
+    Optional<SolverSpec> solver,
+    Optional<SearchSpec> search) {
+
+  public Scenario {
+    materials = Map.copyOf(materials);
+    stack = List.copyOf(stack);
+    subcells = List.copyOf(subcells);
+  }
+}

@@ -1,0 +1,2 @@
+/** The effective-medium part of the plugins. */
+package evensun.effectivemedium;

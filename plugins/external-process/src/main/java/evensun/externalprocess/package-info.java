@@ -1,0 +1,2 @@
+/** The external-process part of the plugins. */
+package evensun.externalprocess;

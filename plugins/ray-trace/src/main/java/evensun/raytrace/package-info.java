@@ -1,0 +1,2 @@
+/** The ray-trace part of the plugins. */
+package evensun.raytrace;

@@ -1,0 +1,32 @@
+package evensun.spi;
+
+import java.util.Set;
+
+/**
+ * What a solver takes and may offer.
+ *
+ * @param features the kinds of {@link Feature} it takes, such as {@code "texture"}; a problem with
+ *     another kind is never handed to it
+ * @param abilities the interfaces an {@link Evaluator} of this solver may offer, such as {@code
+ *     Gradient.class}
+ * @param oblique whether it takes incidences away from the normal
+ * @param incoherent whether it takes incoherent layers
+ * @param statistical whether its results carry a statistical error
+ */
+public record Traits(
+    Set<String> features,
+    Set<Class<?>> abilities,
+    boolean oblique,
+    boolean incoherent,
+    boolean statistical) {
+
+  public Traits {
+    features = Set.copyOf(features);
+    abilities = Set.copyOf(abilities);
+  }
+
+  /** A solver for flat coherent layers at normal incidence, without further abilities. */
+  public static Traits plain() {
+    return new Traits(Set.of(), Set.of(), false, false, false);
+  }
+}

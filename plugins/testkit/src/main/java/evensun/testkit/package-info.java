@@ -1,0 +1,2 @@
+/** The testkit part of the plugins. */
+package evensun.testkit;

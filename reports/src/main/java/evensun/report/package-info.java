@@ -1,0 +1,5 @@
+/** The report package. */
+@NullMarked
+package evensun.report;
+
+import org.jspecify.annotations.NullMarked;
