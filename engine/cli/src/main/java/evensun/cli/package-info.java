@@ -1,4 +1,4 @@
-/** The cli package. */
+/** The command line: one class per command, and the only place that writes to standard streams. */
 @NullMarked
 package evensun.cli;
 

@@ -1,0 +1,111 @@
+package evensun.cli;
+
+import evensun.pluginhost.PluginException;
+import evensun.scenario.Fault;
+import evensun.scenario.InputException;
+import evensun.spi.UnsupportedProblem;
+import java.io.IOException;
+import java.io.PrintWriter;
+import java.io.StringWriter;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.List;
+import java.util.concurrent.CancellationException;
+import picocli.CommandLine;
+import picocli.CommandLine.ParameterException;
+import picocli.CommandLine.ParseResult;
+import tools.jackson.databind.json.JsonMapper;
+import tools.jackson.databind.node.ArrayNode;
+import tools.jackson.databind.node.ObjectNode;
+
+/** Turns whatever went wrong into one clear line each and an exit status. */
+final class ErrorReport {
+
+  private final Console console;
+
+  ErrorReport(Console console) {
+    this.console = console;
+  }
+
+  /** The command line itself is wrong. */
+  int wrongCommandLine(ParameterException e, String[] args) {
+    String message = e.getMessage().replaceAll("\\s*\\R\\s*", " ");
+    String command = e.getCommandLine().getCommandSpec().qualifiedName();
+    boolean json = List.of(args).contains("json") || List.of(args).contains("--format=json");
+    return tell(
+        json,
+        ExitStatus.WRONG_INPUT,
+        List.of(new Line("", 0, "", message + " (see " + command + " --help)")));
+  }
+
+  /** A command threw. */
+  int failed(Exception e, CommandLine line, ParseResult result) {
+    boolean json = ((Evensun) line.getCommandSpec().root().userObject()).global.json();
+    if (e instanceof InputException input) {
+      return tell(json, ExitStatus.WRONG_INPUT, input.faults().stream().map(Line::of).toList());
+    }
+    if (e instanceof PluginException) {
+      return tell(json, ExitStatus.WRONG_PLUGIN, List.of(new Line("", 0, "", e.getMessage())));
+    }
+    if (e instanceof UnsupportedProblem) {
+      return tell(json, ExitStatus.WRONG_INPUT, List.of(new Line("", 0, "", e.getMessage())));
+    }
+    if (e instanceof CancellationException) {
+      return tell(json, ExitStatus.INTERRUPTED, List.of(new Line("", 0, "", e.getMessage())));
+    }
+    return tell(json, ExitStatus.INTERNAL_ERROR, List.of(new Line("", 0, "", internal(e))));
+  }
+
+  private int tell(boolean json, int status, List<Line> lines) {
+    for (Line line : lines) {
+      console.err().println(line.text());
+    }
+    if (json) {
+      JsonMapper mapper = JsonMapper.builder().build();
+      ObjectNode root = mapper.createObjectNode();
+      root.put("exitStatus", status);
+      ArrayNode errors = root.putArray("errors");
+      for (Line line : lines) {
+        ObjectNode error = errors.addObject();
+        error.put("file", line.file());
+        error.put("line", line.line());
+        error.put("key", line.key());
+        error.put("message", line.message());
+      }
+      console.out().println(mapper.writeValueAsString(root));
+    }
+    return status;
+  }
+
+  /** Where to send a defect; the details go to a file, since a stack trace helps no user. */
+  private static String internal(Exception e) {
+    String what = "internal error (" + e.getClass().getSimpleName() + "): " + e.getMessage();
+    try {
+      StringWriter trace = new StringWriter();
+      e.printStackTrace(new PrintWriter(trace));
+      Path file = Files.createTempFile("evensun-error-", ".txt");
+      Files.writeString(file, trace.toString());
+      return what.replaceAll("\\s*\\R\\s*", " ")
+          + "; this is a defect of Evensun: please send "
+          + file
+          + " and your input to the maintainers";
+    } catch (IOException io) {
+      return what + "; this is a defect of Evensun: please report it to the maintainers";
+    }
+  }
+
+  private record Line(String file, int line, String key, String message) {
+
+    static Line of(Fault fault) {
+      return new Line(
+          fault.place().file(), fault.place().line(), fault.place().key(), fault.message());
+    }
+
+    String text() {
+      if (file.isEmpty()) {
+        return message;
+      }
+      return line > 0 ? file + ":" + line + ": " + message : file + ": " + message;
+    }
+  }
+}

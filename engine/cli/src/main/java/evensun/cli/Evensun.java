@@ -1,0 +1,56 @@
+package evensun.cli;
+
+import java.util.concurrent.Callable;
+import picocli.CommandLine;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
+
+/** The program itself: global options and the list of commands. */
+@Command(
+    name = "evensun",
+    mixinStandardHelpOptions = true,
+    versionProvider = Version.class,
+    description = "Balances the currents of the subcells of a multi-junction solar cell.",
+    subcommands = {
+      AssessCommand.class,
+      DesignCommand.class,
+    })
+final class Evensun implements Callable<Integer> {
+
+  private final Console console;
+
+  @Mixin GlobalOptions global = new GlobalOptions();
+
+  private Evensun(Console console) {
+    this.console = console;
+  }
+
+  /** The command line, ready to execute. */
+  static CommandLine commandLine(Console console) {
+    CommandLine line = new CommandLine(new Evensun(console));
+    line.setUsageHelpWidth(100);
+    line.setCaseInsensitiveEnumValuesAllowed(true);
+    line.setOut(new java.io.PrintWriter(console.out(), true));
+    line.setErr(new java.io.PrintWriter(console.err(), true));
+    ErrorReport errors = new ErrorReport(console);
+    line.setParameterExceptionHandler(errors::wrongCommandLine);
+    line.setExecutionExceptionHandler(errors::failed);
+    return line;
+  }
+
+  Console console() {
+    return console;
+  }
+
+  @Override
+  public Integer call() {
+    console
+        .out()
+        .println(
+            """
+            Try the demo:      evensun design scenarios/perovskite-on-silicon.yaml
+            Start your own:    evensun new my-cell.yaml
+            Get help:          evensun --help, or evensun COMMAND --help""");
+    return ExitStatus.DONE;
+  }
+}

@@ -1,0 +1,22 @@
+package evensun.cli;
+
+/** Entry point of the program. */
+public final class Main {
+
+  private Main() {}
+
+  /** Runs one command and ends the process with its exit status. */
+  public static void main(String[] args) {
+    System.exit(run(Console.system(), args));
+  }
+
+  /**
+   * Runs one command. Returns 0 done, 1 internal error, 2 wrong input, 3 wrong plugin, 130 stopped.
+   */
+  public static int run(Console console, String... args) {
+    int status = Evensun.commandLine(console).execute(args);
+    console.out().flush();
+    console.err().flush();
+    return status;
+  }
+}
