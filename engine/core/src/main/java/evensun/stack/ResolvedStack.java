@@ -1,0 +1,54 @@
+package evensun.stack;
+
+import evensun.light.Spectrum;
+import evensun.light.WavelengthGrid;
+import evensun.scenario.Scenario;
+import evensun.spi.Finding;
+import java.util.List;
+
+/**
+ * A scenario with its materials and light found: what the stack means physically.
+ *
+ * @param scenario what it was made from
+ * @param grid the wavelengths
+ * @param spectrum the light
+ * @param slots every row of optical constants
+ * @param incidentSlot row of the incident medium
+ * @param layers the finite layers
+ * @param exitSlot row of the exit medium
+ * @param subcells in the order the light meets them
+ * @param findings what a reader should know already
+ */
+public record ResolvedStack(
+    Scenario scenario,
+    WavelengthGrid grid,
+    Spectrum spectrum,
+    List<MaterialSlot> slots,
+    int incidentSlot,
+    List<ResolvedLayer> layers,
+    int exitSlot,
+    List<ResolvedSubcell> subcells,
+    List<Finding> findings) {
+
+  public ResolvedStack {
+    slots = List.copyOf(slots);
+    layers = List.copyOf(layers);
+    subcells = List.copyOf(subcells);
+    findings = List.copyOf(findings);
+  }
+
+  /** Whether there is one wavelength only: spectra, no currents. */
+  public boolean isMonochromatic() {
+    return grid.size() == 1;
+  }
+
+  /** Index that stands for the exit medium where layers are counted. */
+  public int exitLayer() {
+    return layers.size();
+  }
+
+  /** Name of a layer by index, the exit medium included. */
+  public String layerName(int layer) {
+    return layer == exitLayer() ? scenario.exit().name() : layers.get(layer).name();
+  }
+}
