@@ -1,0 +1,146 @@
+package evensun.evaluation;
+
+import evensun.spi.Channel;
+import evensun.spi.Design;
+import evensun.spi.Evaluator;
+import evensun.spi.Gradient;
+import evensun.spi.Response;
+import evensun.stack.ResolvedStack;
+import evensun.stack.ResolvedSubcell;
+import java.util.List;
+import java.util.Optional;
+
+/**
+ * Where one thread sets the numbers of a stack and asks what the light does. Setting and asking for
+ * currents allocates nothing. After an exception the bench may be used on.
+ */
+public final class Bench implements AutoCloseable {
+
+  private final Model model;
+  private final Model.Filling filling;
+  private final Design design;
+  private final double[] bandgapEv;
+  private final Evaluator evaluator;
+  private final Response sums;
+  private final Optional<Gradient> gradient;
+
+  Bench(Model model, Model.Filling filling) {
+    this.model = model;
+    this.filling = filling;
+    this.design = filling.drawn(Design.of(model.problem()));
+    this.bandgapEv = model.stack().slots().stream().mapToDouble(s -> s.fillValue()).toArray();
+    this.evaluator = model.prepared().newEvaluator();
+    this.sums = currentSums(model);
+    this.gradient = evaluator.ability(Gradient.class);
+  }
+
+  private static Response currentSums(Model model) {
+    ResolvedStack stack = model.stack();
+    List<Channel> channels = model.channels();
+    int count = stack.subcells().size();
+    double[] bins = model.problem().incidentMaPerCm2().toArray();
+    Response response = Response.sums(count, channels.size());
+    for (int s = 0; s < count; s++) {
+      ResolvedSubcell subcell = stack.subcells().get(s);
+      for (int c = 0; c < channels.size(); c++) {
+        if (model.belongsTo(channels.get(c), subcell)) {
+          response.weight[s * channels.size() + c] = bins;
+        }
+      }
+      if (model.exitBelongsTo(subcell)) {
+        response.transmittanceWeight[s] = bins;
+      }
+    }
+    return response;
+  }
+
+  /** The model this bench belongs to. */
+  public Model model() {
+    return model;
+  }
+
+  /** Sets one number, in the unit of the parameter. */
+  public void set(Parameter parameter, double value) {
+    switch (parameter.kind()) {
+      case THICKNESS -> design.thicknessNm[parameter.index()] = value;
+      case BANDGAP -> setBandgap(parameter.index(), value);
+      case KNOB -> design.knob[parameter.index()] = value;
+    }
+  }
+
+  /** The present value of a parameter, in its unit. */
+  public double get(Parameter parameter) {
+    return switch (parameter.kind()) {
+      case THICKNESS -> design.thicknessNm[parameter.index()];
+      case BANDGAP -> bandgapEv[parameter.index()];
+      case KNOB -> design.knob[parameter.index()];
+    };
+  }
+
+  /** Bandgap of a row of optical constants in eV, 0 where it has none. */
+  public double bandgapEv(int slot) {
+    return bandgapEv[slot];
+  }
+
+  private void setBandgap(int slot, double value) {
+    if (value != bandgapEv[slot]) {
+      bandgapEv[slot] = value;
+      filling.fill(design, slot, value);
+    }
+  }
+
+  /** The present design; not to be written. */
+  public Design design() {
+    return design;
+  }
+
+  /**
+   * Photocurrents of the present design.
+   *
+   * @param into [subcell] mA cm⁻²
+   * @throws evensun.spi.EvaluationFailed when this design cannot be evaluated
+   */
+  public void currents(double[] into) {
+    evaluator.evaluate(design, sums);
+    System.arraycopy(sums.sum, 0, into, 0, into.length);
+  }
+
+  /** Whether {@link #currentsAndGradient} is there. */
+  public boolean hasGradient() {
+    return gradient.isPresent();
+  }
+
+  /**
+   * Photocurrents and their derivatives by thickness.
+   *
+   * @param into [subcell] mA cm⁻²
+   * @param byThickness [subcell*L + l] mA cm⁻² per nm
+   */
+  public void currentsAndGradient(double[] into, double[] byThickness) {
+    gradient.orElseThrow().evaluate(design, sums, byThickness);
+    System.arraycopy(sums.sum, 0, into, 0, into.length);
+  }
+
+  /** Every spectrum of the present design. */
+  public Response spectra() {
+    Response response =
+        Response.spectra(
+            model.problem().incidences().size(),
+            model.channels().size(),
+            model.problem().wavelengthCount());
+    response.absorptanceStandardError =
+        new double[response.absorptance.length][model.problem().wavelengthCount()];
+    evaluator.evaluate(design, response);
+    return response;
+  }
+
+  /** A further ability of the solver. */
+  public <A> Optional<A> ability(Class<A> type) {
+    return evaluator.ability(type);
+  }
+
+  @Override
+  public void close() {
+    evaluator.close();
+  }
+}

@@ -1,0 +1,61 @@
+package evensun.evaluation;
+
+import evensun.stack.MaterialSlot;
+import evensun.stack.ResolvedStack;
+import java.util.Optional;
+
+/**
+ * A number of the stack that may be set by its key.
+ *
+ * @param key as in the scenario, such as {@code perovskite.thicknessNm}
+ * @param unit as shown to people
+ * @param kind what it is
+ * @param index layer of a thickness, slot of a bandgap, index of a knob
+ * @param drawn value as drawn
+ */
+public record Parameter(String key, String unit, Kind kind, int index, double drawn) {
+
+  /** What a parameter is. */
+  public enum Kind {
+    /** Thickness of a layer in nm. */
+    THICKNESS,
+    /** Bandgap of a tunable material in eV. */
+    BANDGAP,
+    /** Knob of a feature. */
+    KNOB
+  }
+
+  /** The parameter of a key, or empty when the key names none that can be set. */
+  public static Optional<Parameter> of(String key, ResolvedStack stack) {
+    int dot = key.lastIndexOf('.');
+    if (dot < 0) {
+      return Optional.empty();
+    }
+    String layer = key.substring(0, dot);
+    return switch (key.substring(dot + 1)) {
+      case "thicknessNm" -> thickness(key, layer, stack);
+      case "bandgapEv" -> bandgap(key, layer, stack);
+      default -> Optional.empty();
+    };
+  }
+
+  private static Optional<Parameter> thickness(String key, String layer, ResolvedStack stack) {
+    for (int i = 0; i < stack.layers().size(); i++) {
+      if (stack.layers().get(i).name().equals(layer)) {
+        double drawn = stack.layers().get(i).spec().thicknessNm();
+        return Optional.of(new Parameter(key, "nm", Kind.THICKNESS, i, drawn));
+      }
+    }
+    return Optional.empty();
+  }
+
+  private static Optional<Parameter> bandgap(String key, String layer, ResolvedStack stack) {
+    for (int s = 0; s < stack.slots().size(); s++) {
+      MaterialSlot slot = stack.slots().get(s);
+      if (slot.tunable() && slot.layers().contains(layer)) {
+        return Optional.of(new Parameter(key, "eV", Kind.BANDGAP, s, slot.fillValue()));
+      }
+    }
+    return Optional.empty();
+  }
+}

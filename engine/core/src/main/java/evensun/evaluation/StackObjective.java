@@ -1,0 +1,163 @@
+package evensun.evaluation;
+
+import evensun.search.Objective;
+import evensun.search.Variable;
+import evensun.search.Verdict;
+import evensun.spi.EvaluationFailed;
+import evensun.stack.ResolvedSubcell;
+import java.util.List;
+
+/** A stack as the search sees it: numbers in, the aim out. */
+public final class StackObjective implements Objective {
+
+  /** Matched currents closer than this do not decide a bandgap, in mA cm⁻². */
+  public static final double GAP_TIE_MA_PER_CM2 = 0.02;
+
+  private static final double GAP_STEP_EV = 1e-4;
+
+  private final Model model;
+  private final List<Parameter> parameters;
+  private final List<Variable> variables;
+  private final Aim aim;
+
+  /**
+   * An objective.
+   *
+   * @param model the stack
+   * @param parameters what may vary
+   * @param variables their bounds, in the same order
+   * @param aim what is wanted
+   */
+  public StackObjective(
+      Model model, List<Parameter> parameters, List<Variable> variables, Aim aim) {
+    this.model = model;
+    this.parameters = List.copyOf(parameters);
+    this.variables = List.copyOf(variables);
+    this.aim = aim;
+  }
+
+  /** Whether a bandgap varies. */
+  public boolean variesGap() {
+    return parameters.stream().anyMatch(p -> p.kind() == Parameter.Kind.BANDGAP);
+  }
+
+  @Override
+  public List<Variable> variables() {
+    return variables;
+  }
+
+  @Override
+  public List<String> aims() {
+    return List.of(aim.name());
+  }
+
+  @Override
+  public Worker newWorker() {
+    return new StackWorker();
+  }
+
+  private final class StackWorker implements Worker {
+
+    private final Bench bench = model.newBench();
+    private final Aim own = aim.forAnotherThread();
+    private final int subcells = model.stack().subcells().size();
+    private final double[] currents = new double[subcells];
+    private final double[] shifted = new double[subcells];
+    private final double[] gaps = new double[subcells];
+    private final double[] byThickness = new double[subcells * model.problem().layerCount()];
+
+    @Override
+    public Verdict judge(double[] values) {
+      try {
+        set(values);
+        bench.currents(currents);
+        double value = own.value(currents, gaps());
+        return Double.isFinite(value)
+            ? Verdict.of(value, tieBreak())
+            : Verdict.failed("the solver returned a current that is no number");
+      } catch (EvaluationFailed e) {
+        return Verdict.failed(String.valueOf(e.getMessage()));
+      }
+    }
+
+    private void set(double[] values) {
+      for (int i = 0; i < values.length; i++) {
+        bench.set(parameters.get(i), values[i]);
+      }
+    }
+
+    private double[] gaps() {
+      List<ResolvedSubcell> cells = model.stack().subcells();
+      for (int s = 0; s < gaps.length; s++) {
+        var absorbers = cells.get(s).absorbers();
+        gaps[s] = absorbers.isEmpty() ? 0 : bench.bandgapEv(absorbers.get(0).slot());
+      }
+      return gaps;
+    }
+
+    private double tieBreak() {
+      double sum = 0;
+      for (double gap : gaps) {
+        sum += gap;
+      }
+      return sum;
+    }
+
+    @Override
+    public int partCount() {
+      return aim.isSmallestCurrent() && bench.hasGradient() && !variesKnob() ? subcells : 0;
+    }
+
+    private boolean variesKnob() {
+      return parameters.stream().anyMatch(p -> p.kind() == Parameter.Kind.KNOB);
+    }
+
+    @Override
+    public boolean parts(double[] values, double[] parts, double[][] gradient) {
+      if (partCount() == 0) {
+        return false;
+      }
+      try {
+        set(values);
+        bench.currentsAndGradient(parts, byThickness);
+        for (int v = 0; v < values.length; v++) {
+          if (parameters.get(v).kind() == Parameter.Kind.THICKNESS) {
+            byThickness(v, gradient);
+          } else {
+            byGap(values, v, gradient);
+          }
+        }
+        return true;
+      } catch (EvaluationFailed e) {
+        return false;
+      }
+    }
+
+    private void byThickness(int v, double[][] gradient) {
+      int layers = model.problem().layerCount();
+      for (int s = 0; s < subcells; s++) {
+        gradient[s][v] = byThickness[s * layers + parameters.get(v).index()];
+      }
+    }
+
+    /** Central difference, one-sided at a bound. */
+    private void byGap(double[] values, int v, double[][] gradient) {
+      Variable variable = variables.get(v);
+      double up = Math.min(values[v] + GAP_STEP_EV, variable.high());
+      double down = Math.max(values[v] - GAP_STEP_EV, variable.low());
+      bench.set(parameters.get(v), up);
+      bench.currents(currents);
+      bench.set(parameters.get(v), down);
+      bench.currents(shifted);
+      bench.set(parameters.get(v), values[v]);
+      for (int s = 0; s < subcells; s++) {
+        gradient[s][v] = up > down ? (currents[s] - shifted[s]) / (up - down) : 0;
+      }
+    }
+
+    @Override
+    public void close() {
+      bench.close();
+    }
+  }
+}
