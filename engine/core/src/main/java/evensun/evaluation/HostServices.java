@@ -12,8 +12,8 @@ import java.util.function.Function;
  * @param lookup finds a loaded solver by id
  * @param stop whether the user asked to stop
  */
-public record HostServices(
-    Function<String, Optional<OpticalSolver>> lookup, BooleanSupplier stop) implements Services {
+public record HostServices(Function<String, Optional<OpticalSolver>> lookup, BooleanSupplier stop)
+    implements Services {
 
   @Override
   public Optional<OpticalSolver> solver(String id) {

@@ -76,7 +76,8 @@ public final class Outcomes {
   private List<SubcellOutcome> subcells(boolean spectraOnly) {
     List<SubcellOutcome> outcomes = new ArrayList<>();
     for (ResolvedSubcell subcell : stack.subcells()) {
-      double gap = subcell.absorbers().isEmpty() ? 0 : bench.bandgapEv(subcell.absorbers().get(0).slot());
+      double gap =
+          subcell.absorbers().isEmpty() ? 0 : bench.bandgapEv(subcell.absorbers().get(0).slot());
       double[] current = current(subcell);
       outcomes.add(
           new SubcellOutcome(
@@ -140,8 +141,7 @@ public final class Outcomes {
     for (int c = 0; c < model.channels().size(); c++) {
       Channel channel = model.channels().get(c);
       if (stack.subcells().stream().noneMatch(s -> model.belongsTo(channel, s))) {
-        parasitic.add(
-            new Parasitic(model.channelName(channel), weighted(response.absorptance[c])));
+        parasitic.add(new Parasitic(model.channelName(channel), weighted(response.absorptance[c])));
       }
     }
     boolean collected = stack.subcells().stream().anyMatch(model::exitBelongsTo);
@@ -194,8 +194,7 @@ public final class Outcomes {
   private Spectral spectral() {
     Map<String, List<Double>> absorptance = new LinkedHashMap<>();
     for (int c = 0; c < model.channels().size(); c++) {
-      absorptance.put(
-          model.channelName(model.channels().get(c)), boxed(response.absorptance[c]));
+      absorptance.put(model.channelName(model.channels().get(c)), boxed(response.absorptance[c]));
     }
     return new Spectral(
         boxed(stack.grid().wavelengthNm()),

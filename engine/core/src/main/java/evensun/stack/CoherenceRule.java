@@ -27,8 +27,7 @@ final class CoherenceRule {
    * @param k [w] extinction coefficient
    * @param thicknessNm thickness in nm
    */
-  static double finestFringeNm(
-      WavelengthGrid grid, double[] n, double[] k, double thicknessNm) {
+  static double finestFringeNm(WavelengthGrid grid, double[] n, double[] k, double thicknessNm) {
     double[] wavelengthNm = grid.wavelengthNm();
     double finest = Double.POSITIVE_INFINITY;
     for (int w = 0; w < wavelengthNm.length; w++) {

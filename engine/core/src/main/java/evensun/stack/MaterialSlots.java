@@ -25,8 +25,10 @@ final class MaterialSlots {
   /** The slot of a layer's material, made when it is not there yet. */
   int slot(String layer, String name, OptionalDouble bandgapEv, Place place) {
     Material material = source.material(name, place);
-    OptionalDouble gap = material.tuning().isPresent() ? chosenGap(material, bandgapEv, layer, place)
-        : fixedGap(material, bandgapEv, layer, name, place);
+    OptionalDouble gap =
+        material.tuning().isPresent()
+            ? chosenGap(material, bandgapEv, layer, place)
+            : fixedGap(material, bandgapEv, layer, name, place);
     for (int i = 0; i < slots.size(); i++) {
       MaterialSlot slot = slots.get(i);
       if (slot.name().equals(name) && !slot.tunable()) {
@@ -46,8 +48,7 @@ final class MaterialSlots {
       throw new InputException(
           place,
           "layer \"%s\": bandgapEv must be in [%s, %s] eV for %s but was %s"
-              .formatted(
-                  layer, tuning.lowEv(), tuning.highEv(), material.record().name(), gap));
+              .formatted(layer, tuning.lowEv(), tuning.highEv(), material.record().name(), gap));
     }
     return OptionalDouble.of(gap);
   }

@@ -154,10 +154,10 @@ public final class StackResolver {
   }
 
   private String range(MaterialRangeException e, Spectrum spectrum) {
-    double lost =
-        spectrum.photonCurrentMaPerCm2(grid.fromNm(), Math.min(e.fromNm(), grid.toNm()));
+    double lost = spectrum.photonCurrentMaPerCm2(grid.fromNm(), Math.min(e.fromNm(), grid.toNm()));
     lost = Math.max(0, lost);
-    lost += Math.max(0, spectrum.photonCurrentMaPerCm2(Math.max(e.toNm(), grid.fromNm()), grid.toNm()));
+    lost +=
+        Math.max(0, spectrum.photonCurrentMaPerCm2(Math.max(e.toNm(), grid.fromNm()), grid.toNm()));
     return "%s; %.2f mA cm⁻² of the available current are at stake".formatted(e.getMessage(), lost);
   }
 
