@@ -1,0 +1,160 @@
+package evensun.evaluation;
+
+import evensun.result.Sensitivity;
+import evensun.result.WhatIf;
+import evensun.search.Variable;
+import evensun.stack.ResolvedSubcell;
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+
+/** What happens around a design when one quantity moves and the others stay. */
+public final class Neighbourhood implements AutoCloseable {
+
+  private static final int CURVE_POINTS = 41;
+  private static final double THICKNESS_STEP_NM = 1;
+  private static final double GAP_STEP_EV = 0.01;
+  private static final double KNOB_STEP = 0.01;
+  private static final double THICKNESS_TOLERANCE = 0.05;
+
+  private final Bench bench;
+  private final List<Parameter> parameters;
+  private final List<Variable> variables;
+  private final double[] centre;
+  private final Aim aim;
+  private final List<ResolvedSubcell> subcells;
+
+  /**
+   * The surroundings of a design.
+   *
+   * @param model the stack
+   * @param parameters what varies
+   * @param variables its bounds, in the same order
+   * @param centre [parameter] the design
+   * @param aim what is wanted
+   */
+  public Neighbourhood(
+      Model model, List<Parameter> parameters, List<Variable> variables, double[] centre, Aim aim) {
+    this.bench = model.newBench();
+    this.parameters = List.copyOf(parameters);
+    this.variables = List.copyOf(variables);
+    this.centre = centre.clone();
+    this.aim = aim;
+    this.subcells = model.stack().subcells();
+  }
+
+  /** What a small change of each quantity does, the largest effect first. */
+  public List<Sensitivity> sensitivities() {
+    Point here = at(0, centre[0]);
+    List<Sensitivity> all = new ArrayList<>();
+    for (int v = 0; v < parameters.size(); v++) {
+      all.add(sensitivity(v, here));
+    }
+    all.sort(Comparator.comparingDouble(Sensitivity::toleranceAimChange));
+    return all;
+  }
+
+  /** The aim and the currents against each quantity between its bounds. */
+  public List<WhatIf> curves() {
+    List<WhatIf> curves = new ArrayList<>();
+    for (int v = 0; v < parameters.size(); v++) {
+      curves.add(curve(v));
+    }
+    return curves;
+  }
+
+  private Sensitivity sensitivity(int v, Point here) {
+    Parameter parameter = parameters.get(v);
+    double step = step(parameter);
+    Point up = at(v, centre[v] + step);
+    Point down = at(v, Math.max(0, centre[v] - step));
+    double tolerance = tolerance(parameter, centre[v]);
+    double worse =
+        Math.min(
+            at(v, centre[v] + tolerance).aim(), at(v, Math.max(0, centre[v] - tolerance)).aim());
+    Map<String, Double> currents = new LinkedHashMap<>();
+    for (int s = 0; s < subcells.size(); s++) {
+      currents.put(subcells.get(s).name(), up.currents()[s] - here.currents()[s]);
+    }
+    return new Sensitivity(
+        parameter.key(),
+        parameter.unit(),
+        step,
+        up.aim() - here.aim(),
+        down.aim() - here.aim(),
+        currents,
+        null,
+        tolerance,
+        worse - here.aim());
+  }
+
+  private static double step(Parameter parameter) {
+    return switch (parameter.kind()) {
+      case THICKNESS -> THICKNESS_STEP_NM;
+      case BANDGAP -> GAP_STEP_EV;
+      case KNOB -> KNOB_STEP;
+    };
+  }
+
+  private static double tolerance(Parameter parameter, double value) {
+    return parameter.kind() == Parameter.Kind.THICKNESS
+        ? THICKNESS_TOLERANCE * value
+        : step(parameter);
+  }
+
+  private WhatIf curve(int v) {
+    Variable variable = variables.get(v);
+    List<Double> values = new ArrayList<>();
+    List<Double> aims = new ArrayList<>();
+    Map<String, List<Double>> currents = new LinkedHashMap<>();
+    subcells.forEach(subcell -> currents.put(subcell.name(), new ArrayList<>()));
+    for (int i = 0; i < CURVE_POINTS; i++) {
+      double value = variable.low() + (variable.high() - variable.low()) * i / (CURVE_POINTS - 1);
+      Point point = at(v, value);
+      values.add(value);
+      aims.add(point.aim());
+      for (int s = 0; s < subcells.size(); s++) {
+        currents.get(subcells.get(s).name()).add(point.currents()[s]);
+      }
+    }
+    return new WhatIf(variable.key(), variable.unit(), values, aims, currents);
+  }
+
+  private Point at(int moved, double value) {
+    for (int v = 0; v < centre.length; v++) {
+      bench.set(parameters.get(v), v == moved ? clamp(v, value) : centre[v]);
+    }
+    double[] currents = new double[subcells.size()];
+    double[] gaps = new double[subcells.size()];
+    bench.currents(currents);
+    for (int s = 0; s < gaps.length; s++) {
+      var absorbers = subcells.get(s).absorbers();
+      gaps[s] = absorbers.isEmpty() ? 0 : bench.bandgapEv(absorbers.get(0).slot());
+    }
+    return new Point(aim.value(currents, gaps), currents);
+  }
+
+  /** A bandgap cannot leave the range of its material, a knob not its own. */
+  private double clamp(int v, double value) {
+    Parameter parameter = parameters.get(v);
+    if (parameter.kind() == Parameter.Kind.THICKNESS) {
+      return value;
+    }
+    if (parameter.kind() == Parameter.Kind.BANDGAP) {
+      var slot = bench.model().stack().slots().get(parameter.index());
+      var tuning = slot.material().tuning().orElseThrow();
+      return Math.max(tuning.lowEv(), Math.min(tuning.highEv(), value));
+    }
+    return Math.max(variables.get(v).low(), Math.min(variables.get(v).high(), value));
+  }
+
+  @Override
+  public void close() {
+    bench.close();
+  }
+
+  @SuppressWarnings("ArrayRecordComponent") // never leaves this class
+  private record Point(double aim, double[] currents) {}
+}
