@@ -1,0 +1,201 @@
+package evensun.pluginhost;
+
+import static evensun.pluginhost.PluginBuilder.described;
+import static evensun.pluginhost.PluginBuilder.empty;
+import static evensun.pluginhost.PluginBuilder.solver;
+import static evensun.pluginhost.PluginBuilder.working;
+import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.assertThatThrownBy;
+
+import evensun.spi.OpticalSolver;
+import evensun.spi.Traits;
+import java.io.IOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.HexFormat;
+import java.util.List;
+import org.junit.jupiter.api.BeforeEach;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.ValueSource;
+
+/** What the plugin host promises, on real jars. Witness throughout: the contract's own words. */
+class PluginHostTest {
+
+  @TempDir Path work;
+  private Path plugins;
+
+  @BeforeEach
+  void makeFolder() throws IOException {
+    plugins = Files.createDirectory(work.resolve("plugins"));
+  }
+
+  @Test
+  void aPluginIsDescribed() throws Exception {
+    Path jar = working(work, "lab").jar(plugins.resolve("lab.jar"));
+    try (PluginHost host = PluginHost.open(List.of(plugins))) {
+      assertThat(host.rejected()).isEmpty();
+      // The hash of the JDK's own digest over the whole file at once.
+      byte[] digest =
+          java.security.MessageDigest.getInstance("SHA-256").digest(Files.readAllBytes(jar));
+      assertThat(host.loaded())
+          .containsExactly(
+              new LoadedPlugin(
+                  "lab",
+                  "2.3.4",
+                  ">=1.0.0 & <2.0.0",
+                  "",
+                  jar,
+                  HexFormat.of().formatHex(digest),
+                  "lab",
+                  Traits.plain()));
+      assertThat(host.solver("lab")).get().extracting(OpticalSolver::id).isEqualTo("lab");
+      assertThat(host.pluginOf("lab")).isPresent();
+    }
+  }
+
+  @Test
+  void jarsFoldersAndFoldersWithALibraryLoadFromOneFolderInOrderOfName() throws IOException {
+    working(work, "c").jar(plugins.resolve("c.jar"));
+    working(work, "b").exploded(plugins.resolve("b"));
+    Path folder = Files.createDirectories(plugins.resolve("a/lib")).getParent();
+    working(work, "a").jar(folder.resolve("whatever.jar"));
+    try (PluginHost host = PluginHost.open(List.of(plugins))) {
+      assertThat(host.rejected()).isEmpty();
+      assertThat(host.loaded()).extracting(LoadedPlugin::id).containsExactly("a", "b", "c");
+    }
+  }
+
+  @Test
+  void aPlaceMayBeOnePlugin() {
+    Path classes = working(work, "classes").exploded(work.resolve("target/classes"));
+    Path jar = working(work, "jar").jar(work.resolve("one.jar"));
+    try (PluginHost host = PluginHost.open(List.of(classes, jar))) {
+      assertThat(host.loaded()).extracting(LoadedPlugin::id).containsExactly("classes", "jar");
+      assertThat(host.loaded().get(0).sha256()).matches("[0-9a-f]{64}");
+    }
+  }
+
+  @Test
+  void theSamePlaceNamedTwiceIsLoadedOnce() {
+    working(work, "lab").jar(plugins.resolve("lab.jar"));
+    Path detour = plugins.resolve("../plugins");
+    try (PluginHost host = PluginHost.open(List.of(plugins, detour))) {
+      assertThat(host.loaded()).hasSize(1);
+      assertThat(host.rejected()).isEmpty();
+    }
+  }
+
+  @Test
+  void aBadPluginStopsNoOther() throws IOException {
+    Files.writeString(plugins.resolve("a-corrupt.jar"), "no zip");
+    described(work, "b")
+        .source("lab.Solver", solver("b", "throw new RuntimeException();"))
+        .jar(plugins.resolve("b.jar"));
+    working(work, "c").jar(plugins.resolve("c.jar"));
+    try (PluginHost host = PluginHost.open(List.of(plugins))) {
+      assertThat(host.loaded()).extracting(LoadedPlugin::id).containsExactly("c");
+      assertThat(host.rejected()).hasSize(2);
+      assertThat(host.whyMissing("b"))
+          .contains("loaded: c", "a-corrupt.jar: it is no jar", "b.jar");
+      assertThatThrownBy(() -> host.require("b"))
+          .isInstanceOf(PluginException.class)
+          .hasMessageNotContaining("\n");
+    }
+  }
+
+  @Test
+  void aBundledContractDoesNoHarm() {
+    working(work, "lab").folder(classesOfContract()).jar(plugins.resolve("lab.jar"));
+    try (PluginHost host = PluginHost.open(List.of(plugins))) {
+      assertThat(host.rejected()).isEmpty();
+      assertThat(host.require("lab")).isInstanceOf(OpticalSolver.class);
+    }
+  }
+
+  @ParameterizedTest
+  @ValueSource(
+      strings = {
+        "evensun.pluginhost.PluginHost",
+        "org.apache.commons.math3.complex.Complex",
+        "io.jenetics.Genotype",
+        "tools.jackson.databind.ObjectMapper"
+      })
+  void theHostsOwnClassesAreHidden(String hidden) throws Exception {
+    // Otherwise this test could not fail.
+    assertThat(Class.forName(hidden)).isNotNull();
+    described(work, "lab")
+        .source("lab.Solver", solver("lab", lookUp(hidden)))
+        .jar(plugins.resolve("lab.jar"));
+    assertThat(only().reason()).contains("ClassNotFoundException: " + hidden);
+  }
+
+  @ParameterizedTest
+  @ValueSource(strings = {"evensun.spi.Problem", "java.sql.Connection", "org.pf4j.Plugin"})
+  void theContractTheJdkAndPf4jAreVisible(String visible) {
+    described(work, "lab")
+        .source("lab.Solver", solver("lab", lookUp(visible)))
+        .jar(plugins.resolve("lab.jar"));
+    try (PluginHost host = PluginHost.open(List.of(plugins))) {
+      assertThat(host.rejected()).isEmpty();
+    }
+  }
+
+  @Test
+  void twoPluginsKeepTheirOwnVersionsOfOneLibrary() throws IOException {
+    for (String version : List.of("one", "two")) {
+      Path library =
+          empty(work)
+              .source(
+                  "dep.Lib",
+                  "package dep; public class Lib { public static String version() "
+                      + "{ return \""
+                      + version
+                      + "\"; } }")
+              .jar(work.resolve("lib-" + version + ".jar"));
+      Path folder = Files.createDirectories(plugins.resolve(version + "/lib")).getParent();
+      Files.copy(library, folder.resolve("lib/dep.jar"));
+      String check =
+          "if (!dep.Lib.version().equals(\""
+              + version
+              + "\")) throw new IllegalStateException(dep.Lib.version());";
+      described(work, version)
+          .seeing(library)
+          .source("lab.Solver", solver(version, check))
+          .exploded(folder);
+    }
+    try (PluginHost host = PluginHost.open(List.of(plugins))) {
+      assertThat(host.rejected()).isEmpty();
+      assertThat(host.loaded()).extracting(LoadedPlugin::id).containsExactly("one", "two");
+    }
+  }
+
+  @Test
+  void anotherServiceInThePluginIsNoSolver() {
+    working(work, "lab")
+        .text("META-INF/services/java.lang.Runnable", "dep.NoSolver\n")
+        .jar(plugins.resolve("lab.jar"));
+    try (PluginHost host = PluginHost.open(List.of(plugins))) {
+      assertThat(host.rejected()).isEmpty();
+    }
+  }
+
+  private RejectedPlugin only() {
+    try (PluginHost host = PluginHost.open(List.of(plugins))) {
+      assertThat(host.loaded()).isEmpty();
+      assertThat(host.rejected()).hasSize(1);
+      return host.rejected().get(0);
+    }
+  }
+
+  private static String lookUp(String className) {
+    return "try { Class.forName(\""
+        + className
+        + "\"); } catch (ClassNotFoundException e) { throw new RuntimeException(e.toString()); }";
+  }
+
+  private Path classesOfContract() {
+    return PluginBuilder.contract();
+  }
+}
