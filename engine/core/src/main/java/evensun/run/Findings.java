@@ -1,0 +1,143 @@
+package evensun.run;
+
+import evensun.evaluation.Model;
+import evensun.result.FindingRecord;
+import evensun.result.Outcome;
+import evensun.result.SearchRecord;
+import evensun.spi.Design;
+import evensun.spi.Finding;
+import evensun.spi.Severity;
+import evensun.stack.ResolvedStack;
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.LinkedHashSet;
+import java.util.List;
+import java.util.Locale;
+import java.util.Set;
+
+/** Collects what a reader should know about a result, most severe first. */
+final class Findings {
+
+  /** Light outside the grid that could still be used is worth a finding above this, mA cm⁻². */
+  private static final double OUTSIDE_MA_PER_CM2 = 0.05;
+
+  private final Set<Finding> findings = new LinkedHashSet<>();
+
+  void add(Finding finding) {
+    findings.add(finding);
+  }
+
+  void addAll(List<Finding> more) {
+    findings.addAll(more);
+  }
+
+  /** What the stack and the solver say. */
+  void about(ResolvedStack stack, Model model, Design design) {
+    addAll(stack.findings());
+    addAll(model.prepared().examine(design));
+    if (!stack.isMonochromatic() && !stack.subcells().isEmpty()) {
+      add(
+          new Finding(
+              "perfect-collection",
+              Severity.NOTE,
+              "all subcells",
+              "photocurrents are absorbed light; every absorbed photon is assumed to be collected"));
+      outsideGrid(stack);
+    }
+  }
+
+  private void outsideGrid(ResolvedStack stack) {
+    double blue =
+        stack.spectrum().photonCurrentMaPerCm2(stack.spectrum().fromNm(), stack.grid().fromNm());
+    if (blue > OUTSIDE_MA_PER_CM2) {
+      add(
+          new Finding(
+              "light-below-grid",
+              Severity.NOTE,
+              "grid",
+              "%.2f mA cm⁻² of the spectrum lie below %s nm and are not counted"
+                  .formatted(blue, number(stack.grid().fromNm()))));
+    }
+  }
+
+  /** What the numbers of an outcome say. */
+  void about(Outcome outcome) {
+    Double mismatch = outcome.mismatchMaPerCm2();
+    if (mismatch != null && mismatch >= Outcome.BALANCED_MA_PER_CM2) {
+      add(
+          new Finding(
+              "not-balanced",
+              mismatch > 1 ? Severity.WARNING : Severity.NOTE,
+              String.valueOf(outcome.limitingSubcell()),
+              "this subcell limits the current; the strongest subcell delivers %.2f mA cm⁻² more, which a series device cannot use"
+                  .formatted(mismatch)));
+    }
+    for (Outcome.SubcellOutcome subcell : outcome.subcells()) {
+      Double current = subcell.photocurrentMaPerCm2();
+      if (current != null && current < 0.1) {
+        add(
+            new Finding(
+                "subcell-in-the-dark",
+                Severity.SERIOUS,
+                subcell.name(),
+                "this subcell absorbs %.3f mA cm⁻²: check the order of the stack and its bandgap"
+                    .formatted(current)));
+      }
+    }
+  }
+
+  /** What the search says. */
+  void about(SearchRecord search) {
+    for (SearchRecord.VariableRecord variable : search.variables()) {
+      if (variable.bound() != null) {
+        add(
+            new Finding(
+                "at-bound",
+                Severity.WARNING,
+                variable.key(),
+                "the best value stands on its %s bound (%s %s); a wider range may be better"
+                    .formatted(variable.bound(), number(variable.found()), variable.unit())));
+      }
+    }
+    if (!search.stopped().equals("converged")) {
+      add(
+          new Finding(
+              "search-not-converged",
+              search.stopped().equals("interrupted") ? Severity.SERIOUS : Severity.WARNING,
+              "search",
+              "the search stopped before it had converged (%s); repeat it with a larger budget or resume it"
+                  .formatted(search.stopped())));
+    }
+    if (search.failures() > 0) {
+      add(
+          new Finding(
+              "failed-evaluations",
+              Severity.WARNING,
+              "search",
+              "%d of %d designs could not be evaluated and were left out"
+                  .formatted(search.failures(), search.evaluations())));
+    }
+  }
+
+  /** A number as people write it: no trailing zeros, no exponent for usual sizes. */
+  static String number(double value) {
+    if (value == Math.rint(value) && Math.abs(value) < 1e15) {
+      return Long.toString((long) value);
+    }
+    return new java.math.BigDecimal(value)
+        .round(new java.math.MathContext(6))
+        .stripTrailingZeros()
+        .toPlainString();
+  }
+
+  List<FindingRecord> records() {
+    List<Finding> sorted = new ArrayList<>(findings);
+    sorted.sort(Comparator.comparing(Finding::severity).reversed());
+    return sorted.stream()
+        .map(
+            f ->
+                new FindingRecord(
+                    f.severity().name().toLowerCase(Locale.ROOT), f.code(), f.where(), f.message()))
+        .toList();
+  }
+}
