@@ -1,0 +1,77 @@
+package evensun.transfermatrix.kernel;
+
+/**
+ * The media of a stack at one wavelength and polarisation: what a plane wave with a given
+ * tangential index meets.
+ *
+ * <p>q = √(N² − s²) is the index along the normal in the quadrant Im q ≥ 0, Re q ≥ 0; the
+ * admittance H/E of the tangential fields is q for s and N²/q for p (Born &amp; Wolf, Principles of
+ * Optics, section 1.6).
+ */
+final class Slabs {
+
+  /** Smallest |q²/N²| of a finite layer: at q = 0 the two waves that span its field are one. */
+  private static final double LEAST_LAYER = 1e-12;
+
+  /** The same for the half-spaces, where one wave is enough. */
+  private static final double LEAST_HALF_SPACE = 1e-30;
+
+  /** N, the number of finite layers. */
+  final int layerCount;
+
+  /** [j] admittance. */
+  final Complex[] admittance;
+
+  /** [j] 2πq/λ, per nm. */
+  final Complex[] wavePerNm;
+
+  /** [j] thickness in nm. */
+  final double[] thicknessNm;
+
+  /** [j] whether waves interfere inside. */
+  final boolean[] coherent;
+
+  Slabs(
+      Layout layout, Beam beam, double[][] n, double[][] k, int w, double wavelengthNm, boolean p) {
+    layerCount = layout.layerCount;
+    thicknessNm = layout.thicknessNm;
+    coherent = layout.coherent;
+    admittance = new Complex[layerCount + 2];
+    wavePerNm = new Complex[layerCount + 2];
+    double tangential = n[layout.material[0]][w] * beam.sine();
+    for (int j = 0; j <= layerCount + 1; j++) {
+      int m = layout.material[j];
+      Complex index = new Complex(n[m][w], k[m][w]);
+      Complex square = index.times(index);
+      Complex q = normalIndex(square, tangential, j > 0 && j <= layerCount);
+      admittance[j] = p ? square.over(q) : q;
+      wavePerNm[j] = q.times(2 * Math.PI / wavelengthNm);
+    }
+  }
+
+  private static Complex normalIndex(Complex square, double tangential, boolean finite) {
+    if (tangential == 0) {
+      return square.root();
+    }
+    Complex q2 = square.minus(new Complex(tangential * tangential, 0));
+    double least = (finite ? LEAST_LAYER : LEAST_HALF_SPACE) * Math.sqrt(square.squared());
+    return q2.squared() < least * least ? new Complex(Math.sqrt(least), 0) : q2.root();
+  }
+
+  /**
+   * Whether the wave of medium j is followed as an intensity: half-spaces and incoherent layers.
+   */
+  boolean thick(int j) {
+    return !coherent[j];
+  }
+
+  /** The share of an intensity that survives one crossing of medium j. */
+  double passed(int j) {
+    return Math.exp(-2 * wavePerNm[j].im() * thicknessNm[j]);
+  }
+
+  /** Re η of a thick medium, kept off zero where it divides: an evanescent wave carries no flux. */
+  double carried(int j) {
+    return Math.max(admittance[j].re(), 1e-12 * Math.sqrt(admittance[j].squared()));
+  }
+}
