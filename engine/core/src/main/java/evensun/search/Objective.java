@@ -11,6 +11,19 @@ public interface Objective {
   /** Names of the aims, at least one; all are made as large as possible. */
   List<String> aims();
 
+  /** Names of the limits whose slacks a verdict tells, in its order. */
+  default List<String> limits() {
+    return List.of();
+  }
+
+  /**
+   * Candidates whose first aims differ by less than this are ranked by their tie-break; in the unit
+   * of the first aim, 0 for none.
+   */
+  default double tieResolution() {
+    return 0;
+  }
+
   /** A fresh worker for one thread. */
   Worker newWorker();
 

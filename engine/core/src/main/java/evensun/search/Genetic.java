@@ -1,0 +1,155 @@
+package evensun.search;
+
+import evensun.search.SearchState.Individual;
+import io.jenetics.DoubleGene;
+import io.jenetics.Phenotype;
+import io.jenetics.Selector;
+import io.jenetics.TournamentSelector;
+import io.jenetics.engine.Engine;
+import io.jenetics.engine.EvolutionStart;
+import io.jenetics.util.ISeq;
+import io.jenetics.util.RandomRegistry;
+import io.jenetics.util.Seq;
+import java.util.ArrayList;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.SplittableRandom;
+
+/**
+ * One generation after the other. Selection and alteration run on the calling thread with one
+ * stream of random numbers for each generation; only the judging is spread over threads.
+ */
+final class Genetic {
+
+  private static final double OFFSPRING_FRACTION = 0.6;
+
+  private final Space space;
+  private final SearchSettings settings;
+  private final Judges judges;
+
+  Genetic(Space space, SearchSettings settings, Judges judges) {
+    this.space = space;
+    this.settings = settings;
+    this.judges = judges;
+  }
+
+  /**
+   * A first population that fills the cube evenly (a Latin hypercube), the given designs in front.
+   */
+  List<Individual> first(List<double[]> given, int generation, Tally tally) {
+    SplittableRandom random = Numbers.random(settings.seed(), generation);
+    int count = settings.populationSize();
+    double[][] cube = latinHypercube(count, random);
+    List<Phenotype<DoubleGene, Fitness>> population = new ArrayList<>(count);
+    for (int i = 0; i < count; i++) {
+      double[] genes = space.snap(i < given.size() ? given.get(i) : cube[i]);
+      population.add(Phenotype.of(Genes.genotype(genes), generation));
+    }
+    return individuals(
+        evaluated(ISeq.of(population), ISeq.empty(), Double.NEGATIVE_INFINITY, tally));
+  }
+
+  private double[][] latinHypercube(int count, SplittableRandom random) {
+    double[][] cube = new double[count][space.size()];
+    for (int variable = 0; variable < space.size(); variable++) {
+      int[] order = permutation(count, random);
+      for (int i = 0; i < count; i++) {
+        cube[i][variable] = (order[i] + random.nextDouble()) / count;
+      }
+    }
+    return cube;
+  }
+
+  private static int[] permutation(int count, SplittableRandom random) {
+    int[] order = new int[count];
+    for (int i = 0; i < count; i++) {
+      int j = random.nextInt(i + 1);
+      order[i] = order[j];
+      order[j] = i;
+    }
+    return order;
+  }
+
+  /**
+   * The generation after the given one.
+   *
+   * @param floor see {@link Fitness#of}
+   */
+  List<Individual> next(List<Individual> present, int generation, double floor, Tally tally) {
+    ISeq<Phenotype<DoubleGene, Fitness>> parents =
+        present.stream().map(individual -> phenotype(individual, floor)).collect(ISeq.toISeq());
+    Engine<DoubleGene, Fitness> engine =
+        new Engine.Builder<DoubleGene, Fitness>(
+                population -> evaluated(population, parents, floor, tally),
+                () -> Genes.genotype(new double[space.size()]))
+            .executor(Runnable::run)
+            .populationSize(present.size())
+            .offspringFraction(OFFSPRING_FRACTION)
+            .survivorsSelector(survivors())
+            .offspringSelector(new TournamentSelector<>(3))
+            .alterers(new Variation(space, 0.5, 0.3))
+            .maximalPhenotypeAge(Long.MAX_VALUE)
+            .build();
+    List<Individual> result = new ArrayList<>(present.size());
+    RandomRegistry.using(
+        Numbers.random(settings.seed(), generation),
+        random ->
+            result.addAll(
+                individuals(engine.evolve(EvolutionStart.of(parents, generation)).population())));
+    return result;
+  }
+
+  private static Selector<DoubleGene, Fitness> survivors() {
+    return new DistinctBest();
+  }
+
+  private static Phenotype<DoubleGene, Fitness> phenotype(Individual individual, double floor) {
+    double[] genes = Numbers.array(individual.genes());
+    return Phenotype.of(
+        Genes.genotype(genes), individual.birth(), Fitness.of(individual.verdict(), floor));
+  }
+
+  private static List<Individual> individuals(Seq<Phenotype<DoubleGene, Fitness>> population) {
+    List<Individual> individuals = new ArrayList<>(population.size());
+    for (Phenotype<DoubleGene, Fitness> p : population) {
+      individuals.add(
+          new Individual(p.generation(), Numbers.list(Genes.of(p)), p.fitness().verdict));
+    }
+    return individuals;
+  }
+
+  /** Judges what has no fitness yet; equal genes, and genes of a parent, are judged once. */
+  private ISeq<Phenotype<DoubleGene, Fitness>> evaluated(
+      Seq<Phenotype<DoubleGene, Fitness>> population,
+      Seq<Phenotype<DoubleGene, Fitness>> parents,
+      double floor,
+      Tally tally) {
+    Map<Genes.Key, Fitness> known = new HashMap<>();
+    parents.forEach(p -> known.put(new Genes.Key(Genes.of(p)), p.fitness()));
+    List<double[]> wanted = new ArrayList<>();
+    for (Phenotype<DoubleGene, Fitness> p : population) {
+      double[] genes = Genes.of(p);
+      if (p.nonEvaluated() && known.putIfAbsent(new Genes.Key(genes), UNKNOWN) == null) {
+        wanted.add(genes);
+      }
+    }
+    judge(wanted, floor, tally, known);
+    return population.stream()
+        .map(p -> p.isEvaluated() ? p : p.withFitness(known.get(new Genes.Key(Genes.of(p)))))
+        .collect(ISeq.toISeq());
+  }
+
+  private static final Fitness UNKNOWN =
+      Fitness.of(Verdict.failed("not judged"), Double.NEGATIVE_INFINITY);
+
+  private void judge(
+      List<double[]> wanted, double floor, Tally tally, Map<Genes.Key, Fitness> known) {
+    List<double[]> values = wanted.stream().map(space::values).toList();
+    List<Verdict> verdicts = judges.judge(values);
+    for (int i = 0; i < verdicts.size(); i++) {
+      tally.count(Candidate.of(values.get(i), verdicts.get(i)));
+      known.put(new Genes.Key(wanted.get(i)), Fitness.of(verdicts.get(i), floor));
+    }
+  }
+}

@@ -1,0 +1,40 @@
+package evensun.search;
+
+import java.util.List;
+import org.jspecify.annotations.Nullable;
+
+/**
+ * What a search found.
+ *
+ * @param best the best design; null when no design could be evaluated
+ * @param stop why it stopped
+ * @param generations generations over all rounds
+ * @param evaluations designs evaluated
+ * @param failureCount designs that could not be evaluated
+ * @param failures one entry per kind of failure, in the order in which they were met
+ * @param history one entry per generation
+ * @param refinementGain what the local refinement added to the best first aim
+ * @param optima distinct good designs, best first
+ * @param roundBests best first aim of each round, for the spread over restarts
+ * @param state where the search stands; a resumed search continues from it
+ */
+public record SearchOutcome(
+    @Nullable Candidate best,
+    StopReason stop,
+    int generations,
+    int evaluations,
+    int failureCount,
+    List<FailureRecord> failures,
+    List<GenerationRecord> history,
+    double refinementGain,
+    List<Candidate> optima,
+    List<Double> roundBests,
+    SearchState state) {
+
+  public SearchOutcome {
+    failures = List.copyOf(failures);
+    history = List.copyOf(history);
+    optima = List.copyOf(optima);
+    roundBests = List.copyOf(roundBests);
+  }
+}

@@ -1,0 +1,129 @@
+package evensun.search;
+
+import java.util.List;
+
+/**
+ * All that a search needs to continue bit for bit.
+ *
+ * @param fingerprint what must agree with the search that continues
+ * @param phase {@code GENETIC}, {@code REFINE} or {@code DONE}
+ * @param round from 0
+ * @param generation generations so far over all rounds
+ * @param evaluations evaluations so far
+ * @param population the present generation in order
+ * @param optima what the refinement found so far, best first
+ * @param roundBests [round] best aim of each finished round
+ * @param unrefinedBest best aim that the genetic algorithm alone found
+ * @param history one entry per generation
+ * @param failures one entry per kind of failure
+ * @param tieBreaking whether the tie-break now decides among designs of nearly the best aim
+ * @param stop why it stopped or is about to
+ */
+public record SearchState(
+    String fingerprint,
+    Phase phase,
+    int round,
+    int generation,
+    int evaluations,
+    List<Individual> population,
+    List<Individual> optima,
+    List<Double> roundBests,
+    double unrefinedBest,
+    List<GenerationRecord> history,
+    List<FailureRecord> failures,
+    boolean tieBreaking,
+    StopReason stop) {
+
+  /** Where in a round the search is. */
+  public enum Phase {
+    GENETIC,
+    REFINE,
+    DONE
+  }
+
+  /**
+   * A member of the population.
+   *
+   * @param birth generation in which it was born
+   * @param genes [variable] in [0, 1]
+   * @param verdict what became of it
+   */
+  public record Individual(long birth, List<Double> genes, Verdict verdict) {
+    public Individual {
+      genes = List.copyOf(genes);
+    }
+
+    boolean isFeasible() {
+      return !verdict.isFailure() && verdict.violation() <= 0;
+    }
+
+    double[] geneArray() {
+      return Numbers.array(genes);
+    }
+  }
+
+  public SearchState {
+    population = List.copyOf(population);
+    optima = List.copyOf(optima);
+    roundBests = List.copyOf(roundBests);
+    history = List.copyOf(history);
+    failures = List.copyOf(failures);
+  }
+
+  /** The state in which a search starts. */
+  static SearchState start(String fingerprint) {
+    return new SearchState(
+        fingerprint,
+        Phase.GENETIC,
+        0,
+        0,
+        0,
+        List.of(),
+        List.of(),
+        List.of(),
+        Double.NEGATIVE_INFINITY,
+        List.of(),
+        List.of(),
+        false,
+        StopReason.CONVERGED);
+  }
+
+  /** The same in another phase, with a reason to stop. */
+  SearchState with(Phase next, StopReason reason) {
+    return new SearchState(
+        fingerprint,
+        next,
+        round,
+        generation,
+        evaluations,
+        population,
+        optima,
+        roundBests,
+        unrefinedBest,
+        history,
+        failures,
+        tieBreaking,
+        reason);
+  }
+
+  /** Best first aim of a design that keeps all limits, minus infinity for none. */
+  public double bestAim() {
+    return Math.max(bestAim(population), bestAim(optima));
+  }
+
+  /** The same among some individuals. */
+  static double bestAim(List<Individual> individuals) {
+    double best = Double.NEGATIVE_INFINITY;
+    for (Individual individual : individuals) {
+      if (individual.isFeasible()) {
+        best = Math.max(best, individual.verdict().aims().get(0));
+      }
+    }
+    return best;
+  }
+
+  /** Number of designs that could not be evaluated. */
+  public int failureCount() {
+    return failures.stream().mapToInt(FailureRecord::count).sum();
+  }
+}

@@ -1,0 +1,63 @@
+package evensun.search;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.concurrent.atomic.AtomicInteger;
+import java.util.function.Function;
+
+/** Objectives for tests, made of plain functions; counts its evaluations. */
+record Problem(
+    List<Variable> variables,
+    List<String> aims,
+    List<String> limits,
+    double tieResolution,
+    Function<double[], Verdict> judge,
+    AtomicInteger calls)
+    implements Objective {
+
+  /** A number made of numbers. */
+  interface Value {
+    double at(double[] x);
+  }
+
+  static Problem of(Value value, Variable... variables) {
+    return judged(x -> Verdict.of(value.at(x), 0), variables);
+  }
+
+  static Problem judged(Function<double[], Verdict> judge, Variable... variables) {
+    return new Problem(
+        List.of(variables), List.of("aim"), List.of(), 0, judge, new AtomicInteger());
+  }
+
+  Problem withTieResolution(double resolution) {
+    return new Problem(variables, aims, limits, resolution, judge, calls);
+  }
+
+  Problem withLimits(String... names) {
+    return new Problem(variables, aims, List.of(names), tieResolution, judge, calls);
+  }
+
+  Problem withAims(String... names) {
+    return new Problem(variables, List.of(names), limits, tieResolution, judge, calls);
+  }
+
+  static Variable variable(String key, double low, double high) {
+    return new Variable(key, "", low, high, 0, low);
+  }
+
+  static Variable[] box(int count, double low, double high) {
+    List<Variable> variables = new ArrayList<>();
+    for (int i = 0; i < count; i++) {
+      variables.add(variable("x" + i, low, high));
+    }
+    return variables.toArray(Variable[]::new);
+  }
+
+  @Override
+  public Worker newWorker() {
+    return values -> {
+      calls.incrementAndGet();
+      return judge.apply(values);
+    };
+  }
+}
