@@ -27,6 +27,16 @@ public interface Material {
    */
   Filler on(double[] wavelengthNm);
 
+  /**
+   * What a user should know about a chosen bandgap, such as that it lies where the numbers are an
+   * estimate.
+   *
+   * @param bandgapEv the chosen bandgap in eV
+   */
+  default List<Finding> findingsAt(double bandgapEv) {
+    return List.of();
+  }
+
   /** Fills rows of n and k; a filler belongs to one thread and allocates nothing while filling. */
   interface Filler {
 

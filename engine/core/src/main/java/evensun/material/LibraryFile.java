@@ -1,0 +1,91 @@
+package evensun.material;
+
+import evensun.data.DataFile;
+import evensun.material.table.Bandgap;
+import evensun.material.table.OpticalTable;
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.List;
+import java.util.OptionalDouble;
+
+/** Makes materials of the program's own data files. */
+final class LibraryFile {
+
+  private LibraryFile() {}
+
+  static MaterialRecord record(String resource) {
+    return record(DataFile.header(LibraryFile.class, resource));
+  }
+
+  static Material material(String resource) {
+    DataFile file = DataFile.resource(LibraryFile.class, resource);
+    MaterialRecord record = record(file);
+    return switch (file.value("model").orElse("table")) {
+      case "table" -> table(file, record);
+      case "constant" -> constant(file, record);
+      case "moved-edge" -> movedEdge(file, record);
+      default -> throw new IllegalStateException("unknown model in " + resource);
+    };
+  }
+
+  private static MaterialRecord record(DataFile file) {
+    double[] range = numbers(file.value("range-nm").orElse("100,100000"));
+    List<String> notes = new ArrayList<>();
+    for (String key : List.of("cleaned", "extended", "bandgap-note", "note")) {
+      String lead = key.equals("cleaned") || key.equals("extended") ? key + " " : "";
+      file.values(key).forEach(value -> notes.add(lead + value));
+    }
+    file.value("largest-interpolation-error")
+        .ifPresent(value -> notes.add("largest interpolation error: " + value));
+    return new MaterialRecord(
+        file.required("name"),
+        file.required("title"),
+        file.required("kind"),
+        file.required("form"),
+        file.required("source"),
+        Integer.parseInt(file.required("year")),
+        range[0],
+        range[1],
+        Double.parseDouble(file.required("temperature-k")),
+        file.value("from-memory").isPresent(),
+        file.values("hazard"),
+        notes);
+  }
+
+  private static Material table(DataFile file, MaterialRecord record) {
+    OpticalTable table = OpticalTable.of(file.column(0), file.column(1), file.column(2));
+    OptionalDouble gap =
+        file.value("bandgap-ev")
+            .map(value -> OptionalDouble.of(Double.parseDouble(value)))
+            .orElse(OptionalDouble.empty());
+    boolean direct = gap.isPresent() && file.value("bandgap-note").isEmpty();
+    return TableMaterial.of(record, table, false, direct ? Bandgap.of(table) : gap);
+  }
+
+  private static Material constant(DataFile file, MaterialRecord record) {
+    double[] at = {record.fromNm(), record.toNm()};
+    double n = Double.parseDouble(file.required("n"));
+    double k = Double.parseDouble(file.required("k"));
+    OpticalTable table = OpticalTable.of(at, new double[] {n, n}, new double[] {k, k});
+    return TableMaterial.of(record, table, true, OptionalDouble.empty());
+  }
+
+  private static Material movedEdge(DataFile file, MaterialRecord record) {
+    double[] tuning = numbers(file.required("tuning-ev"));
+    return new MovedEdgeMaterial(
+        record,
+        new Tuning(tuning[0], tuning[1], tuning[2]),
+        file.values("anchor").stream().map(EdgeShape::load).toList(),
+        file.values("marked-ev").stream().map(LibraryFile::marked).toList());
+  }
+
+  private static MovedEdgeMaterial.MarkedRange marked(String value) {
+    String[] parts = value.split(",", 3);
+    return new MovedEdgeMaterial.MarkedRange(
+        Double.parseDouble(parts[0]), Double.parseDouble(parts[1]), parts[2]);
+  }
+
+  private static double[] numbers(String value) {
+    return Arrays.stream(value.split(",")).mapToDouble(Double::parseDouble).toArray();
+  }
+}

@@ -1,0 +1,28 @@
+package evensun.material;
+
+import java.util.Locale;
+
+/** Sentences about ranges of wavelengths. */
+final class Ranges {
+
+  private Ranges() {}
+
+  static String nm(double nm) {
+    return String.format(Locale.ROOT, "%.6g", nm).replaceAll("\\.?0+$", "") + " nm";
+  }
+
+  static String message(String name, double fromNm, double toNm, double gridFrom, double gridTo) {
+    return "material \""
+        + name
+        + "\" is known from "
+        + nm(fromNm)
+        + " to "
+        + nm(toNm)
+        + " but the grid runs from "
+        + nm(gridFrom)
+        + " to "
+        + nm(gridTo)
+        + "; shorten the grid, or write extrapolate: hold in the scenario's materials to go on with"
+        + " the end values";
+  }
+}
