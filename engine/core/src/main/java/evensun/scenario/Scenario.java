@@ -1,5 +1,7 @@
 package evensun.scenario;
 
+import java.util.Collections;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -35,7 +37,7 @@ public record Scenario(
     Optional<SearchSpec> search) {
 
   public Scenario {
-    materials = Map.copyOf(materials);
+    materials = Collections.unmodifiableMap(new LinkedHashMap<>(materials));
     stack = List.copyOf(stack);
     subcells = List.copyOf(subcells);
   }

@@ -1,5 +1,7 @@
 package evensun.scenario;
 
+import java.util.Collections;
+import java.util.LinkedHashMap;
 import java.util.Map;
 
 /**
@@ -12,6 +14,6 @@ import java.util.Map;
 public record SolverSpec(String id, Map<String, String> options, Place place) {
 
   public SolverSpec {
-    options = Map.copyOf(options);
+    options = Collections.unmodifiableMap(new LinkedHashMap<>(options));
   }
 }

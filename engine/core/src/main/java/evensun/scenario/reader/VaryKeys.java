@@ -1,0 +1,62 @@
+package evensun.scenario.reader;
+
+import evensun.scenario.LayerSpec;
+import evensun.scenario.tree.Fields;
+import evensun.scenario.tree.Interval;
+import evensun.scenario.tree.Nearest;
+import evensun.scenario.tree.Node.Entry;
+import evensun.scenario.tree.Shown;
+import java.util.LinkedHashMap;
+import java.util.Map;
+import java.util.Optional;
+
+/** The quantities that a search may vary, and why others may not. */
+final class VaryKeys {
+
+  private VaryKeys() {}
+
+  /** The interval of the quantity that a key names; empty, and a fault, when it names none. */
+  static Optional<Interval> interval(Fields vary, Entry entry, StackBinder.Stack stack) {
+    if (!stack.known()) {
+      return Optional.empty();
+    }
+    Map<String, Interval> known = of(stack);
+    Optional<Interval> found = Optional.ofNullable(known.get(entry.key()));
+    if (found.isEmpty()) {
+      vary.fault(
+          entry.keyPlace(), Shown.plain(entry.key()) + " " + complaint(entry.key(), stack, known));
+    }
+    return found;
+  }
+
+  private static Map<String, Interval> of(StackBinder.Stack stack) {
+    Map<String, Interval> known = new LinkedHashMap<>();
+    for (LayerSpec layer : stack.layers()) {
+      known.put(layer.name() + ".thicknessNm", StackBinder.THICKNESS);
+      if (layer.bandgapEv().isPresent()) {
+        known.put(layer.name() + ".bandgapEv", StackBinder.BANDGAP);
+      }
+    }
+    if (stack.exit().bandgapEv().isPresent()) {
+      known.put(stack.exit().name() + ".bandgapEv", StackBinder.BANDGAP);
+    }
+    return known;
+  }
+
+  private static String complaint(
+      String key, StackBinder.Stack stack, Map<String, Interval> known) {
+    int dot = key.indexOf('.');
+    String layer = dot < 0 ? key : key.substring(0, dot);
+    String quantity = dot < 0 ? "" : key.substring(dot + 1);
+    if (stack.position(layer) < 0) {
+      return "names no layer of the stack" + Nearest.hint(dot < 0 ? key : layer, stack.names());
+    }
+    if (quantity.equals("thicknessNm")) {
+      return "cannot vary: the exit medium has no thickness";
+    }
+    if (quantity.equals("bandgapEv")) {
+      return "cannot vary: write bandgapEv in the layer first, as the value to start from";
+    }
+    return "names nothing that can vary" + Nearest.hint(key, known.keySet());
+  }
+}
