@@ -89,6 +89,16 @@ public final class Bench implements AutoCloseable {
     }
   }
 
+  /** Takes over the design of another bench of the same stack. */
+  public void copyFrom(Bench other) {
+    for (int slot = 0; slot < bandgapEv.length; slot++) {
+      setBandgap(slot, other.bandgapEv[slot]);
+    }
+    System.arraycopy(other.design.thicknessNm, 0, design.thicknessNm, 0, design.thicknessNm.length);
+    System.arraycopy(other.design.material, 0, design.material, 0, design.material.length);
+    System.arraycopy(other.design.knob, 0, design.knob, 0, design.knob.length);
+  }
+
   /** The present design; not to be written. */
   public Design design() {
     return design;

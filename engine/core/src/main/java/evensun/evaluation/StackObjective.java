@@ -52,6 +52,11 @@ public final class StackObjective implements Objective {
   }
 
   @Override
+  public double tieResolution() {
+    return aim.isSmallestCurrent() && variesGap() ? GAP_TIE_MA_PER_CM2 : 0;
+  }
+
+  @Override
   public Worker newWorker() {
     return new StackWorker();
   }

@@ -1,0 +1,205 @@
+package evensun.run;
+
+import evensun.evaluation.Aim;
+import evensun.evaluation.Bench;
+import evensun.evaluation.Model;
+import evensun.evaluation.Neighbourhood;
+import evensun.evaluation.Outcomes;
+import evensun.evaluation.StackObjective;
+import evensun.result.Outcome;
+import evensun.result.RunResult;
+import evensun.result.SearchRecord;
+import evensun.scenario.InputException;
+import evensun.scenario.Place;
+import evensun.scenario.SearchSpec;
+import evensun.search.Candidate;
+import evensun.search.Search;
+import evensun.search.SearchListener;
+import evensun.search.SearchOutcome;
+import evensun.search.SearchSettings;
+import evensun.search.SearchState;
+import evensun.spi.EvaluationFailed;
+import evensun.spi.Finding;
+import evensun.spi.Severity;
+import evensun.stack.ResolvedStack;
+import java.util.LinkedHashMap;
+import java.util.Map;
+import java.util.function.BooleanSupplier;
+import org.jspecify.annotations.Nullable;
+
+/** The main job: search the best design of a scenario and record everything a review needs. */
+public final class DesignJob {
+
+  private final Preparation preparation;
+  private final SearchSpec spec;
+  private final Aim aim;
+  private final Varied varied;
+  private final StackObjective objective;
+
+  /**
+   * A design job.
+   *
+   * @param preparation the scenario made ready
+   * @throws InputException when the scenario holds no search or one that does not fit
+   */
+  public DesignJob(Preparation preparation) {
+    this.preparation = preparation;
+    ResolvedStack stack = preparation.stack();
+    this.spec =
+        stack
+            .scenario()
+            .search()
+            .orElseThrow(
+                () ->
+                    new InputException(
+                        Place.of(stack.scenario().source().name()),
+                        "the scenario has no search: section; add one with vary:, or use evensun assess for the stack as drawn"));
+    this.aim = Aims.of(spec, stack);
+    this.varied = Varied.of(spec, stack);
+    this.objective =
+        new StackObjective(preparation.model(), varied.parameters(), varied.variables(), aim);
+  }
+
+  /** Unit of the aim. */
+  public String aimUnit() {
+    return aim.unit();
+  }
+
+  /** Settings of the search as the scenario asks, on so many threads. */
+  public SearchSettings settings(int threads) {
+    SearchSettings settings =
+        SearchSettings.of(spec.seed(), varied.variables().size()).withThreads(threads);
+    return spec.evaluations().isPresent()
+        ? settings.withEvaluations(spec.evaluations().getAsInt())
+        : settings;
+  }
+
+  /**
+   * Runs the job.
+   *
+   * @param settings how to search
+   * @param listener hears about progress and states
+   * @param resumed where an earlier run stood, if it is to go on
+   * @param cancelled whether the user asked to stop
+   * @param repeatCommand command that repeats the run
+   * @throws EvaluationFailed when not a single design could be evaluated
+   */
+  public RunResult run(
+      SearchSettings settings,
+      SearchListener listener,
+      @Nullable SearchState resumed,
+      BooleanSupplier cancelled,
+      String repeatCommand) {
+    ProvenanceBuilder provenance = new ProvenanceBuilder(preparation);
+    Search search = new Search(objective, settings, listener, cancelled);
+    SearchOutcome outcome = resumed == null ? search.run() : search.resume(resumed);
+    Candidate best = outcome.best();
+    if (best == null) {
+      throw new EvaluationFailed(
+          outcome.failures().isEmpty()
+              ? "the search was stopped before it had evaluated a design"
+              : "no design could be evaluated: "
+                  + outcome.failures().get(0).first().verdict().failure());
+    }
+    return result(outcome, best, settings, provenance, repeatCommand);
+  }
+
+  private RunResult result(
+      SearchOutcome outcome,
+      Candidate best,
+      SearchSettings settings,
+      ProvenanceBuilder provenance,
+      String repeatCommand) {
+    Model model = preparation.model();
+    Findings findings = new Findings();
+    try (Bench bench = model.newBench();
+        Neighbourhood around = around(best)) {
+      Outcome asDrawn = asDrawn(bench, findings);
+      set(bench, best);
+      Outcome found = Outcomes.of(bench, varied.parameters());
+      SearchRecord record =
+          new SearchRecords(varied, aim)
+              .record(outcome, best, asDrawn == null ? null : aimOf(asDrawn));
+      findings.about(preparation.stack(), model, bench.design());
+      findings.about(found);
+      findings.about(record);
+      gapNotDecided(findings);
+      return new RunResult(
+          RunResult.FORMAT,
+          "design",
+          preparation.stack().scenario().title(),
+          found,
+          asDrawn,
+          record,
+          Usage.materials(bench),
+          Usage.spectrum(preparation.stack()),
+          AssessJob.depth(bench),
+          AssessJob.angular(preparation, bench),
+          around.sensitivities(),
+          around.curves(),
+          null,
+          findings.records(),
+          Cautions.of(preparation.stack()),
+          provenance.build(spec.seed(), repeatCommand, settingsOf(settings)));
+    }
+  }
+
+  private Neighbourhood around(Candidate best) {
+    return new Neighbourhood(
+        preparation.model(), varied.parameters(), varied.variables(), best.toArray(), aim);
+  }
+
+  private void set(Bench bench, Candidate best) {
+    for (int v = 0; v < varied.parameters().size(); v++) {
+      bench.set(varied.parameters().get(v), best.values().get(v));
+    }
+  }
+
+  /** The stack as drawn; when it cannot be evaluated the search's result still counts. */
+  private @Nullable Outcome asDrawn(Bench bench, Findings findings) {
+    try {
+      return Outcomes.of(bench, varied.parameters());
+    } catch (EvaluationFailed e) {
+      findings.add(
+          new Finding(
+              "as-drawn-failed",
+              Severity.WARNING,
+              "stack as drawn",
+              "the stack as drawn could not be evaluated: " + e.getMessage()));
+      return null;
+    }
+  }
+
+  private double aimOf(Outcome outcome) {
+    double[] currents =
+        outcome.subcells().stream().mapToDouble(s -> s.photocurrentMaPerCm2()).toArray();
+    double[] gaps =
+        outcome.subcells().stream()
+            .mapToDouble(s -> s.bandgapEv() == null ? 0 : s.bandgapEv())
+            .toArray();
+    return aim.value(currents, gaps);
+  }
+
+  private void gapNotDecided(Findings findings) {
+    if (aim.isSmallestCurrent() && objective.variesGap()) {
+      findings.add(
+          new Finding(
+              "gap-not-decided",
+              Severity.WARNING,
+              "search.aim",
+              "matched current alone cannot decide a bandgap, since thickness trades for it; among designs within %s mA cm⁻² the one with the largest sum of gaps was taken"
+                  .formatted(StackObjective.GAP_TIE_MA_PER_CM2)));
+    }
+  }
+
+  private static Map<String, String> settingsOf(SearchSettings settings) {
+    Map<String, String> map = new LinkedHashMap<>();
+    map.put("search.populationSize", String.valueOf(settings.populationSize()));
+    map.put("search.evaluations", String.valueOf(settings.evaluations()));
+    map.put("search.rounds", String.valueOf(settings.rounds()));
+    map.put("search.stallGenerations", String.valueOf(settings.stallGenerations()));
+    map.put("search.stallFraction", String.valueOf(settings.stallFraction()));
+    map.put("search.refined", String.valueOf(settings.refined()));
+    return map;
+  }
+}

@@ -1,0 +1,93 @@
+package evensun.run;
+
+import evensun.evaluation.Model;
+import evensun.light.Spectrum;
+import evensun.pluginhost.PluginHost;
+import evensun.scenario.InputFiles;
+import evensun.scenario.Scenario;
+import evensun.scenario.SearchSpec;
+import evensun.spi.Incidence;
+import evensun.spi.Services;
+import evensun.stack.ResolvedStack;
+import evensun.stack.StackResolver;
+import java.util.List;
+import java.util.function.BooleanSupplier;
+
+/** A scenario made ready: files read, materials and light found, solver chosen and prepared. */
+public final class Preparation implements AutoCloseable {
+
+  private static final long DEFAULT_SEED = 1;
+
+  private final InputFiles files;
+  private final ResolvedStack stack;
+  private final SolverChoice choice;
+  private final PluginHost host;
+  private final Services services;
+  private final Model model;
+
+  private Preparation(
+      InputFiles files, ResolvedStack stack, PluginHost host, BooleanSupplier cancelled) {
+    this.files = files;
+    this.stack = stack;
+    this.host = host;
+    this.services = host.services(cancelled);
+    this.choice = SolverChoice.of(stack, host);
+    this.model = Model.of(stack, choice.solver(), choice.options(), seed(), services);
+  }
+
+  /**
+   * Makes a scenario ready.
+   *
+   * @param scenario as read
+   * @param host loaded solvers
+   * @param cancelled whether the user asked to stop
+   * @throws evensun.scenario.InputException with every fault found
+   * @throws evensun.pluginhost.PluginException when the solver is not loaded
+   * @throws evensun.spi.UnsupportedProblem when the solver cannot take the stack
+   */
+  public static Preparation of(Scenario scenario, PluginHost host, BooleanSupplier cancelled) {
+    InputFiles files = new InputFiles(scenario.source().folder());
+    ScenarioMaterials materials = new ScenarioMaterials(scenario, files);
+    Spectrum spectrum = ScenarioLight.spectrum(scenario, files);
+    return new Preparation(
+        files, StackResolver.resolve(scenario, materials, spectrum), host, cancelled);
+  }
+
+  /** Seed of the search, and of whatever a solver draws at random. */
+  public long seed() {
+    return stack.scenario().search().map(SearchSpec::seed).orElse(DEFAULT_SEED);
+  }
+
+  /** The stack. */
+  public ResolvedStack stack() {
+    return stack;
+  }
+
+  /** The stack made ready for its solver. */
+  public Model model() {
+    return model;
+  }
+
+  /** The same stack for other directions of the light; the caller closes it. */
+  Model modelFor(List<Incidence> incidences) {
+    return Model.of(stack, choice.solver(), choice.options(), seed(), services, incidences);
+  }
+
+  SolverChoice choice() {
+    return choice;
+  }
+
+  PluginHost host() {
+    return host;
+  }
+
+  /** The files that the scenario names, as they were read. */
+  public InputFiles files() {
+    return files;
+  }
+
+  @Override
+  public void close() {
+    model.close();
+  }
+}
