@@ -15,11 +15,13 @@ import evensun.scenario.tree.Node.Scalar;
 import evensun.scenario.tree.Shown;
 import java.util.ArrayList;
 import java.util.HashMap;
+import java.util.HashSet;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.Set;
 
 /** Binds {@code stack}. */
 final class StackBinder {
@@ -33,6 +35,8 @@ final class StackBinder {
   private final Fields root;
   private final List<Node> entries;
   private final Map<String, Place> names = new HashMap<>();
+  private final Set<String> refusedNames = new HashSet<>();
+  private boolean endsTooLate;
 
   private StackBinder(Fields root, List<Node> entries) {
     this.root = root;
@@ -42,9 +46,20 @@ final class StackBinder {
   /**
    * The stack as far as it could be read.
    *
+   * @param refusedNames names that were reported already, so that nobody complains twice
    * @param known whether it could be read at all, so that names in other sections can be checked
    */
-  record Stack(MediumSpec incident, List<LayerSpec> layers, MediumSpec exit, boolean known) {
+  record Stack(
+      MediumSpec incident,
+      List<LayerSpec> layers,
+      MediumSpec exit,
+      Set<String> refusedNames,
+      boolean known) {
+
+    /** Whether a name that no layer has need not be reported. */
+    boolean excuses(String layer) {
+      return !known || refusedNames.contains(layer);
+    }
 
     Optional<LayerSpec> layer(String name) {
       return layers.stream().filter(l -> l.name().equals(name)).findFirst();
@@ -80,7 +95,7 @@ final class StackBinder {
             "stack must have at least two entries, {medium: air} first and the exit medium last");
       }
       MediumSpec none = new MediumSpec("", "", OptionalDouble.empty(), root.place("stack"));
-      return new Stack(none, List.of(), none, false);
+      return new Stack(none, List.of(), none, Set.of(), false);
     }
     return binder.stack();
   }
@@ -91,7 +106,7 @@ final class StackBinder {
     for (int i = 1; i < entries.size() - 1; i++) {
       layers.add(layer(i));
     }
-    return new Stack(incident, layers, exit(), true);
+    return new Stack(incident, layers, exit(), refusedNames, true);
   }
 
   private MediumSpec incident(Node node) {
@@ -101,6 +116,7 @@ final class StackBinder {
     }
     Fields fields = opened.get();
     if (!fields.has("medium")) {
+      refuseName(fields);
       fields.fault(
           fields.place(),
           "the first entry must be the medium the light comes from, such as {medium: air}");
@@ -125,6 +141,7 @@ final class StackBinder {
     }
     String name = name(fields);
     if (!fields.has("thicknessNm") && endsTooLate(index)) {
+      endsTooLate = true;
       fields.fault(
           fields.place(),
           "thicknessNm is missing, and more entries follow; only the last entry, the exit medium,"
@@ -176,6 +193,9 @@ final class StackBinder {
     for (String key : List.of("thicknessNm", "coherence")) {
       if (exit.has(key)) {
         exit.know(key);
+        if (endsTooLate) {
+          return;
+        }
         exit.fault(
             exit.place(key),
             "the last entry is the exit medium and takes no "
@@ -224,6 +244,9 @@ final class StackBinder {
 
   private String name(Fields fields) {
     String name = fields.requiredName("name", "a name for the layer", NameRule.ELEMENT).orElse("");
+    if (name.isEmpty()) {
+      refuseName(fields);
+    }
     Place first = name.isEmpty() ? null : names.putIfAbsent(name, fields.place("name"));
     if (first != null) {
       fields.fault(
@@ -231,6 +254,13 @@ final class StackBinder {
           "the name is used twice (first in line " + first.line() + "); names are unique");
     }
     return name;
+  }
+
+  private void refuseName(Fields fields) {
+    fields
+        .node("name")
+        .filter(Scalar.class::isInstance)
+        .ifPresent(n -> refusedNames.add(((Scalar) n).text()));
   }
 
   private static String value(Fields fields, String key) {

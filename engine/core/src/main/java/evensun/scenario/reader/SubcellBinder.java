@@ -106,7 +106,7 @@ final class SubcellBinder {
 
   private boolean exists(Fields fields, Node item, String absorber) {
     String layer = layerOf(absorber);
-    if (!stack.known() || stack.position(layer) >= 0 && layer.equals(absorber)) {
+    if (stack.excuses(layer) || stack.position(layer) >= 0 && layer.equals(absorber)) {
       return true;
     }
     if (stack.position(layer) < 0) {
@@ -166,7 +166,9 @@ final class SubcellBinder {
     for (int i = 1; i < subcells.size(); i++) {
       SubcellSpec upper = subcells.get(i - 1);
       SubcellSpec lower = subcells.get(i);
-      if (firstPosition(lower) < firstPosition(upper)) {
+      if (firstPosition(upper) >= 0
+          && firstPosition(lower) >= 0
+          && firstPosition(lower) < firstPosition(upper)) {
         root.fault(
             lower.place(),
             "subcell "
@@ -178,11 +180,9 @@ final class SubcellBinder {
     }
   }
 
+  /** Where the light meets a subcell first; -1 when that is not known after other faults. */
   private int firstPosition(SubcellSpec subcell) {
-    return subcell.absorbers().stream()
-        .mapToInt(a -> stack.position(layerOf(a)))
-        .min()
-        .orElse(Integer.MAX_VALUE);
+    return subcell.absorbers().stream().mapToInt(a -> stack.position(layerOf(a))).min().orElse(-1);
   }
 
   private static String layerOf(String absorber) {

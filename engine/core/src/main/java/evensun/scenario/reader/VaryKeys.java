@@ -17,7 +17,7 @@ final class VaryKeys {
 
   /** The interval of the quantity that a key names; empty, and a fault, when it names none. */
   static Optional<Interval> interval(Fields vary, Entry entry, StackBinder.Stack stack) {
-    if (!stack.known()) {
+    if (stack.excuses(entry.key().replaceFirst("\\..*", ""))) {
       return Optional.empty();
     }
     Map<String, Interval> known = of(stack);

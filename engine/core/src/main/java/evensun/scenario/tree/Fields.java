@@ -129,9 +129,9 @@ public final class Fields {
     return OptionalLong.of((long) number.getAsDouble());
   }
 
-  /** A whole number of at most nine digits; empty when it is absent or after a fault. */
+  /** A whole number up to 1e9; empty when it is absent or after a fault. */
   public OptionalInt count(String key, int low) {
-    OptionalLong whole = whole(key, low, 999_999_999);
+    OptionalLong whole = whole(key, low, 1_000_000_000);
     return whole.isEmpty() ? OptionalInt.empty() : OptionalInt.of((int) whole.getAsLong());
   }
 

@@ -15,7 +15,7 @@ final class SyntaxFaults {
   private SyntaxFaults() {}
 
   static void report(JacksonException e, String file, String[] lines, Faults faults) {
-    if (reportTabs(file, lines, faults)) {
+    if (reportIndents(file, lines, faults)) {
       return;
     }
     if (e instanceof StreamConstraintsException) {
@@ -29,18 +29,33 @@ final class SyntaxFaults {
     faults.add(at(e, file), otherMessage(e));
   }
 
-  private static boolean reportTabs(String file, String[] lines, Faults faults) {
+  /** Tabs and odd spaces at the start of a line are invisible, and behind many syntax errors. */
+  private static boolean reportIndents(String file, String[] lines, Faults faults) {
     int before = faults.count();
     for (int i = 0; i < lines.length; i++) {
-      String indent = lines[i].substring(0, lines[i].length() - lines[i].stripLeading().length());
-      int tab = indent.indexOf('\t');
-      if (tab >= 0 && !lines[i].isBlank()) {
+      int odd = oddIndent(lines[i]);
+      if (odd >= 0) {
+        String what = lines[i].charAt(odd) == '\t' ? "a tab" : "a space that is no plain space";
         faults.add(
-            new Place(file, i + 1, tab + 1, ""),
-            "the line is indented with a tab; YAML takes spaces only");
+            new Place(file, i + 1, odd + 1, ""),
+            "the line is indented with " + what + "; YAML takes plain spaces only");
       }
     }
     return faults.count() > before;
+  }
+
+  /** Position of the first character of the indent that is no plain space, or -1. */
+  private static int oddIndent(String line) {
+    for (int i = 0; i < line.length(); i++) {
+      char c = line.charAt(i);
+      if (c == '\t' || (c != ' ' && Character.isSpaceChar(c))) {
+        return line.isBlank() ? -1 : i;
+      }
+      if (c != ' ') {
+        return -1;
+      }
+    }
+    return -1;
   }
 
   private static String yamlMessage(MarkedYamlEngineException e) {
@@ -74,6 +89,9 @@ final class SyntaxFaults {
     }
     if (problem.contains("that cannot start any token")) {
       return "a value cannot start with this character; put it in quotes";
+    }
+    if (problem.contains("stream end")) {
+      return "the text ends before everything is closed: a bracket or a value is missing";
     }
     return "cannot be read as YAML: " + Shown.plain(problem);
   }

@@ -114,8 +114,8 @@ public final class TreeReader {
       return true;
     }
     if (parser.getTypeId() != null) {
-      faults.add(
-          place, "!" + Shown.plain(String.valueOf(parser.getTypeId())) + " is a tag; remove it");
+      String tag = String.valueOf(parser.getTypeId()).replace("tag:yaml.org,2002:", "!");
+      faults.add(place, "!" + Shown.plain(tag) + " is a tag; remove it");
       return true;
     }
     return false;
