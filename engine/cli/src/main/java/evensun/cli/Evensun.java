@@ -14,6 +14,7 @@ import picocli.CommandLine.Mixin;
     subcommands = {
       AssessCommand.class,
       DesignCommand.class,
+      PluginsCommand.class,
     })
 final class Evensun implements Callable<Integer> {
 
