@@ -23,7 +23,8 @@ final class SampleResult {
         List.of(new DepthLayer("absorber", List.of(0.0, 1.0), List.of(1e21, 9.5e20))),
         new Angular(List.of(0.0, 30.0), List.of(4.0, 4.25), map("top", List.of(19.5, 19.25))),
         List.of(
-            new Sensitivity("absorber.thicknessNm", "nm", 1, 0.01, -0.012, map("top", 0.01), 0.02)),
+            new Sensitivity(
+                "absorber.thicknessNm", "nm", 1, 0.01, -0.012, map("top", 0.01), 0.02, 25, -0.4)),
         List.of(
             new WhatIf(
                 "absorber.thicknessNm",
