@@ -30,15 +30,20 @@ final class Stack {
     layout = new Layout(layers);
   }
 
+  /** [l] whether waves interfere in a layer. */
+  boolean[] coherent() {
+    return coherent.clone();
+  }
+
   /** The light of an incidence. At normal incidence s and p are one. */
   static Beam beam(Incidence incidence) {
-    double sine = Math.sin(Math.toRadians(incidence.angleDeg()));
-    if (sine == 0 || incidence.polarisation() == Polarisation.S) {
-      return new Beam(sine, 1, 0);
+    double cosine = incidence.angleDeg() == 0 ? 1 : Math.cos(Math.toRadians(incidence.angleDeg()));
+    if (cosine == 1 || incidence.polarisation() == Polarisation.S) {
+      return new Beam(cosine, 1, 0);
     }
     return incidence.polarisation() == Polarisation.P
-        ? new Beam(sine, 0, 1)
-        : new Beam(sine, 0.5, 0.5);
+        ? new Beam(cosine, 0, 1)
+        : new Beam(cosine, 0.5, 0.5);
   }
 
   /**

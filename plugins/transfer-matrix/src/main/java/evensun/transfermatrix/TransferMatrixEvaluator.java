@@ -9,6 +9,7 @@ import evensun.spi.Problem;
 import evensun.spi.Response;
 import evensun.spi.Side;
 import evensun.transfermatrix.kernel.Beam;
+import evensun.transfermatrix.kernel.FastKernel;
 import evensun.transfermatrix.kernel.Kernel;
 import evensun.transfermatrix.kernel.Layout;
 import evensun.transfermatrix.kernel.ReferenceKernel;
@@ -19,13 +20,16 @@ import java.util.Optional;
 /** Answers designs with a kernel of its own; allocates nothing with the fast kernel. */
 final class TransferMatrixEvaluator implements Evaluator, DepthProfile {
 
+  /** Kernels keep what the materials decide for one beam; long angular tables share one kernel. */
+  private static final int MOST_KERNELS = 16;
+
   private final Problem problem;
   private final int layers;
   private final int wavelengths;
   private final Stack stack;
   private final Incidence[] incidences;
   private final Beam[] beams;
-  private final Kernel[] kernels; // [i] one per incidence, since each keeps what it learned
+  private final Kernel[] kernels; // [i] one per incidence, the last for all further ones
   private final Spectra rows;
   private final double[] transmittance;
   private final double[][] absorptance;
@@ -37,12 +41,26 @@ final class TransferMatrixEvaluator implements Evaluator, DepthProfile {
     stack = new Stack(problem);
     incidences = problem.incidences().toArray(new Incidence[0]);
     beams = Arrays.stream(incidences).map(Stack::beam).toArray(Beam[]::new);
-    double[] nm = problem.wavelengthNm().toArray();
-    kernels = new Kernel[incidences.length];
-    Arrays.setAll(kernels, i -> new ReferenceKernel(nm));
+    kernels = kernels(kind);
     rows = new Spectra(layers);
     transmittance = new double[wavelengths];
     absorptance = new double[layers][wavelengths];
+  }
+
+  private Kernel[] kernels(Options.KernelKind kind) {
+    Kernel[] owned = new Kernel[Math.min(incidences.length, MOST_KERNELS)];
+    double[] nm = problem.wavelengthNm().toArray();
+    Arrays.setAll(
+        owned,
+        i ->
+            kind == Options.KernelKind.REFERENCE
+                ? new ReferenceKernel(nm)
+                : new FastKernel(nm, stack.coherent(), problem.materialCount()));
+    return owned;
+  }
+
+  private Kernel kernel(int incidence) {
+    return kernels[Math.min(incidence, kernels.length - 1)];
   }
 
   @Override
@@ -53,7 +71,7 @@ final class TransferMatrixEvaluator implements Evaluator, DepthProfile {
       if (wantsAnything()) {
         Layout layout = stack.layout(design, incidences[i].side(), false);
         clearAbsent(design);
-        kernels[i].solve(layout, beams[i], design.n, design.k, design.revision, rows);
+        kernel(i).solve(layout, beams[i], design.n, design.k, design.revision, rows);
       }
       if (i == 0 && into.sum != null) {
         sum(into);

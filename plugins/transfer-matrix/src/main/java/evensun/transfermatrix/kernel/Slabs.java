@@ -10,12 +10,6 @@ package evensun.transfermatrix.kernel;
  */
 final class Slabs {
 
-  /** Smallest |q²/N²| of a finite layer: at q = 0 the two waves that span its field are one. */
-  private static final double LEAST_LAYER = 1e-12;
-
-  /** The same for the half-spaces, where one wave is enough. */
-  private static final double LEAST_HALF_SPACE = 1e-30;
-
   /** N, the number of finite layers. */
   final int layerCount;
 
@@ -38,24 +32,26 @@ final class Slabs {
     coherent = layout.coherent;
     admittance = new Complex[layerCount + 2];
     wavePerNm = new Complex[layerCount + 2];
-    double tangential = n[layout.material[0]][w] * beam.sine();
+    double incident = n[layout.material[0]][w];
     for (int j = 0; j <= layerCount + 1; j++) {
       int m = layout.material[j];
       Complex index = new Complex(n[m][w], k[m][w]);
-      Complex square = index.times(index);
-      Complex q = normalIndex(square, tangential, j > 0 && j <= layerCount);
-      admittance[j] = p ? square.over(q) : q;
+      boolean finite = j > 0 && j <= layerCount;
+      Complex q = beam.normal() ? index : normalIndex(index, incident, beam.cosine(), finite);
+      admittance[j] = p ? index.times(index).over(q) : q;
       wavePerNm[j] = q.times(2 * Math.PI / wavelengthNm);
     }
   }
 
-  private static Complex normalIndex(Complex square, double tangential, boolean finite) {
-    if (tangential == 0) {
-      return square.root();
-    }
-    Complex q2 = square.minus(new Complex(tangential * tangential, 0));
-    double least = (finite ? LEAST_LAYER : LEAST_HALF_SPACE) * Math.sqrt(square.squared());
-    return q2.squared() < least * least ? new Complex(Math.sqrt(least), 0) : q2.root();
+  private static Complex normalIndex(
+      Complex index, double incident, double cosine, boolean finite) {
+    Complex square =
+        new Complex(
+            NormalIndex.squareRe(index.re(), index.im(), incident, cosine),
+            NormalIndex.squareIm(index.re(), index.im()));
+    double least =
+        (finite ? NormalIndex.LEAST_LAYER : NormalIndex.LEAST_HALF_SPACE) * index.squared();
+    return square.squared() < least * least ? new Complex(Math.sqrt(least), 0) : square.root();
   }
 
   /**
