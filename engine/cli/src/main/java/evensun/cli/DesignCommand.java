@@ -1,15 +1,146 @@
 package evensun.cli;
 
+import evensun.pluginhost.PluginHost;
+import evensun.result.ResultJson;
+import evensun.result.RunResult;
+import evensun.run.DesignJob;
+import evensun.run.Preparation;
+import evensun.run.RunFolder;
+import evensun.scenario.InputException;
+import evensun.scenario.Place;
+import evensun.scenario.Scenario;
+import evensun.search.SearchSettings;
+import evensun.search.SearchState;
+import evensun.search.SearchStateCodec;
+import java.io.IOException;
+import java.io.PrintStream;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.time.Instant;
+import java.util.ArrayList;
+import java.util.List;
+import org.jspecify.annotations.Nullable;
 import picocli.CommandLine.Command;
+import picocli.CommandLine.Option;
+import picocli.CommandLine.Parameters;
 
 /** {@code evensun design}: the main job. */
 @Command(
     name = "design",
-    description = "Searches the best design of a scenario and writes its report.")
+    description = "Searches the best design of a scenario and writes its report.",
+    footer = {"", "Example:", "  evensun design scenarios/perovskite-on-silicon.yaml --out my-run"})
 final class DesignCommand extends BaseCommand {
+
+  @Parameters(
+      arity = "0..1",
+      paramLabel = "SCENARIO",
+      description = "Scenario file, or - for standard input; not needed with --resume.")
+  String scenarioFile;
+
+  @Option(
+      names = "--set",
+      paramLabel = "KEY=VALUE",
+      description = "Changes one value of the scenario, such as search.seed (repeatable).")
+  List<String> settings = new ArrayList<>();
+
+  @Option(
+      names = "--out",
+      paramLabel = "DIR",
+      description = "Folder of the run (default: evensun-runs/SCENARIO-TIME).")
+  Path out;
+
+  @Option(names = "--force", description = "Replaces what Evensun wrote into --out earlier.")
+  boolean force;
+
+  @Option(
+      names = "--resume",
+      paramLabel = "RUN",
+      description = "Goes on with a run that was stopped; it ends where it would have ended.")
+  Path resume;
+
+  @Option(
+      names = "--time-seconds",
+      paramLabel = "S",
+      description = "Stops searching after this time with what was found.")
+  Double timeSeconds;
 
   @Override
   public Integer call() {
-    throw new UnsupportedOperationException();
+    GlobalOptions global = global();
+    Interruption interruption = Interruption.listen();
+    Scenario scenario = scenario();
+    RunResult result;
+    Path report;
+    try (PluginHost host = Plugins.open(evensun());
+        Preparation preparation = Preparation.of(scenario, host, interruption)) {
+      DesignJob job = new DesignJob(preparation);
+      RunFolder folder = folder(scenario);
+      RunFiles.inputs(folder, scenario, preparation);
+      result = search(job, folder, global, interruption);
+      report = RunFiles.results(folder, result);
+    }
+    console()
+        .out()
+        .print(global.json() ? ResultJson.write(result) : RunFiles.summary(result, report));
+    return interruption.getAsBoolean() ? ExitStatus.INTERRUPTED : ExitStatus.DONE;
+  }
+
+  private Scenario scenario() {
+    if (resume != null) {
+      RunFolder.open(resume);
+      return ScenarioInput.read(
+          resume.resolve(RunFiles.SCENARIO).toString(), settings, console().in());
+    }
+    if (scenarioFile == null) {
+      throw new InputException(
+          Place.option("design"), "names no scenario; write evensun design SCENARIO");
+    }
+    return ScenarioInput.read(scenarioFile, settings, console().in());
+  }
+
+  private RunFolder folder(Scenario scenario) {
+    if (resume != null) {
+      return RunFolder.open(resume);
+    }
+    Path folder =
+        out != null
+            ? out
+            : RunFolder.defaultFolder(Path.of(""), ScenarioInput.runName(scenario), Instant.now());
+    return RunFolder.create(folder, force);
+  }
+
+  private RunResult search(
+      DesignJob job, RunFolder folder, GlobalOptions global, Interruption interruption) {
+    SearchSettings searchSettings = job.settings(global.threadCount());
+    if (timeSeconds != null) {
+      searchSettings = searchSettings.withTimeSeconds(timeSeconds);
+    }
+    boolean live = console().errIsTerminal() && !global.quiet;
+    PrintStream terminal = live ? console().err() : null;
+    ProgressLine progress = new ProgressLine(terminal, folder, job.aimUnit());
+    try {
+      return job.run(searchSettings, progress, savedState(), interruption, repeatCommand());
+    } finally {
+      progress.end();
+      progress.save();
+    }
+  }
+
+  private @Nullable SearchState savedState() {
+    if (resume == null) {
+      return null;
+    }
+    Path file = resume.resolve(ProgressLine.STATE);
+    try {
+      return SearchStateCodec.read(Files.readString(file));
+    } catch (IOException | RuntimeException e) {
+      throw new InputException(
+          Place.of(file.toString()),
+          "holds no state to go on from; start the run again with evensun design");
+    }
+  }
+
+  private String repeatCommand() {
+    return CommandText.of("design", RunFiles.SCENARIO, settings);
   }
 }

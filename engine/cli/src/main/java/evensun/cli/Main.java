@@ -7,7 +7,9 @@ public final class Main {
 
   /** Runs one command and ends the process with its exit status. */
   public static void main(String[] args) {
-    System.exit(run(Console.system(), args));
+    int status = run(Console.system(), args);
+    Interruption.finished();
+    System.exit(status);
   }
 
   /**

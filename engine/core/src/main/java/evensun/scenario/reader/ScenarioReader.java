@@ -21,6 +21,15 @@ public final class ScenarioReader {
   }
 
   /**
+   * The text of a scenario file, unread.
+   *
+   * @throws evensun.scenario.InputException when the file cannot be read
+   */
+  public static Source source(Path file) {
+    return Sources.open(file);
+  }
+
+  /**
    * Reads a scenario that is in memory already.
    *
    * @throws evensun.scenario.InputException with everything that is wrong with it

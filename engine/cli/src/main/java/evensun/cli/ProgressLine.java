@@ -1,0 +1,91 @@
+package evensun.cli;
+
+import evensun.run.RunFolder;
+import evensun.search.Progress;
+import evensun.search.SearchListener;
+import evensun.search.SearchState;
+import evensun.search.SearchStateCodec;
+import java.io.PrintStream;
+import java.util.Locale;
+import org.jspecify.annotations.Nullable;
+
+/** Shows how a search goes, on a terminal only, and saves its state at intervals. */
+final class ProgressLine implements SearchListener {
+
+  /** Name of the saved state in a run's folder. */
+  static final String STATE = "search-state.json";
+
+  private static final long SHOW_NANOS = 200_000_000L;
+  private static final long SAVE_NANOS = 5_000_000_000L;
+
+  private final @Nullable PrintStream terminal;
+  private final RunFolder folder;
+  private final String unit;
+  private long shown = System.nanoTime();
+  private long saved = System.nanoTime();
+  private @Nullable SearchState latest;
+  private int width;
+
+  ProgressLine(@Nullable PrintStream terminal, RunFolder folder, String unit) {
+    this.terminal = terminal;
+    this.folder = folder;
+    this.unit = unit;
+  }
+
+  @Override
+  public void progress(Progress progress) {
+    long now = System.nanoTime();
+    if (terminal != null && now - shown > SHOW_NANOS) {
+      shown = now;
+      show(text(progress));
+    }
+  }
+
+  private String text(Progress progress) {
+    String left =
+        Double.isFinite(progress.leftSeconds())
+            ? ", at most %.0f s left".formatted(progress.leftSeconds())
+            : "";
+    return String.format(
+        Locale.ROOT,
+        "%s: generation %d, %d evaluations, best %.3f %s%s",
+        progress.phase(),
+        progress.generation(),
+        progress.evaluations(),
+        progress.best(),
+        unit,
+        left);
+  }
+
+  private void show(String text) {
+    String padded = text.length() < width ? text + " ".repeat(width - text.length()) : text;
+    width = text.length();
+    terminal.print("\r" + padded);
+    terminal.flush();
+  }
+
+  @Override
+  public void state(SearchState state) {
+    latest = state;
+    long now = System.nanoTime();
+    if (now - saved > SAVE_NANOS) {
+      save();
+    }
+  }
+
+  /** Saves the latest state, if there is one. */
+  void save() {
+    if (latest != null) {
+      saved = System.nanoTime();
+      folder.write(STATE, SearchStateCodec.write(latest));
+    }
+  }
+
+  /** Clears the line. */
+  void end() {
+    if (terminal != null && width > 0) {
+      terminal.print("\r" + " ".repeat(width) + "\r");
+      terminal.flush();
+    }
+  }
+}

@@ -1,0 +1,50 @@
+package evensun.cli;
+
+import evensun.scenario.InputException;
+import evensun.scenario.Place;
+import evensun.scenario.Scenario;
+import evensun.scenario.Source;
+import evensun.scenario.reader.ScenarioReader;
+import evensun.scenario.reader.Setting;
+import java.io.IOException;
+import java.io.InputStream;
+import java.nio.charset.StandardCharsets;
+import java.nio.file.Path;
+import java.util.List;
+
+/** Reads the scenario that a command names: a file, or standard input for {@code -}. */
+final class ScenarioInput {
+
+  private static final int LARGEST_BYTES = 16 << 20;
+
+  private ScenarioInput() {}
+
+  static Scenario read(String argument, List<String> settings, InputStream in) {
+    List<Setting> parsed = settings.stream().map(text -> Setting.parse("--set", text)).toList();
+    return ScenarioReader.read(source(argument, in), parsed);
+  }
+
+  static Source source(String argument, InputStream in) {
+    if (!argument.equals("-")) {
+      return ScenarioReader.source(Path.of(argument));
+    }
+    try {
+      byte[] bytes = in.readNBytes(LARGEST_BYTES);
+      return new Source(
+          "<standard input>",
+          Path.of("").toAbsolutePath(),
+          new String(bytes, StandardCharsets.UTF_8));
+    } catch (IOException e) {
+      throw new InputException(Place.of("<standard input>"), "cannot be read: " + e.getMessage());
+    }
+  }
+
+  /** Name for a run's folder: the scenario's file name without its ending. */
+  static String runName(Scenario scenario) {
+    if (scenario.source().name().startsWith("<")) {
+      return "scenario";
+    }
+    String name = Path.of(scenario.source().name()).getFileName().toString();
+    return name.replaceFirst("\\.(ya?ml|json)$", "");
+  }
+}

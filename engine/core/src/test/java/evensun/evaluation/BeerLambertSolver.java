@@ -1,0 +1,93 @@
+package evensun.evaluation;
+
+import evensun.spi.Channel;
+import evensun.spi.Design;
+import evensun.spi.EvaluationFailed;
+import evensun.spi.Evaluator;
+import evensun.spi.OpticalSolver;
+import evensun.spi.PreparedSolver;
+import evensun.spi.Problem;
+import evensun.spi.Response;
+import evensun.spi.Services;
+import evensun.spi.Traits;
+import java.util.List;
+import java.util.Set;
+import java.util.stream.IntStream;
+
+/**
+ * One pass through the stack without any reflection, A = 1 − exp(−4πkd/λ) of what arrives: simple
+ * enough that every current has a closed form.
+ */
+final class BeerLambertSolver implements OpticalSolver {
+
+  /** Light that the solver loses on purpose, to break its ledger. */
+  double lost;
+
+  /** Thickness of the first layer above which it refuses a design. */
+  double refuseAboveNm = Double.POSITIVE_INFINITY;
+
+  @Override
+  public String id() {
+    return "beer-lambert";
+  }
+
+  @Override
+  public Traits traits() {
+    return new Traits(Set.of(), Set.of(), true, true, false);
+  }
+
+  @Override
+  public PreparedSolver prepare(Problem problem, Design start, Services services) {
+    List<Channel> channels =
+        IntStream.range(0, problem.layerCount()).mapToObj(Channel::of).toList();
+    return new PreparedSolver() {
+      @Override
+      public List<Channel> channels() {
+        return channels;
+      }
+
+      @Override
+      public Evaluator newEvaluator() {
+        return (design, into) -> evaluate(problem, design, into);
+      }
+    };
+  }
+
+  private void evaluate(Problem problem, Design design, Response into) {
+    if (design.thicknessNm[0] > refuseAboveNm) {
+      throw new EvaluationFailed("too thick for this solver");
+    }
+    int channels = problem.layerCount();
+    if (into.sum != null) {
+      java.util.Arrays.fill(into.sum, 0);
+    }
+    for (int w = 0; w < problem.wavelengthCount(); w++) {
+      double left = 1;
+      for (int l = 0; l < channels; l++) {
+        double k = design.k[design.material[l]][w];
+        double pass =
+            Math.exp(-4 * Math.PI * k * design.thicknessNm[l] / problem.wavelengthNm().at(w));
+        add(into, l, w, channels, left * (1 - pass));
+        left *= pass;
+      }
+      if (into.transmittance != null) {
+        into.transmittance[0][w] = left - lost;
+      }
+      for (int s = 0; into.sum != null && s < into.sum.length; s++) {
+        if (into.transmittanceWeight != null && into.transmittanceWeight[s] != null) {
+          into.sum[s] += left * into.transmittanceWeight[s][w];
+        }
+      }
+    }
+  }
+
+  private static void add(Response into, int layer, int w, int channels, double share) {
+    if (into.absorptance != null) {
+      into.absorptance[layer][w] = share;
+    }
+    for (int s = 0; into.sum != null && s < into.sum.length; s++) {
+      double[] weight = into.weight[s * channels + layer];
+      into.sum[s] += weight == null ? 0 : share * weight[w];
+    }
+  }
+}

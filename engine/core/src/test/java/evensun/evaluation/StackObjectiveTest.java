@@ -1,0 +1,80 @@
+package evensun.evaluation;
+
+import static org.assertj.core.api.Assertions.assertThat;
+
+import evensun.search.Objective;
+import evensun.search.Variable;
+import evensun.search.Verdict;
+import java.util.List;
+import org.junit.jupiter.api.Test;
+
+class StackObjectiveTest {
+
+  private static StackObjective objective(Model model, Aim aim) {
+    Parameter upper = Parameter.of("upper.thicknessNm", model.stack()).orElseThrow();
+    return new StackObjective(
+        model, List.of(upper), List.of(new Variable(upper.key(), "nm", 0, 2000, 0, 300)), aim);
+  }
+
+  @Test
+  void theMatchedCurrentIsTheSmallerOne() {
+    try (Model model = Cells.model(Cells.twoCells(300, 900), new BeerLambertSolver());
+        Bench bench = model.newBench();
+        Objective.Worker worker = objective(model, Aim.matchedCurrent()).newWorker()) {
+      double[] currents = new double[2];
+      bench.set(Parameter.of("upper.thicknessNm", model.stack()).orElseThrow(), 500);
+      bench.currents(currents);
+      Verdict verdict = worker.judge(new double[] {500});
+      assertThat(verdict.aims()).containsExactly(Math.min(currents[0], currents[1]));
+    }
+  }
+
+  @Test
+  void theVerdictDependsOnTheValuesAlone() {
+    try (Model model = Cells.model(Cells.twoCells(300, 900), new BeerLambertSolver());
+        Objective.Worker worker = objective(model, Aim.currentSum()).newWorker()) {
+      Verdict first = worker.judge(new double[] {100});
+      worker.judge(new double[] {1500});
+      assertThat(worker.judge(new double[] {100})).isEqualTo(first);
+    }
+  }
+
+  @Test
+  void aDesignThatFailsCarriesItsReason() {
+    BeerLambertSolver solver = new BeerLambertSolver();
+    solver.refuseAboveNm = 1000;
+    try (Model model = Cells.model(Cells.twoCells(300, 900), solver);
+        Objective.Worker worker = objective(model, Aim.matchedCurrent()).newWorker()) {
+      assertThat(worker.judge(new double[] {1500}).failure())
+          .isEqualTo("too thick for this solver");
+      assertThat(worker.judge(new double[] {500}).isFailure()).isFalse();
+    }
+  }
+
+  @Test
+  void aBandgapIsSetOnItsLayerAlone() {
+    String yaml =
+        Cells.twoCells(300, 900)
+            .replace("name: upper, material: grey", "name: upper, material: edge, bandgapEv: 1.2")
+            .replace("name: lower, material: grey", "name: lower, material: edge");
+    try (Model model = Cells.model(yaml, new BeerLambertSolver());
+        Bench bench = model.newBench()) {
+      Parameter upper = Parameter.of("upper.bandgapEv", model.stack()).orElseThrow();
+      Parameter lower = Parameter.of("lower.bandgapEv", model.stack()).orElseThrow();
+      assertThat(upper.drawn()).isEqualTo(1.2);
+      assertThat(lower.drawn()).isEqualTo(1.5); // the material's default
+      bench.set(upper, 1.8);
+      assertThat(bench.design().k[upper.index()][0]).isEqualTo(1.8 / 100);
+      assertThat(bench.design().k[lower.index()][0]).isEqualTo(1.5 / 100);
+    }
+  }
+
+  @Test
+  void keysThatNameNothingAreNoParameters() {
+    try (Model model = Cells.model(Cells.twoCells(300, 900), new BeerLambertSolver())) {
+      assertThat(Parameter.of("nowhere.thicknessNm", model.stack())).isEmpty();
+      assertThat(Parameter.of("upper.bandgapEv", model.stack())).isEmpty(); // grey has none
+      assertThat(Parameter.of("upper", model.stack())).isEmpty();
+    }
+  }
+}
