@@ -22,7 +22,7 @@ import java.util.stream.Collectors;
 final class SearchBinder {
 
   /** Aims by the name they are written with. */
-  static final List<String> AIMS = List.of("matched-current");
+  static final List<String> AIMS = List.of("matched-current", "current-sum");
 
   private SearchBinder() {}
 
