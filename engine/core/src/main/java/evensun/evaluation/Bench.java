@@ -82,6 +82,19 @@ public final class Bench implements AutoCloseable {
     return bandgapEv[slot];
   }
 
+  /**
+   * Bandgap of each subcell's first absorber.
+   *
+   * @param into [subcell] eV, 0 where it has none
+   */
+  public void subcellGaps(double[] into) {
+    List<ResolvedSubcell> subcells = model.stack().subcells();
+    for (int s = 0; s < into.length; s++) {
+      List<ResolvedSubcell.Absorber> absorbers = subcells.get(s).absorbers();
+      into[s] = absorbers.isEmpty() ? 0 : bandgapEv[absorbers.get(0).slot()];
+    }
+  }
+
   private void setBandgap(int slot, double value) {
     if (value != bandgapEv[slot]) {
       bandgapEv[slot] = value;

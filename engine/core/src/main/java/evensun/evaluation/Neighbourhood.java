@@ -129,10 +129,7 @@ public final class Neighbourhood implements AutoCloseable {
     double[] currents = new double[subcells.size()];
     double[] gaps = new double[subcells.size()];
     bench.currents(currents);
-    for (int s = 0; s < gaps.length; s++) {
-      var absorbers = subcells.get(s).absorbers();
-      gaps[s] = absorbers.isEmpty() ? 0 : bench.bandgapEv(absorbers.get(0).slot());
-    }
+    bench.subcellGaps(gaps);
     return new Point(aim.value(currents, gaps), currents);
   }
 

@@ -4,7 +4,6 @@ import evensun.search.Objective;
 import evensun.search.Variable;
 import evensun.search.Verdict;
 import evensun.spi.EvaluationFailed;
-import evensun.stack.ResolvedSubcell;
 import java.util.List;
 
 /** A stack as the search sees it: numbers in, the aim out. */
@@ -76,7 +75,8 @@ public final class StackObjective implements Objective {
       try {
         set(values);
         bench.currents(currents);
-        double value = own.value(currents, gaps());
+        bench.subcellGaps(gaps);
+        double value = own.value(currents, gaps);
         return Double.isFinite(value)
             ? Verdict.of(value, tieBreak())
             : Verdict.failed("the solver returned a current that is no number");
@@ -89,15 +89,6 @@ public final class StackObjective implements Objective {
       for (int i = 0; i < values.length; i++) {
         bench.set(parameters.get(i), values[i]);
       }
-    }
-
-    private double[] gaps() {
-      List<ResolvedSubcell> cells = model.stack().subcells();
-      for (int s = 0; s < gaps.length; s++) {
-        var absorbers = cells.get(s).absorbers();
-        gaps[s] = absorbers.isEmpty() ? 0 : bench.bandgapEv(absorbers.get(0).slot());
-      }
-      return gaps;
     }
 
     private double tieBreak() {

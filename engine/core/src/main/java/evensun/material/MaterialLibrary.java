@@ -45,6 +45,25 @@ public final class MaterialLibrary {
     return Optional.ofNullable(fileOf.get(name)).map(LibraryFile::record);
   }
 
+  /**
+   * Other sources or preparations of the same material: names that agree up to the first dot and
+   * hold other data.
+   */
+  public List<String> alternatives(String name) {
+    String family = family(name);
+    String own = fileOf.get(name);
+    return fileOf.entrySet().stream()
+        .filter(entry -> family(entry.getKey()).equals(family) && entry.getKey().contains("."))
+        .filter(entry -> !entry.getValue().equals(own))
+        .map(Map.Entry::getKey)
+        .toList();
+  }
+
+  private static String family(String name) {
+    int dot = name.indexOf('.');
+    return dot < 0 ? name : name.substring(0, dot);
+  }
+
   /** The known name nearest to one that is not known, for a suggestion. */
   public String nearest(String name) {
     return fileOf.keySet().stream()

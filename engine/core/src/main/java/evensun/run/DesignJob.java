@@ -137,7 +137,7 @@ public final class DesignJob {
           AssessJob.angular(preparation, bench),
           around.sensitivities(),
           around.curves(),
-          null,
+          new SecondOpinions(preparation, varied, aim, best).opinions(),
           findings.records(),
           Cautions.of(preparation.stack()),
           provenance.build(spec.seed(), repeatCommand, settingsOf(settings)));

@@ -16,7 +16,8 @@ import java.util.Map;
  */
 record SolverChoice(OpticalSolver solver, Map<String, String> options) {
 
-  private static final String FLAT = "transfer-matrix";
+  /** The solver of flat stacks. */
+  static final String FLAT = "transfer-matrix";
 
   SolverChoice {
     options = Map.copyOf(options);

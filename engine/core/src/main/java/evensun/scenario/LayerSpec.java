@@ -20,6 +20,11 @@ public record LayerSpec(
     Coherence coherence,
     Place place) {
 
+  /** This layer of another material. */
+  public LayerSpec withMaterial(String other) {
+    return new LayerSpec(name, other, bandgapEv, thicknessNm, coherence, place);
+  }
+
   /** What the scenario says about interference inside a layer. */
   public enum Coherence {
     /** Nothing: coherent, and refused when its fringes are too fine for the grid. */

@@ -10,4 +10,10 @@ import java.util.OptionalDouble;
  * @param bandgapEv wanted bandgap of a tunable material, in eV
  * @param place where it stands
  */
-public record MediumSpec(String name, String material, OptionalDouble bandgapEv, Place place) {}
+public record MediumSpec(String name, String material, OptionalDouble bandgapEv, Place place) {
+
+  /** This medium of another material. */
+  public MediumSpec withMaterial(String other) {
+    return new MediumSpec(name, other, bandgapEv, place);
+  }
+}

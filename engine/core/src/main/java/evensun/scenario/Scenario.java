@@ -41,4 +41,59 @@ public record Scenario(
     stack = List.copyOf(stack);
     subcells = List.copyOf(subcells);
   }
+
+  /** This scenario on another grid. */
+  public Scenario withGrid(GridSpec other) {
+    return new Scenario(
+        source,
+        title,
+        light,
+        other,
+        materials,
+        incidentMedium,
+        stack,
+        exit,
+        subcells,
+        connection,
+        solver,
+        search);
+  }
+
+  /** This scenario with another solver. */
+  public Scenario withSolver(SolverSpec other) {
+    return new Scenario(
+        source,
+        title,
+        light,
+        grid,
+        materials,
+        incidentMedium,
+        stack,
+        exit,
+        subcells,
+        connection,
+        Optional.of(other),
+        search);
+  }
+
+  /** This scenario with one material replaced by another wherever it stands. */
+  public Scenario withMaterial(String name, String other) {
+    return new Scenario(
+        source,
+        title,
+        light,
+        grid,
+        materials,
+        incidentMedium.material().equals(name)
+            ? incidentMedium.withMaterial(other)
+            : incidentMedium,
+        stack.stream()
+            .map(layer -> layer.material().equals(name) ? layer.withMaterial(other) : layer)
+            .toList(),
+        exit.material().equals(name) ? exit.withMaterial(other) : exit,
+        subcells,
+        connection,
+        solver,
+        search);
+  }
 }

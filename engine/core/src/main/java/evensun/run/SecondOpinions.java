@@ -1,0 +1,106 @@
+package evensun.run;
+
+import evensun.evaluation.Aim;
+import evensun.evaluation.Bench;
+import evensun.evaluation.Parameter;
+import evensun.material.MaterialLibrary;
+import evensun.result.Opinion;
+import evensun.scenario.GridSpec;
+import evensun.scenario.InputException;
+import evensun.scenario.Scenario;
+import evensun.scenario.SolverSpec;
+import evensun.search.Candidate;
+import evensun.spi.EvaluationFailed;
+import evensun.spi.UnsupportedProblem;
+import evensun.stack.MaterialSlot;
+import java.util.ArrayList;
+import java.util.HashMap;
+import java.util.LinkedHashSet;
+import java.util.List;
+import java.util.Map;
+import java.util.Set;
+
+/**
+ * The found design evaluated in other ways: with a finer grid, with the solver's plain twin, and
+ * with every other library table of its materials. The differences are an error budget of what was
+ * tried, not of everything that may be wrong.
+ */
+final class SecondOpinions {
+
+  private final Preparation preparation;
+  private final Varied varied;
+  private final Aim aim;
+  private final Candidate found;
+
+  SecondOpinions(Preparation preparation, Varied varied, Aim aim, Candidate found) {
+    this.preparation = preparation;
+    this.varied = varied;
+    this.aim = aim;
+    this.found = found;
+  }
+
+  List<Opinion> opinions() {
+    List<Opinion> opinions = new ArrayList<>();
+    Scenario scenario = preparation.stack().scenario();
+    GridSpec grid = scenario.grid();
+    GridSpec finer = new GridSpec(grid.fromNm(), grid.toNm(), grid.stepNm() / 2, grid.place());
+    opinions.add(
+        opinion(
+            "numerics",
+            "half the wavelength step (" + Findings.number(finer.stepNm()) + " nm)",
+            scenario.withGrid(finer)));
+    referenceKernel(scenario, opinions);
+    Set<String> names = new LinkedHashSet<>();
+    preparation.stack().slots().stream().map(MaterialSlot::name).forEach(names::add);
+    for (String name : names) {
+      if (!scenario.materials().containsKey(name)) {
+        otherTables(name, scenario, opinions);
+      }
+    }
+    return opinions;
+  }
+
+  private void referenceKernel(Scenario scenario, List<Opinion> opinions) {
+    if (!preparation.choice().solver().id().equals(SolverChoice.FLAT)) {
+      return;
+    }
+    Map<String, String> options = new HashMap<>(preparation.choice().options());
+    options.put("kernel", "reference");
+    SolverSpec reference = new SolverSpec(SolverChoice.FLAT, options, scenario.grid().place());
+    opinions.add(
+        opinion("numerics", "the solver's reference kernel", scenario.withSolver(reference)));
+  }
+
+  private void otherTables(String name, Scenario scenario, List<Opinion> opinions) {
+    for (String other : MaterialLibrary.builtIn().alternatives(name)) {
+      opinions.add(
+          opinion("material", name + " replaced by " + other, scenario.withMaterial(name, other)));
+    }
+  }
+
+  private Opinion opinion(String kind, String what, Scenario other) {
+    try (Preparation prepared = Preparation.of(other, preparation.host(), () -> false);
+        Bench bench = prepared.model().newBench()) {
+      double value = aimOf(prepared, bench);
+      return new Opinion(kind, what, value, value - found.aim(), "");
+    } catch (InputException | EvaluationFailed | UnsupportedProblem e) {
+      return new Opinion(kind, what, null, null, String.valueOf(e.getMessage()));
+    }
+  }
+
+  private double aimOf(Preparation prepared, Bench bench) {
+    for (int v = 0; v < varied.parameters().size(); v++) {
+      String key = varied.parameters().get(v).key();
+      Parameter parameter =
+          Parameter.of(key, prepared.stack())
+              .orElseThrow(() -> new EvaluationFailed(key + " cannot be set with that table"));
+      bench.set(parameter, found.values().get(v));
+    }
+    int subcells = prepared.stack().subcells().size();
+    double[] currents = new double[subcells];
+    double[] gaps = new double[subcells];
+    bench.currents(currents);
+    bench.subcellGaps(gaps);
+    return aim.value(currents, gaps);
+  }
+}
