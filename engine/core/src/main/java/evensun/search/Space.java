@@ -105,17 +105,23 @@ final class Space {
 
   private double between(int variable, double gene) {
     Variable v = variables.get(variable);
-    double value = v.low() + gene * (v.high() - v.low());
+    double value = v.low() + gene * span(variable);
     return Math.min(v.high(), Math.max(v.low(), value));
   }
 
-  double gene(int variable, double value) {
+  /** Distance of the values at genes 0 and 1; the last step may end below the upper bound. */
+  double span(int variable) {
     Variable v = variables.get(variable);
-    if (v.high() == v.low()) {
+    double top = isStepped(variable) ? onStep(variable, stepCount[variable]) : v.high();
+    return top - v.low();
+  }
+
+  double gene(int variable, double value) {
+    double span = span(variable);
+    if (span == 0) {
       return 0;
     }
-    double top = isStepped(variable) ? onStep(variable, stepCount[variable]) : v.high();
-    return Math.min(1, Math.max(0, (value - v.low()) / (top - v.low())));
+    return Math.min(1, Math.max(0, (value - variables.get(variable).low()) / span));
   }
 
   double[] genes(double[] values) {

@@ -27,7 +27,7 @@ final class Steps {
     this.settings = settings;
     rounds = new Rounds(settings);
     genetic = new Genetic(space, settings, judges);
-    refiner = new Refiner(space, judges);
+    refiner = new Refiner(space, judges, objective.limits().size(), settings.seed());
   }
 
   SearchState advance(SearchState state) {

@@ -1,0 +1,84 @@
+package evensun.search;
+
+import java.util.Arrays;
+
+/**
+ * Climbs to a local optimum of a {@link MaxMinModel} by sequential linear programming: within a
+ * small box the functions are replaced by their tangents, the best point of the box follows from a
+ * linear program, and the box grows or shrinks with how well it was predicted. The kink at which
+ * another function becomes the smallest is thereby no obstacle (Madsen, J. Inst. Math. Appl. 16,
+ * 321 (1975)).
+ */
+final class MaxMinSolver {
+
+  /** Sides below this fraction of the whole box end the climb. */
+  private static final double SMALLEST = 2e-6;
+
+  private final MaxMinModel model;
+  private final LinearStep linear;
+  private Sample here;
+  private double radius;
+
+  /**
+   * A climb from a point.
+   *
+   * @param penalty what one unit below zero of a function to be kept costs
+   */
+  MaxMinSolver(MaxMinModel model, double[] start, double radius, double penalty) {
+    this.model = model;
+    this.radius = radius;
+    linear = new LinearStep(model.size(), model.wanted(), model.kept(), penalty);
+    here = sample(start.clone());
+  }
+
+  /** Climbs for at most so many steps and returns the best point. */
+  double[] climb(int steps) {
+    for (int i = 0; i < steps && here.usable && radius > SMALLEST; i++) {
+      step();
+    }
+    return here.point;
+  }
+
+  private void step() {
+    double[] target = linear.best(here.point, here.rows, here.gradient, radius);
+    double predicted = linear.gain();
+    if (!(predicted > 1e-9 * Math.max(1, Math.abs(here.merit)))) {
+      radius = 0;
+      return;
+    }
+    Sample there = sample(target);
+    double ratio = there.usable ? (there.merit - here.merit) / predicted : -1;
+    double length = Numbers.distance(there.point, here.point);
+    if (ratio > 0.05) {
+      here = there;
+    }
+    radius = ratio > 0.7 ? Math.min(0.5, 2 * radius) : ratio < 0.3 ? 0.4 * length : radius;
+  }
+
+  private Sample sample(double[] point) {
+    int rows = model.wanted() + model.kept();
+    Sample sample = new Sample(point, new double[rows], new double[rows][model.size()]);
+    sample.usable = model.at(point, sample.rows, sample.gradient) && sample.isFinite();
+    sample.merit = linear.merit(sample.rows);
+    return sample;
+  }
+
+  private static final class Sample {
+    final double[] point;
+    final double[] rows;
+    final double[][] gradient;
+    double merit;
+    boolean usable;
+
+    Sample(double[] point, double[] rows, double[][] gradient) {
+      this.point = point;
+      this.rows = rows;
+      this.gradient = gradient;
+    }
+
+    boolean isFinite() {
+      return Arrays.stream(rows).allMatch(Double::isFinite)
+          && Arrays.stream(gradient).flatMapToDouble(Arrays::stream).allMatch(Double::isFinite);
+    }
+  }
+}
