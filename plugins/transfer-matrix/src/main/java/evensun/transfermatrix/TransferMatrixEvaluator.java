@@ -4,6 +4,7 @@ import evensun.spi.Channel;
 import evensun.spi.DepthProfile;
 import evensun.spi.Design;
 import evensun.spi.Evaluator;
+import evensun.spi.Gradient;
 import evensun.spi.Incidence;
 import evensun.spi.Problem;
 import evensun.spi.Response;
@@ -14,11 +15,12 @@ import evensun.transfermatrix.kernel.Kernel;
 import evensun.transfermatrix.kernel.Layout;
 import evensun.transfermatrix.kernel.ReferenceKernel;
 import evensun.transfermatrix.kernel.Spectra;
+import evensun.transfermatrix.kernel.Weights;
 import java.util.Arrays;
 import java.util.Optional;
 
 /** Answers designs with a kernel of its own; allocates nothing with the fast kernel. */
-final class TransferMatrixEvaluator implements Evaluator, DepthProfile {
+final class TransferMatrixEvaluator implements Evaluator, Gradient, DepthProfile {
 
   /** Kernels keep what the materials decide for one beam; long angular tables share one kernel. */
   private static final int MOST_KERNELS = 16;
@@ -30,7 +32,9 @@ final class TransferMatrixEvaluator implements Evaluator, DepthProfile {
   private final Incidence[] incidences;
   private final Beam[] beams;
   private final Kernel[] kernels; // [i] one per incidence, the last for all further ones
+  private final boolean differentiable;
   private final Spectra rows;
+  private Weights weights; // made when the first gradient is asked for
   private final double[] transmittance;
   private final double[][] absorptance;
 
@@ -42,6 +46,7 @@ final class TransferMatrixEvaluator implements Evaluator, DepthProfile {
     incidences = problem.incidences().toArray(new Incidence[0]);
     beams = Arrays.stream(incidences).map(Stack::beam).toArray(Beam[]::new);
     kernels = kernels(kind);
+    differentiable = kind == Options.KernelKind.FAST;
     rows = new Spectra(layers);
     transmittance = new double[wavelengths];
     absorptance = new double[layers][wavelengths];
@@ -66,7 +71,53 @@ final class TransferMatrixEvaluator implements Evaluator, DepthProfile {
   @Override
   public void evaluate(Design design, Response into) {
     stack.check(design);
-    for (int i = 0; i < incidences.length; i++) {
+    solveFrom(0, design, into);
+  }
+
+  /**
+   * {@inheritDoc}
+   *
+   * <p>The derivative by a coherent layer of zero thickness is that from above; an incoherent one
+   * appears at once, so its derivative is given as 0.
+   */
+  @Override
+  public void evaluate(Design design, Response response, double[] into) {
+    if (response.sum == null) {
+      throw new IllegalArgumentException("a gradient needs a response that wants sums");
+    }
+    stack.check(design);
+    want(response, 0);
+    clearAbsent(design);
+    setWeights(response);
+    ((FastKernel) kernel(0))
+        .differentiate(
+            stack.layout(design, incidences[0].side(), true),
+            beams[0],
+            design.n,
+            design.k,
+            design.revision,
+            rows,
+            weights,
+            into);
+    sum(response);
+    solveFrom(1, design, response);
+  }
+
+  private void setWeights(Response response) {
+    int sums = response.sum.length;
+    if (weights == null || weights.sums != sums) {
+      weights = new Weights(sums, layers);
+    }
+    for (int s = 0; s < sums; s++) {
+      for (int l = 0; l < layers; l++) {
+        weights.absorptance[s][l] = row(response.weight, s * layers + l);
+      }
+      weights.transmittance[s] = row(response.transmittanceWeight, s);
+    }
+  }
+
+  private void solveFrom(int first, Design design, Response into) {
+    for (int i = first; i < incidences.length; i++) {
       want(into, i);
       if (wantsAnything()) {
         Layout layout = stack.layout(design, incidences[i].side(), false);
@@ -175,6 +226,7 @@ final class TransferMatrixEvaluator implements Evaluator, DepthProfile {
 
   @Override
   public <A> Optional<A> ability(Class<A> type) {
-    return type == DepthProfile.class ? Optional.of(type.cast(this)) : Optional.empty();
+    boolean offered = type == DepthProfile.class || (type == Gradient.class && differentiable);
+    return offered ? Optional.of(type.cast(this)) : Optional.empty();
   }
 }

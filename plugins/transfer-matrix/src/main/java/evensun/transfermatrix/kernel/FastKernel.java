@@ -1,5 +1,7 @@
 package evensun.transfermatrix.kernel;
 
+import java.util.Arrays;
+
 /**
  * The kernel for searches: loops over wavelengths that the JIT compiler turns into vector
  * instructions, nothing allocated per design, and what materials decide kept while they stay.
@@ -18,6 +20,7 @@ public final class FastKernel implements Kernel {
   private final Optics s;
   private final Optics p;
   private final Intensities stack;
+  private StackGradient gradient; // made when first asked for
 
   /**
    * A kernel with its workspaces.
@@ -58,5 +61,36 @@ public final class FastKernel implements Kernel {
     optics.refresh(layout);
     stack.solve(optics, share, into);
     stack.report(optics, add, into);
+  }
+
+  /**
+   * Fills the wanted rows and finds the derivatives of weighted sums.
+   *
+   * @param into rows to fill; those of weighted layers must be wanted
+   * @param derivative [s*L + l] derivative of sum s by the thickness of layer l, per nm
+   */
+  public void differentiate(
+      Layout layout,
+      Beam beam,
+      double[][] n,
+      double[][] k,
+      long[] revision,
+      Spectra into,
+      Weights weights,
+      double[] derivative) {
+    Arrays.fill(derivative, 0, weights.sums * layers, 0);
+    if (gradient == null) {
+      gradient = new StackGradient(stack, layers, thickLayers, wavelengths);
+    }
+    media.refresh(layout, beam, n, k, revision);
+    phases.refresh(layout, media);
+    if (beam.s() > 0) {
+      solve(s, layout, beam.s(), false, into);
+      gradient.add(s, weights, layers, derivative);
+    }
+    if (beam.p() > 0) {
+      solve(p, layout, beam.p(), beam.s() > 0, into);
+      gradient.add(p, weights, layers, derivative);
+    }
   }
 }
