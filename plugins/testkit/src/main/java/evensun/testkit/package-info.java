@@ -1,2 +1,5 @@
-/** The testkit part of the plugins. */
+/**
+ * The laws that every solver of the contract obeys, as plain Java: each has a name, a promise, and
+ * a check that ends with the smallest case that breaks it.
+ */
 package evensun.testkit;

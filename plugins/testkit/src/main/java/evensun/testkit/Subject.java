@@ -1,0 +1,91 @@
+package evensun.testkit;
+
+import evensun.spi.Evaluator;
+import evensun.spi.OpticalSolver;
+import evensun.spi.PreparedSolver;
+import evensun.spi.Problem;
+import evensun.spi.Response;
+import evensun.spi.Services;
+import java.util.Optional;
+
+/**
+ * The solver on trial.
+ *
+ * @param solver the solver
+ * @param services what the host would offer it
+ */
+public record Subject(OpticalSolver solver, Services services) {
+
+  /** A solver that needs no other. */
+  public static Subject alone(OpticalSolver solver) {
+    return new Subject(solver, noServices());
+  }
+
+  /** Services without any other solver, never cancelled. */
+  public static Services noServices() {
+    return with();
+  }
+
+  /** Services with some other solvers, never cancelled. */
+  public static Services with(OpticalSolver... others) {
+    return new Services() {
+      @Override
+      public Optional<OpticalSolver> solver(String id) {
+        for (OpticalSolver other : others) {
+          if (other.id().equals(id)) {
+            return Optional.of(other);
+          }
+        }
+        return Optional.empty();
+      }
+
+      @Override
+      public boolean cancelled() {
+        return false;
+      }
+    };
+  }
+
+  /** Prepares for one case. */
+  PreparedSolver prepare(StackCase stack) {
+    return solver.prepare(stack.problem(), stack.design(), services);
+  }
+
+  /** Prepares, evaluates once and releases everything. */
+  Answer answer(StackCase stack) {
+    try (PreparedSolver prepared = prepare(stack);
+        Evaluator evaluator = prepared.newEvaluator()) {
+      Response response = spectra(prepared, stack);
+      evaluator.evaluate(stack.design(), response);
+      return answer(prepared, response, stack);
+    }
+  }
+
+  /** A response that wants every spectrum, and errors where there may be some. */
+  Response spectra(PreparedSolver prepared, StackCase stack) {
+    int channels = prepared.channels().size();
+    int wavelengths = stack.wavelengthCount();
+    Response response = Response.spectra(1, channels, wavelengths);
+    if (solver.traits().statistical()) {
+      response.absorptanceStandardError = new double[channels][wavelengths];
+    }
+    return response;
+  }
+
+  /** What stands in a response, by layer. */
+  Answer answer(PreparedSolver prepared, Response response, StackCase stack) {
+    return Answer.of(response, prepared.channels(), stack.layerCount(), stack.wavelengthCount());
+  }
+
+  /** Whether the solver claims the case; refusing what it does not claim is its right. */
+  boolean claims(StackCase stack) {
+    boolean thick = stack.layers().stream().anyMatch(layer -> !layer.coherent());
+    return (solver.traits().oblique() || stack.angleDeg() == 0)
+        && (solver.traits().incoherent() || !thick);
+  }
+
+  /** Prepares any problem with the first design of a case. */
+  PreparedSolver prepare(Problem problem, StackCase start) {
+    return solver.prepare(problem, start.design(), services);
+  }
+}
