@@ -1,16 +1,30 @@
 package evensun.report;
 
-import evensun.result.ResultJson;
 import evensun.result.RunResult;
+import gg.jte.ContentType;
+import gg.jte.TemplateEngine;
+import gg.jte.output.StringOutput;
+import java.util.Map;
 
-/** Writes the design-review page of a result. */
+/** Writes the report of a run: one HTML file that needs nothing else. Safe for threads. */
 public final class ReportWriter {
+
+  /** Where the templates were compiled to. */
+  static final String TEMPLATES = "evensun.report.template";
 
   private ReportWriter() {}
 
-  /** The page as HTML text; the bare data until the page is designed. */
+  /** The page, a function of the result alone. */
   public static String write(RunResult result) {
-    String json = ResultJson.write(result).replace("&", "&amp;").replace("<", "&lt;");
-    return "<!doctype html><meta charset=\"utf-8\"><title>Evensun</title><pre>" + json + "</pre>\n";
+    StringOutput output = new StringOutput();
+    engine()
+        .render(
+            "report.jte", Map.of("page", ReportPages.of(result), "assets", Assets.get()), output);
+    return output.toString();
+  }
+
+  private static TemplateEngine engine() {
+    return TemplateEngine.createPrecompiled(
+        null, ContentType.Html, ReportWriter.class.getClassLoader(), TEMPLATES);
   }
 }

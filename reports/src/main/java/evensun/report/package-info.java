@@ -1,4 +1,4 @@
-/** The report package. */
+/** What others call: a run's results in, an HTML page or a closing summary out. */
 @NullMarked
 package evensun.report;
 

@@ -1,0 +1,230 @@
+package evensun.report.chart;
+
+import evensun.report.figure.Canvas;
+import evensun.report.figure.Drawing;
+import evensun.report.figure.Figure;
+import evensun.report.figure.Path;
+import evensun.report.figure.Shape.Anchor;
+import evensun.report.figure.Ticks;
+import evensun.report.text.Clip;
+import evensun.report.text.Numbers;
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import org.jspecify.annotations.Nullable;
+
+/**
+ * Draws a chart as plain shapes.
+ *
+ * @param chart what to draw
+ */
+record ChartDrawing(Chart chart) implements Figure.Sketch {
+
+  private static final double TOP = 26;
+  private static final double BOTTOM = 44;
+  private static final double LEFT = 58;
+  private static final double LABEL_ROOM_PX = 17;
+
+  /** The inner frame in px. */
+  private record Frame(Chart chart, double left, double top, double width, double height) {
+
+    double x(double value) {
+      return left + chart.x().fraction(value) * width;
+    }
+
+    double y(double value) {
+      double fraction = Math.max(-0.02, Math.min(1.02, chart.y().fraction(value)));
+      return top + height - fraction * height;
+    }
+
+    double bottom() {
+      return top + height;
+    }
+
+    double right() {
+      return left + width;
+    }
+  }
+
+  @Override
+  public Drawing draw(double widthPx) {
+    boolean wide = widthPx > 600;
+    double high = wide ? 330 : 250;
+    double right = chart.kind() == Kind.LINES && wide ? 150 : 14;
+    Canvas canvas = new Canvas(widthPx);
+    Frame frame = new Frame(chart, LEFT, TOP, widthPx - LEFT - right, high - TOP - BOTTOM);
+    axes(canvas, frame, wide);
+    switch (chart.kind()) {
+      case STACK -> stack(canvas, frame, wide);
+      case LINES -> lines(canvas, frame, wide);
+      case POINTS -> points(canvas, frame);
+    }
+    marks(canvas, frame);
+    canvas.stroke(frame.left(), frame.bottom(), frame.right(), frame.bottom(), "axis");
+    return canvas.drawing(high);
+  }
+
+  private void axes(Canvas canvas, Frame frame, boolean wide) {
+    for (double tick : ticks(chart.y(), 5)) {
+      double y = frame.y(tick);
+      canvas.stroke(frame.left(), y, frame.right(), y, "grid");
+      canvas.label(frame.left() - 8, y + 4, text(chart.y(), tick, 5), Anchor.END, "tick");
+    }
+    int wanted = wide ? 9 : 4;
+    for (double tick : ticks(chart.x(), wanted)) {
+      double x = frame.x(tick);
+      canvas.stroke(x, frame.bottom(), x, frame.bottom() + 5, "axis");
+      canvas.label(
+          x, frame.bottom() + 19, text(chart.x(), tick, wanted), Anchor.MIDDLE, "tick");
+    }
+    canvas.label(0, 13, chart.y().title(), Anchor.START, "axis-name");
+    canvas.label(
+        frame.right(), frame.bottom() + 37, chart.x().title(), Anchor.END, "axis-name");
+  }
+
+  private static List<Double> ticks(Axis axis, int wanted) {
+    if (!axis.logarithmic()) {
+      return Ticks.of(axis.min(), axis.max(), wanted);
+    }
+    List<Double> ticks = new ArrayList<>();
+    double from = Math.ceil(Math.log10(axis.min()) - 1e-9);
+    double to = Math.floor(Math.log10(axis.max()) + 1e-9);
+    double step = Math.max(1, Math.ceil((to - from) / wanted));
+    for (double power = from; power <= to; power += step) {
+      ticks.add(Math.pow(10, power));
+    }
+    return ticks;
+  }
+
+  private static String text(Axis axis, double tick, int wanted) {
+    return axis.logarithmic()
+        ? Numbers.significant(tick, 2)
+        : Numbers.fixed(tick, Ticks.decimals(Ticks.step(axis.min(), axis.max(), wanted)));
+  }
+
+  private void stack(Canvas canvas, Frame frame, boolean wide) {
+    double[] base = new double[chart.xs().size()];
+    for (Series row : chart.series()) {
+      double[] top = new double[base.length];
+      Path path = new Path();
+      for (int i = 0; i < base.length; i++) {
+        top[i] = base[i] + orZero(row.values().get(i));
+        point(path, i, frame.x(chart.xs().get(i)), frame.y(top[i]));
+      }
+      for (int i = base.length - 1; i >= 0; i--) {
+        path.line(frame.x(chart.xs().get(i)), frame.y(base[i]));
+      }
+      canvas.outline(path.close(), "part fill-" + row.role(), row.label());
+      base = top;
+    }
+    stackLabels(canvas, frame, wide);
+  }
+
+  private static double orZero(@Nullable Double value) {
+    return value == null ? 0 : value;
+  }
+
+  private static void point(Path path, int index, double x, double y) {
+    if (index == 0) {
+      path.move(x, y);
+    } else {
+      path.line(x, y);
+    }
+  }
+
+  /** Names each area where it is thickest, if it is thick enough there. */
+  private void stackLabels(Canvas canvas, Frame frame, boolean wide) {
+    double[] base = new double[chart.xs().size()];
+    for (Series row : chart.series()) {
+      int best = -1;
+      double thickest = 0;
+      for (int i = 0; i < base.length; i++) {
+        double x = frame.x(chart.xs().get(i));
+        double room = Math.min(x - frame.left(), frame.right() - x);
+        double thick = frame.y(base[i]) - frame.y(base[i] + orZero(row.values().get(i)));
+        double score = Math.min(thick, 60) + Math.min(0, room - 50);
+        if (score > thickest) {
+          thickest = score;
+          best = i;
+        }
+      }
+      if (best >= 0 && thickest > LABEL_ROOM_PX) {
+        double middle = base[best] + orZero(row.values().get(best)) / 2;
+        String text = Clip.to(row.label(), wide ? 34 : 16);
+        double x = frame.x(chart.xs().get(best));
+        canvas.label(x, frame.y(middle) + 4, text, Anchor.MIDDLE, "part-name on-" + row.role());
+      }
+      for (int i = 0; i < base.length; i++) {
+        base[i] += orZero(row.values().get(i));
+      }
+    }
+  }
+
+  private record End(Series row, double y) {}
+
+  private void lines(Canvas canvas, Frame frame, boolean wide) {
+    List<End> ends = new ArrayList<>();
+    for (Series row : chart.series()) {
+      Path path = new Path();
+      boolean pen = false;
+      double lastY = Double.NaN;
+      for (int i = 0; i < chart.xs().size(); i++) {
+        Double value = row.values().get(i);
+        if (value == null) {
+          pen = false;
+          continue;
+        }
+        lastY = frame.y(value);
+        point(path, pen ? 1 : 0, frame.x(chart.xs().get(i)), lastY);
+        pen = true;
+      }
+      canvas.outline(path, "line line-" + row.role() + (row.dashed() ? " dashed" : ""), row.label());
+      if (!Double.isNaN(lastY)) {
+        ends.add(new End(row, lastY));
+      }
+    }
+    if (wide) {
+      endLabels(canvas, frame, ends);
+    }
+  }
+
+  private static void endLabels(Canvas canvas, Frame frame, List<End> ends) {
+    List<End> sorted = ends.stream().sorted(Comparator.comparingDouble(End::y)).toList();
+    double edge = frame.top() - 8;
+    for (End end : sorted) {
+      double y = Math.max(end.y(), edge + 14);
+      edge = y;
+      String text = Clip.to(end.row().label(), 20);
+      canvas.label(frame.right() + 8, y + 4, text, Anchor.START, "part-name ink-" + end.row().role());
+    }
+  }
+
+  private void points(Canvas canvas, Frame frame) {
+    for (Series row : chart.series()) {
+      for (int i = 0; i < chart.xs().size(); i++) {
+        Double value = row.values().get(i);
+        if (value != null) {
+          double x = frame.x(chart.xs().get(i));
+          canvas.box(x - 3.5, frame.y(value) - 3.5, 7, 7, "dot fill-" + row.role(), row.label());
+        }
+      }
+    }
+  }
+
+  private void marks(Canvas canvas, Frame frame) {
+    for (Mark mark : chart.marks()) {
+      double x = frame.x(mark.x());
+      if (x < frame.left() - 1 || x > frame.right() + 1) {
+        continue;
+      }
+      canvas.stroke(x, frame.top() - 4, x, frame.bottom(), "mark");
+      boolean left = x > (frame.left() + frame.right()) / 2;
+      canvas.label(
+          x + (left ? -5 : 5),
+          frame.top() - 8,
+          mark.label(),
+          left ? Anchor.END : Anchor.START,
+          "tick halo");
+    }
+  }
+}

@@ -1,0 +1,61 @@
+package evensun.report.decision;
+
+import evensun.report.text.Clip;
+import evensun.report.text.Keys;
+import evensun.report.text.Numbers;
+import evensun.result.SearchRecord.VariableRecord;
+import java.util.ArrayList;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+
+/** The varied quantities as a person at the deposition tool says them. */
+final class Deposit {
+
+  private static final int MOST_PHRASES = 5;
+  private static final int MOST_LETTERS = 40;
+
+  private Deposit() {}
+
+  /** Such as {@code 92 nm antireflection, 431.2 nm perovskite of 1.680 eV}. */
+  static String phrase(List<VariableRecord> variables) {
+    Map<String, List<VariableRecord>> byLayer = new LinkedHashMap<>();
+    for (VariableRecord variable : variables) {
+      byLayer.computeIfAbsent(Keys.layer(variable.key()), k -> new ArrayList<>()).add(variable);
+    }
+    List<String> phrases = new ArrayList<>();
+    byLayer.forEach((layer, values) -> phrases.add(layer(layer, values)));
+    if (phrases.size() > MOST_PHRASES) {
+      int more = phrases.size() - MOST_PHRASES + 1;
+      return String.join(", ", phrases.subList(0, MOST_PHRASES - 1))
+          + " and "
+          + more
+          + " more layers";
+    }
+    return joined(phrases);
+  }
+
+  private static String layer(String layer, List<VariableRecord> values) {
+    StringBuilder text = new StringBuilder(Clip.to(layer, MOST_LETTERS));
+    for (VariableRecord value : values) {
+      if (Keys.isThickness(value.key())) {
+        text.insert(0, Numbers.thickness(value.found()) + " ");
+      } else if (Keys.isBandgap(value.key())) {
+        text.append(" of ").append(Numbers.quantity(value.found(), "eV"));
+      } else {
+        text.append(" with ")
+            .append(Keys.property(value.key()))
+            .append(' ')
+            .append(Numbers.quantity(value.found(), value.unit()));
+      }
+    }
+    return text.toString();
+  }
+
+  private static String joined(List<String> phrases) {
+    int last = phrases.size() - 1;
+    return last < 1
+        ? String.join("", phrases)
+        : String.join(", ", phrases.subList(0, last)) + " and " + phrases.get(last);
+  }
+}

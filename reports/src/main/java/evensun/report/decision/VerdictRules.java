@@ -1,0 +1,144 @@
+package evensun.report.decision;
+
+import evensun.report.page.Verdict;
+import evensun.report.page.Verdict.Level;
+import evensun.report.text.Clip;
+import evensun.report.text.Keys;
+import evensun.report.text.Numbers;
+import evensun.result.FindingRecord;
+import evensun.result.Opinion;
+import evensun.result.RunResult;
+import evensun.result.SearchRecord;
+import evensun.result.SearchRecord.VariableRecord;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Objects;
+
+/** The verdict, by rules that the page states. */
+public final class VerdictRules {
+
+  private static final double NUMERICS_FRACTION = 0.0025;
+  private static final int MOST_LETTERS = 400;
+
+  private VerdictRules() {}
+
+  /** The rules in words, as the page shows them. */
+  public static List<String> rules() {
+    return List.of(
+        "“Do not decide on this” if a finding is serious, if there are no currents, or if the search"
+            + " could evaluate no design.",
+        "“Decide after checking these points” if a finding is a warning, if the search stopped"
+            + " before it had converged, if a found value stands on its bound, if another way to"
+            + " compute the same design moves the aim by more than 0.25 %, or if another source of a"
+            + " material takes away more than the gain over as drawn.",
+        "“Fit to decide on” otherwise: within the assumptions listed below, nothing speaks against"
+            + " it.");
+  }
+
+  /** The verdict on a result. */
+  public static Verdict of(RunResult result) {
+    List<String> against = against(result);
+    if (!against.isEmpty()) {
+      return new Verdict(Level.DO_NOT, against);
+    }
+    List<String> points = points(result);
+    return new Verdict(points.isEmpty() ? Level.FIT : Level.CHECK, points);
+  }
+
+  private static List<String> against(RunResult result) {
+    List<String> reasons = new ArrayList<>(findings(result, "serious"));
+    if (result.found().incidentMaPerCm2() == null) {
+      reasons.add("A single wavelength carries no current.");
+    }
+    SearchRecord search = result.search();
+    if (search != null && Sentence.failed(search)) {
+      reasons.add("The search could evaluate no design.");
+    }
+    return reasons;
+  }
+
+  private static List<String> points(RunResult result) {
+    List<String> points = new ArrayList<>(findings(result, "warning"));
+    SearchRecord search = result.search();
+    if (search != null) {
+      stopped(search).ifPresent(points::add);
+      search.variables().stream()
+          .filter(variable -> variable.bound() != null)
+          .filter(variable -> !named(result, variable))
+          .map(VerdictRules::bound)
+          .forEach(points::add);
+      opinions(result, search, points);
+    }
+    return points;
+  }
+
+  private static List<String> findings(RunResult result, String severity) {
+    return result.findings().stream()
+        .filter(finding -> finding.severity().equals(severity))
+        .map(VerdictRules::words)
+        .toList();
+  }
+
+  private static String words(FindingRecord finding) {
+    String where = Clip.to(finding.where(), 60);
+    String message = Clip.to(finding.message(), MOST_LETTERS);
+    return where.isEmpty() || message.contains(where) ? message : where + ": " + message;
+  }
+
+  private static java.util.Optional<String> stopped(SearchRecord search) {
+    return switch (search.stopped()) {
+      case "converged" -> java.util.Optional.empty();
+      case "evaluations" ->
+          java.util.Optional.of(
+              "The search spent its "
+                  + Numbers.count(search.evaluations(), "evaluation")
+                  + " before it had converged.");
+      case "time" -> java.util.Optional.of("The search ran out of time before it had converged.");
+      case "interrupted" -> java.util.Optional.of("The search was interrupted.");
+      default -> java.util.Optional.of("The search stopped: " + search.stopped() + ".");
+    };
+  }
+
+  /** Whether a finding already says something about a variable's bound. */
+  private static boolean named(RunResult result, VariableRecord variable) {
+    return result.findings().stream()
+        .anyMatch(
+            finding ->
+                finding.code().contains("bound")
+                    && (finding.where().contains(Keys.layer(variable.key()))
+                        || finding.message().contains(Keys.layer(variable.key()))));
+  }
+
+  private static String bound(VariableRecord variable) {
+    boolean low = "low".equals(variable.bound());
+    return Clip.to(Keys.words(variable.key()), 60)
+        + " stands on its "
+        + (low ? "lower" : "upper")
+        + " bound of "
+        + Numbers.quantity(low ? variable.low() : variable.high(), variable.unit())
+        + "; a wider range may do better.";
+  }
+
+  private static void opinions(RunResult result, SearchRecord search, List<String> points) {
+    double gain =
+        search.aimFound() - Objects.requireNonNullElse(search.aimAsDrawn(), search.aimFound());
+    for (Opinion opinion : Objects.requireNonNullElse(result.secondOpinion(), List.<Opinion>of())) {
+      Double difference = opinion.difference();
+      if (difference == null) {
+        continue;
+      }
+      boolean numerics = opinion.kind().equals("numerics");
+      boolean large =
+          numerics
+              ? Math.abs(difference) > NUMERICS_FRACTION * Math.abs(search.aimFound())
+              : gain > 0 && -difference > gain;
+      if (large) {
+        points.add(
+            Clip.to(opinion.what(), 120)
+                + " moves the aim by "
+                + Numbers.change(difference, search.aimUnit())
+                + (numerics ? "." : ", more than the gain over as drawn."));
+      }
+    }
+  }
+}

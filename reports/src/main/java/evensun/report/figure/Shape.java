@@ -1,0 +1,60 @@
+package evensun.report.figure;
+
+/** A shape of a drawing. Coordinates in px of its frame; {@code look} is a class of the style sheet. */
+public sealed interface Shape {
+
+  /** Class of the style sheet that gives colour and stroke. */
+  String look();
+
+  /**
+   * A rectangle.
+   *
+   * @param note shown on hover, empty for none
+   */
+  record Box(double x, double y, double width, double height, String look, String note)
+      implements Shape {
+
+    /** Never a negative size, which browsers report as an error. */
+    public Box {
+      width = Math.max(0, width);
+      height = Math.max(0, height);
+    }
+  }
+
+  /** A straight line. */
+  record Stroke(double x1, double y1, double x2, double y2, String look) implements Shape {}
+
+  /**
+   * A path.
+   *
+   * @param path commands of an SVG path, numbers and letters only
+   * @param note shown on hover, empty for none
+   */
+  record Outline(String path, String look, String note) implements Shape {
+
+    private static final java.util.regex.Pattern PATH =
+        java.util.regex.Pattern.compile("[MLHVZ0-9 .,-]*");
+
+    /** Refuses what is no path. */
+    public Outline {
+      if (!PATH.matcher(path).matches()) {
+        throw new IllegalArgumentException("not a path: " + path);
+      }
+    }
+  }
+
+  /** Where a text is anchored. */
+  enum Anchor {
+    START,
+    MIDDLE,
+    END;
+
+    /** As SVG spells it. */
+    public String css() {
+      return name().toLowerCase(java.util.Locale.ROOT);
+    }
+  }
+
+  /** A line of text. */
+  record Label(double x, double y, String text, Anchor anchor, String look) implements Shape {}
+}

@@ -1,0 +1,24 @@
+package evensun.report.figure;
+
+/**
+ * A part of the available light.
+ *
+ * @param label as shown to people
+ * @param role class of the style sheet: {@code sub1}, …, {@code reflected}, {@code parasitic}, {@code
+ *     exit}
+ * @param maPerCm2 mA cm⁻²
+ */
+public record Share(String label, String role, double maPerCm2) {
+
+  private static final int SUBCELL_ROLES = 6;
+
+  /** The role of a subcell, from 0 in the light's order. */
+  public static String subcellRole(int index) {
+    return "sub" + (index % SUBCELL_ROLES + 1);
+  }
+
+  /** Whether this light is collected. */
+  public boolean collected() {
+    return role.startsWith("sub");
+  }
+}

@@ -1,0 +1,199 @@
+package evensun.report.section;
+
+import evensun.report.chart.Axis;
+import evensun.report.chart.Chart;
+import evensun.report.chart.Kind;
+import evensun.report.chart.Series;
+import evensun.report.page.Block;
+import evensun.report.page.Section;
+import evensun.report.page.Table;
+import evensun.report.text.Keys;
+import evensun.report.text.Numbers;
+import evensun.result.RunResult;
+import evensun.result.SearchRecord;
+import evensun.result.SearchRecord.ConstraintRecord;
+import evensun.result.SearchRecord.Front;
+import evensun.result.SearchRecord.Generation;
+import evensun.result.SearchRecord.Optimum;
+import evensun.result.SearchRecord.VariableRecord;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+
+/** How the search found it. */
+public final class SearchSection {
+
+  private SearchSection() {}
+
+  /** The section; absent when nothing was searched. */
+  public static Optional<Section> of(RunResult result) {
+    SearchRecord search = result.search();
+    if (search == null) {
+      return Optional.empty();
+    }
+    List<Block> blocks = new ArrayList<>();
+    blocks.add(new Block.Prose(story(search)));
+    search.notes().forEach(note -> blocks.add(new Block.Prose(note)));
+    if (search.history().size() > 1) {
+      blocks.add(Tables.plot(convergence(search)));
+    }
+    if (search.optima().size() > 1) {
+      blocks.add(new Block.Grid(optima(search), false));
+    }
+    if (!search.constraints().isEmpty()) {
+      blocks.add(new Block.Grid(constraints(search), false));
+    }
+    Front front = search.front();
+    if (front != null && front.points().size() > 1 && front.aims().size() > 1) {
+      front(search, front, blocks);
+    }
+    return Optional.of(new Section("search", "Search", heading(search), blocks));
+  }
+
+  private static String heading(SearchRecord search) {
+    String tried = Numbers.count(search.evaluations(), "evaluation");
+    return switch (search.stopped()) {
+      case "converged" -> "The search converged after " + tried;
+      case "evaluations" -> "The search spent its budget of " + tried;
+      case "time" -> "The search ran out of time after " + tried;
+      case "interrupted" -> "The search was interrupted after " + tried;
+      default -> "The search stopped after " + tried + ": " + search.stopped();
+    };
+  }
+
+  private static String story(SearchRecord search) {
+    StringBuilder text = new StringBuilder("Aim: " + Keys.aim(search.aim()));
+    Double drawn = search.aimAsDrawn();
+    if (drawn != null) {
+      text.append(", as drawn ").append(Numbers.quantity(drawn, search.aimUnit()));
+    }
+    text.append(", found ").append(Numbers.quantity(search.aimFound(), search.aimUnit()));
+    text.append(". ").append(Numbers.count(search.generations(), "generation"));
+    Double refinement = search.refinementGain();
+    if (refinement != null) {
+      text.append("; the local refinement at the end added ")
+          .append(Numbers.withUnit(Numbers.fixed(refinement, 4), search.aimUnit()));
+    }
+    if (search.failures() > 0) {
+      text.append("; ")
+          .append(Numbers.count(search.failures(), "design"))
+          .append(" could not be evaluated");
+    }
+    return text.append('.').toString();
+  }
+
+  private static Chart convergence(SearchRecord search) {
+    List<Generation> history = search.history();
+    List<Double> xs = history.stream().map(g -> (double) g.evaluations()).toList();
+    List<Double> best = history.stream().map(Generation::best).toList();
+    List<Double> mean = history.stream().map(Generation::mean).toList();
+    double high = best.stream().mapToDouble(Double::doubleValue).max().orElse(1);
+    double low = Math.min(lowest(best), lowest(mean));
+    double margin = Math.max(1e-3, (high - low) * 0.08);
+    Axis x = Axis.linear("designs evaluated", "", xs.get(0), xs.get(xs.size() - 1));
+    Axis y = Axis.linear(Keys.aim(search.aim()), search.aimUnit(), low - margin, high + margin);
+    List<Series> series =
+        List.of(
+            Series.of("best so far", "ink", best),
+            Series.of("mean of the generation", "muted", mean));
+    String title =
+        "Convergence: " + halfway(search) + " of the generations reach the last 0.1 % of the aim";
+    return new Chart("convergence", Kind.LINES, title, x, y, xs, series, List.of());
+  }
+
+  private static double lowest(List<Double> values) {
+    return values.stream().mapToDouble(Double::doubleValue).min().orElse(0);
+  }
+
+  private static String halfway(SearchRecord search) {
+    double goal = search.aimFound() - Math.abs(search.aimFound()) * 1e-3;
+    int first = 0;
+    while (first < search.history().size() && search.history().get(first).best() < goal) {
+      first++;
+    }
+    return (search.history().size() - first) + " of " + search.history().size();
+  }
+
+  private static Table optima(SearchRecord search) {
+    Table.Builder table =
+        new Table.Builder("table-optima", "Distinct designs found, best first")
+            .words("design")
+            .numbers(Keys.aim(search.aim()), search.aimUnit());
+    for (VariableRecord v : search.variables()) {
+      table.numbers(Keys.words(v.key()), v.unit());
+    }
+    for (int i = 0; i < search.optima().size(); i++) {
+      Optimum optimum = search.optima().get(i);
+      List<String> cells = new ArrayList<>();
+      cells.add(i == 0 ? "found" : Integer.toString(i + 1));
+      cells.add(Numbers.fixed(optimum.aim(), 3));
+      for (VariableRecord v : search.variables()) {
+        Double value = optimum.values().get(v.key());
+        cells.add(value == null ? "" : Numbers.bare(value, v.unit()));
+      }
+      table.row(cells);
+    }
+    return table.build();
+  }
+
+  private static Table constraints(SearchRecord search) {
+    Table.Builder table =
+        new Table.Builder("table-constraints", "Limits kept")
+            .words("limit")
+            .numbers("at the found design", "")
+            .words("binds");
+    for (ConstraintRecord c : search.constraints()) {
+      table.row(c.text(), Numbers.significant(c.value(), 5), c.active() ? "yes" : "no");
+    }
+    return table.build();
+  }
+
+  private static void front(SearchRecord search, Front front, List<Block> blocks) {
+    List<Double> xs = front.points().stream().map(p -> p.aims().get(0)).toList();
+    List<Double> ys = front.points().stream().map(p -> p.aims().get(1)).toList();
+    List<Double> knee = new ArrayList<>();
+    for (int i = 0; i < ys.size(); i++) {
+      knee.add(i == front.knee() ? ys.get(i) : null);
+    }
+    Chart chart =
+        new Chart(
+            "front",
+            Kind.POINTS,
+            "Designs none of which is better in every aim",
+            around(Keys.aim(front.aims().get(0)), front.units().get(0), xs),
+            around(Keys.aim(front.aims().get(1)), front.units().get(1), ys),
+            xs,
+            List.of(
+                Series.of("designs of the front", "muted", ys),
+                new Series("best compromise", "sub1", false, knee)),
+            List.of());
+    blocks.add(new Block.Plot(chart, frontTable(search, front)));
+  }
+
+  private static Axis around(String label, String unit, List<Double> values) {
+    double low = lowest(values);
+    double high = values.stream().mapToDouble(Double::doubleValue).max().orElse(1);
+    double margin = Math.max(1e-9, (high - low) * 0.06);
+    return Axis.linear(label, unit, low - margin, high + margin);
+  }
+
+  private static Table frontTable(SearchRecord search, Front front) {
+    Table.Builder table = new Table.Builder("table-front", "The Pareto front").words("design");
+    for (int i = 0; i < front.aims().size(); i++) {
+      table.numbers(Keys.aim(front.aims().get(i)), front.units().get(i));
+    }
+    search.variables().forEach(v -> table.numbers(Keys.words(v.key()), v.unit()));
+    for (int i = 0; i < front.points().size(); i++) {
+      var point = front.points().get(i);
+      List<String> cells = new ArrayList<>();
+      cells.add(i == front.knee() ? "best compromise" : Integer.toString(i + 1));
+      point.aims().forEach(aim -> cells.add(Numbers.significant(aim, 5)));
+      for (VariableRecord v : search.variables()) {
+        Double value = point.values().get(v.key());
+        cells.add(value == null ? "" : Numbers.bare(value, v.unit()));
+      }
+      table.row(cells);
+    }
+    return table.build();
+  }
+}

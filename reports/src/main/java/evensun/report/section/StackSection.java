@@ -1,0 +1,190 @@
+package evensun.report.section;
+
+import evensun.report.figure.Figure;
+import evensun.report.figure.Share;
+import evensun.report.figure.StackPicture;
+import evensun.report.figure.StackPicture.Slab;
+import evensun.report.page.Block;
+import evensun.report.page.Section;
+import evensun.report.page.Table;
+import evensun.report.text.Clip;
+import evensun.report.text.Keys;
+import evensun.report.text.Numbers;
+import evensun.result.Outcome;
+import evensun.result.Outcome.StackEntry;
+import evensun.result.Outcome.SubcellOutcome;
+import evensun.result.RunResult;
+import evensun.result.SearchRecord;
+import evensun.result.SearchRecord.VariableRecord;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+
+/** The stack as drawn beside the stack found. */
+public final class StackSection {
+
+  private StackSection() {}
+
+  /** The section; absent when the result names no layer. */
+  public static Optional<Section> of(RunResult result) {
+    if (result.found().stack().isEmpty()) {
+      return Optional.empty();
+    }
+    List<Block> blocks = new ArrayList<>();
+    blocks.add(picture(result));
+    SearchRecord search = result.search();
+    if (search != null && !search.variables().isEmpty()) {
+      blocks.add(new Block.Grid(variables(search), false));
+    }
+    blocks.add(new Block.Grid(layers(result), true));
+    return Optional.of(new Section("stack", "Stack", heading(result), blocks));
+  }
+
+  private static String heading(RunResult result) {
+    SearchRecord search = result.search();
+    long layers =
+        result.found().stack().stream().filter(entry -> entry.role().equals("layer")).count();
+    if (search == null || search.variables().isEmpty()) {
+      return "The stack as drawn: " + Numbers.count((int) layers, "layer");
+    }
+    VariableRecord most = search.variables().get(0);
+    for (VariableRecord variable : search.variables()) {
+      most = relativeChange(variable) > relativeChange(most) ? variable : most;
+    }
+    if (relativeChange(most) < 1e-9) {
+      return "The search kept every value as drawn";
+    }
+    return Clip.to(Keys.words(most.key()), 60)
+        + " changes most: from "
+        + Numbers.quantity(most.drawn(), most.unit())
+        + " to "
+        + Numbers.quantity(most.found(), most.unit());
+  }
+
+  private static double relativeChange(VariableRecord variable) {
+    double width = variable.high() - variable.low();
+    return width > 0 ? Math.abs(variable.found() - variable.drawn()) / width : 0;
+  }
+
+  private static Block picture(RunResult result) {
+    Outcome drawn = result.asDrawn();
+    StackPicture picture =
+        new StackPicture(drawn == null ? List.of() : slabs(drawn), slabs(result.found()));
+    String what =
+        (drawn == null ? "The stack" : "The stack as drawn (left) and as found (right)")
+            + ", light from above. Layers are to scale with each other; those of 3 µm and more are cut"
+            + " short with a break, and very thin ones are drawn at least as a line.";
+    return new Block.Picture("fig-stack", Figure.of(picture, what), what);
+  }
+
+  private static List<Slab> slabs(Outcome outcome) {
+    List<String> names = outcome.subcells().stream().map(SubcellOutcome::name).toList();
+    return outcome.stack().stream().map(entry -> slab(entry, names)).toList();
+  }
+
+  private static Slab slab(StackEntry entry, List<String> subcells) {
+    int index = entry.subcell() == null ? -1 : subcells.indexOf(entry.subcell());
+    String role =
+        index >= 0
+            ? Share.subcellRole(index)
+            : entry.role().equals("layer") ? "parasitic" : "medium";
+    double nm = entry.thicknessNm() == null ? Double.NaN : entry.thicknessNm();
+    String gap = entry.bandgapEv() == null ? "" : Numbers.quantity(entry.bandgapEv(), "eV");
+    String name = entry.role().equals("exit") ? entry.name() + " (exit)" : entry.name();
+    return new Slab(name, role, nm, gap);
+  }
+
+  private static Table variables(SearchRecord search) {
+    Table.Builder table =
+        new Table.Builder("table-variables", "What may vary: drawn, found, equally good, allowed")
+            .words("quantity")
+            .words("unit")
+            .numbers("drawn", "")
+            .numbers("found", "")
+            .numbers("change", "")
+            .words("equally good")
+            .words("allowed")
+            .words("bound");
+    for (VariableRecord v : search.variables()) {
+      table.row(
+          Keys.words(v.key()),
+          v.unit(),
+          Numbers.bare(v.drawn(), v.unit()),
+          Numbers.bare(v.found(), v.unit()),
+          signed(v),
+          range(v.equallyGoodLow(), v.equallyGoodHigh(), v.unit()),
+          range(v.low(), v.high(), v.unit()) + step(v),
+          v.bound() == null ? "" : "stands on the " + (v.bound().equals("low") ? "lower" : "upper"));
+    }
+    return table.build();
+  }
+
+  private static String signed(VariableRecord v) {
+    double change = v.found() - v.drawn();
+    return (change > 0 ? "+" : "") + Numbers.bare(change, v.unit());
+  }
+
+  private static String step(VariableRecord v) {
+    return v.step() > 0 ? ", step " + Numbers.bare(v.step(), v.unit()) : "";
+  }
+
+  private static String range(
+      @org.jspecify.annotations.Nullable Double low,
+      @org.jspecify.annotations.Nullable Double high,
+      String unit) {
+    return low == null || high == null
+        ? ""
+        : Numbers.bare(low, unit) + " to " + Numbers.bare(high, unit);
+  }
+
+  private static Table layers(RunResult result) {
+    Table.Builder table =
+        new Table.Builder("table-layers", "Every layer, in the order the light meets them")
+            .words("layer")
+            .words("material")
+            .words("part of")
+            .numbers("as drawn", "nm")
+            .numbers("found", "nm")
+            .numbers("bandgap", "eV")
+            .words("waves")
+            .words("further");
+    for (StackEntry entry : result.found().stack()) {
+      table.row(
+          entry.name(),
+          entry.material(),
+          partOf(entry),
+          drawnNm(result, entry.name()),
+          nm(entry.thicknessNm()),
+          entry.bandgapEv() == null ? "" : Numbers.fixed(entry.bandgapEv(), 3),
+          entry.role().equals("layer") ? (entry.coherent() ? "interfere" : "incoherent") : "",
+          String.join("; ", entry.features()));
+    }
+    return table.build();
+  }
+
+  private static String partOf(StackEntry entry) {
+    if (entry.subcell() != null) {
+      return "subcell " + entry.subcell();
+    }
+    return switch (entry.role()) {
+      case "incident" -> "incident medium";
+      case "exit" -> "exit medium";
+      default -> "collects nothing";
+    };
+  }
+
+  private static String drawnNm(RunResult result, String name) {
+    Outcome drawn = result.asDrawn();
+    return drawn == null
+        ? ""
+        : drawn.stack().stream()
+            .filter(entry -> entry.name().equals(name))
+            .findFirst()
+            .map(entry -> nm(entry.thicknessNm()))
+            .orElse("");
+  }
+
+  private static String nm(@org.jspecify.annotations.Nullable Double nm) {
+    return nm == null ? "" : Numbers.trimmed(nm, 2);
+  }
+}

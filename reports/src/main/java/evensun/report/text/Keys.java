@@ -1,0 +1,46 @@
+package evensun.report.text;
+
+import java.util.Locale;
+
+/** Keys of varied quantities, such as {@code perovskite.thicknessNm}, in words. */
+public final class Keys {
+
+  private Keys() {}
+
+  /** The layer, or {@code layer/component}, a key belongs to; the whole key if it has no dot. */
+  public static String layer(String key) {
+    int dot = key.lastIndexOf('.');
+    return dot < 0 ? key : key.substring(0, dot);
+  }
+
+  /** What of the layer varies: {@code thickness}, {@code bandgap}, and so on. */
+  public static String property(String key) {
+    String name = key.substring(key.lastIndexOf('.') + 1);
+    String bare = name.replaceFirst("(Nm|Ev|Deg|K|Percent)$", "");
+    return spaced(bare.isEmpty() ? name : bare);
+  }
+
+  /** Layer and property: {@code perovskite thickness}. */
+  public static String words(String key) {
+    return key.indexOf('.') < 0 ? spaced(key) : layer(key) + " " + property(key);
+  }
+
+  /** Whether a key names a thickness. */
+  public static boolean isThickness(String key) {
+    return key.endsWith(".thicknessNm");
+  }
+
+  /** Whether a key names a bandgap. */
+  public static boolean isBandgap(String key) {
+    return key.endsWith(".bandgapEv");
+  }
+
+  /** The name of an aim in words. */
+  public static String aim(String aim) {
+    return aim.replace('-', ' ');
+  }
+
+  private static String spaced(String camelCase) {
+    return camelCase.replaceAll("([a-z])([A-Z])", "$1 $2").toLowerCase(Locale.ROOT);
+  }
+}

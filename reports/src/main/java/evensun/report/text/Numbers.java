@@ -1,0 +1,131 @@
+package evensun.report.text;
+
+import java.math.BigDecimal;
+import java.math.MathContext;
+import java.math.RoundingMode;
+
+/** Numbers for people: a full stop, a true minus sign, a space before the unit, no locale. */
+public final class Numbers {
+
+  /** What current densities are shown in. */
+  public static final String MA = "mA cm⁻²";
+
+  private static final String NBSP = "\u00a0";
+  private static final char MINUS = '\u2212';
+  private static final double MICROMETRE_FROM_NM = 10_000;
+
+  private Numbers() {}
+
+  /** With so many decimals, rounded half up; never a negative zero. */
+  public static String fixed(double value, int decimals) {
+    if (!Double.isFinite(value)) {
+      return "–";
+    }
+    BigDecimal rounded = BigDecimal.valueOf(value).setScale(decimals, RoundingMode.HALF_UP);
+    return rounded.signum() < 0 ? MINUS + rounded.negate().toPlainString() : rounded.toPlainString();
+  }
+
+  /** As {@link #fixed}, with a plus sign where the value is positive. */
+  public static String signed(double value, int decimals) {
+    String text = fixed(value, decimals);
+    boolean zero = text.chars().noneMatch(c -> c >= '1' && c <= '9');
+    return value > 0 && !zero ? "+" + text : text;
+  }
+
+  /** As {@link #fixed}, without trailing zeros. */
+  public static String trimmed(double value, int decimals) {
+    String text = fixed(value, decimals);
+    if (text.indexOf('.') < 0) {
+      return text;
+    }
+    int end = text.length();
+    while (text.charAt(end - 1) == '0') {
+      end--;
+    }
+    return text.substring(0, text.charAt(end - 1) == '.' ? end - 1 : end);
+  }
+
+  /** With so many significant digits, as a power of ten where it is very large or very small. */
+  public static String significant(double value, int digits) {
+    double size = Math.abs(value);
+    if (size != 0 && (size < 1e-3 || size >= 1e6) && Double.isFinite(value)) {
+      return powerOfTen(value, digits);
+    }
+    BigDecimal rounded = BigDecimal.valueOf(value).round(new MathContext(digits));
+    return trimmed(rounded.doubleValue(), Math.max(0, rounded.scale()));
+  }
+
+  private static String powerOfTen(double value, int digits) {
+    BigDecimal rounded = BigDecimal.valueOf(value).round(new MathContext(digits));
+    int exponent = rounded.precision() - rounded.scale() - 1;
+    String mantissa = trimmed(rounded.movePointLeft(exponent).doubleValue(), digits - 1);
+    return mantissa + " × 10" + superscript(exponent);
+  }
+
+  private static String superscript(int number) {
+    StringBuilder text = new StringBuilder();
+    for (char c : Integer.toString(number).toCharArray()) {
+      text.append(c == '-' ? '⁻' : "⁰¹²³⁴⁵⁶⁷⁸⁹".charAt(c - '0'));
+    }
+    return text.toString();
+  }
+
+  /** A current density with its unit. */
+  public static String ma(double maPerCm2) {
+    return fixed(maPerCm2, 2) + NBSP + MA;
+  }
+
+  /** A change of a current density with its unit. */
+  public static String maChange(double maPerCm2) {
+    return signed(maPerCm2, 2) + NBSP + MA;
+  }
+
+  /** A thickness with its unit, in µm from 10 µm. */
+  public static String thickness(double nm) {
+    return nm >= MICROMETRE_FROM_NM
+        ? trimmed(nm / 1000, 2) + NBSP + "µm"
+        : trimmed(nm, 1) + NBSP + "nm";
+  }
+
+  /** A value in its unit, as precise as the unit is deposited or graded. */
+  public static String quantity(double value, String unit) {
+    return switch (unit) {
+      case "nm" -> thickness(value);
+      case "eV" -> withUnit(fixed(value, 3), unit);
+      case "deg", "°" -> trimmed(value, 1) + "°";
+      case MA -> ma(value);
+      case "%" -> withUnit(fixed(value, 2), unit);
+      default -> withUnit(significant(value, 4), unit);
+    };
+  }
+
+  /** The bare number of {@link #quantity}, for a column that names the unit. */
+  public static String bare(double value, String unit) {
+    return switch (unit) {
+      case "nm" -> trimmed(value, 1);
+      case "eV" -> fixed(value, 3);
+      case "%", MA -> fixed(value, 2);
+      default -> significant(value, 4);
+    };
+  }
+
+  /** A change of a value in its unit. */
+  public static String change(double value, String unit) {
+    return switch (unit) {
+      case "nm" -> (value > 0 ? "+" : "") + withUnit(trimmed(value, 1), unit);
+      case "eV" -> withUnit(signed(value, 3), unit);
+      case "%", MA -> withUnit(signed(value, 2), unit);
+      default -> (value > 0 ? "+" : "") + withUnit(significant(value, 4), unit);
+    };
+  }
+
+  /** A number text and its unit, kept on one line. */
+  public static String withUnit(String number, String unit) {
+    return unit.isEmpty() ? number : number + NBSP + unit.replace(" ", NBSP);
+  }
+
+  /** A count with its noun, plural by adding s. */
+  public static String count(int number, String noun) {
+    return number + " " + noun + (number == 1 ? "" : "s");
+  }
+}
