@@ -104,7 +104,9 @@ final class ReportPages {
     Double level = result.found().matchedCurrentMaPerCm2();
     String what =
         "Each subcell filled to its current"
-            + (level == null ? "." : "; the weakest sets the level, what stands above it is unused.")
+            + (level == null
+                ? "."
+                : "; the weakest sets the level, what stands above it is unused.")
             + (drawn == null ? "" : " Dotted: as drawn.");
     return Figure.of(new LevelPicture(vessels, level), what);
   }
@@ -131,7 +133,9 @@ final class ReportPages {
           "efficiency",
           "%",
           electrical.efficiencyPercent(),
-          drawn == null || drawn.electrical() == null ? null : drawn.electrical().efficiencyPercent());
+          drawn == null || drawn.electrical() == null
+              ? null
+              : drawn.electrical().efficiencyPercent());
     }
     add(
         headlines,

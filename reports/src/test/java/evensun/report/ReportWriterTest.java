@@ -15,6 +15,7 @@ class ReportWriterTest {
     assertThat(html).startsWith("<!DOCTYPE html>");
     Files.createDirectories(Path.of("target/pages"));
     Files.writeString(Path.of("target/pages/full.html"), html);
-    Files.writeString(Path.of("target/pages/assess.html"), ReportWriter.write(SampleRuns.assessment()));
+    Files.writeString(
+        Path.of("target/pages/assess.html"), ReportWriter.write(SampleRuns.assessment()));
   }
 }

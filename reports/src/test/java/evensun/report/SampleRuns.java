@@ -121,11 +121,17 @@ final class SampleRuns {
     double jsc = o.matchedCurrentMaPerCm2();
     List<Electrical.CurvePoint> curve =
         ToyOptics.grid(0, 1.9, 0.05).stream()
-            .map(v -> new Electrical.CurvePoint(v, Math.max(0, jsc * (1 - Math.exp((v - 1.9) / 0.06)))))
+            .map(
+                v ->
+                    new Electrical.CurvePoint(
+                        v, Math.max(0, jsc * (1 - Math.exp((v - 1.9) / 0.06)))))
             .toList();
     List<Electrical.MismatchPoint> cost =
         ToyOptics.grid(-3, 3, 0.25).stream()
-            .map(d -> new Electrical.MismatchPoint(d, efficiency - 0.6 * Math.abs(d), 0.78 + 0.01 * Math.abs(d)))
+            .map(
+                d ->
+                    new Electrical.MismatchPoint(
+                        d, efficiency - 0.6 * Math.abs(d), 0.78 + 0.01 * Math.abs(d)))
             .toList();
     return new Electrical(
         "saturation currents from each subcell's own absorptance",
@@ -138,8 +144,10 @@ final class SampleRuns {
         efficiency,
         efficiency + 0.42,
         List.of(
-            new Electrical.SubcellElectrical("top", 1.68, 3.1e-23, 0.01, 1.4, 1.23, 1.09, jsc * 0.96, 0.71),
-            new Electrical.SubcellElectrical("bottom", 1.12, 2.6e-12, 0.02, 1.0, 0.71, 0.61, jsc * 0.96, 0.66)),
+            new Electrical.SubcellElectrical(
+                "top", 1.68, 3.1e-23, 0.01, 1.4, 1.23, 1.09, jsc * 0.96, 0.71),
+            new Electrical.SubcellElectrical(
+                "bottom", 1.12, 2.6e-12, 0.02, 1.0, 0.71, 0.61, jsc * 0.96, 0.66)),
         curve,
         cost,
         List.of(
@@ -155,7 +163,8 @@ final class SampleRuns {
     List<Generation> history = new ArrayList<>();
     for (int g = 1; g <= 40; g++) {
       double best = aim - (aim - start) * Math.exp(-g / 6.0);
-      history.add(new Generation(g, g * 60, g == 40 ? aim : best, best - 2.2 * Math.exp(-g / 12.0)));
+      history.add(
+          new Generation(g, g * 60, g == 40 ? aim : best, best - 2.2 * Math.exp(-g / 12.0)));
     }
     return new SearchRecord(
         "matched-current",
@@ -171,7 +180,17 @@ final class SampleRuns {
         List.of(
             new VariableRecord(COATING, "nm", 60, 150, 0, 100, 112.4, 104.0, 121.5, null),
             new VariableRecord(CONTACT, "nm", 40, 120, 0, 80, 40, 40.0, 43.1, "low"),
-            new VariableRecord(ABSORBER, "nm", 200, 1000, 0, 640, balancedNm(), balancedNm() - 4, balancedNm() + 5, null)),
+            new VariableRecord(
+                ABSORBER,
+                "nm",
+                200,
+                1000,
+                0,
+                640,
+                balancedNm(),
+                balancedNm() - 4,
+                balancedNm() + 5,
+                null)),
         List.of(
             new Optimum(aim, found.design()),
             new Optimum(aim - 0.21, Map.of(COATING, 71.0, CONTACT, 41.5, ABSORBER, 512.0))),
@@ -183,10 +202,32 @@ final class SampleRuns {
   private static List<MaterialUse> materials(Outcome found) {
     List<Double> nm = found.spectral().wavelengthNm();
     return List.of(
-        material("magnesium-fluoride", "Magnesium fluoride", List.of("antireflection"), nm, 1.38, 0, null),
-        material("indium-tin-oxide", "Indium tin oxide", List.of("front-contact", "recombination"), nm, 1.9, 0.02, null),
-        material("lead-halide-perovskite", "Lead-halide perovskite", List.of("perovskite"), nm, 2.4, 0.6, 1.68),
-        material("crystalline-silicon", "Crystalline silicon", List.of("wafer"), nm, 3.7, 0.3, null),
+        material(
+            "magnesium-fluoride",
+            "Magnesium fluoride",
+            List.of("antireflection"),
+            nm,
+            1.38,
+            0,
+            null),
+        material(
+            "indium-tin-oxide",
+            "Indium tin oxide",
+            List.of("front-contact", "recombination"),
+            nm,
+            1.9,
+            0.02,
+            null),
+        material(
+            "lead-halide-perovskite",
+            "Lead-halide perovskite",
+            List.of("perovskite"),
+            nm,
+            2.4,
+            0.6,
+            1.68),
+        material(
+            "crystalline-silicon", "Crystalline silicon", List.of("wafer"), nm, 3.7, 0.3, null),
         material("silver", "Silver", List.of("mirror"), nm, 0.15, 4.0, null));
   }
 
@@ -222,8 +263,12 @@ final class SampleRuns {
     List<Double> film = ToyOptics.grid(0, 560, 5);
     List<Double> wafer = ToyOptics.grid(0, 180_000, 2_000);
     return List.of(
-        new DepthLayer("perovskite", film, film.stream().map(z -> 4.2e21 * Math.exp(-z / 160) + 4e20).toList()),
-        new DepthLayer("wafer", wafer, wafer.stream().map(z -> 8e19 * Math.exp(-z / 25_000) + 1e17).toList()));
+        new DepthLayer(
+            "perovskite",
+            film,
+            film.stream().map(z -> 4.2e21 * Math.exp(-z / 160) + 4e20).toList()),
+        new DepthLayer(
+            "wafer", wafer, wafer.stream().map(z -> 8e19 * Math.exp(-z / 25_000) + 1e17).toList()));
   }
 
   private static Angular angular(Outcome found) {
@@ -233,8 +278,14 @@ final class SampleRuns {
         angles,
         angles.stream().map(a -> reflected * (1 + Math.pow(a / 60, 4))).toList(),
         ordered(
-            "top", angles.stream().map(a -> current(found, 0) * (1 - 0.1 * Math.pow(a / 60, 4))).toList(),
-            "bottom", angles.stream().map(a -> current(found, 1) * (1 - 0.14 * Math.pow(a / 60, 4))).toList()));
+            "top",
+                angles.stream()
+                    .map(a -> current(found, 0) * (1 - 0.1 * Math.pow(a / 60, 4)))
+                    .toList(),
+            "bottom",
+                angles.stream()
+                    .map(a -> current(found, 1) * (1 - 0.14 * Math.pow(a / 60, 4)))
+                    .toList()));
   }
 
   private static List<Sensitivity> sensitivities(Outcome found) {
@@ -256,7 +307,8 @@ final class SampleRuns {
         1,
         up.matchedCurrentMaPerCm2() - aim,
         down.matchedCurrentMaPerCm2() - aim,
-        ordered("top", current(up, 0) - current(here, 0), "bottom", current(up, 1) - current(here, 1)),
+        ordered(
+            "top", current(up, 0) - current(here, 0), "bottom", current(up, 1) - current(here, 1)),
         -0.011,
         0.05 * (da * a + db * b + dc * c),
         Math.min(0, worst(a, b, c, da, db, dc) - aim));
@@ -272,9 +324,16 @@ final class SampleRuns {
 
   private static List<WhatIf> whatIf() {
     return List.of(
-        whatIf(ABSORBER, ToyOptics.grid(200, 1000, 25), v -> ToyOptics.tandem(112.4, 40, v, Map.of())),
-        whatIf(CONTACT, ToyOptics.grid(40, 120, 4), v -> ToyOptics.tandem(112.4, v, balancedNm(), Map.of())),
-        whatIf(COATING, ToyOptics.grid(60, 150, 5), v -> ToyOptics.tandem(v, 40, balancedNm(), Map.of())));
+        whatIf(
+            ABSORBER, ToyOptics.grid(200, 1000, 25), v -> ToyOptics.tandem(112.4, 40, v, Map.of())),
+        whatIf(
+            CONTACT,
+            ToyOptics.grid(40, 120, 4),
+            v -> ToyOptics.tandem(112.4, v, balancedNm(), Map.of())),
+        whatIf(
+            COATING,
+            ToyOptics.grid(60, 150, 5),
+            v -> ToyOptics.tandem(v, 40, balancedNm(), Map.of())));
   }
 
   private static WhatIf whatIf(
@@ -296,7 +355,8 @@ final class SampleRuns {
         new Opinion("numerics", "half the wavelength step (2.5 nm)", aim - 0.002, -0.002, ""),
         new Opinion("numerics", "reference kernel", aim, 0.0, "agrees to the last digit"),
         new Opinion("material", "front-contact: indium-tin-oxide.sputtered", aim - 0.38, -0.38, ""),
-        new Opinion("material", "wafer: another table of crystalline silicon", aim + 0.06, 0.06, ""),
+        new Opinion(
+            "material", "wafer: another table of crystalline silicon", aim + 0.06, 0.06, ""),
         new Opinion("material", "mirror: aluminium", null, null, "covers 280 to 1000 nm only"));
   }
 
@@ -316,8 +376,11 @@ final class SampleRuns {
 
   private static List<Caution> cautions() {
     return List.of(
-        new Caution("perovskite", "Lead halides are water-soluble and toxic for reproduction; broken modules are hazardous waste."),
-        new Caution("front-contact", "Indium compounds: keep dust and sputter flakes out of the air."));
+        new Caution(
+            "perovskite",
+            "Lead halides are water-soluble and toxic for reproduction; broken modules are hazardous waste."),
+        new Caution(
+            "front-contact", "Indium compounds: keep dust and sputter flakes out of the air."));
   }
 
   private static Provenance provenance() {

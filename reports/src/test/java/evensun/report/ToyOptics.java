@@ -40,8 +40,18 @@ final class ToyOptics {
       double left = 1 - r;
       reflectance.add(r);
       left -= take(absorptance, "antireflection", left, 0.002);
-      left -= take(absorptance, "front-contact", left, contactNm * (edge(340, wavelength, 20) * 4e-3 + 4e-4));
-      left -= take(absorptance, "perovskite", left, absorberNm * 7e-3 * edge(735, wavelength, 5) * (500 / wavelength));
+      left -=
+          take(
+              absorptance,
+              "front-contact",
+              left,
+              contactNm * (edge(340, wavelength, 20) * 4e-3 + 4e-4));
+      left -=
+          take(
+              absorptance,
+              "perovskite",
+              left,
+              absorberNm * 7e-3 * edge(735, wavelength, 5) * (500 / wavelength));
       left -= take(absorptance, "recombination", left, 0.012);
       left -= take(absorptance, "wafer", left, 6 * edge(1120, wavelength, 22));
       transmittance.add(left);

@@ -33,8 +33,15 @@ public record Chart(
     for (Series row : series) {
       if (row.values().size() != xs.size()) {
         throw new IllegalArgumentException(
-            "chart " + id + ": series " + row.label() + " has " + row.values().size()
-                + " values for " + xs.size() + " points");
+            "chart "
+                + id
+                + ": series "
+                + row.label()
+                + " has "
+                + row.values().size()
+                + " values for "
+                + xs.size()
+                + " points");
       }
     }
   }

@@ -74,12 +74,10 @@ record ChartDrawing(Chart chart) implements Figure.Sketch {
     for (double tick : ticks(chart.x(), wanted)) {
       double x = frame.x(tick);
       canvas.stroke(x, frame.bottom(), x, frame.bottom() + 5, "axis");
-      canvas.label(
-          x, frame.bottom() + 19, text(chart.x(), tick, wanted), Anchor.MIDDLE, "tick");
+      canvas.label(x, frame.bottom() + 19, text(chart.x(), tick, wanted), Anchor.MIDDLE, "tick");
     }
     canvas.label(0, 13, chart.y().title(), Anchor.START, "axis-name");
-    canvas.label(
-        frame.right(), frame.bottom() + 37, chart.x().title(), Anchor.END, "axis-name");
+    canvas.label(frame.right(), frame.bottom() + 37, chart.x().title(), Anchor.END, "axis-name");
   }
 
   private static List<Double> ticks(Axis axis, int wanted) {
@@ -178,7 +176,8 @@ record ChartDrawing(Chart chart) implements Figure.Sketch {
         point(path, pen ? 1 : 0, frame.x(chart.xs().get(i)), lastY);
         pen = true;
       }
-      canvas.outline(path, "line line-" + row.role() + (row.dashed() ? " dashed" : ""), row.label());
+      canvas.outline(
+          path, "line line-" + row.role() + (row.dashed() ? " dashed" : ""), row.label());
       if (!Double.isNaN(lastY)) {
         ends.add(new End(row, lastY));
       }
@@ -195,7 +194,8 @@ record ChartDrawing(Chart chart) implements Figure.Sketch {
       double y = Math.max(end.y(), edge + 14);
       edge = y;
       String text = Clip.to(end.row().label(), 20);
-      canvas.label(frame.right() + 8, y + 4, text, Anchor.START, "part-name ink-" + end.row().role());
+      canvas.label(
+          frame.right() + 8, y + 4, text, Anchor.START, "part-name ink-" + end.row().role());
     }
   }
 

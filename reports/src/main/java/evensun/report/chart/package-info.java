@@ -1,4 +1,6 @@
-/** Charts as data: what a chart shows, its table, and its drawing for readers without JavaScript. */
+/**
+ * Charts as data: what a chart shows, its table, and its drawing for readers without JavaScript.
+ */
 @NullMarked
 package evensun.report.chart;
 

@@ -54,8 +54,7 @@ public final class Outlook {
     if (Math.abs(change) < 5e-3) {
       return "changes next to nothing";
     }
-    return (change < 0 ? "costs up to " : "gains ")
-        + Numbers.quantity(Math.abs(change), unit);
+    return (change < 0 ? "costs up to " : "gains ") + Numbers.quantity(Math.abs(change), unit);
   }
 
   private static Optional<String> window(String key, String unit, RunResult result) {
@@ -86,8 +85,7 @@ public final class Outlook {
   /** What is uncertain, numerical and material uncertainty apart. */
   public static List<String> uncertain(RunResult result) {
     List<String> texts = new ArrayList<>();
-    List<Opinion> opinions =
-        Objects.requireNonNullElse(result.secondOpinion(), List.<Opinion>of());
+    List<Opinion> opinions = Objects.requireNonNullElse(result.secondOpinion(), List.<Opinion>of());
     numerics(opinions, aimUnit(result)).ifPresent(texts::add);
     materials(opinions, aimUnit(result)).ifPresent(texts::add);
     statistics(result).ifPresent(texts::add);
@@ -146,7 +144,13 @@ public final class Outlook {
         .filter(Objects::nonNull)
         .max(Double::compare)
         .filter(error -> error > 0)
-        .map(error -> "Statistics: subcell currents carry ±" + Numbers.fixed(error, 3) + "\u00a0" + Numbers.MA + " (one standard error).");
+        .map(
+            error ->
+                "Statistics: subcell currents carry ±"
+                    + Numbers.fixed(error, 3)
+                    + "\u00a0"
+                    + Numbers.MA
+                    + " (one standard error).");
   }
 
   private static Optional<String> remembered(RunResult result) {
@@ -154,6 +158,7 @@ public final class Outlook {
         result.materials().stream().filter(MaterialUse::fromMemory).map(MaterialUse::name).toList();
     return names.isEmpty()
         ? Optional.empty()
-        : Optional.of("From memory, not looked up: " + Clip.to(String.join(", ", names), 120) + ".");
+        : Optional.of(
+            "From memory, not looked up: " + Clip.to(String.join(", ", names), 120) + ".");
   }
 }

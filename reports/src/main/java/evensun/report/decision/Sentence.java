@@ -53,12 +53,13 @@ public final class Sentence {
     String better =
         drawn == null
             ? ""
-            : ", " + Numbers.change(search.aimFound() - drawn, search.aimUnit()) + " against as drawn";
+            : ", "
+                + Numbers.change(search.aimFound() - drawn, search.aimUnit())
+                + " against as drawn";
     return aim + better + "; " + currents;
   }
 
-  private static String currents(
-      Outcome found, @Nullable Outcome asDrawn, SearchRecord search) {
+  private static String currents(Outcome found, @Nullable Outcome asDrawn, SearchRecord search) {
     Double matched = found.matchedCurrentMaPerCm2();
     if (matched == null) {
       return sum(found);
@@ -96,7 +97,11 @@ public final class Sentence {
     }
     return limiting == null
         ? "balanced to " + Numbers.ma(mismatch)
-        : Clip.to(limiting, 40) + " limits, " + Numbers.ma(mismatch) + " below " + strongest(outcome);
+        : Clip.to(limiting, 40)
+            + " limits, "
+            + Numbers.ma(mismatch)
+            + " below "
+            + strongest(outcome);
   }
 
   private static String strongest(Outcome outcome) {

@@ -12,8 +12,8 @@ import java.util.Optional;
 record Window(double low, double high) {
 
   /**
-   * Walks from the found value to both sides until the curve falls below the floor, linearly between
-   * its points.
+   * Walks from the found value to both sides until the curve falls below the floor, linearly
+   * between its points.
    *
    * @param curve values ascending
    * @param found where to start
@@ -28,7 +28,10 @@ record Window(double low, double high) {
     while (above < n - 1 && curve.value().get(above) < found) {
       above++;
     }
-    return Optional.of(new Window(end(curve, above, -1, found, floor), end(curve, Math.max(0, above - 1), 1, found, floor)));
+    return Optional.of(
+        new Window(
+            end(curve, above, -1, found, floor),
+            end(curve, Math.max(0, above - 1), 1, found, floor)));
   }
 
   private static double end(WhatIf curve, int from, int step, double found, double floor) {
@@ -37,7 +40,8 @@ record Window(double low, double high) {
       double aim = curve.aim().get(i);
       if (aim < floor) {
         double before = curve.aim().get(i - step);
-        double part = before > aim ? Math.max(0, Math.min(1, (before - floor) / (before - aim))) : 0;
+        double part =
+            before > aim ? Math.max(0, Math.min(1, (before - floor) / (before - aim))) : 0;
         double at = curve.value().get(i - step);
         double crossing = at + part * (curve.value().get(i) - at);
         return step < 0 ? Math.min(found, crossing) : Math.max(found, crossing);

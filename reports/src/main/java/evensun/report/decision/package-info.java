@@ -1,4 +1,7 @@
-/** The decision in words: the sentence, the verdict by stated rules, what would change it, what is uncertain. */
+/**
+ * The decision in words: the sentence, the verdict by stated rules, what would change it, what is
+ * uncertain.
+ */
 @NullMarked
 package evensun.report.decision;
 

@@ -43,7 +43,8 @@ public record Bars(List<Row> rows) implements Figure.Sketch {
       double y = 4 + i * ROW;
       double x = zero + Math.min(0, row.value()) * pxPerUnit;
       String look = row.value() < 0 ? "fill-down" : "fill-up";
-      canvas.label(left - 12, y + 12, Clip.to(row.label(), wide ? 40 : 19), Anchor.END, "part-name");
+      canvas.label(
+          left - 12, y + 12, Clip.to(row.label(), wide ? 40 : 19), Anchor.END, "part-name");
       canvas.box(x, y, Math.max(1, Math.abs(row.value()) * pxPerUnit), BAR, look, "");
       canvas.label(widthPx, y + 12, row.text(), Anchor.END, "part-value");
     }

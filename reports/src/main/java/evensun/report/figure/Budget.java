@@ -57,8 +57,7 @@ public record Budget(double incidentMaPerCm2, List<Share> shares) {
   private static final Share NONE = new Share("", "", 0);
 
   /** A subcell with several absorbers stands where the light meets the first. */
-  private static void place(
-      SubcellOutcome subcell, String role, Map<String, Share> byChannel) {
+  private static void place(SubcellOutcome subcell, String role, Map<String, Share> byChannel) {
     Double current = subcell.photocurrentMaPerCm2();
     if (current == null) {
       return;

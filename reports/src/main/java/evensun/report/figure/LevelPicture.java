@@ -7,8 +7,8 @@ import java.util.List;
 import org.jspecify.annotations.Nullable;
 
 /**
- * The level picture: each subcell a vessel filled to its current, a line at the weakest, what stands
- * above it hatched.
+ * The level picture: each subcell a vessel filled to its current, a line at the weakest, what
+ * stands above it hatched.
  *
  * @param vessels in the order the light meets the subcells
  * @param levelMaPerCm2 the weakest current of a series device; null where the subcells are apart

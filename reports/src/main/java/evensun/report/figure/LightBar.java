@@ -53,14 +53,21 @@ public record LightBar(@Nullable Budget drawn, Budget found) implements Figure.S
       Share share = budget.shares().get(i);
       double wide = px(share.maPerCm2(), budget, widthPx);
       canvas.box(
-          x, y, wide, BAR, "part " + fill(share, i), share.label() + " " + Numbers.ma(share.maPerCm2()));
+          x,
+          y,
+          wide,
+          BAR,
+          "part " + fill(share, i),
+          share.label() + " " + Numbers.ma(share.maPerCm2()));
       insideLabel(canvas, share, x, y, wide);
       x += wide;
     }
   }
 
   private static String fill(Share share, int index) {
-    return "fill-" + share.role() + (share.role().equals("parasitic") && index % 2 == 1 ? "-b" : "");
+    return "fill-"
+        + share.role()
+        + (share.role().equals("parasitic") && index % 2 == 1 ? "-b" : "");
   }
 
   private static void insideLabel(Canvas canvas, Share share, double x, double y, double wide) {

@@ -1,6 +1,8 @@
 package evensun.report.figure;
 
-/** A shape of a drawing. Coordinates in px of its frame; {@code look} is a class of the style sheet. */
+/**
+ * A shape of a drawing. Coordinates in px of its frame; {@code look} is a class of the style sheet.
+ */
 public sealed interface Shape {
 
   /** Class of the style sheet that gives colour and stroke. */

@@ -4,8 +4,8 @@ package evensun.report.figure;
  * A part of the available light.
  *
  * @param label as shown to people
- * @param role class of the style sheet: {@code sub1}, …, {@code reflected}, {@code parasitic}, {@code
- *     exit}
+ * @param role class of the style sheet: {@code sub1}, …, {@code reflected}, {@code parasitic},
+ *     {@code exit}
  * @param maPerCm2 mA cm⁻²
  */
 public record Share(String label, String role, double maPerCm2) {

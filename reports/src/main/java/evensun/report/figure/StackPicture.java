@@ -79,10 +79,7 @@ public record StackPicture(List<Slab> drawn, List<Slab> found) implements Figure
   }
 
   private static double scaledNm(List<Slab> slabs) {
-    return slabs.stream()
-        .mapToDouble(Slab::thicknessNm)
-        .filter(nm -> nm < BREAK_FROM_NM)
-        .sum();
+    return slabs.stream().mapToDouble(Slab::thicknessNm).filter(nm -> nm < BREAK_FROM_NM).sum();
   }
 
   private static double px(Slab slab, double pxPerNm) {
@@ -106,7 +103,8 @@ public record StackPicture(List<Slab> drawn, List<Slab> found) implements Figure
       Slab slab = slabs.get(i);
       double high = px(slab, pxPerNm);
       String other = slab.role().equals("parasitic") && i % 2 == 1 ? "-b" : "";
-      canvas.box(x, y, column, high, "part fill-" + slab.role() + other, slab.name() + " " + value(slab));
+      canvas.box(
+          x, y, column, high, "part fill-" + slab.role() + other, slab.name() + " " + value(slab));
       if (slab.thicknessNm() >= BREAK_FROM_NM) {
         zigzag(canvas, x, y + high / 2, column);
       }
@@ -199,8 +197,7 @@ public record StackPicture(List<Slab> drawn, List<Slab> found) implements Figure
               .filter(b -> b.name().equals(slab.name()))
               .mapToDouble(Slab::thicknessNm)
               .findFirst();
-      boolean moved =
-          old.isPresent() && Math.abs(old.getAsDouble() - slab.thicknessNm()) >= 0.05;
+      boolean moved = old.isPresent() && Math.abs(old.getAsDouble() - slab.thicknessNm()) >= 0.05;
       leader(canvas, x, wanted[i], 14, at[i]);
       String look = moved ? "part-value" : "tick";
       canvas.label(x + 18, at[i] + 4, value(slab), Anchor.START, look);

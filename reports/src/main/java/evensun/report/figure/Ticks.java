@@ -45,7 +45,9 @@ public final class Ticks {
 
   /** Decimals needed to tell such ticks apart. */
   public static int decimals(double step) {
-    return step > 0 ? Math.max(0, (int) Math.ceil(-Math.log10(step) - 1e-9) + (quarter(step) ? 1 : 0)) : 0;
+    return step > 0
+        ? Math.max(0, (int) Math.ceil(-Math.log10(step) - 1e-9) + (quarter(step) ? 1 : 0))
+        : 0;
   }
 
   private static boolean quarter(double step) {

@@ -10,8 +10,7 @@ final class Widths {
 
   /** Width in px of a text set in a font of the given size in px. */
   static double of(String text, double fontPx) {
-    double ems =
-        text.codePoints().mapToDouble(c -> c < WIDE_FROM ? EM_FRACTION : 1).sum();
+    double ems = text.codePoints().mapToDouble(c -> c < WIDE_FROM ? EM_FRACTION : 1).sum();
     return ems * fontPx;
   }
 }

@@ -42,7 +42,13 @@ public record Table(
     for (List<String> row : rows) {
       if (row.size() != columns.size()) {
         throw new IllegalArgumentException(
-            "table " + id + ": a row has " + row.size() + " cells for " + columns.size() + " columns");
+            "table "
+                + id
+                + ": a row has "
+                + row.size()
+                + " cells for "
+                + columns.size()
+                + " columns");
       }
     }
   }

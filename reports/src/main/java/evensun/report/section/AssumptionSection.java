@@ -56,8 +56,7 @@ public final class AssumptionSection {
         "spectrum",
         light.name() + ", " + Numbers.withUnit(Numbers.fixed(light.totalWPerM2(), 2), "W m⁻²"));
     table.row("its source", light.source());
-    table.row(
-        "incidence", Numbers.trimmed(light.angleDeg(), 2) + "°, " + light.polarisation());
+    table.row("incidence", Numbers.trimmed(light.angleDeg(), 2) + "°, " + light.polarisation());
     table.row("wavelengths", provenance.grid());
     Double incident = result.found().incidentMaPerCm2();
     if (incident != null) {
@@ -82,7 +81,8 @@ public final class AssumptionSection {
 
   private static Table byLayer(RunResult result) {
     Table.Builder table =
-        new Table.Builder("table-assumptions", "What each layer is made of, and where its data come from")
+        new Table.Builder(
+                "table-assumptions", "What each layer is made of, and where its data come from")
             .words("layer")
             .words("material")
             .words("waves")
@@ -98,7 +98,9 @@ public final class AssumptionSection {
       table.row(
           entry.name(),
           use == null || use.title().isEmpty() ? entry.material() : use.title(),
-          entry.role().equals("layer") ? (entry.coherent() ? "coherent" : "incoherent") : entry.role(),
+          entry.role().equals("layer")
+              ? (entry.coherent() ? "coherent" : "incoherent")
+              : entry.role(),
           use == null ? "" : use.source() + (use.fromMemory() ? " (from memory)" : ""),
           use == null ? "" : use.form(),
           data ? Numbers.trimmed(use.fromNm(), 1) : "",

@@ -22,8 +22,7 @@ public final class CautionSection {
             "These are predictions of idealised optics. They say nothing about stability, lifetime or"
                 + " certified efficiency and replace no measurement. Safety data sheets, local rules"
                 + " and trained staff come before anything written here."));
-    List<Block.Point> points =
-        result.cautions().stream().map(CautionSection::point).toList();
+    List<Block.Point> points = result.cautions().stream().map(CautionSection::point).toList();
     if (!points.isEmpty()) {
       blocks.add(new Block.Points(points));
     }

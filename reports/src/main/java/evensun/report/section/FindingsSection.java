@@ -24,8 +24,7 @@ public final class FindingsSection {
             .map(f -> new Block.Point(f.severity(), f.where(), f.message(), f.code()))
             .toList();
     return Optional.of(
-        new Section(
-            "findings", "Findings", heading(findings), List.of(new Block.Points(points))));
+        new Section("findings", "Findings", heading(findings), List.of(new Block.Points(points))));
   }
 
   private static String heading(List<FindingRecord> findings) {

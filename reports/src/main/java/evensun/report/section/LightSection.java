@@ -63,11 +63,9 @@ public final class LightSection {
     String bars =
         "The available current, split in the order the light meets the layers"
             + (drawn == null ? "." : ": as drawn above, found below.");
-    blocks.add(
-        new Block.Picture("fig-light", Figure.of(new LightBar(drawn, found), bars), bars));
+    blocks.add(new Block.Picture("fig-light", Figure.of(new LightBar(drawn, found), bars), bars));
     String steps = "From the available current, loss by loss, to what the subcells share, mA cm⁻².";
-    blocks.add(
-        new Block.Picture("fig-waterfall", Figure.of(new Waterfall(found), steps), steps));
+    blocks.add(new Block.Picture("fig-waterfall", Figure.of(new Waterfall(found), steps), steps));
     blocks.add(new Block.Grid(ledger(drawn, found), false));
   }
 
@@ -125,8 +123,7 @@ public final class LightSection {
     }
     List<Series> all = new ArrayList<>(Spectra.subcells(found));
     all.addAll(Spectra.losses(found));
-    Chart chart =
-        chart("spectrum", Kind.STACK, "Where the light goes, by wavelength", nm, all);
+    Chart chart = chart("spectrum", Kind.STACK, "Where the light goes, by wavelength", nm, all);
     if (nm.size() == 1) {
       blocks.add(new Block.Grid(Tables.behind(chart), false));
       return;

@@ -18,8 +18,7 @@ public final class OpinionSection {
 
   /** The section; absent without a second opinion. */
   public static Optional<Section> of(RunResult result) {
-    List<Opinion> opinions =
-        Objects.requireNonNullElse(result.secondOpinion(), List.<Opinion>of());
+    List<Opinion> opinions = Objects.requireNonNullElse(result.secondOpinion(), List.<Opinion>of());
     if (opinions.isEmpty()) {
       return Optional.empty();
     }

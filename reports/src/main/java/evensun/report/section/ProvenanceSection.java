@@ -73,7 +73,9 @@ public final class ProvenanceSection {
 
   private static Table inputs(Provenance provenance) {
     Table.Builder table =
-        new Table.Builder("table-inputs", "Every input with its SHA-256").words("file").words("SHA-256");
+        new Table.Builder("table-inputs", "Every input with its SHA-256")
+            .words("file")
+            .words("SHA-256");
     provenance.inputs().forEach(input -> table.row(input.path(), input.sha256()));
     return table.build();
   }

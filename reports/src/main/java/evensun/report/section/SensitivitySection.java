@@ -48,8 +48,7 @@ public final class SensitivitySection {
     }
     return blocks.isEmpty()
         ? Optional.empty()
-        : Optional.of(
-            new Section("sensitivities", "Sensitivities", heading(rows, unit), blocks));
+        : Optional.of(new Section("sensitivities", "Sensitivities", heading(rows, unit), blocks));
   }
 
   private static String unit(RunResult result) {
@@ -170,7 +169,8 @@ public final class SensitivitySection {
       }
     }
     double margin = Math.max(1e-3, (high - low) * 0.08);
-    return Axis.linear(unit.equals(Numbers.MA) ? "current" : "aim", unit, low - margin, high + margin);
+    return Axis.linear(
+        unit.equals(Numbers.MA) ? "current" : "aim", unit, low - margin, high + margin);
   }
 
   private static double found(RunResult result, WhatIf whatIf) {

@@ -55,7 +55,9 @@ final class Spectra {
             .toList();
     List<Map.Entry<String, List<Double>>> largest =
         parasitic.stream()
-            .sorted((a, b) -> Double.compare(carried(outcome, b.getValue()), carried(outcome, a.getValue())))
+            .sorted(
+                (a, b) ->
+                    Double.compare(carried(outcome, b.getValue()), carried(outcome, a.getValue())))
             .limit(MOST_LAYERS)
             .toList();
     List<Series> series = new ArrayList<>();

@@ -114,7 +114,9 @@ public final class StackSection {
           signed(v),
           range(v.equallyGoodLow(), v.equallyGoodHigh(), v.unit()),
           range(v.low(), v.high(), v.unit()) + step(v),
-          v.bound() == null ? "" : "stands on the " + (v.bound().equals("low") ? "lower" : "upper"));
+          v.bound() == null
+              ? ""
+              : "stands on the " + (v.bound().equals("low") ? "lower" : "upper"));
     }
     return table.build();
   }

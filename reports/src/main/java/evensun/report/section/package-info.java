@@ -1,4 +1,7 @@
-/** What each section of the page says about a result: one class per section, absent where there is no data. */
+/**
+ * What each section of the page says about a result: one class per section, absent where there is
+ * no data.
+ */
 @NullMarked
 package evensun.report.section;
 

@@ -22,7 +22,9 @@ public final class Numbers {
       return "–";
     }
     BigDecimal rounded = BigDecimal.valueOf(value).setScale(decimals, RoundingMode.HALF_UP);
-    return rounded.signum() < 0 ? MINUS + rounded.negate().toPlainString() : rounded.toPlainString();
+    return rounded.signum() < 0
+        ? MINUS + rounded.negate().toPlainString()
+        : rounded.toPlainString();
   }
 
   /** As {@link #fixed}, with a plus sign where the value is positive. */
