@@ -1,5 +1,8 @@
 package evensun.report;
 
+import evensun.report.summary.MarkdownLayout;
+import evensun.report.summary.Summary;
+import evensun.report.summary.TextLayout;
 import evensun.result.RunResult;
 
 /** The decision in a few lines, for the end of a command. */
@@ -8,14 +11,23 @@ public final class ClosingSummary {
   private ClosingSummary() {}
 
   /**
-   * The summary as text.
+   * The summary as text: the decision, the verdict, currents, varied values with the range that is
+   * equally good, the ledger with its total, findings, the report.
    *
    * @param result the result
    * @param reportPath path of the report, empty for none
    */
   public static String text(RunResult result, String reportPath) {
-    StringBuilder text = new StringBuilder(result.title()).append('\n');
-    result.found().subcells().forEach(s -> text.append("  ").append(s).append('\n'));
-    return text.append(reportPath).append('\n').toString();
+    return TextLayout.of(Summary.of(result), reportPath);
+  }
+
+  /**
+   * The same as Markdown.
+   *
+   * @param result the result
+   * @param reportPath path of the report, empty for none
+   */
+  public static String markdown(RunResult result, String reportPath) {
+    return MarkdownLayout.of(Summary.of(result), reportPath);
   }
 }

@@ -84,6 +84,28 @@ final class SampleRuns {
         provenance());
   }
 
+  /** The full run under another title. */
+  static RunResult titled(String title) {
+    RunResult r = full();
+    return new RunResult(
+        r.formatVersion(),
+        r.kind(),
+        title,
+        r.found(),
+        r.asDrawn(),
+        r.search(),
+        r.materials(),
+        r.spectrum(),
+        r.depth(),
+        r.angular(),
+        r.sensitivities(),
+        r.whatIf(),
+        r.secondOpinion(),
+        r.findings(),
+        r.cautions(),
+        r.provenance());
+  }
+
   /** The absorber thickness at which the toy's subcells balance, by bisection. */
   static double balancedNm() {
     double low = 50;

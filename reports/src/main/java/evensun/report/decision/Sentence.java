@@ -96,7 +96,9 @@ public final class Sentence {
       return "one subcell";
     }
     return limiting == null
-        ? "balanced to " + Numbers.ma(mismatch)
+        ? "balanced to "
+            + (mismatch < NOTICEABLE ? "better than " : "")
+            + Numbers.ma(Math.max(mismatch, 2 * NOTICEABLE))
         : Clip.to(limiting, 40)
             + " limits, "
             + Numbers.ma(mismatch)

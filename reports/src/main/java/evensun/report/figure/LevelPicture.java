@@ -3,6 +3,7 @@ package evensun.report.figure;
 import evensun.report.figure.Shape.Anchor;
 import evensun.report.text.Clip;
 import evensun.report.text.Numbers;
+import evensun.result.Outcome;
 import java.util.List;
 import org.jspecify.annotations.Nullable;
 
@@ -120,8 +121,15 @@ public record LevelPicture(List<Vessel> vessels, @Nullable Double levelMaPerCm2)
       String unused = Numbers.signed(surplus, 2) + (slot > 110 ? " unused" : "");
       canvas.label(centre, bottom + 36, unused, Anchor.MIDDLE, "tick");
     } else if (levelMaPerCm2 != null && vessels.size() > 1) {
-      canvas.label(centre, bottom + 36, "sets the level", Anchor.MIDDLE, "tick");
+      canvas.label(
+          centre, bottom + 36, balanced() ? "balanced" : "sets the level", Anchor.MIDDLE, "tick");
     }
+  }
+
+  private boolean balanced() {
+    double low = vessels.stream().mapToDouble(Vessel::maPerCm2).min().orElse(0);
+    double high = vessels.stream().mapToDouble(Vessel::maPerCm2).max().orElse(0);
+    return high - low < Outcome.BALANCED_MA_PER_CM2;
   }
 
   private void level(Canvas canvas, double widthPx, double room, double pxPerMa) {

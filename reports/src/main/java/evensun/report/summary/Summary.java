@@ -1,0 +1,201 @@
+package evensun.report.summary;
+
+import evensun.report.decision.Sentence;
+import evensun.report.decision.VerdictRules;
+import evensun.report.figure.Budget;
+import evensun.report.figure.Share;
+import evensun.report.page.Verdict;
+import evensun.report.text.Clip;
+import evensun.report.text.Keys;
+import evensun.report.text.Numbers;
+import evensun.result.Electrical;
+import evensun.result.FindingRecord;
+import evensun.result.Outcome;
+import evensun.result.Outcome.SubcellOutcome;
+import evensun.result.RunResult;
+import evensun.result.SearchRecord;
+import evensun.result.SearchRecord.VariableRecord;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import org.jspecify.annotations.Nullable;
+
+/**
+ * The decision in a few lines, as data.
+ *
+ * @param title title of the scenario
+ * @param sentence the decision in one sentence
+ * @param verdict whether to decide on it
+ * @param tables numbers that carry it
+ * @param closing lines at the end
+ */
+public record Summary(
+    String title, String sentence, String verdict, List<Listing> tables, List<String> closing) {
+
+  private static final int MOST_LETTERS = 100;
+
+  /**
+   * A small table.
+   *
+   * @param header heads of the columns; the first column holds words, the others numbers
+   * @param rows its rows
+   */
+  public record Listing(List<String> header, List<List<String>> rows) {}
+
+  /** The summary of a result. */
+  public static Summary of(RunResult result) {
+    Verdict verdict = VerdictRules.of(result);
+    List<Listing> tables = new ArrayList<>();
+    tables.add(currents(result));
+    SearchRecord search = result.search();
+    if (search != null && !search.variables().isEmpty()) {
+      tables.add(varied(search));
+    }
+    Budget.of(result.found()).ifPresent(found -> tables.add(ledger(result, found)));
+    String points =
+        verdict.level() == Verdict.Level.CHECK ? " (" + verdict.reasons().size() + ")" : "";
+    return new Summary(
+        Clip.to(result.title(), MOST_LETTERS),
+        Sentence.of(result),
+        verdict.level().words() + points,
+        tables,
+        List.of(findings(result.findings())));
+  }
+
+  private static Listing currents(RunResult result) {
+    Outcome found = result.found();
+    Outcome drawn = result.asDrawn();
+    List<List<String>> rows = new ArrayList<>();
+    for (SubcellOutcome subcell : found.subcells()) {
+      add(
+          rows,
+          drawn != null,
+          Clip.to(subcell.name(), 40),
+          subcell.photocurrentMaPerCm2(),
+          current(drawn, subcell.name()));
+    }
+    add(
+        rows,
+        drawn != null,
+        "matched current",
+        found.matchedCurrentMaPerCm2(),
+        drawn == null ? null : drawn.matchedCurrentMaPerCm2());
+    add(
+        rows,
+        drawn != null,
+        "mismatch",
+        found.mismatchMaPerCm2(),
+        drawn == null ? null : drawn.mismatchMaPerCm2());
+    Electrical power = found.electrical();
+    Electrical before = drawn == null ? null : drawn.electrical();
+    if (power != null) {
+      add(
+          rows,
+          drawn != null,
+          "efficiency, %",
+          power.efficiencyPercent(),
+          before == null ? null : before.efficiencyPercent());
+    }
+    List<String> header =
+        drawn == null
+            ? List.of("currents, " + Numbers.MA, "as drawn")
+            : List.of("currents, " + Numbers.MA, "as drawn", "found", "change");
+    return new Listing(header, rows);
+  }
+
+  private static void add(
+      List<List<String>> rows,
+      boolean compared,
+      String label,
+      @Nullable Double value,
+      @Nullable Double drawn) {
+    if (value == null) {
+      return;
+    }
+    String now = Numbers.fixed(value, 2);
+    if (!compared) {
+      rows.add(List.of(label, now));
+      return;
+    }
+    String before = drawn == null ? "" : Numbers.fixed(drawn, 2);
+    rows.add(List.of(label, before, now, drawn == null ? "" : Numbers.signed(value - drawn, 2)));
+  }
+
+  private static @Nullable Double current(@Nullable Outcome outcome, String subcell) {
+    return outcome == null
+        ? null
+        : outcome.subcells().stream()
+            .filter(s -> s.name().equals(subcell))
+            .findFirst()
+            .map(SubcellOutcome::photocurrentMaPerCm2)
+            .orElse(null);
+  }
+
+  private static Listing varied(SearchRecord search) {
+    List<List<String>> rows = new ArrayList<>();
+    for (VariableRecord v : search.variables()) {
+      rows.add(
+          List.of(
+              Clip.to(Keys.words(v.key()), 48),
+              Numbers.bare(v.drawn(), v.unit()),
+              "→",
+              Numbers.quantity(v.found(), v.unit()),
+              equallyGood(v)));
+    }
+    return new Listing(List.of("varied", "as drawn", "", "found", "equally good"), rows);
+  }
+
+  private static String equallyGood(VariableRecord v) {
+    Double low = v.equallyGoodLow();
+    Double high = v.equallyGoodHigh();
+    String range =
+        low == null || high == null
+            ? ""
+            : Numbers.bare(low, v.unit()) + " to " + Numbers.bare(high, v.unit());
+    return v.bound() == null ? range : (range + " (on its " + v.bound() + " bound)").strip();
+  }
+
+  private static Listing ledger(RunResult result, Budget found) {
+    Outcome asDrawn = result.asDrawn();
+    Optional<Budget> drawn = asDrawn == null ? Optional.empty() : Budget.of(asDrawn);
+    List<List<String>> rows = new ArrayList<>();
+    for (Share share : found.shares()) {
+      String label = Clip.to(share.label(), 40);
+      add(
+          rows,
+          drawn.isPresent(),
+          label,
+          share.maPerCm2(),
+          drawn.map(d -> d.of(share.label())).orElse(null));
+    }
+    add(
+        rows,
+        drawn.isPresent(),
+        "total",
+        found.totalMaPerCm2(),
+        drawn.map(Budget::totalMaPerCm2).orElse(null));
+    String head = "of " + Numbers.fixed(found.incidentMaPerCm2(), 2) + " " + Numbers.MA;
+    return new Listing(
+        drawn.isPresent()
+            ? List.of(head, "as drawn", "found", "change")
+            : List.of(head, "as drawn"),
+        rows);
+  }
+
+  private static String findings(List<FindingRecord> findings) {
+    if (findings.isEmpty()) {
+      return "No findings.";
+    }
+    FindingRecord first = findings.get(0);
+    return Numbers.count(findings.size(), "finding")
+        + "; first: "
+        + first.severity()
+        + ", "
+        + first.where()
+        + ": "
+        + first.message()
+        + " (evensun explain "
+        + first.code()
+        + ")";
+  }
+}
