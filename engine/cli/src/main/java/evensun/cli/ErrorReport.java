@@ -3,6 +3,7 @@ package evensun.cli;
 import evensun.pluginhost.PluginException;
 import evensun.scenario.Fault;
 import evensun.scenario.InputException;
+import evensun.spi.EvaluationFailed;
 import evensun.spi.UnsupportedProblem;
 import java.io.IOException;
 import java.io.PrintWriter;
@@ -49,6 +50,9 @@ final class ErrorReport {
     }
     if (e instanceof UnsupportedProblem) {
       return tell(json, ExitStatus.WRONG_INPUT, List.of(new Line("", 0, "", e.getMessage())));
+    }
+    if (e instanceof EvaluationFailed) {
+      return tell(json, ExitStatus.WRONG_PLUGIN, List.of(new Line("", 0, "", e.getMessage())));
     }
     if (e instanceof CancellationException) {
       return tell(json, ExitStatus.INTERRUPTED, List.of(new Line("", 0, "", e.getMessage())));

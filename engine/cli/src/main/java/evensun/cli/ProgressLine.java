@@ -5,21 +5,33 @@ import evensun.search.Progress;
 import evensun.search.SearchListener;
 import evensun.search.SearchState;
 import evensun.search.SearchStateCodec;
+import java.io.IOException;
 import java.io.PrintStream;
+import java.io.UncheckedIOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.nio.file.StandardOpenOption;
 import java.util.Locale;
 import org.jspecify.annotations.Nullable;
+import tools.jackson.databind.json.JsonMapper;
+import tools.jackson.databind.node.ObjectNode;
 
 /** Shows how a search goes, on a terminal only, and saves its state at intervals. */
 final class ProgressLine implements SearchListener {
 
+  /** Name of the log of the progress in a run's folder: one JSON document per line. */
+  static final String LOG = "progress.jsonl";
+
   /** Name of the saved state in a run's folder. */
   static final String STATE = "search-state.json";
 
+  private static final JsonMapper JSON = JsonMapper.builder().build();
   private static final long SHOW_NANOS = 200_000_000L;
   private static final long SAVE_NANOS = 5_000_000_000L;
 
   private final @Nullable PrintStream terminal;
   private final RunFolder folder;
+  private final Path log;
   private final String unit;
   private long shown = System.nanoTime();
   private long saved = System.nanoTime();
@@ -29,15 +41,37 @@ final class ProgressLine implements SearchListener {
   ProgressLine(@Nullable PrintStream terminal, RunFolder folder, String unit) {
     this.terminal = terminal;
     this.folder = folder;
+    this.log = folder.claim(LOG);
     this.unit = unit;
   }
 
   @Override
   public void progress(Progress progress) {
+    log(progress);
     long now = System.nanoTime();
     if (terminal != null && now - shown > SHOW_NANOS) {
       shown = now;
       show(text(progress));
+    }
+  }
+
+  private void log(Progress progress) {
+    ObjectNode line = JSON.createObjectNode();
+    line.put("phase", progress.phase());
+    line.put("generation", progress.generation());
+    line.put("evaluations", progress.evaluations());
+    if (Double.isFinite(progress.best())) {
+      line.put("best", progress.best());
+    }
+    line.put("elapsedSeconds", Math.round(progress.elapsedSeconds() * 1000) / 1000.0);
+    try {
+      Files.writeString(
+          log,
+          JSON.writeValueAsString(line) + "\n",
+          StandardOpenOption.CREATE,
+          StandardOpenOption.APPEND);
+    } catch (IOException e) {
+      throw new UncheckedIOException("cannot write " + log, e);
     }
   }
 

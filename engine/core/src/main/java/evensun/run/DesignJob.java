@@ -24,6 +24,7 @@ import evensun.spi.Severity;
 import evensun.stack.ResolvedStack;
 import java.util.LinkedHashMap;
 import java.util.Map;
+import java.util.concurrent.CancellationException;
 import java.util.function.BooleanSupplier;
 import org.jspecify.annotations.Nullable;
 
@@ -83,6 +84,7 @@ public final class DesignJob {
    * @param cancelled whether the user asked to stop
    * @param repeatCommand command that repeats the run
    * @throws EvaluationFailed when not a single design could be evaluated
+   * @throws CancellationException when it was stopped before the first one
    */
   public RunResult run(
       SearchSettings settings,
@@ -95,9 +97,12 @@ public final class DesignJob {
     SearchOutcome outcome = resumed == null ? search.run() : search.resume(resumed);
     Candidate best = outcome.best();
     if (best == null) {
+      if (cancelled.getAsBoolean()) {
+        throw new CancellationException("stopped before a design had been evaluated");
+      }
       throw new EvaluationFailed(
           outcome.failures().isEmpty()
-              ? "the search was stopped before it had evaluated a design"
+              ? "no design was evaluated"
               : "no design could be evaluated: "
                   + outcome.failures().get(0).first().verdict().failure());
     }
