@@ -23,7 +23,14 @@ final class LibraryFile {
     return switch (file.value("model").orElse("table")) {
       case "table" -> table(file, record);
       case "constant" -> constant(file, record);
-      case "moved-edge" -> movedEdge(file, record);
+      case "sum" -> ModelMaterial.of(record, LibraryTerms.dispersion(file));
+      case "moved-edge" ->
+          tunable(
+              file,
+              record,
+              new MovedEdge(file.values("anchor").stream().map(EdgeShape::load).toList()));
+      case "alloy" -> tunable(file, record, Alloy.load(file.required("shape")));
+      case "ideal" -> ideal(file, record);
       default -> throw new IllegalStateException("unknown model in " + resource);
     };
   }
@@ -70,18 +77,30 @@ final class LibraryFile {
     return TableMaterial.of(record, table, true, OptionalDouble.empty());
   }
 
-  private static Material movedEdge(DataFile file, MaterialRecord record) {
-    double[] tuning = numbers(file.required("tuning-ev"));
-    return new MovedEdgeMaterial(
+  private static Material tunable(DataFile file, MaterialRecord record, GapCurves curves) {
+    return new TunableMaterial(
         record,
-        new Tuning(tuning[0], tuning[1], tuning[2]),
-        file.values("anchor").stream().map(EdgeShape::load).toList(),
+        tuning(file),
+        curves,
         file.values("marked-ev").stream().map(LibraryFile::marked).toList());
   }
 
-  private static MovedEdgeMaterial.MarkedRange marked(String value) {
+  private static Material ideal(DataFile file, MaterialRecord record) {
+    return IdealAbsorber.of(
+        record,
+        tuning(file),
+        Double.parseDouble(file.required("n")),
+        Double.parseDouble(file.required("absorption-per-cm")));
+  }
+
+  private static Tuning tuning(DataFile file) {
+    double[] tuning = numbers(file.required("tuning-ev"));
+    return new Tuning(tuning[0], tuning[1], tuning[2]);
+  }
+
+  private static TunableMaterial.MarkedRange marked(String value) {
     String[] parts = value.split(",", 3);
-    return new MovedEdgeMaterial.MarkedRange(
+    return new TunableMaterial.MarkedRange(
         Double.parseDouble(parts[0]), Double.parseDouble(parts[1]), parts[2]);
   }
 

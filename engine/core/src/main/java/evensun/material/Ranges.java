@@ -11,6 +11,18 @@ final class Ranges {
     return String.format(Locale.ROOT, "%.6g", nm).replaceAll("\\.?0+$", "") + " nm";
   }
 
+  /** Refuses a grid that leaves the range of a record. */
+  static void require(MaterialRecord record, double[] wavelengthNm) {
+    double first = wavelengthNm[0];
+    double last = wavelengthNm[wavelengthNm.length - 1];
+    if (first < record.fromNm() || last > record.toNm()) {
+      throw new MaterialRangeException(
+          message(record.name(), record.fromNm(), record.toNm(), first, last),
+          record.fromNm(),
+          record.toNm());
+    }
+  }
+
   static String message(String name, double fromNm, double toNm, double gridFrom, double gridTo) {
     return "material \""
         + name
