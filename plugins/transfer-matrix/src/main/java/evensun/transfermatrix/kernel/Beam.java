@@ -14,4 +14,9 @@ public record Beam(double cosine, double s, double p) {
   boolean normal() {
     return cosine == 1;
   }
+
+  /** As equals, but free of boxing. */
+  boolean same(Beam other) {
+    return other != null && cosine == other.cosine && s == other.s && p == other.p;
+  }
 }
