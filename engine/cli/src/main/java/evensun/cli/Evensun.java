@@ -15,6 +15,7 @@ import picocli.CommandLine.Mixin;
       AssessCommand.class,
       DesignCommand.class,
       PluginsCommand.class,
+      SchemaCommand.class,
     })
 final class Evensun implements Callable<Integer> {
 

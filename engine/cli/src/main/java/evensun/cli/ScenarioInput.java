@@ -6,16 +6,16 @@ import evensun.scenario.Scenario;
 import evensun.scenario.Source;
 import evensun.scenario.reader.ScenarioReader;
 import evensun.scenario.reader.Setting;
-import java.io.IOException;
+import evensun.scenario.reader.Sources;
 import java.io.InputStream;
-import java.nio.charset.StandardCharsets;
+import java.nio.file.InvalidPathException;
 import java.nio.file.Path;
 import java.util.List;
 
 /** Reads the scenario that a command names: a file, or standard input for {@code -}. */
 final class ScenarioInput {
 
-  private static final int LARGEST_BYTES = 16 << 20;
+  private static final String STANDARD_INPUT = "<standard input>";
 
   private ScenarioInput() {}
 
@@ -25,17 +25,13 @@ final class ScenarioInput {
   }
 
   static Source source(String argument, InputStream in) {
-    if (!argument.equals("-")) {
-      return ScenarioReader.source(Path.of(argument));
+    if (argument.equals("-")) {
+      return Sources.open(STANDARD_INPUT, Path.of("").toAbsolutePath(), in);
     }
     try {
-      byte[] bytes = in.readNBytes(LARGEST_BYTES);
-      return new Source(
-          "<standard input>",
-          Path.of("").toAbsolutePath(),
-          new String(bytes, StandardCharsets.UTF_8));
-    } catch (IOException e) {
-      throw new InputException(Place.of("<standard input>"), "cannot be read: " + e.getMessage());
+      return ScenarioReader.source(Path.of(argument));
+    } catch (InvalidPathException e) {
+      throw new InputException(Place.of("SCENARIO"), "is not the name of a file: " + e.getReason());
     }
   }
 

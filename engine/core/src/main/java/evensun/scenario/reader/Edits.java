@@ -48,8 +48,11 @@ final class Edits {
     return root;
   }
 
-  /** Reads the value as it would be read in the file, then moves it to the place of the setting. */
+  /** Lists, mappings and quoted text are read as in the file; everything else stands for itself. */
   private static Optional<Node> parse(Setting setting, Faults faults) {
+    if (setting.value().isEmpty() || "[{\"'".indexOf(setting.value().charAt(0)) < 0) {
+      return Optional.of(new Scalar(setting.value(), false, setting.place()));
+    }
     Faults own = new Faults();
     Source text = new Source("value", Path.of(""), setting.value());
     Node value = TreeReader.read(text, own);
@@ -138,12 +141,13 @@ final class Edits {
   }
 
   private static String hint(Mapping root, String key) {
-    int dot = key.lastIndexOf('.');
     Set<String> known = new LinkedHashSet<>(layerNames(root));
     known.addAll(RootBinder.KEYS);
-    String head = dot < 0 ? key : key.substring(0, key.indexOf('.'));
+    int dot = key.indexOf('.');
+    String head = dot < 0 ? key : key.substring(0, dot);
+    String rest = dot < 0 || dot == key.length() - 1 ? "" : key.substring(dot);
     return Nearest.of(head, known)
-        .map(n -> "; did you mean " + n + (dot < 0 ? "" : key.substring(key.indexOf('.'))) + "?")
+        .map(n -> "; did you mean " + n + rest + "?")
         .orElse("; write LAYER.KEY or SECTION.KEY, such as perovskite.thicknessNm or grid.stepNm");
   }
 

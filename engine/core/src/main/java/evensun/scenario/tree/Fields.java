@@ -211,28 +211,37 @@ public final class Fields {
 
   private void unknown(Entry entry, String previous, List<String> unused) {
     String key = entry.key();
-    boolean digits = !key.isEmpty() && key.chars().allMatch(Character::isDigit);
-    if (digits && entry.value() instanceof Scalar s && s.isNothing() && !previous.isEmpty()) {
+    if (isDecimalPart(entry) && !previous.isEmpty()) {
+      String number = shown(previous);
       fault(
           entry.keyPlace(),
           previous
-              + " seems to have a decimal comma ("
-              + shown(previous)
-              + ","
-              + key
-              + "); write "
-              + shown(previous)
-              + "."
-              + key);
+              + " seems to have a decimal comma (%1$s,%2$s); write %1$s.%2$s"
+                  .formatted(number, key));
       return;
     }
-    Optional<String> nearest = Nearest.of(key, unused);
-    nearest.ifPresent(missing::remove);
+    String unspaced = key.replaceAll("\\h+", "");
+    boolean spaced = !unspaced.equals(key) && asked.contains(unspaced);
+    Optional<String> meant = spaced ? Optional.of(unspaced) : nearest(key, unused);
+    meant.ifPresent(missing::remove);
     String hint =
-        nearest
-            .map(n -> "; did you mean " + n + "?" + unitHint(key, n))
-            .orElse("; known here: " + Shown.list(asked));
+        spaced
+            ? "; it holds a space, write " + unspaced
+            : meant
+                .map(m -> "; did you mean " + m + "?" + unitHint(key, m))
+                .orElse("; known here: " + Shown.list(asked));
     fault(entry.keyPlace(), "unknown key " + Shown.plain(key) + hint);
+  }
+
+  /** A key that is not written yet is the likelier one to have been meant. */
+  private Optional<String> nearest(String key, List<String> unused) {
+    return Nearest.of(key, unused).or(() -> Nearest.of(key, asked));
+  }
+
+  /** In {@code {a: 1,5}} YAML sees the key 5 with nothing as its value. */
+  private static boolean isDecimalPart(Entry entry) {
+    boolean digits = !entry.key().isEmpty() && entry.key().chars().allMatch(Character::isDigit);
+    return digits && entry.value() instanceof Scalar s && s.isNothing();
   }
 
   private static String unitHint(String key, String nearest) {

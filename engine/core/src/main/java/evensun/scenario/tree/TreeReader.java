@@ -107,10 +107,8 @@ public final class TreeReader {
           place, "*" + Shown.plain(parser.getString()) + " is an alias; write the value out here");
       return true;
     }
-    if (parser.getObjectId() != null) {
-      faults.add(
-          place,
-          "&" + Shown.plain(String.valueOf(parser.getObjectId())) + " is an anchor; remove it");
+    if (!json && characterAt(place) == '&') {
+      faults.add(place, "there is an anchor (&) here; remove it");
       return true;
     }
     if (parser.getTypeId() != null) {

@@ -1,6 +1,7 @@
 package evensun.scenario.reader;
 
 import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.catchThrowable;
 
 import com.networknt.schema.InputFormat;
 import com.networknt.schema.Schema;
@@ -8,7 +9,6 @@ import com.networknt.schema.SchemaRegistry;
 import com.networknt.schema.SpecificationVersion;
 import evensun.scenario.InputException;
 import java.io.IOException;
-import java.io.InputStream;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
@@ -26,12 +26,8 @@ class ScenarioSchemaTest {
   private final Schema schema = schema();
 
   private static Schema schema() {
-    try (InputStream in =
-        ScenarioSchemaTest.class.getResourceAsStream("/evensun/scenario.schema.json")) {
-      return SchemaRegistry.withDefaultDialect(SpecificationVersion.DRAFT_2020_12).getSchema(in);
-    } catch (IOException e) {
-      throw new IllegalStateException(e);
-    }
+    return SchemaRegistry.withDefaultDialect(SpecificationVersion.DRAFT_2020_12)
+        .getSchema(ScenarioSchema.text());
   }
 
   static List<Path> scenarios() throws IOException {
@@ -116,8 +112,7 @@ class ScenarioSchemaTest {
     String text = ScenarioReaderTest.PLANAR.replace(right, wrong == null ? "" : wrong);
     assertThat(text).isNotEqualTo(ScenarioReaderTest.PLANAR);
     assertThat(schema.validate(text, InputFormat.YAML)).isNotEmpty();
-    assertThat(org.assertj.core.api.Assertions.catchThrowable(() -> read(text)))
-        .isInstanceOf(InputException.class);
+    assertThat(catchThrowable(() -> read(text))).isInstanceOf(InputException.class);
   }
 
   private static void read(String text) {
