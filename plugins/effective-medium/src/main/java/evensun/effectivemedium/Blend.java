@@ -139,15 +139,14 @@ final class Blend {
       return;
     }
     System.arraycopy(fractions, 0, fraction[slot], 0, fractions.length);
-    int pure = pure(fractions);
-    if (pure >= 0) {
-      System.arraycopy(rowN[pure], 0, n[slot], 0, n[slot].length);
-      System.arraycopy(rowK[pure], 0, k[slot], 0, k[slot].length);
-      Permittivity.ofIndex(n[slot], k[slot], mixedRe, mixedIm);
-    } else {
-      blend(slot, fractions);
+    if (permittivity(slot, fractions)) {
+      Permittivity.toIndex(mixedRe, mixedIm, n[slot], k[slot]);
     }
-    LossShares.fill(epsRe, epsIm, fractions, fieldFactor(), mixedRe, mixedIm, share[slot]);
+    finish(slot);
+  }
+
+  private void finish(int slot) {
+    LossShares.fill(epsRe, epsIm, fraction[slot], fieldFactor(), mixedRe, mixedIm, share[slot]);
     revision[slot] = Design.nextRevision();
     stale[slot] = false;
   }
@@ -167,7 +166,15 @@ final class Blend {
     return first;
   }
 
-  private void blend(int slot, double[] f) {
+  /** Fills the mixed permittivity; false where it has written the index of the slot already. */
+  private boolean permittivity(int slot, double[] f) {
+    int pure = pure(f);
+    if (pure >= 0) {
+      System.arraycopy(rowN[pure], 0, n[slot], 0, n[slot].length);
+      System.arraycopy(rowK[pure], 0, k[slot], 0, k[slot].length);
+      Permittivity.ofIndex(n[slot], k[slot], mixedRe, mixedIm);
+      return false;
+    }
     switch (rule) {
       case BRUGGEMAN -> bruggeman(f);
       case MAXWELL_GARNETT ->
@@ -183,10 +190,10 @@ final class Blend {
       case REFRACTIVE_INDEX -> {
         PowerMeans.mean(rowN, rowK, f, n[slot], k[slot]);
         Permittivity.ofIndex(n[slot], k[slot], mixedRe, mixedIm);
-        return;
+        return false;
       }
     }
-    Permittivity.toIndex(mixedRe, mixedIm, n[slot], k[slot]);
+    return true;
   }
 
   private void bruggeman(double[] f) {

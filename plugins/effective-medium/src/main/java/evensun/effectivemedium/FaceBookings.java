@@ -11,6 +11,9 @@ final class FaceBookings {
   private final Fit fit;
   private final Booking[] bookings;
 
+  /** [f] channel of the plain stack, −1 for a face that scatters. */
+  private final int[] plainChannel;
+
   /** [f][entry][w] shares, product of the face's and the neighbour's. */
   private final double[][][] shares;
 
@@ -20,12 +23,14 @@ final class FaceBookings {
     this.fit = fit;
     this.bookings = bookings;
     shares = new double[plan.faces().size()][][];
+    plainChannel = new int[shares.length];
     int most = 1;
     for (int l = 0; l < plan.bodies().size(); l++) {
       most = Math.max(most, channels.componentCount(l));
     }
     for (int f = 0; f < shares.length; f++) {
       boolean mixed = plan.facePiece(f) >= 0;
+      plainChannel[f] = mixed ? channels.plainChannel(plan.facePiece(f)) : -1;
       shares[f] = new double[mixed ? 2 * most : 0][plan.problem().wavelengthCount()];
     }
   }
@@ -33,14 +38,14 @@ final class FaceBookings {
   /** Fills the bookings of all rough faces after the fit was updated. */
   void update() {
     for (int f = 0; f < shares.length; f++) {
-      if (plan.facePiece(f) >= 0) {
+      if (plainChannel[f] >= 0) {
         update(f);
       }
     }
   }
 
   private void update(int f) {
-    Booking booking = bookings[channels.plainChannel(plan.facePiece(f))];
+    Booking booking = bookings[plainChannel[f]];
     booking.clear();
     int below = plan.faces().get(f).below();
     if (fit.above(f) == Fit.INCIDENT) {

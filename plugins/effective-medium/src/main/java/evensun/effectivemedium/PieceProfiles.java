@@ -4,6 +4,8 @@ import evensun.spi.Channel;
 import evensun.spi.DepthProfile;
 import evensun.spi.Design;
 import java.util.Arrays;
+import java.util.function.DoubleUnaryOperator;
+import java.util.stream.IntStream;
 
 /**
  * Absorption against depth of the layers as drawn. Depth counts from the mean plane of the upper
@@ -17,8 +19,6 @@ final class PieceProfiles {
   private final Fit fit;
   private final Booking[] bookings;
   private final DepthProfile below;
-  private final double[] one = new double[1];
-  private final double[][] row;
 
   PieceProfiles(Plan plan, ChannelMap channels, Fit fit, Booking[] bookings, DepthProfile below) {
     this.plan = plan;
@@ -26,7 +26,6 @@ final class PieceProfiles {
     this.fit = fit;
     this.bookings = bookings;
     this.below = below;
-    row = new double[1][plan.problem().wavelengthCount()];
   }
 
   /** As {@link DepthProfile#evaluate}, after the fit and the bookings were updated. */
@@ -36,27 +35,25 @@ final class PieceProfiles {
       throw new IllegalArgumentException(
           "no channel " + ChainedEvaluator.name(channel, plan) + " in this stack");
     }
-    double thickness = design.thicknessNm[channel.layer()];
-    for (int z = 0; z < depthNm.length; z++) {
-      Arrays.fill(into[z], 0);
-      double depth = Math.max(0, Math.min(thickness, depthNm[z]));
-      addBody(incidence, channel.layer(), drawn, depth, into[z]);
-      addFaces(incidence, channel.layer(), drawn, depth, thickness, into[z]);
+    for (double[] row : into) {
+      Arrays.fill(row, 0);
     }
-  }
-
-  private void addBody(int incidence, int l, int drawn, double depth, double[] into) {
+    int l = channel.layer();
+    double[] depths = inside(depthNm, design.thicknessNm[l]);
     double top = upperFaceNm(l);
-    int first = plan.firstPiece(l);
-    int count = plan.body(l).pieces();
-    for (int i = 0; i < count; i++) {
-      double bottom = top + fit.plain().thicknessNm[first + i];
-      if (depth >= top && (depth < bottom || i == count - 1 && depth <= bottom)) {
-        add(incidence, first + i, depth - top, drawn, into);
-        return;
-      }
+    for (int i = 0; i < plan.body(l).pieces(); i++) {
+      int piece = plan.firstPiece(l) + i;
+      double bottom = top + fit.plain().thicknessNm[piece];
+      boolean last = i == plan.body(l).pieces() - 1;
+      double from = top;
+      add(incidence, piece, drawn, depths, into, z -> z < bottom || last ? z - from : -1);
       top = bottom;
     }
+    addFaces(incidence, l, drawn, depths, design.thicknessNm[l], into);
+  }
+
+  private static double[] inside(double[] depthNm, double thicknessNm) {
+    return Arrays.stream(depthNm).map(z -> Math.max(0, Math.min(thicknessNm, z))).toArray();
   }
 
   /** Depth at which the body begins: below the half of a rough face that it gave way to. */
@@ -74,30 +71,51 @@ final class PieceProfiles {
   }
 
   private void addFaces(
-      int incidence, int l, int drawn, double depth, double thickness, double[] into) {
+      int incidence, int l, int drawn, double[] depths, double thicknessNm, double[][] into) {
     for (int f = 0; f < plan.faces().size(); f++) {
-      if (plan.facePiece(f) < 0) {
-        continue;
-      }
+      int piece = plan.facePiece(f);
       boolean upper = plan.faces().get(f).below() == l;
-      boolean lower = fit.above(f) == l;
-      double distance = upper ? depth : thickness - depth;
-      if ((upper || lower) && distance < halfNm(f)) {
-        add(incidence, plan.facePiece(f), halfNm(f) - distance, drawn, into);
-        add(incidence, plan.facePiece(f), halfNm(f) + distance, drawn, into);
+      if (piece >= 0 && (upper || fit.above(f) == l)) {
+        double half = halfNm(f);
+        DoubleUnaryOperator distance = z -> upper ? z : thicknessNm - z;
+        add(incidence, piece, drawn, depths, into, distance.andThen(x -> near(x, half, -x)));
+        add(incidence, piece, drawn, depths, into, distance.andThen(x -> near(x, half, x)));
       }
     }
   }
 
-  private void add(int incidence, int piece, double depthNm, int drawn, double[] into) {
-    int plainChannel = channels.plainChannel(piece);
-    Booking booking = bookings[plainChannel];
-    for (int e = 0; e < booking.count(); e++) {
+  /** Depth in a rough layer, −1 for places beyond it. */
+  private static double near(double distance, double half, double shift) {
+    return distance < half ? half + shift : -1;
+  }
+
+  /** Adds what a piece absorbs for a channel, at those depths that lie in it. */
+  private void add(
+      int incidence,
+      int piece,
+      int drawn,
+      double[] depths,
+      double[][] into,
+      DoubleUnaryOperator local) {
+    double thickness = fit.plain().thicknessNm[piece];
+    int[] at =
+        IntStream.range(0, depths.length)
+            .filter(z -> isIn(local.applyAsDouble(depths[z]), thickness))
+            .toArray();
+    Booking booking = bookings[channels.plainChannel(piece)];
+    for (int e = 0; e < booking.count() && at.length > 0; e++) {
       if (booking.channel(e) == drawn) {
-        one[0] = depthNm;
-        below.evaluate(fit.plain(), incidence, Channel.of(piece), one, row);
-        booking.addShare(e, row[0], into);
+        double[] own = Arrays.stream(at).mapToDouble(z -> local.applyAsDouble(depths[z])).toArray();
+        double[][] rows = new double[at.length][plan.problem().wavelengthCount()];
+        below.evaluate(fit.plain(), incidence, Channel.of(piece), own, rows);
+        for (int i = 0; i < at.length; i++) {
+          booking.addShare(e, rows[i], into[at[i]]);
+        }
       }
     }
+  }
+
+  private static boolean isIn(double depthNm, double thicknessNm) {
+    return depthNm >= 0 && depthNm <= thicknessNm;
   }
 }

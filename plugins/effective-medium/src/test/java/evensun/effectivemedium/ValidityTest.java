@@ -82,6 +82,7 @@ class ValidityTest {
     PreparedSolver prepared = stack.prepare();
     Design grown = stack.design();
     grown.thicknessNm[0] = 2000;
+    System.out.println(prepared.describe(stack.design()));
     assertThat(prepared.examine(stack.design())).isEmpty();
     assertThat(prepared.examine(grown)).extracting(Finding::code).containsExactly("grading-coarse");
   }
