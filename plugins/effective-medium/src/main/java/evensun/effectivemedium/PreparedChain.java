@@ -62,7 +62,7 @@ final class PreparedChain implements PreparedSolver {
       return;
     }
     int count = gradedCount();
-    double change = slices.get().change(design, count);
+    double change = slices.get().remainder(design, count);
     if (change > tolerance) {
       findings.add(
           new Finding(
@@ -70,9 +70,8 @@ final class PreparedChain implements PreparedSolver {
               Severity.WARNING,
               gradedNames(),
               Validity.text(
-                  "with %d slices a spectrum still changes by %.1e when they are halved, more than"
-                      + " the tolerance of %.1e; draw the layer nearer to this thickness and run"
-                      + " again",
+                  "with %d slices a spectrum is off by %.1e, more than the tolerance of %.1e; draw the"
+                      + " layer nearer to this thickness and run again",
                   count, change, tolerance)));
     }
   }

@@ -6,9 +6,9 @@ import evensun.spi.Response;
 import evensun.spi.Services;
 
 /**
- * How many slices a graded layer needs: doubled until R, T and every absorptance of the stack as
- * drawn change by less than the tolerance, both at the drawn thickness of the graded layers and at
- * twice that, so that a search has room.
+ * How many slices a graded layer needs: so many that finer ones change R, T and every absorptance
+ * by less than the tolerance, in the stack as drawn and with the graded layers twice as thick, so
+ * that a search has room.
  */
 final class SliceChoice {
 
@@ -41,26 +41,30 @@ final class SliceChoice {
     Design thick = thick();
     int count = FEWEST;
     while (count < MOST && !services.cancelled()) {
-      if (change(start, count) <= tolerance && change(thick, count) <= tolerance) {
-        return 2 * count;
+      if (remainder(start, count) <= tolerance && remainder(thick, count) <= tolerance) {
+        return count;
       }
-      count *= 2;
+      // 4, 6, 8, 12, 16, 24, ...
+      count = Integer.bitCount(count) == 1 ? count + count / 2 : count / 3 * 4;
     }
     return MOST;
   }
 
   /**
-   * Largest change of R, T and any absorptance from so many slices to twice as many.
+   * Largest change of R, T and any absorptance that infinitely fine slices would make. Slices
+   * converge with the square of their thickness, so all further halvings together change a third of
+   * what the first one does.
    *
    * @param design a design
    * @param count number of slices
    */
-  double change(Design design, int count) {
+  double remainder(Design design, int count) {
     Response coarse = spectra(design, count);
     Response fine = spectra(design, 2 * count);
     double change = difference(coarse.reflectance, fine.reflectance);
     change = Math.max(change, difference(coarse.transmittance, fine.transmittance));
-    return Math.max(change, difference(coarse.absorptance, fine.absorptance));
+    change = Math.max(change, difference(coarse.absorptance, fine.absorptance));
+    return change * 4 / 3;
   }
 
   private Response spectra(Design design, int count) {

@@ -3,9 +3,8 @@ package evensun.effectivemedium;
 import evensun.spi.Profile;
 
 /**
- * A profile cut into slices, finer where it changes faster. Each slice knows the mean and the
- * spread of the share over its depth: two equal parts at mean ± spread have the same first two
- * moments, so the mean permittivity of a slice is right to the fourth order of its thickness.
+ * A profile cut into slices, finer where it changes faster; each slice has the mean share over its
+ * depth, so that the amount of both ends is kept.
  */
 final class Slices {
 
@@ -14,12 +13,10 @@ final class Slices {
 
   private final double[] boundary;
   private final double[] share;
-  private final double[] spread;
 
-  private Slices(double[] boundary, double[] share, double[] spread) {
+  private Slices(double[] boundary, double[] share) {
     this.boundary = boundary;
     this.share = share;
-    this.spread = spread;
   }
 
   /**
@@ -31,13 +28,10 @@ final class Slices {
   static Slices of(Profile profile, int count) {
     double[] boundary = boundaries(profile, count);
     double[] share = new double[count];
-    double[] spread = new double[count];
     for (int i = 0; i < count; i++) {
       share[i] = mean(profile, boundary[i], boundary[i + 1]);
-      double rms = rms(profile, boundary[i], boundary[i + 1], share[i]);
-      spread[i] = Math.max(0, Math.min(rms, Math.min(share[i], 1 - share[i])));
     }
-    return new Slices(boundary, share, spread);
+    return new Slices(boundary, share);
   }
 
   int count() {
@@ -49,16 +43,9 @@ final class Slices {
     return boundary[slice + 1] - boundary[slice];
   }
 
-  /** Mean share of the lower end in a slice. */
+  /** Share of the lower end in a slice. */
   double share(int slice) {
     return share[slice];
-  }
-
-  /**
-   * Root mean square deviation of the share in a slice, kept such that share ± spread is a share.
-   */
-  double spread(int slice) {
-    return spread[slice];
   }
 
   /** The slice at a relative depth in [0, 1]. */
@@ -107,14 +94,5 @@ final class Slices {
       sum += profile.at(from + (to - from) * (i + 0.5) / POINTS_PER_SLICE);
     }
     return sum / POINTS_PER_SLICE;
-  }
-
-  private static double rms(Profile profile, double from, double to, double mean) {
-    double sum = 0;
-    for (int i = 0; i < POINTS_PER_SLICE; i++) {
-      double off = profile.at(from + (to - from) * (i + 0.5) / POINTS_PER_SLICE) - mean;
-      sum += off * off;
-    }
-    return Math.sqrt(sum / POINTS_PER_SLICE);
   }
 }

@@ -77,12 +77,11 @@ class ValidityTest {
 
   @Test
   void aGradedLayerFarFromItsDrawingIsSaid() {
-    Stacks stack = Stacks.on(4, 0);
+    Stacks stack = Stacks.on(1.6, 0);
     stack.layer("graded", 1, 0, 40, grading());
     PreparedSolver prepared = stack.prepare();
     Design grown = stack.design();
-    grown.thicknessNm[0] = 2000;
-    System.out.println(prepared.describe(stack.design()));
+    grown.thicknessNm[0] = 20_000;
     assertThat(prepared.examine(stack.design())).isEmpty();
     assertThat(prepared.examine(grown)).extracting(Finding::code).containsExactly("grading-coarse");
   }
