@@ -1,7 +1,6 @@
 package evensun.cli;
 
 import evensun.pluginhost.PluginHost;
-import evensun.result.ResultJson;
 import evensun.result.RunResult;
 import evensun.run.DesignJob;
 import evensun.run.Preparation;
@@ -21,6 +20,7 @@ import java.util.ArrayList;
 import java.util.List;
 import org.jspecify.annotations.Nullable;
 import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.Parameters;
 
@@ -43,14 +43,7 @@ final class DesignCommand extends BaseCommand {
       description = "Changes one value of the scenario, such as search.seed (repeatable).")
   List<String> settings = new ArrayList<>();
 
-  @Option(
-      names = "--out",
-      paramLabel = "DIR",
-      description = "Folder of the run (default: evensun-runs/SCENARIO-TIME).")
-  Path out;
-
-  @Option(names = "--force", description = "Replaces what Evensun wrote into --out earlier.")
-  boolean force;
+  @Mixin OutputOptions output = new OutputOptions();
 
   @Option(
       names = "--resume",
@@ -79,9 +72,7 @@ final class DesignCommand extends BaseCommand {
       result = search(job, folder, global, interruption);
       report = RunFiles.results(folder, result);
     }
-    console()
-        .out()
-        .print(global.json() ? ResultJson.write(result) : RunFiles.summary(result, report));
+    output.tell(console(), global, result, report);
     return interruption.getAsBoolean() ? ExitStatus.INTERRUPTED : ExitStatus.DONE;
   }
 
@@ -103,10 +94,10 @@ final class DesignCommand extends BaseCommand {
       return RunFolder.open(resume);
     }
     Path folder =
-        out != null
-            ? out
+        output.out != null
+            ? output.out
             : RunFolder.defaultFolder(Path.of(""), ScenarioInput.runName(scenario), Instant.now());
-    return RunFolder.create(folder, force);
+    return RunFolder.create(folder, output.force);
   }
 
   private RunResult search(

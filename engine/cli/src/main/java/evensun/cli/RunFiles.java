@@ -1,6 +1,5 @@
 package evensun.cli;
 
-import evensun.report.ClosingSummary;
 import evensun.report.ReportWriter;
 import evensun.result.ResultJson;
 import evensun.result.RunResult;
@@ -10,7 +9,6 @@ import evensun.run.Tables;
 import evensun.scenario.Scenario;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
-import org.jspecify.annotations.Nullable;
 
 /** Writes everything a run leaves behind. */
 final class RunFiles {
@@ -44,10 +42,5 @@ final class RunFiles {
     Tables.of(result).forEach(folder::write);
     folder.write(REPORT, ReportWriter.write(result).getBytes(StandardCharsets.UTF_8));
     return folder.file(REPORT);
-  }
-
-  /** The closing summary of a run. */
-  static String summary(RunResult result, @Nullable Path report) {
-    return ClosingSummary.text(result, report == null ? "" : report.toString());
   }
 }

@@ -16,18 +16,24 @@ import org.jspecify.annotations.Nullable;
 /** The stack as drawn, without a search. */
 public final class AssessJob {
 
+  /** Step of the angles in a report, in degrees. */
+  public static final double USUAL_ANGLE_STEP_DEG = 5;
+
   private final Preparation preparation;
-  private final boolean full;
+  private final boolean depth;
+  private final double angleStepDeg;
 
   /**
    * An assessment.
    *
    * @param preparation the scenario made ready
-   * @param full whether to add what only a report shows: depth profiles and angles
+   * @param depth whether to add generation against depth
+   * @param angleStepDeg step of the angles to add in degrees, 0 for none
    */
-  public AssessJob(Preparation preparation, boolean full) {
+  public AssessJob(Preparation preparation, boolean depth, double angleStepDeg) {
     this.preparation = preparation;
-    this.full = full;
+    this.depth = depth;
+    this.angleStepDeg = angleStepDeg;
   }
 
   /**
@@ -53,8 +59,8 @@ public final class AssessJob {
           null,
           Usage.materials(bench),
           Usage.spectrum(preparation.stack()),
-          full ? depth(bench) : null,
-          full ? angular(preparation, bench) : null,
+          depth ? depth(bench) : null,
+          angleStepDeg > 0 ? angular(preparation, bench, angleStepDeg) : null,
           null,
           null,
           null,
@@ -71,7 +77,7 @@ public final class AssessJob {
   /**
    * Currents against angle for the bench's design; null where the solver takes no oblique light.
    */
-  static @Nullable Angular angular(Preparation preparation, Bench bench) {
+  static @Nullable Angular angular(Preparation preparation, Bench bench, double stepDeg) {
     boolean useful =
         preparation.choice().solver().traits().oblique()
             && !preparation.choice().solver().traits().statistical()
@@ -79,7 +85,7 @@ public final class AssessJob {
     if (!useful) {
       return null;
     }
-    try (Model model = preparation.modelFor(AngleSweep.incidences(preparation.model(), 5));
+    try (Model model = preparation.modelFor(AngleSweep.incidences(preparation.model(), stepDeg));
         Bench oblique = model.newBench()) {
       oblique.copyFrom(bench);
       return AngleSweep.of(oblique);

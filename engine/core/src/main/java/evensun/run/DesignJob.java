@@ -139,7 +139,7 @@ public final class DesignJob {
           Usage.materials(bench),
           Usage.spectrum(preparation.stack()),
           AssessJob.depth(bench),
-          AssessJob.angular(preparation, bench),
+          AssessJob.angular(preparation, bench, AssessJob.USUAL_ANGLE_STEP_DEG),
           around.sensitivities(),
           around.curves(),
           new SecondOpinions(preparation, varied, aim, best).opinions(),

@@ -3,6 +3,7 @@ package evensun.run;
 import evensun.evaluation.Parameter;
 import evensun.scenario.Fault;
 import evensun.scenario.InputException;
+import evensun.scenario.Place;
 import evensun.scenario.SearchSpec;
 import evensun.search.Variable;
 import evensun.stack.ResolvedStack;
@@ -72,6 +73,24 @@ record Varied(List<Parameter> parameters, List<Variable> variables) {
               "\"%s\": the range must lie in [%s, %s] eV, the range of the material, but was [%s, %s] eV"
                   .formatted(
                       vary.key(), tuning.lowEv(), tuning.highEv(), vary.low(), vary.high())));
+    }
+  }
+
+  /**
+   * Checks one value of a bandgap against the range of its material.
+   *
+   * @throws InputException when it lies outside
+   */
+  static void checkInTuning(Parameter parameter, double value, ResolvedStack stack, Place place) {
+    if (parameter.kind() != Parameter.Kind.BANDGAP) {
+      return;
+    }
+    var tuning = stack.slots().get(parameter.index()).material().tuning().orElseThrow();
+    if (!(value >= tuning.lowEv() && value <= tuning.highEv())) {
+      throw new InputException(
+          place,
+          "%s must be in [%s, %s] eV, the range of the material, but was %s eV"
+              .formatted(parameter.key(), tuning.lowEv(), tuning.highEv(), value));
     }
   }
 
