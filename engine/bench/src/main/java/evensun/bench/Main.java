@@ -1,0 +1,98 @@
+package evensun.bench;
+
+import java.util.Collection;
+import java.util.Locale;
+import org.openjdk.jmh.profile.GCProfiler;
+import org.openjdk.jmh.results.Result;
+import org.openjdk.jmh.results.RunResult;
+import org.openjdk.jmh.runner.Runner;
+import org.openjdk.jmh.runner.RunnerException;
+import org.openjdk.jmh.runner.options.Options;
+import org.openjdk.jmh.runner.options.OptionsBuilder;
+import org.openjdk.jmh.runner.options.TimeValue;
+import org.openjdk.jmh.runner.options.VerboseMode;
+
+/** Runs the benchmarks and prints one line for each. */
+public final class Main {
+
+  private static final String USAGE =
+      "usage: java -jar evensun-bench.jar [REGEX] [--forks N] [--seconds S]";
+
+  private Main() {}
+
+  /** Entry point; see the package for the command. */
+  public static void main(String[] args) throws RunnerException {
+    String include = "evensun.bench";
+    int forks = 3;
+    double seconds = 0.5;
+    try {
+      for (int i = 0; i < args.length; i++) {
+        switch (args[i]) {
+          case "--forks" -> forks = Integer.parseInt(args[++i]);
+          case "--seconds" -> seconds = Double.parseDouble(args[++i]);
+          default -> include = args[i];
+        }
+      }
+    } catch (NumberFormatException | ArrayIndexOutOfBoundsException e) {
+      System.err.println(USAGE);
+      System.exit(2);
+    }
+    print(new Runner(options(include, forks, seconds)).run());
+  }
+
+  private static Options options(String include, int forks, double seconds) {
+    TimeValue time = TimeValue.milliseconds(Math.round(1000 * seconds));
+    return new OptionsBuilder()
+        .include(include)
+        .forks(forks)
+        .warmupIterations(6)
+        .warmupTime(time)
+        .measurementIterations(6)
+        .measurementTime(time)
+        .addProfiler(GCProfiler.class)
+        .jvmArgs("-Xmx512m", "-XX:+UseSerialGC")
+        .verbosity(VerboseMode.SILENT)
+        .build();
+  }
+
+  private static void print(Collection<RunResult> results) {
+    System.out.printf(
+        Locale.ROOT,
+        "Java %s, %s%n%-46s %10s %10s %14s %12s%n",
+        System.getProperty("java.version"),
+        System.getProperty("os.arch"),
+        "benchmark",
+        "median µs",
+        "least µs",
+        "ns/layer/wl",
+        "bytes/eval");
+    for (RunResult result : results) {
+      print(result);
+    }
+  }
+
+  private static void print(RunResult result) {
+    String name = result.getParams().getBenchmark();
+    String size = result.getParams().getParam("size");
+    String[] parts = (size == null ? "12x181" : size).split("x", -1);
+    double elements = Double.parseDouble(parts[0]) * Double.parseDouble(parts[1]);
+    double median = result.getPrimaryResult().getStatistics().getPercentile(50);
+    Result<?> bytes = allocation(result);
+    System.out.printf(
+        Locale.ROOT,
+        "%-46s %10.2f %10.2f %14.3f %12.3f%n",
+        name.substring("evensun.bench.".length()) + (size == null ? "" : " " + size),
+        median,
+        result.getPrimaryResult().getStatistics().getMin(),
+        1000 * median / elements,
+        bytes == null ? Double.NaN : bytes.getScore());
+  }
+
+  private static Result<?> allocation(RunResult result) {
+    return result.getSecondaryResults().entrySet().stream()
+        .filter(entry -> entry.getKey().endsWith("gc.alloc.rate.norm"))
+        .map(java.util.Map.Entry::getValue)
+        .findFirst()
+        .orElse(null);
+  }
+}
