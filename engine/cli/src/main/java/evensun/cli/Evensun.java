@@ -16,6 +16,7 @@ import picocli.CommandLine.Mixin;
       DesignCommand.class,
       PluginsCommand.class,
       SchemaCommand.class,
+      ExplainCommand.class,
     })
 final class Evensun implements Callable<Integer> {
 
