@@ -17,6 +17,7 @@ import tools.jackson.databind.node.ObjectNode;
 /** {@code evensun plugins}: what is loaded, from where, and what did not load and why. */
 @Command(
     name = "plugins",
+    subcommands = PluginsCheckCommand.class,
     description = {
       "Lists the solver plugins: what is loaded, from where, and what did not load and why.",
       "A plugin is code that runs with your rights. Plugins come from the distribution and from"
