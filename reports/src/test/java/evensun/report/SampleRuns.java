@@ -167,16 +167,29 @@ final class SampleRuns {
         efficiency + 0.42,
         List.of(
             new Electrical.SubcellElectrical(
-                "top", 1.68, 3.1e-23, 0.01, 1.4, 1.23, 1.09, jsc * 0.96, 0.71),
+                "top", 1.68, 3.1e-23, 0.01, 1.4, 1.23, 1.09, jsc * 0.96, 0.71, jsc, 0, 1.36, 1.12),
             new Electrical.SubcellElectrical(
-                "bottom", 1.12, 2.6e-12, 0.02, 1.0, 0.71, 0.61, jsc * 0.96, 0.66)),
+                "bottom",
+                1.12,
+                2.6e-12,
+                0.02,
+                1.0,
+                0.71,
+                0.61,
+                jsc * 0.96,
+                0.66,
+                jsc,
+                0,
+                0.83,
+                -1.12)),
         curve,
         cost,
         List.of(
             new Electrical.LadderStep("detailed-balance limit of these gaps", 43.9, null),
             new Electrical.LadderStep("reflection", -4.1, -3.9),
             new Electrical.LadderStep("parasitic absorption", -2.2, -2.0),
-            new Electrical.LadderStep("non-radiative recombination", efficiency - 37.6, null)));
+            new Electrical.LadderStep("non-radiative recombination", efficiency - 37.6, null)),
+        null);
   }
 
   private static SearchRecord search(Outcome drawn, Outcome found) {

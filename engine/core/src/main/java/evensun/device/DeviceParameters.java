@@ -10,9 +10,13 @@ import evensun.scenario.Connection;
  * @param seriesResistanceOhmCm2 series resistance in Ω cm², at least 0: of the two terminals; with
  *     independent subcells it lies in the circuit of each
  * @param temperatureK temperature in K, in [50, 1000]
+ * @param saturation where the radiative saturation currents come from
  */
 public record DeviceParameters(
-    Connection connection, double seriesResistanceOhmCm2, double temperatureK) {
+    Connection connection,
+    double seriesResistanceOhmCm2,
+    double temperatureK,
+    Saturation saturation) {
 
   /** Lowest temperature at which saturation currents are still ordinary numbers, in K. */
   public static final double LOWEST_TEMPERATURE_K = 50;
@@ -33,16 +37,16 @@ public record DeviceParameters(
 
   /** Without resistance, at 298.15 K. */
   public static DeviceParameters of(Connection connection) {
-    return new DeviceParameters(connection, 0, Constants.CELL_TEMPERATURE_K);
+    return new DeviceParameters(connection, 0, Constants.CELL_TEMPERATURE_K, Saturation.AUTOMATIC);
   }
 
   /** The same with another connection. */
   public DeviceParameters withConnection(Connection other) {
-    return new DeviceParameters(other, seriesResistanceOhmCm2, temperatureK);
+    return new DeviceParameters(other, seriesResistanceOhmCm2, temperatureK, saturation);
   }
 
   /** The same with another series resistance in Ω cm². */
   public DeviceParameters withSeriesResistance(double ohmCm2) {
-    return new DeviceParameters(connection, ohmCm2, temperatureK);
+    return new DeviceParameters(connection, ohmCm2, temperatureK, saturation);
   }
 }

@@ -19,6 +19,8 @@ import org.jspecify.annotations.Nullable;
  * @param curve current against voltage of the device; empty for independent subcells
  * @param mismatchCost efficiency and fill factor against the difference of the photocurrents
  * @param ladder from the detailed-balance limit to the device; the steps add up exactly
+ * @param limitingSubcell subcell of a series device with the least current at maximum power, its
+ *     luminescence counted; null where it is balanced or not in series
  */
 public record Electrical(
     String pairing,
@@ -33,7 +35,8 @@ public record Electrical(
     List<SubcellElectrical> subcells,
     List<CurvePoint> curve,
     List<MismatchPoint> mismatchCost,
-    List<LadderStep> ladder) {
+    List<LadderStep> ladder,
+    @Nullable String limitingSubcell) {
 
   /**
    * A subcell at the operating point.
@@ -47,6 +50,12 @@ public record Electrical(
    * @param operatingVoltageV voltage at the device's maximum power in V
    * @param operatingMaPerCm2 current at the device's maximum power in mA cm⁻²
    * @param efficiencyGainPerMaPerCm2 dη/dJ: absolute percent per mA cm⁻² of its photocurrent
+   * @param collectedMaPerCm2 photocurrent after collection
+   * @param luminescenceMaPerCm2 what it receives as luminescence of the subcell above, at the
+   *     device's maximum power
+   * @param radiativeLimitV open-circuit voltage if all recombination were radiative
+   * @param shortCircuitVoltageV voltage it is driven to when the device is short-circuited; null
+   *     for independent subcells
    */
   public record SubcellElectrical(
       String name,
@@ -57,7 +66,11 @@ public record Electrical(
       double vocV,
       double operatingVoltageV,
       double operatingMaPerCm2,
-      @Nullable Double efficiencyGainPerMaPerCm2) {}
+      @Nullable Double efficiencyGainPerMaPerCm2,
+      double collectedMaPerCm2,
+      double luminescenceMaPerCm2,
+      double radiativeLimitV,
+      @Nullable Double shortCircuitVoltageV) {}
 
   /**
    * A point of the device's curve.

@@ -111,10 +111,12 @@ final class SampleResult {
         29.6,
         30.1,
         List.of(
-            new Electrical.SubcellElectrical("top", 1.68, 1e-20, 0.01, 1.5, 1.2, 1.0, 18.5, null)),
+            new Electrical.SubcellElectrical(
+                "top", 1.68, 1e-20, 0.01, 1.5, 1.2, 1.0, 18.5, null, 19.5, 0.1, 1.3, null)),
         List.of(new Electrical.CurvePoint(0, 19.5), new Electrical.CurvePoint(1.9, 0)),
         List.of(new Electrical.MismatchPoint(-1, 28, 0.81)),
-        List.of(new Electrical.LadderStep("limit", 45.1, null)));
+        List.of(new Electrical.LadderStep("limit", 45.1, null)),
+        null);
   }
 
   private static SearchRecord search() {
