@@ -15,6 +15,7 @@ import java.util.concurrent.CancellationException;
 import picocli.CommandLine;
 import picocli.CommandLine.ParameterException;
 import picocli.CommandLine.ParseResult;
+import picocli.CommandLine.UnmatchedArgumentException;
 import tools.jackson.databind.json.JsonMapper;
 import tools.jackson.databind.node.ArrayNode;
 import tools.jackson.databind.node.ObjectNode;
@@ -30,13 +31,22 @@ final class ErrorReport {
 
   /** The command line itself is wrong. */
   int wrongCommandLine(ParameterException e, String[] args) {
-    String message = e.getMessage().replaceAll("\\s*\\R\\s*", " ");
+    String message = message(e);
     String command = e.getCommandLine().getCommandSpec().qualifiedName();
     boolean json = List.of(args).contains("json") || List.of(args).contains("--format=json");
     return tell(
         json,
         ExitStatus.WRONG_INPUT,
         List.of(new Line("", 0, "", message + " (see " + command + " --help)")));
+  }
+
+  private static String message(ParameterException e) {
+    if (e instanceof UnmatchedArgumentException unmatched) {
+      List<String> suggestions = unmatched.getSuggestions();
+      return "there is no command or option \"%s\"".formatted(unmatched.getUnmatched().get(0))
+          + (suggestions.isEmpty() ? "" : "; did you mean " + suggestions.get(0) + "?");
+    }
+    return e.getMessage().replaceAll("\\s*\\R\\s*", " ");
   }
 
   /** A command threw. */

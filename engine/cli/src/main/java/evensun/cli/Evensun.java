@@ -35,6 +35,15 @@ final class Evensun implements Callable<Integer> {
     line.setCaseInsensitiveEnumValuesAllowed(true);
     line.setOut(new java.io.PrintWriter(console.out(), true));
     line.setErr(new java.io.PrintWriter(console.err(), true));
+    line.getHelpSectionMap()
+        .put(CommandLine.Model.UsageMessageSpec.SECTION_KEY_COMMAND_LIST_HEADING, help -> "");
+    line.getHelpSectionMap()
+        .put(
+            CommandLine.Model.UsageMessageSpec.SECTION_KEY_COMMAND_LIST,
+            help ->
+                help.commandSpec().parent() == null
+                    ? CommandGroups.render(help)
+                    : help.commandList());
     ErrorReport errors = new ErrorReport(console);
     line.setParameterExceptionHandler(errors::wrongCommandLine);
     line.setExecutionExceptionHandler(errors::failed);
