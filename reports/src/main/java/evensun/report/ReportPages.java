@@ -39,6 +39,7 @@ import org.jspecify.annotations.Nullable;
 /** Turns a result into the page as data. */
 final class ReportPages {
 
+  private static final double LEVELS_PX = 580;
   private static final int DAY_LENGTH = "2026-01-31".length();
 
   private static final List<Function<RunResult, Optional<Section>>> SECTIONS =
@@ -108,7 +109,7 @@ final class ReportPages {
                 ? "."
                 : "; the weakest sets the level, what stands above it is unused.")
             + (drawn == null ? "" : " Dotted: as drawn.");
-    return Figure.of(new LevelPicture(vessels, level), what);
+    return Figure.of(new LevelPicture(vessels, level), what, LEVELS_PX);
   }
 
   private static @Nullable Double drawnCurrent(@Nullable Outcome drawn, String name) {

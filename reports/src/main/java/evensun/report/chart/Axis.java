@@ -1,5 +1,7 @@
 package evensun.report.chart;
 
+import evensun.report.figure.Ticks;
+
 /**
  * An axis.
  *
@@ -14,6 +16,13 @@ public record Axis(String label, String unit, double min, double max, boolean lo
   /** A linear axis. */
   public static Axis linear(String label, String unit, double min, double max) {
     return new Axis(label, unit, min, max > min ? max : min + 1, false);
+  }
+
+  /** A linear axis from round number to round number, wide enough for both values. */
+  public static Axis covering(String label, String unit, double low, double high) {
+    double step = Ticks.step(low, Math.max(high, low + Math.max(1e-9, Math.abs(low) * 1e-9)), 5);
+    double from = Math.floor(low / step + 1e-9) * step;
+    return linear(label, unit, from, Math.ceil(high / step - 1e-9) * step);
   }
 
   /** A logarithmic axis. */

@@ -1,7 +1,10 @@
 package evensun.report.chart;
 
 import evensun.report.figure.Figure;
+import java.util.ArrayList;
 import java.util.List;
+import java.util.stream.IntStream;
+import org.jspecify.annotations.Nullable;
 
 /**
  * A chart as data; its table and its two drawings come from it.
@@ -44,6 +47,27 @@ public record Chart(
                 + " points");
       }
     }
+  }
+
+  /** The chart with so many of its points, the first and the last among them. */
+  Chart thinned(int points) {
+    int last = xs.size() - 1;
+    List<Integer> kept =
+        IntStream.range(0, points)
+            .map(i -> (int) ((long) i * last / (points - 1)))
+            .boxed()
+            .toList();
+    List<Series> rows =
+        series.stream()
+            .map(s -> new Series(s.label(), s.role(), s.dashed(), pick(s.values(), kept)))
+            .toList();
+    return new Chart(id, kind, title, x, y, pick(xs, kept), rows, marks);
+  }
+
+  private static <T extends @Nullable Object> List<T> pick(List<T> from, List<Integer> kept) {
+    List<T> picked = new ArrayList<>(kept.size());
+    kept.forEach(i -> picked.add(from.get(i)));
+    return picked;
   }
 
   /** The chart drawn for those without JavaScript and for paper. */

@@ -23,7 +23,9 @@ record ChartDrawing(Chart chart) implements Figure.Sketch {
   private static final double TOP = 26;
   private static final double BOTTOM = 44;
   private static final double LEFT = 58;
-  private static final double LABEL_ROOM_PX = 17;
+  private static final double LABEL_ROOM_PX = 16;
+  private static final double HALF_LETTER_PX = 3.6;
+  private static final int MOST_POINTS = 240;
 
   /** The inner frame in px. */
   private record Frame(Chart chart, double left, double top, double width, double height) {
@@ -48,6 +50,12 @@ record ChartDrawing(Chart chart) implements Figure.Sketch {
 
   @Override
   public Drawing draw(double widthPx) {
+    return chart.xs().size() > MOST_POINTS
+        ? new ChartDrawing(chart.thinned(MOST_POINTS)).draw(widthPx)
+        : drawAll(widthPx);
+  }
+
+  private Drawing drawAll(double widthPx) {
     boolean wide = widthPx > 600;
     double high = wide ? 330 : 250;
     double right = chart.kind() == Kind.LINES && wide ? 150 : 14;
@@ -130,31 +138,55 @@ record ChartDrawing(Chart chart) implements Figure.Sketch {
     }
   }
 
-  /** Names each area where it is thickest, if it is thick enough there. */
+  /** Names each area where it is thick enough for the whole name, near its middle. */
   private void stackLabels(Canvas canvas, Frame frame, boolean wide) {
     double[] base = new double[chart.xs().size()];
     for (Series row : chart.series()) {
-      int best = -1;
-      double thickest = 0;
-      for (int i = 0; i < base.length; i++) {
-        double x = frame.x(chart.xs().get(i));
-        double room = Math.min(x - frame.left(), frame.right() - x);
-        double thick = frame.y(base[i]) - frame.y(base[i] + orZero(row.values().get(i)));
-        double score = Math.min(thick, 60) + Math.min(0, room - 50);
-        if (score > thickest) {
-          thickest = score;
-          best = i;
-        }
+      String text = Clip.to(row.label(), wide ? 34 : 16);
+      int half = (int) Math.ceil(text.length() * HALF_LETTER_PX / frame.width() * base.length) + 1;
+      Spot best = null;
+      double centre = centre(row);
+      for (int i = half; i < base.length - half; i++) {
+        Spot spot = Spot.at(frame, row, base, i, half, centre);
+        best =
+            spot.room() > LABEL_ROOM_PX && (best == null || spot.score() > best.score())
+                ? spot
+                : best;
       }
-      if (best >= 0 && thickest > LABEL_ROOM_PX) {
-        double middle = base[best] + orZero(row.values().get(best)) / 2;
-        String text = Clip.to(row.label(), wide ? 34 : 16);
-        double x = frame.x(chart.xs().get(best));
-        canvas.label(x, frame.y(middle) + 4, text, Anchor.MIDDLE, "part-name on-" + row.role());
+      if (best != null) {
+        double x = frame.x(chart.xs().get(best.index()));
+        canvas.label(x, best.y() + 4, text, Anchor.MIDDLE, "part-name on-" + row.role());
       }
       for (int i = 0; i < base.length; i++) {
         base[i] += orZero(row.values().get(i));
       }
+    }
+  }
+
+  /** Index of the middle of an area. */
+  private static double centre(Series row) {
+    double weight = 0;
+    double moment = 0;
+    for (int i = 0; i < row.values().size(); i++) {
+      weight += orZero(row.values().get(i));
+      moment += i * orZero(row.values().get(i));
+    }
+    return weight > 0 ? moment / weight : 0;
+  }
+
+  /** A place for a name: its room from edge to edge in px, and how good it is. */
+  private record Spot(int index, double y, double room, double score) {
+
+    static Spot at(Frame frame, Series row, double[] base, int index, int half, double centre) {
+      double low = frame.bottom();
+      double high = frame.top();
+      for (int k = index - half; k <= index + half; k++) {
+        low = Math.min(low, frame.y(base[k]));
+        high = Math.max(high, frame.y(base[k] + orZero(row.values().get(k))));
+      }
+      double away = Math.abs(index - centre) / base.length * frame.height() / 10;
+      return new Spot(
+          index, (low + high) / 2, low - high, Math.min(low - high, frame.height() / 4) - away);
     }
   }
 

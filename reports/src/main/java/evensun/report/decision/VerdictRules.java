@@ -75,14 +75,18 @@ public final class VerdictRules {
   private static List<String> findings(RunResult result, String severity) {
     return result.findings().stream()
         .filter(finding -> finding.severity().equals(severity))
-        .map(VerdictRules::words)
+        .map(finding -> words(result, finding))
         .toList();
   }
 
-  private static String words(FindingRecord finding) {
-    String where = Clip.to(finding.where(), 60);
+  private static String words(RunResult result, FindingRecord finding) {
+    String where = Clip.to(spoken(result, finding.where()), 60);
     String message = Clip.to(finding.message(), MOST_LETTERS);
     return where.isEmpty() || message.contains(where) ? message : where + ": " + message;
+  }
+
+  private static String spoken(RunResult result, String where) {
+    return result.found().design().containsKey(where) ? Keys.words(where) : where;
   }
 
   private static java.util.Optional<String> stopped(SearchRecord search) {

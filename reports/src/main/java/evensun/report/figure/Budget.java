@@ -40,9 +40,10 @@ public record Budget(double incidentMaPerCm2, List<Share> shares) {
   private static List<Share> split(Outcome outcome, Losses losses) {
     Map<String, Share> byChannel = new LinkedHashMap<>();
     outcome.spectral().absorptance().keySet().forEach(channel -> byChannel.put(channel, NONE));
+    int count = 0;
     for (Parasitic parasitic : losses.parasitic()) {
-      byChannel.put(
-          parasitic.layer(), new Share(parasitic.layer(), "parasitic", parasitic.maPerCm2()));
+      String role = Share.parasiticRole(count++);
+      byChannel.put(parasitic.layer(), new Share(parasitic.layer(), role, parasitic.maPerCm2()));
     }
     for (int i = 0; i < outcome.subcells().size(); i++) {
       place(outcome.subcells().get(i), Share.subcellRole(i), byChannel);

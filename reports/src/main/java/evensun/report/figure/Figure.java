@@ -20,6 +20,11 @@ public record Figure(Drawing wide, Drawing narrow, String description) {
     return new Figure(sketch.draw(WIDE_PX), sketch.draw(NARROW_PX), description);
   }
 
+  /** Draws at a width of its own where it stands beside something, and narrow. */
+  public static Figure of(Sketch sketch, String description, double widePx) {
+    return new Figure(sketch.draw(widePx), sketch.draw(NARROW_PX), description);
+  }
+
   /** Something that can be drawn at a width. */
   @FunctionalInterface
   public interface Sketch {

@@ -28,7 +28,7 @@ public record LevelPicture(List<Vessel> vessels, @Nullable Double levelMaPerCm2)
 
   private static final double TOP = 34;
   private static final double DEPTH = 216;
-  private static final double HEIGHT = TOP + DEPTH + 46;
+  private static final double HEIGHT = TOP + DEPTH + 62;
   private static final double LEFT = 34;
   private static final double VISIBLE_SURPLUS = 0.005;
 
@@ -40,7 +40,7 @@ public record LevelPicture(List<Vessel> vessels, @Nullable Double levelMaPerCm2)
     double pxPerMa = DEPTH / ceiling();
     scale(canvas, widthPx - room, pxPerMa);
     for (int i = 0; i < vessels.size(); i++) {
-      double wide = Math.min(slot * 0.62, 150);
+      double wide = Math.min(slot * 0.58, 150);
       vessel(canvas, i, LEFT + slot * i + (slot - wide) / 2, wide, slot, pxPerMa);
     }
     level(canvas, widthPx, room, pxPerMa);
@@ -48,7 +48,7 @@ public record LevelPicture(List<Vessel> vessels, @Nullable Double levelMaPerCm2)
   }
 
   private double roomOnTheRight(double widthPx) {
-    return levelMaPerCm2 == null ? 8 : widthPx > 600 ? 128 : 62;
+    return levelMaPerCm2 == null ? 8 : widthPx > 500 ? 116 : 62;
   }
 
   private double ceiling() {
@@ -90,22 +90,18 @@ public record LevelPicture(List<Vessel> vessels, @Nullable Double levelMaPerCm2)
         new Path().move(x, TOP - 4).line(x, bottom).line(x + wide, bottom).line(x + wide, TOP - 4),
         "vessel",
         "");
-    drawnMark(canvas, vessel, x, wide, slot, pxPerMa);
+    drawnMark(canvas, vessel, x, wide, pxPerMa);
     labels(canvas, vessel, role, x + wide / 2, slot, line);
   }
 
   private static void drawnMark(
-      Canvas canvas, Vessel vessel, double x, double wide, double slot, double pxPerMa) {
+      Canvas canvas, Vessel vessel, double x, double wide, double pxPerMa) {
     Double drawn = vessel.drawnMaPerCm2();
     if (drawn == null) {
       return;
     }
     double y = y(drawn, pxPerMa);
     canvas.stroke(x - 6, y, x + wide + 6, y, "drawn");
-    if (slot - wide > 90) {
-      canvas.label(
-          x + wide + 10, y + 4, "drawn " + Numbers.fixed(drawn, 2), Anchor.START, "tick halo");
-    }
   }
 
   private void labels(
@@ -116,6 +112,11 @@ public record LevelPicture(List<Vessel> vessels, @Nullable Double levelMaPerCm2)
         centre, Math.min(line + 24, bottom - 6), inside, Anchor.MIDDLE, "value on-" + role);
     String name = Clip.to(vessel.name(), (int) Math.max(4, slot / 8.5));
     canvas.label(centre, bottom + 19, name, Anchor.MIDDLE, "name");
+    Double drawn = vessel.drawnMaPerCm2();
+    if (drawn != null) {
+      String before = "drawn " + Numbers.fixed(drawn, 2);
+      canvas.label(centre, bottom + 52, before, Anchor.MIDDLE, "tick");
+    }
     double surplus = levelMaPerCm2 == null ? 0 : vessel.maPerCm2() - levelMaPerCm2;
     if (surplus >= VISIBLE_SURPLUS) {
       String unused = Numbers.signed(surplus, 2) + (slot > 110 ? " unused" : "");

@@ -49,25 +49,18 @@ public record LightBar(@Nullable Budget drawn, Budget found) implements Figure.S
 
   private static void bar(Canvas canvas, Budget budget, double y, double widthPx) {
     double x = 0;
-    for (int i = 0; i < budget.shares().size(); i++) {
-      Share share = budget.shares().get(i);
+    for (Share share : budget.shares()) {
       double wide = px(share.maPerCm2(), budget, widthPx);
       canvas.box(
           x,
           y,
           wide,
           BAR,
-          "part " + fill(share, i),
+          "part fill-" + share.role(),
           share.label() + " " + Numbers.ma(share.maPerCm2()));
       insideLabel(canvas, share, x, y, wide);
       x += wide;
     }
-  }
-
-  private static String fill(Share share, int index) {
-    return "fill-"
-        + share.role()
-        + (share.role().equals("parasitic") && index % 2 == 1 ? "-b" : "");
   }
 
   private static void insideLabel(Canvas canvas, Share share, double x, double y, double wide) {

@@ -17,6 +17,11 @@ public record Share(String label, String role, double maPerCm2) {
     return "sub" + (index % SUBCELL_ROLES + 1);
   }
 
+  /** The role of a layer that collects nothing, from 0: two greys take turns. */
+  public static String parasiticRole(int index) {
+    return index % 2 == 0 ? "parasitic" : "parasitic-b";
+  }
+
   /** Whether this light is collected. */
   public boolean collected() {
     return role.startsWith("sub");

@@ -99,12 +99,9 @@ public record StackPicture(List<Slab> drawn, List<Slab> found) implements Figure
   private static void column(
       Canvas canvas, List<Slab> slabs, double x, double column, double pxPerNm) {
     double y = TOP;
-    for (int i = 0; i < slabs.size(); i++) {
-      Slab slab = slabs.get(i);
+    for (Slab slab : slabs) {
       double high = px(slab, pxPerNm);
-      String other = slab.role().equals("parasitic") && i % 2 == 1 ? "-b" : "";
-      canvas.box(
-          x, y, column, high, "part fill-" + slab.role() + other, slab.name() + " " + value(slab));
+      canvas.box(x, y, column, high, "part fill-" + slab.role(), slab.name() + " " + value(slab));
       if (slab.thicknessNm() >= BREAK_FROM_NM) {
         zigzag(canvas, x, y + high / 2, column);
       }

@@ -68,7 +68,8 @@ public sealed interface Block {
    * @param chart aim and subcell currents against the quantity
    * @param found value found
    * @param decimals decimals of the quantity
+   * @param weakest whether the aim is the smallest series; otherwise it is the last one
    * @param table the numbers
    */
-  record StripCurve(Chart chart, double found, int decimals, Table table) {}
+  record StripCurve(Chart chart, double found, int decimals, boolean weakest, Table table) {}
 }

@@ -52,7 +52,7 @@ public final class AngleSection {
         Kind.LINES,
         "Currents against the angle of incidence, the irradiance on the cell plane kept",
         Axis.linear("angle of incidence", "°", angles.get(0), angles.get(angles.size() - 1)),
-        Axis.linear("current", Numbers.MA, 0, high * 1.08),
+        Axis.covering("current", Numbers.MA, 0, high),
         angles,
         series,
         List.of());

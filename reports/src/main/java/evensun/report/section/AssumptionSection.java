@@ -161,7 +161,7 @@ public final class AssumptionSection {
         Kind.LINES,
         use.name() + gap,
         Axis.linear("wavelength", "nm", nm.get(0), nm.get(nm.size() - 1)),
-        Axis.linear("n, k", "", 0, high * 1.08),
+        Axis.covering("n, k", "", 0, high),
         nm,
         List.of(Series.of("n", "ink", use.n()), Series.of("k", "sub2", use.k())),
         List.of());

@@ -97,7 +97,7 @@ public final class ElectricalSection {
             .max()
             .orElse(1);
     Axis x = Axis.linear("voltage", "V", 0, volts.get(volts.size() - 1));
-    Axis y = Axis.linear("current", Numbers.MA, 0, top * 1.08);
+    Axis y = Axis.covering("current", Numbers.MA, 0, top * 1.03);
     return new Chart("jv", Kind.LINES, curveTitle(found), x, y, volts, series, List.of());
   }
 
@@ -151,7 +151,7 @@ public final class ElectricalSection {
     double margin = Math.max(0.05, (high - low) * 0.1);
     Axis x =
         Axis.linear("first minus second subcell", Numbers.MA, xs.get(0), xs.get(xs.size() - 1));
-    Axis y = Axis.linear("efficiency", "%", low - margin, high + margin);
+    Axis y = Axis.covering("efficiency", "%", low, high + margin);
     return new Chart(
         "mismatch",
         Kind.LINES,

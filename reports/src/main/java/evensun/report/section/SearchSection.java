@@ -90,14 +90,13 @@ public final class SearchSection {
     double high = best.stream().mapToDouble(Double::doubleValue).max().orElse(1);
     double low = Math.min(lowest(best), lowest(mean));
     double margin = Math.max(1e-3, (high - low) * 0.08);
-    Axis x = Axis.linear("designs evaluated", "", xs.get(0), xs.get(xs.size() - 1));
-    Axis y = Axis.linear(Keys.aim(search.aim()), search.aimUnit(), low - margin, high + margin);
+    Axis x = Axis.covering("designs evaluated", "", 0, xs.get(xs.size() - 1));
+    Axis y = Axis.covering(Keys.aim(search.aim()), search.aimUnit(), low, high + margin / 4);
     List<Series> series =
         List.of(
             Series.of("best so far", "ink", best),
             Series.of("mean of the generation", "muted", mean));
-    String title =
-        "Convergence: " + halfway(search) + " of the generations reach the last 0.1 % of the aim";
+    String title = "Convergence: within 0.1 % of the aim found from generation " + arrival(search);
     return new Chart("convergence", Kind.LINES, title, x, y, xs, series, List.of());
   }
 
@@ -105,13 +104,14 @@ public final class SearchSection {
     return values.stream().mapToDouble(Double::doubleValue).min().orElse(0);
   }
 
-  private static String halfway(SearchRecord search) {
+  private static String arrival(SearchRecord search) {
     double goal = search.aimFound() - Math.abs(search.aimFound()) * 1e-3;
     int first = 0;
     while (first < search.history().size() && search.history().get(first).best() < goal) {
       first++;
     }
-    return (search.history().size() - first) + " of " + search.history().size();
+    int last = search.history().size();
+    return Math.min(first + 1, last) + " of " + last;
   }
 
   private static Table optima(SearchRecord search) {
@@ -174,7 +174,7 @@ public final class SearchSection {
     double low = lowest(values);
     double high = values.stream().mapToDouble(Double::doubleValue).max().orElse(1);
     double margin = Math.max(1e-9, (high - low) * 0.06);
-    return Axis.linear(label, unit, low - margin, high + margin);
+    return Axis.covering(label, unit, low - margin, high + margin);
   }
 
   private static Table frontTable(SearchRecord search, Front front) {

@@ -61,8 +61,9 @@ public final class SensitivitySection {
       return "What a changed value would do";
     }
     Sensitivity most = rows.get(0);
-    return Clip.to(Keys.words(most.key()), 60)
-        + " matters most: ±"
+    return "Most sensitive: "
+        + Clip.to(Keys.words(most.key()), 60)
+        + "; ±"
         + Numbers.quantity(most.tolerance(), most.unit())
         + " costs up to "
         + Numbers.quantity(Math.max(0, -most.toleranceAimChange()), unit);
@@ -128,7 +129,10 @@ public final class SensitivitySection {
         series.add(Series.of(subcells.get(i).name(), Share.subcellRole(i), values));
       }
     }
-    series.add(Series.of("aim", "ink", whatIf.aim()).asDashed());
+    boolean weakest = weakest(result) && series.size() == subcells.size();
+    if (!weakest) {
+      series.add(Series.of("aim", "ink", whatIf.aim()).asDashed());
+    }
     Chart chart =
         new Chart(
             "what-if-" + index(result, whatIf.key()),
@@ -144,7 +148,14 @@ public final class SensitivitySection {
             series,
             List.of());
     int decimals = whatIf.unit().equals("eV") ? 3 : 1;
-    return new Block.StripCurve(chart, found(result, whatIf), decimals, Tables.behind(chart));
+    return new Block.StripCurve(
+        chart, found(result, whatIf), decimals, weakest, Tables.behind(chart));
+  }
+
+  /** Whether the aim is the smallest of the subcell currents. */
+  private static boolean weakest(RunResult result) {
+    SearchRecord search = result.search();
+    return search == null || search.aim().equals("matched-current");
   }
 
   private static int index(RunResult result, String key) {
@@ -169,8 +180,8 @@ public final class SensitivitySection {
       }
     }
     double margin = Math.max(1e-3, (high - low) * 0.08);
-    return Axis.linear(
-        unit.equals(Numbers.MA) ? "current" : "aim", unit, low - margin, high + margin);
+    return Axis.covering(
+        unit.equals(Numbers.MA) ? "current" : "aim", unit, low - margin / 2, high + margin / 2);
   }
 
   private static double found(RunResult result, WhatIf whatIf) {

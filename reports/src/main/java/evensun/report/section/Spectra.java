@@ -65,8 +65,7 @@ final class Spectra {
     int others = 0;
     for (Map.Entry<String, List<Double>> entry : parasitic) {
       if (largest.contains(entry)) {
-        String role = series.size() % 2 == 0 ? "parasitic" : "parasitic-b";
-        series.add(Series.of(entry.getKey(), role, entry.getValue()));
+        series.add(Series.of(entry.getKey(), role(outcome, entry.getKey()), entry.getValue()));
       } else {
         add(rest, entry.getValue());
         others++;
@@ -76,6 +75,16 @@ final class Spectra {
       series.add(Series.of(others + " other layers", "parasitic", boxed(rest)));
     }
     return series;
+  }
+
+  /** The same grey as in the light's budget. */
+  private static String role(Outcome outcome, String layer) {
+    return Budget.of(outcome).stream()
+        .flatMap(budget -> budget.shares().stream())
+        .filter(share -> share.label().equals(layer))
+        .map(Share::role)
+        .findFirst()
+        .orElse("parasitic");
   }
 
   private static Optional<Series> exit(Outcome outcome) {

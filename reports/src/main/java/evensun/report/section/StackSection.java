@@ -54,8 +54,9 @@ public final class StackSection {
     if (relativeChange(most) < 1e-9) {
       return "The search kept every value as drawn";
     }
-    return Clip.to(Keys.words(most.key()), 60)
-        + " changes most: from "
+    return "Largest change: "
+        + Clip.to(Keys.words(most.key()), 60)
+        + ", from "
         + Numbers.quantity(most.drawn(), most.unit())
         + " to "
         + Numbers.quantity(most.found(), most.unit());
@@ -79,15 +80,19 @@ public final class StackSection {
 
   private static List<Slab> slabs(Outcome outcome) {
     List<String> names = outcome.subcells().stream().map(SubcellOutcome::name).toList();
-    return outcome.stack().stream().map(entry -> slab(entry, names)).toList();
+    List<Slab> slabs = new ArrayList<>();
+    int parasitic = 0;
+    for (StackEntry entry : outcome.stack()) {
+      int index = entry.subcell() == null ? -1 : names.indexOf(entry.subcell());
+      boolean layer = entry.role().equals("layer");
+      String other = layer ? Share.parasiticRole(parasitic) : "medium";
+      slabs.add(slab(entry, index >= 0 ? Share.subcellRole(index) : other));
+      parasitic += layer && index < 0 ? 1 : 0;
+    }
+    return slabs;
   }
 
-  private static Slab slab(StackEntry entry, List<String> subcells) {
-    int index = entry.subcell() == null ? -1 : subcells.indexOf(entry.subcell());
-    String role =
-        index >= 0
-            ? Share.subcellRole(index)
-            : entry.role().equals("layer") ? "parasitic" : "medium";
+  private static Slab slab(StackEntry entry, String role) {
     double nm = entry.thicknessNm() == null ? Double.NaN : entry.thicknessNm();
     String gap = entry.bandgapEv() == null ? "" : Numbers.quantity(entry.bandgapEv(), "eV");
     String name = entry.role().equals("exit") ? entry.name() + " (exit)" : entry.name();

@@ -74,12 +74,12 @@ public final class Numbers {
 
   /** A current density with its unit. */
   public static String ma(double maPerCm2) {
-    return fixed(maPerCm2, 2) + NBSP + MA;
+    return withUnit(fixed(maPerCm2, 2), MA);
   }
 
   /** A change of a current density with its unit. */
   public static String maChange(double maPerCm2) {
-    return signed(maPerCm2, 2) + NBSP + MA;
+    return withUnit(signed(maPerCm2, 2), MA);
   }
 
   /** A thickness with its unit, in µm from 10 µm. */
