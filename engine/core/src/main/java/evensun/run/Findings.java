@@ -34,6 +34,7 @@ final class Findings {
   /** What the stack and the solver say. */
   void about(ResolvedStack stack, Model model, Design design) {
     addAll(stack.findings());
+    addAll(Slips.of(stack));
     addAll(model.prepared().examine(design));
     if (!stack.isMonochromatic() && !stack.subcells().isEmpty()) {
       add(

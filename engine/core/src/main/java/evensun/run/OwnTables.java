@@ -16,6 +16,9 @@ import java.util.List;
 /** Reads the tables that a scenario brings: materials and spectra. */
 final class OwnTables {
 
+  /** No table for a solar cell ends below this; one that seems to is in micrometres. */
+  private static final double SHORTEST_NM = 20;
+
   private OwnTables() {}
 
   static Material material(String name, MaterialSpec.Table spec, InputFiles files) {
@@ -54,6 +57,13 @@ final class OwnTables {
             "the spectrum covers %s to %s nm but the grid runs from %s to %s nm; shorten the grid"
                 .formatted(spectrum.fromNm(), spectrum.toNm(), grid.fromNm(), grid.toNm()));
       }
+      if (spectrum.photonCurrentMaPerCm2(grid.fromNm(), grid.toNm()) <= 0
+          && grid.toNm() > grid.fromNm()) {
+        throw new InputException(
+            place,
+            "the spectrum of table \"%s\" holds no light between %s and %s nm"
+                .formatted(path, grid.fromNm(), grid.toNm()));
+      }
       return spectrum;
     } catch (IllegalArgumentException e) {
       throw new InputException(Place.of(path), e.getMessage());
@@ -81,6 +91,13 @@ final class OwnTables {
     if (rows.isEmpty()) {
       throw new InputException(Place.of(path), "holds no numbers; it needs lines " + header);
     }
+    double lastNm = rows.get(rows.size() - 1)[0];
+    if (lastNm > 0 && lastNm < SHORTEST_NM) {
+      throw new InputException(
+          Place.of(path),
+          "the wavelengths (%s to %s) look like micrometres; write them in nm, 1000 times as much"
+              .formatted(rows.get(0)[0], lastNm));
+    }
     double[][] columns = new double[count][rows.size()];
     for (int r = 0; r < rows.size(); r++) {
       for (int c = 0; c < count; c++) {
@@ -91,6 +108,13 @@ final class OwnTables {
   }
 
   private static double[] row(String[] cells, int count, String header, Place place) {
+    if (cells[0].contains(";")) {
+      throw new InputException(
+          place,
+          "the columns are parted by semicolons; part them by commas, with decimal points ("
+              + header
+              + ")");
+    }
     if (cells.length != count) {
       throw new InputException(
           place, "needs %d numbers (%s) but has %d".formatted(count, header, cells.length));
