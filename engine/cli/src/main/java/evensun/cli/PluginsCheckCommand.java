@@ -46,6 +46,12 @@ final class PluginsCheckCommand extends BaseCommand {
   Path out;
 
   @Option(
+      names = "--option",
+      paramLabel = "NAME=VALUE",
+      description = "An option of the solver, as in solver.options of a scenario (repeatable).")
+  Map<String, String> options = new LinkedHashMap<>();
+
+  @Option(
       names = "--limit-seconds",
       paramLabel = "N",
       description = "How long a law may take before it counts as broken (default: 120).")
@@ -83,7 +89,8 @@ final class PluginsCheckCommand extends BaseCommand {
   }
 
   private int check(PluginHost host, LoadedPlugin plugin) throws IOException {
-    Subject subject = new Subject(host.require(plugin.solverId()), host.services(() -> false));
+    Subject subject =
+        new Subject(host.require(plugin.solverId()), host.services(() -> false), options);
     boolean json = global().json();
     if (!json) {
       console().out().println(plugin.id() + " " + plugin.version() + ", " + plugin.file());
@@ -118,7 +125,11 @@ final class PluginsCheckCommand extends BaseCommand {
     Path folder = out == null ? Path.of("evensun-check-" + plugin.id()) : out;
     String title = plugin.id() + " breaks " + report.law() + ": " + report.message();
     return CaseFiles.write(
-        report.smallest().orElseThrow(), plugin.solverId(), title, folder.resolve(report.law()));
+        report.smallest().orElseThrow(),
+        plugin.solverId(),
+        options,
+        title,
+        folder.resolve(report.law()));
   }
 
   private void print(LawReport report) {

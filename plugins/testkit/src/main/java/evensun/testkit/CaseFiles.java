@@ -4,6 +4,7 @@ import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.Locale;
+import java.util.Map;
 
 /** Writes a case as a scenario with its tables, so that it can be looked at and run. */
 public final class CaseFiles {
@@ -20,11 +21,13 @@ public final class CaseFiles {
    *
    * @param stack the case
    * @param solverId solver that the scenario names
+   * @param options options of that solver
    * @param title title of the scenario
    * @param folder where to; made when absent, files of these names are replaced
    * @return the scenario file
    */
-  public static Path write(StackCase stack, String solverId, String title, Path folder)
+  public static Path write(
+      StackCase stack, String solverId, Map<String, String> options, String title, Path folder)
       throws IOException {
     Files.createDirectories(folder);
     table(folder, "incident", stack.incident());
@@ -33,7 +36,7 @@ public final class CaseFiles {
     }
     table(folder, "exit", stack.exit());
     Path scenario = folder.resolve("scenario.yaml");
-    Files.writeString(scenario, yaml(stack, solverId, title));
+    Files.writeString(scenario, yaml(stack, solverId, options, title));
     return scenario;
   }
 
@@ -46,7 +49,8 @@ public final class CaseFiles {
     Files.writeString(folder.resolve(name + ".csv"), csv.toString());
   }
 
-  private static String yaml(StackCase stack, String solverId, String title) {
+  private static String yaml(
+      StackCase stack, String solverId, Map<String, String> options, String title) {
     StringBuilder yaml = new StringBuilder("evensun: 1\n");
     yaml.append("title: \"").append(title.replace("\"", "'")).append("\"\n");
     yaml.append("light: {spectrum: AM1.5G, angleDeg: ").append(stack.angleDeg());
@@ -73,7 +77,13 @@ public final class CaseFiles {
     String absorber = stack.layerCount() == 0 ? "exit" : layer(0);
     yaml.append("subcells:\n  - {name: cell, absorbers: [").append(absorber).append("]}\n");
     yaml.append("connection: series\n");
-    yaml.append("solver: {id: ").append(solverId).append("}\n");
+    yaml.append("solver:\n  id: ").append(solverId).append('\n');
+    if (!options.isEmpty()) {
+      yaml.append("  options:\n");
+      options.forEach(
+          (key, value) ->
+              yaml.append("    ").append(key).append(": \"").append(value).append("\"\n"));
+    }
     return yaml.toString();
   }
 

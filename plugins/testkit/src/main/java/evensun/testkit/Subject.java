@@ -6,6 +6,8 @@ import evensun.spi.PreparedSolver;
 import evensun.spi.Problem;
 import evensun.spi.Response;
 import evensun.spi.Services;
+import java.util.HashMap;
+import java.util.Map;
 import java.util.Optional;
 
 /**
@@ -13,8 +15,18 @@ import java.util.Optional;
  *
  * @param solver the solver
  * @param services what the host would offer it
+ * @param options what a scenario would say under {@code solver.options}
  */
-public record Subject(OpticalSolver solver, Services services) {
+public record Subject(OpticalSolver solver, Services services, Map<String, String> options) {
+
+  public Subject {
+    options = Map.copyOf(options);
+  }
+
+  /** A solver without options. */
+  public Subject(OpticalSolver solver, Services services) {
+    this(solver, services, Map.of());
+  }
 
   /** A solver that needs no other. */
   public static Subject alone(OpticalSolver solver) {
@@ -48,7 +60,7 @@ public record Subject(OpticalSolver solver, Services services) {
 
   /** Prepares for one case. */
   PreparedSolver prepare(StackCase stack) {
-    return solver.prepare(stack.problem(), stack.design(), services);
+    return prepare(stack.problem(), stack);
   }
 
   /** Prepares, evaluates once and releases everything. */
@@ -84,8 +96,10 @@ public record Subject(OpticalSolver solver, Services services) {
         && (solver.traits().incoherent() || !thick);
   }
 
-  /** Prepares any problem with the first design of a case. */
+  /** Prepares any problem with the first design of a case; its options are added to. */
   PreparedSolver prepare(Problem problem, StackCase start) {
-    return solver.prepare(problem, start.design(), services);
+    Map<String, String> all = new HashMap<>(options);
+    all.putAll(problem.options());
+    return solver.prepare(problem.withOptions(all), start.design(), services);
   }
 }

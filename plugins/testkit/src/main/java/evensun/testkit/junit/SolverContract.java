@@ -6,6 +6,7 @@ import evensun.testkit.LawReport;
 import evensun.testkit.LawReport.Status;
 import evensun.testkit.Laws;
 import evensun.testkit.Subject;
+import java.util.Map;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.Assertions;
 import org.junit.jupiter.api.DynamicTest;
@@ -22,9 +23,14 @@ public abstract class SolverContract {
     return Subject.noServices();
   }
 
+  /** What a scenario would say under {@code solver.options}; override it when there is need. */
+  protected Map<String, String> options() {
+    return Map.of();
+  }
+
   @TestFactory
   Stream<DynamicTest> keepsTheContract() {
-    Subject subject = new Subject(solver(), services());
+    Subject subject = new Subject(solver(), services(), options());
     return Laws.all().stream()
         .map(
             law ->
