@@ -158,6 +158,7 @@
     if (stacked) {
       var spot = labelSpot(chart, index, width);
       made.stack = 'light';
+      made.stackStrategy = 'all';
       made.areaStyle = { color: colour, opacity: 1 };
       if (spot && wide) {
         made.markPoint = { symbol: 'circle', symbolSize: 0.1, silent: true, animation: false,
@@ -219,7 +220,7 @@
     });
     ends.sort(function (a, b) { return a.y - b.y; });
     var room = 15;
-    var bottom = height + 8;
+    var bottom = height - 4;
     var at = ends.map(function (end) { return end.y; });
     for (var i = 1; i < at.length; i++) { at[i] = Math.max(at[i], at[i - 1] + room); }
     for (var j = at.length - 1; j >= 0; j--) {
@@ -335,6 +336,12 @@
     show();
   }
 
+  /* With two decimals, a sign, and no negative zero. */
+  function signed(value) {
+    var size = Math.abs(value).toFixed(2);
+    return +size === 0 ? size : (value > 0 ? '+' : MINUS) + size;
+  }
+
   function aim(chart, weakest, x) {
     var here = chart.series.map(function (row) { return between(chart.xs, row.values, x); });
     return weakest ? Math.min.apply(null, here) : here[here.length - 1];
@@ -346,8 +353,7 @@
     });
     var change = aim(chart, weakest, x) - aim(chart, weakest, found);
     var at = withUnit(x.toFixed(decimals), chart.x.unit);
-    var spoken = at + ': ' + parts.join(', ') + '; ' + (change > 0 ? '+' : '') +
-      withUnit(change.toFixed(2).replace('-', MINUS), chart.y.unit) + ' against found (interpolated)';
+    var spoken = at + ': ' + parts.join(', ') + '; ' + withUnit(signed(change), chart.y.unit) + ' against found (interpolated)';
     box.querySelector('output').textContent = spoken;
     box.querySelector('input').setAttribute('aria-valuetext', spoken);
   }

@@ -83,7 +83,10 @@ final class SecondOpinions {
         Bench bench = prepared.model().newBench()) {
       double value = aimOf(prepared, bench);
       return new Opinion(kind, what, value, value - found.aim(), "");
-    } catch (InputException | EvaluationFailed | UnsupportedProblem e) {
+    } catch (InputException e) {
+      // Without the place: a report names no path of the author's machine.
+      return new Opinion(kind, what, null, null, e.faults().get(0).message());
+    } catch (EvaluationFailed | UnsupportedProblem e) {
       return new Opinion(kind, what, null, null, String.valueOf(e.getMessage()));
     }
   }

@@ -21,6 +21,7 @@ public final class Outlook {
 
   private static final int MOST_SENSITIVITIES = 3;
   private static final double TOLERATED = 0.1;
+  private static final double LEAST_SHOWN = 1e-3;
 
   private Outlook() {}
 
@@ -66,7 +67,8 @@ public final class Outlook {
       Optional<VariableRecord> variable =
           search.variables().stream().filter(v -> v.key().equals(key)).findFirst();
       if (whatIf.key().equals(key) && variable.isPresent()) {
-        return Window.around(whatIf, variable.get().found(), search.aimFound() - TOLERATED)
+        return Window.around(
+                whatIf, variable.get().found(), search.aimFound(), search.aimFound() - TOLERATED)
             .map(
                 w ->
                     "it costs less than "
@@ -111,8 +113,9 @@ public final class Outlook {
         : Optional.of(
             "Numerics: "
                 + Numbers.count(tested, "other way")
-                + " to compute the same design moved it by at most "
-                + Numbers.withUnit(Numbers.fixed(largest, 3), unit)
+                + " to compute the same design moved it by "
+                + (largest < LEAST_SHOWN ? "less than " : "at most ")
+                + Numbers.withUnit(Numbers.fixed(Math.max(largest, LEAST_SHOWN), 3), unit)
                 + ".");
   }
 

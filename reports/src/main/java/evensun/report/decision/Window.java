@@ -1,6 +1,8 @@
 package evensun.report.decision;
 
 import evensun.result.WhatIf;
+import java.util.ArrayList;
+import java.util.List;
 import java.util.Optional;
 
 /**
@@ -13,41 +15,41 @@ record Window(double low, double high) {
 
   /**
    * Walks from the found value to both sides until the curve falls below the floor, linearly
-   * between its points.
+   * between its points, of which the found value is one.
    *
    * @param curve values ascending
    * @param found where to start
+   * @param aimFound aim there
    * @param floor least aim
    */
-  static Optional<Window> around(WhatIf curve, double found, double floor) {
+  static Optional<Window> around(WhatIf curve, double found, double aimFound, double floor) {
     int n = curve.value().size();
     if (n < 2 || found < curve.value().get(0) || found > curve.value().get(n - 1)) {
       return Optional.empty();
     }
-    int above = 0;
-    while (above < n - 1 && curve.value().get(above) < found) {
-      above++;
+    List<double[]> below = new ArrayList<>();
+    List<double[]> above = new ArrayList<>();
+    for (int i = 0; i < n; i++) {
+      double[] point = {curve.value().get(i), curve.aim().get(i)};
+      if (point[0] < found) {
+        below.add(0, point);
+      } else if (point[0] > found) {
+        above.add(point);
+      }
     }
-    return Optional.of(
-        new Window(
-            end(curve, above, -1, found, floor),
-            end(curve, Math.max(0, above - 1), 1, found, floor)));
+    double[] start = {found, aimFound};
+    return Optional.of(new Window(end(start, below, floor), end(start, above, floor)));
   }
 
-  private static double end(WhatIf curve, int from, int step, double found, double floor) {
-    double inside = found;
-    for (int i = from + step; i >= 0 && i < curve.value().size(); i += step) {
-      double aim = curve.aim().get(i);
-      if (aim < floor) {
-        double before = curve.aim().get(i - step);
-        double part =
-            before > aim ? Math.max(0, Math.min(1, (before - floor) / (before - aim))) : 0;
-        double at = curve.value().get(i - step);
-        double crossing = at + part * (curve.value().get(i) - at);
-        return step < 0 ? Math.min(found, crossing) : Math.max(found, crossing);
+  private static double end(double[] start, List<double[]> points, double floor) {
+    double[] inside = start;
+    for (double[] point : points) {
+      if (point[1] < floor) {
+        double part = (inside[1] - floor) / (inside[1] - point[1]);
+        return inside[0] + part * (point[0] - inside[0]);
       }
-      inside = curve.value().get(i);
+      inside = point;
     }
-    return inside;
+    return inside[0];
   }
 }

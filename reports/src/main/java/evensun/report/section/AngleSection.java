@@ -18,6 +18,8 @@ import java.util.Optional;
 /** Currents against the angle of incidence. */
 public final class AngleSection {
 
+  private static final double LOW_SUN_DEG = 60;
+
   private AngleSection() {}
 
   /** The section; absent without more than one angle. */
@@ -58,23 +60,32 @@ public final class AngleSection {
         List.of());
   }
 
-  /** How the weakest subcell changes from the first angle to the last. */
+  /** How the weakest subcell changes from the first angle to that nearest to a low sun. */
   private static String heading(Angular angular) {
-    int last = angular.angleDeg().size() - 1;
+    int low = 0;
+    for (int i = 1; i < angular.angleDeg().size(); i++) {
+      low = distance(angular, i) < distance(angular, low) ? i : low;
+    }
     double first = weakest(angular, 0);
-    double end = weakest(angular, last);
-    String angle = Numbers.trimmed(angular.angleDeg().get(last), 1) + "°";
+    double then = weakest(angular, low);
     return "At "
-        + angle
+        + degrees(angular, low)
         + " the weakest subcell passes "
-        + Numbers.ma(end)
+        + Numbers.ma(then)
         + ", "
-        + Numbers.fixed(Math.abs(end - first) / Math.max(first, 1e-12) * 100, 1)
-        + " % "
-        + (end < first ? "less" : "more")
+        + Numbers.fixed(Math.abs(then - first) / Math.max(first, 1e-12) * 100, 1)
+        + "\u00a0% "
+        + (then < first ? "less" : "more")
         + " than at "
-        + Numbers.trimmed(angular.angleDeg().get(0), 1)
-        + "°";
+        + degrees(angular, 0);
+  }
+
+  private static double distance(Angular angular, int index) {
+    return Math.abs(angular.angleDeg().get(index) - LOW_SUN_DEG);
+  }
+
+  private static String degrees(Angular angular, int index) {
+    return Numbers.trimmed(angular.angleDeg().get(index), 1) + "°";
   }
 
   private static double weakest(Angular angular, int index) {

@@ -85,30 +85,41 @@ public final class AssumptionSection {
                 "table-assumptions", "What each layer is made of, and where its data come from")
             .words("layer")
             .words("material")
-            .words("waves")
             .words("source")
-            .words("preparation")
-            .numbers("data from", "nm")
-            .numbers("to", "nm")
-            .numbers("at", "K")
+            .words("data")
             .words("what was done to the numbers");
     for (StackEntry entry : result.found().stack()) {
       MaterialUse use = material(result, entry);
-      boolean data = use != null && use.toNm() > use.fromNm();
       table.row(
-          entry.name(),
-          use == null || use.title().isEmpty() ? entry.material() : use.title(),
-          entry.role().equals("layer")
-              ? (entry.coherent() ? "coherent" : "incoherent")
-              : entry.role(),
+          entry.name() + waves(entry),
+          use == null ? entry.material() : prepared(use),
           use == null ? "" : use.source() + (use.fromMemory() ? " (from memory)" : ""),
-          use == null ? "" : use.form(),
-          data ? Numbers.trimmed(use.fromNm(), 1) : "",
-          data ? Numbers.trimmed(use.toNm(), 1) : "",
-          use == null ? "" : Numbers.trimmed(use.temperatureK(), 2),
+          use == null ? "" : range(use),
           use == null ? "" : String.join("; ", use.notes()));
     }
     return table.build();
+  }
+
+  private static String waves(StackEntry entry) {
+    return entry.role().equals("layer")
+        ? entry.coherent() ? "" : " (incoherent)"
+        : " (" + entry.role() + ")";
+  }
+
+  private static String prepared(MaterialUse use) {
+    String title = use.title().isEmpty() ? use.name() : use.title();
+    return use.form().isEmpty() ? title : title + "; " + use.form();
+  }
+
+  private static String range(MaterialUse use) {
+    String kelvin = Numbers.withUnit(Numbers.trimmed(use.temperatureK(), 2), "K");
+    return use.toNm() > use.fromNm()
+        ? Numbers.trimmed(use.fromNm(), 1)
+            + " to "
+            + Numbers.withUnit(Numbers.trimmed(use.toNm(), 1), "nm")
+            + ", "
+            + kelvin
+        : kelvin;
   }
 
   private static @org.jspecify.annotations.Nullable MaterialUse material(

@@ -20,6 +20,8 @@ import java.util.Optional;
 /** Generation against depth. */
 public final class DepthSection {
 
+  private static final double MICROMETRE_FROM_NM = 10_000;
+
   private DepthSection() {}
 
   /** The section; absent without depth profiles. */
@@ -68,12 +70,14 @@ public final class DepthSection {
             .orElse(peak / 10);
     double low = Math.pow(10, Math.floor(Math.log10(least)));
     double high = Math.pow(10, Math.ceil(Math.log10(peak)));
-    List<Double> depth = layer.depthNm();
+    boolean thick = layer.depthNm().get(layer.depthNm().size() - 1) >= MICROMETRE_FROM_NM;
+    List<Double> depth =
+        thick ? layer.depthNm().stream().map(nm -> nm / 1000).toList() : layer.depthNm();
     return new Chart(
         "depth-" + (index + 1),
         Kind.LINES,
         layer.layer(),
-        Axis.linear("depth", "nm", depth.get(0), depth.get(depth.size() - 1)),
+        Axis.linear("depth", thick ? "µm" : "nm", depth.get(0), depth.get(depth.size() - 1)),
         Axis.logarithmic("generation rate", "cm⁻³ s⁻¹", low, high),
         depth,
         List.of(Series.of(layer.layer(), role(result, layer.layer()), layer.generationPerCm3S())),

@@ -2,6 +2,7 @@ package evensun.report.section;
 
 import evensun.report.page.Block;
 import evensun.report.page.Section;
+import evensun.report.text.Keys;
 import evensun.report.text.Numbers;
 import evensun.result.FindingRecord;
 import evensun.result.RunResult;
@@ -21,10 +22,16 @@ public final class FindingsSection {
     }
     List<Block.Point> points =
         findings.stream()
-            .map(f -> new Block.Point(f.severity(), f.where(), f.message(), f.code()))
+            .map(
+                f ->
+                    new Block.Point(f.severity(), spoken(result, f.where()), f.message(), f.code()))
             .toList();
     return Optional.of(
         new Section("findings", "Findings", heading(findings), List.of(new Block.Points(points))));
+  }
+
+  private static String spoken(RunResult result, String where) {
+    return result.found().design().containsKey(where) ? Keys.words(where) : where;
   }
 
   private static String heading(List<FindingRecord> findings) {

@@ -14,6 +14,8 @@ import java.util.Optional;
 /** The found design evaluated in other ways: an error budget. */
 public final class OpinionSection {
 
+  private static final double LEAST_SHOWN = 1e-3;
+
   private OpinionSection() {}
 
   /** The section; absent without a second opinion. */
@@ -38,7 +40,11 @@ public final class OpinionSection {
   private static String heading(List<Opinion> opinions, String unit) {
     Optional<String> numerics =
         largest(opinions, "numerics")
-            .map(d -> "Numerics ±" + Numbers.withUnit(Numbers.fixed(Math.abs(d), 3), unit));
+            .map(
+                d ->
+                    "Numerics ±"
+                        + Numbers.withUnit(
+                            Numbers.fixed(Math.max(LEAST_SHOWN, Math.abs(d)), 3), unit));
     Optional<String> material =
         largest(opinions, "material")
             .map(d -> "other material data up to " + Numbers.withUnit(Numbers.signed(d, 2), unit));

@@ -23,6 +23,8 @@ import java.util.Optional;
 /** How the search found it. */
 public final class SearchSection {
 
+  private static final double LEAST_SHOWN = 5e-5;
+
   private SearchSection() {}
 
   /** The section; absent when nothing was searched. */
@@ -70,7 +72,7 @@ public final class SearchSection {
     text.append(", found ").append(Numbers.quantity(search.aimFound(), search.aimUnit()));
     text.append(". ").append(Numbers.count(search.generations(), "generation"));
     Double refinement = search.refinementGain();
-    if (refinement != null) {
+    if (refinement != null && refinement >= LEAST_SHOWN) {
       text.append("; the local refinement at the end added ")
           .append(Numbers.withUnit(Numbers.fixed(refinement, 4), search.aimUnit()));
     }
@@ -90,7 +92,7 @@ public final class SearchSection {
     double high = best.stream().mapToDouble(Double::doubleValue).max().orElse(1);
     double low = Math.min(lowest(best), lowest(mean));
     double margin = Math.max(1e-3, (high - low) * 0.08);
-    Axis x = Axis.covering("designs evaluated", "", 0, xs.get(xs.size() - 1));
+    Axis x = Axis.linear("designs evaluated", "", 0, xs.get(xs.size() - 1));
     Axis y = Axis.covering(Keys.aim(search.aim()), search.aimUnit(), low, high + margin / 4);
     List<Series> series =
         List.of(

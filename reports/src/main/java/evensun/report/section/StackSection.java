@@ -100,30 +100,44 @@ public final class StackSection {
   }
 
   private static Table variables(SearchRecord search) {
+    boolean ranges = search.variables().stream().anyMatch(v -> v.equallyGoodLow() != null);
+    boolean bounds = search.variables().stream().anyMatch(v -> v.bound() != null);
     Table.Builder table =
-        new Table.Builder("table-variables", "What may vary: drawn, found, equally good, allowed")
+        new Table.Builder("table-variables", "What may vary")
             .words("quantity")
             .words("unit")
             .numbers("drawn", "")
             .numbers("found", "")
-            .numbers("change", "")
-            .words("equally good")
-            .words("allowed")
-            .words("bound");
-    for (VariableRecord v : search.variables()) {
-      table.row(
-          Keys.words(v.key()),
-          v.unit(),
-          Numbers.bare(v.drawn(), v.unit()),
-          Numbers.bare(v.found(), v.unit()),
-          signed(v),
-          range(v.equallyGoodLow(), v.equallyGoodHigh(), v.unit()),
-          range(v.low(), v.high(), v.unit()) + step(v),
-          v.bound() == null
-              ? ""
-              : "stands on the " + (v.bound().equals("low") ? "lower" : "upper"));
+            .numbers("change", "");
+    if (ranges) {
+      table.words("equally good");
     }
+    table.words("allowed");
+    if (bounds) {
+      table.words("bound");
+    }
+    search.variables().forEach(v -> table.row(row(v, ranges, bounds)));
     return table.build();
+  }
+
+  private static List<String> row(VariableRecord v, boolean ranges, boolean bounds) {
+    List<String> cells =
+        new ArrayList<>(
+            List.of(
+                Keys.words(v.key()),
+                v.unit(),
+                Numbers.bare(v.drawn(), v.unit()),
+                Numbers.bare(v.found(), v.unit()),
+                signed(v)));
+    if (ranges) {
+      cells.add(range(v.equallyGoodLow(), v.equallyGoodHigh(), v.unit()));
+    }
+    cells.add(range(v.low(), v.high(), v.unit()) + step(v));
+    if (bounds) {
+      String side = "low".equals(v.bound()) ? "lower" : "upper";
+      cells.add(v.bound() == null ? "" : "stands on the " + side);
+    }
+    return cells;
   }
 
   private static String signed(VariableRecord v) {
