@@ -14,6 +14,7 @@ import evensun.transfermatrix.kernel.FastKernel;
 import evensun.transfermatrix.kernel.Kernel;
 import evensun.transfermatrix.kernel.Layout;
 import evensun.transfermatrix.kernel.ReferenceKernel;
+import evensun.transfermatrix.kernel.RowSums;
 import evensun.transfermatrix.kernel.Spectra;
 import evensun.transfermatrix.kernel.Weights;
 import java.util.Arrays;
@@ -188,12 +189,8 @@ final class TransferMatrixEvaluator implements Evaluator, Gradient, DepthProfile
     }
   }
 
-  private double dot(double[] weight, double[] values) {
-    double total = 0;
-    for (int w = 0; weight != null && w < wavelengths; w++) {
-      total += weight[w] * values[w];
-    }
-    return total;
+  private static double dot(double[] weight, double[] values) {
+    return weight == null ? 0 : RowSums.dot(weight, values);
   }
 
   @Override

@@ -6,41 +6,13 @@ final class GradientLoops {
   private GradientLoops() {}
 
   /** 1/u. */
-  static void reciprocal(double[] uRe, double[] uIm, double[] outRe, double[] outIm) {
-    for (int w = 0; w < outRe.length; w++) {
+  static void reciprocal(double[] uRe, double[] uIm, double[] outRe, double[] outIm, int count) {
+    for (int w = 0; w < count; w++) {
       double a = uRe[w];
       double b = uIm[w];
       double scale = 1 / (a * a + b * b);
       outRe[w] = a * scale;
       outIm[w] = -b * scale;
-    }
-  }
-
-  /** 1 - r². */
-  static void oneLessSquare(double[] rRe, double[] rIm, double[] outRe, double[] outIm) {
-    for (int w = 0; w < outRe.length; w++) {
-      double a = rRe[w];
-      double b = rIm[w];
-      outRe[w] = 1 - (a * a - b * b);
-      outIm[w] = -2 * a * b;
-    }
-  }
-
-  /** Complex a·b + c·d. */
-  static void multiplySum(
-      double[] aRe,
-      double[] aIm,
-      double[] bRe,
-      double[] bIm,
-      double[] cRe,
-      double[] cIm,
-      double[] dRe,
-      double[] dIm,
-      double[] outRe,
-      double[] outIm) {
-    for (int w = 0; w < outRe.length; w++) {
-      outRe[w] = aRe[w] * bRe[w] - aIm[w] * bIm[w] + cRe[w] * dRe[w] - cIm[w] * dIm[w];
-      outIm[w] = aRe[w] * bIm[w] + aIm[w] * bRe[w] + cRe[w] * dIm[w] + cIm[w] * dRe[w];
     }
   }
 
@@ -51,8 +23,9 @@ final class GradientLoops {
       double[] xRe,
       double[] xIm,
       double[] outRe,
-      double[] outIm) {
-    for (int w = 0; w < outRe.length; w++) {
+      double[] outIm,
+      int count) {
+    for (int w = 0; w < count; w++) {
       double decay = MediumRows.DECAY_PARTS * decayPerNm[w];
       double angle = 2 * Math.PI * turnsPerNm[w];
       outRe[w] = decay * xRe[w] - angle * xIm[w];
@@ -62,50 +35,59 @@ final class GradientLoops {
 
   /** α + 2 Re(h ν). */
   static void loss(
-      double[] decayPerNm, double[] hRe, double[] hIm, double[] nuRe, double[] nuIm, double[] out) {
-    for (int w = 0; w < out.length; w++) {
+      double[] decayPerNm,
+      double[] hRe,
+      double[] hIm,
+      double[] nuRe,
+      double[] nuIm,
+      double[] out,
+      int count) {
+    for (int w = 0; w < count; w++) {
       double growth = hRe[w] * nuRe[w] - hIm[w] * nuIm[w];
       out[w] = 2 * growth - MediumRows.DECAY_PARTS * decayPerNm[w];
     }
   }
 
-  /** P ∂s/∂w of the flux s of a pair, P the product of the first two rows. */
-  static void fluxByWave(
-      double[] norm,
-      double[] through,
+  /** −2p η′ w*: the straight part of p ∂s/∂w, s the flux of a pair. */
+  static void straightByWave(
+      double[] p,
       double[] etaRe,
+      double[] wRe,
+      double[] wIm,
+      double[] outRe,
+      double[] outIm,
+      int count) {
+    for (int w = 0; w < count; w++) {
+      double factor = 2 * etaRe[w] * p[w];
+      outRe[w] = -factor * wRe[w];
+      outIm[w] = factor * wIm[w];
+    }
+  }
+
+  /** Adds −i·cross·p η″ u*: the mixed part of p ∂s/∂w. */
+  static void addMixedByWave(
+      double[] p,
       double[] etaIm,
       double cross,
       double[] uRe,
       double[] uIm,
-      double[] wRe,
-      double[] wIm,
       double[] outRe,
-      double[] outIm) {
-    for (int w = 0; w < outRe.length; w++) {
-      double p = norm[w] * through[w];
-      double straight = 2 * etaRe[w] * p;
-      double mixed = cross * etaIm[w] * p;
-      outRe[w] = -straight * wRe[w] - mixed * uIm[w];
-      outIm[w] = straight * wIm[w] - mixed * uRe[w];
+      double[] outIm,
+      int count) {
+    for (int w = 0; w < count; w++) {
+      double factor = cross * etaIm[w] * p[w];
+      outRe[w] -= factor * uIm[w];
+      outIm[w] -= factor * uRe[w];
     }
   }
 
-  /** Complex a·b − 2f·c. */
-  static void seed(
-      double[] aRe,
-      double[] aIm,
-      double[] bRe,
-      double[] bIm,
-      double[] f,
-      double[] cRe,
-      double[] cIm,
-      double[] outRe,
-      double[] outIm) {
-    for (int w = 0; w < outRe.length; w++) {
+  /** Subtracts 2f·x. */
+  static void subtractTwice(
+      double[] f, double[] xRe, double[] xIm, double[] outRe, double[] outIm, int count) {
+    for (int w = 0; w < count; w++) {
       double twice = 2 * f[w];
-      outRe[w] = aRe[w] * bRe[w] - aIm[w] * bIm[w] - twice * cRe[w];
-      outIm[w] = aRe[w] * bIm[w] + aIm[w] * bRe[w] - twice * cIm[w];
+      outRe[w] -= twice * xRe[w];
+      outIm[w] -= twice * xIm[w];
     }
   }
 
@@ -119,16 +101,18 @@ final class GradientLoops {
       double[] rhoRe,
       double[] rhoIm,
       double[] outRe,
-      double[] outIm) {
-    for (int w = 0; w < outRe.length; w++) {
+      double[] outIm,
+      int count) {
+    for (int w = 0; w < count; w++) {
       outRe[w] = 2 * ofReflectance[w] * rhoRe[w];
       outIm[w] = ofMixed[w] * cross * etaIm[w] / carried[w] - 2 * ofReflectance[w] * rhoIm[w];
     }
   }
 
   /** Real factor times complex row. */
-  static void scale(double[] factor, double[] xRe, double[] xIm, double[] outRe, double[] outIm) {
-    for (int w = 0; w < outRe.length; w++) {
+  static void scale(
+      double[] factor, double[] xRe, double[] xIm, double[] outRe, double[] outIm, int count) {
+    for (int w = 0; w < count; w++) {
       outRe[w] = factor[w] * xRe[w];
       outIm[w] = factor[w] * xIm[w];
     }
@@ -136,57 +120,46 @@ final class GradientLoops {
 
   /** Adds a real factor times a complex row. */
   static void addScaled(
-      double[] factor, double[] xRe, double[] xIm, double[] outRe, double[] outIm) {
-    for (int w = 0; w < outRe.length; w++) {
+      double[] factor, double[] xRe, double[] xIm, double[] outRe, double[] outIm, int count) {
+    for (int w = 0; w < count; w++) {
       outRe[w] += factor[w] * xRe[w];
       outIm[w] += factor[w] * xIm[w];
     }
   }
 
   /** a·b + c. */
-  static void multiplyAdd(double[] a, double[] b, double[] c, double[] out) {
-    for (int w = 0; w < out.length; w++) {
+  static void multiplyAdd(double[] a, double[] b, double[] c, double[] out, int count) {
+    for (int w = 0; w < count; w++) {
       out[w] = a[w] * b[w] + c[w];
     }
   }
 
-  /** (a − b)·c. */
-  static void multiplyDifference(double[] a, double[] b, double[] c, double[] out) {
-    for (int w = 0; w < out.length; w++) {
-      out[w] = (a[w] - b[w]) * c[w];
+  /** −a. */
+  static void negative(double[] a, double[] out, int count) {
+    for (int w = 0; w < count; w++) {
+      out[w] = -a[w];
+    }
+  }
+
+  /** a − b. */
+  static void difference(double[] a, double[] b, double[] out, int count) {
+    for (int w = 0; w < count; w++) {
+      out[w] = a[w] - b[w];
     }
   }
 
   /** Re(h γ). */
-  static void realProduct(double[] hRe, double[] hIm, double[] gRe, double[] gIm, double[] out) {
-    for (int w = 0; w < out.length; w++) {
+  static void realProduct(
+      double[] hRe, double[] hIm, double[] gRe, double[] gIm, double[] out, int count) {
+    for (int w = 0; w < count; w++) {
       out[w] = hRe[w] * gRe[w] - hIm[w] * gIm[w];
     }
   }
 
   /** Subtracts a·b. */
-  static void subtractProduct(double[] a, double[] b, double[] out) {
-    for (int w = 0; w < out.length; w++) {
+  static void subtractProduct(double[] a, double[] b, double[] out, int count) {
+    for (int w = 0; w < count; w++) {
       out[w] -= a[w] * b[w];
     }
-  }
-
-  /** Sum of a row, in four strands so that additions need not wait for each other. */
-  static double total(double[] row) {
-    double a = 0;
-    double b = 0;
-    double c = 0;
-    double d = 0;
-    int w = 0;
-    for (; w + 3 < row.length; w += 4) {
-      a += row[w];
-      b += row[w + 1];
-      c += row[w + 2];
-      d += row[w + 3];
-    }
-    for (; w < row.length; w++) {
-      a += row[w];
-    }
-    return (a + b) + (c + d);
   }
 }

@@ -38,11 +38,13 @@ final class Intensities {
   /** [b][w] intensity on packet b - 1 from below. */
   final double[][] returning;
 
+  private final int wavelengths;
   private final boolean[] followed; // [j]
   private final double[] start;
   private final double[] row;
 
   Intensities(int layers, int thickLayers, int wavelengths) {
+    this.wavelengths = wavelengths;
     int count = thickLayers + 2;
     thick = new int[count];
     front = new Waves(1, layers, wavelengths);
@@ -104,15 +106,16 @@ final class Intensities {
     for (int b = packets - 2; b >= 0; b--) {
       int near = thick[b];
       int next = thick[b + 1];
-      IntensityLoops.round(passed(optics, b + 1), below(b + 1), round[b + 1]);
-      IntensityLoops.echo(rear.reflectance[next], round[b + 1], echo[b + 1]);
+      IntensityLoops.round(passed(optics, b + 1), below(b + 1), round[b + 1], wavelengths);
+      IntensityLoops.echo(rear.reflectance[next], round[b + 1], echo[b + 1], wavelengths);
       IntensityLoops.gather(
           front.reflectance[near],
           front.transmittance[near],
           rear.transmittance[next],
           round[b + 1],
           echo[b + 1],
-          below[b]);
+          below[b],
+          wavelengths);
     }
   }
 
@@ -120,9 +123,9 @@ final class Intensities {
     Arrays.fill(falling[0], share);
     for (int b = 1; b < packets; b++) {
       double[] transmitted = front.transmittance[thick[b - 1]];
-      WaveLoops.product(falling[b - 1], transmitted, echo[b], entering[b]);
-      WaveLoops.product(entering[b], passed(optics, b), falling[b]);
-      WaveLoops.product(entering[b], round[b], returning[b]);
+      WaveLoops.product(falling[b - 1], transmitted, echo[b], entering[b], wavelengths);
+      WaveLoops.product(entering[b], passed(optics, b), falling[b], wavelengths);
+      WaveLoops.product(entering[b], round[b], returning[b], wavelengths);
     }
   }
 
@@ -144,16 +147,16 @@ final class Intensities {
   }
 
   private void report(double[] intensity, double[] fraction, boolean add, double[] out) {
-    WaveLoops.product(intensity, fraction, add ? row : out);
+    WaveLoops.product(intensity, fraction, add ? row : out, wavelengths);
     if (add) {
-      WaveLoops.add(row, out);
+      WaveLoops.add(row, out, wavelengths);
     }
   }
 
   private void reportPacket(Optics optics, int b, boolean add, Spectra into) {
     int near = thick[b];
     int far = thick[b + 1];
-    WaveLoops.product(falling[b], front.norm[near], start);
+    WaveLoops.product(falling[b], front.norm[near], start, wavelengths);
     for (int j = near + 1; j < far; j++) {
       double[] out = into.absorptance[optics.layout.layer[j]];
       if (out != null) {
@@ -163,7 +166,7 @@ final class Intensities {
     if (b == packets - 1) {
       return;
     }
-    WaveLoops.product(returning[b + 1], rear.norm[far], start);
+    WaveLoops.product(returning[b + 1], rear.norm[far], start, wavelengths);
     for (int j = near + 1; j < far; j++) {
       double[] out = into.absorptance[optics.layout.layer[j]];
       if (out != null) {
@@ -178,11 +181,12 @@ final class Intensities {
       return;
     }
     double[] target = add ? row : out;
-    IntensityLoops.absorbed(passed(optics, b), entering[b], falling[b], below(b), target);
+    IntensityLoops.absorbed(
+        passed(optics, b), entering[b], falling[b], below(b), target, wavelengths);
     IntensityLoops.addMixed(
-        falling[b], front.mixed[thick[b]], returning[b], rear.mixed[thick[b]], target);
+        falling[b], front.mixed[thick[b]], returning[b], rear.mixed[thick[b]], target, wavelengths);
     if (add) {
-      WaveLoops.add(row, out);
+      WaveLoops.add(row, out, wavelengths);
     }
   }
 }

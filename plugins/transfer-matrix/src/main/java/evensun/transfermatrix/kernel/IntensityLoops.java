@@ -6,15 +6,15 @@ final class IntensityLoops {
   private IntensityLoops() {}
 
   /** What comes back of an intensity that crosses a medium, is reflected and crosses it again. */
-  static void round(double[] passed, double[] below, double[] out) {
-    for (int w = 0; w < out.length; w++) {
+  static void round(double[] passed, double[] below, double[] out, int count) {
+    for (int w = 0; w < count; w++) {
       out[w] = passed[w] * passed[w] * below[w];
     }
   }
 
   /** Factor by which the round trips add up, 1/(1 − R x). */
-  static void echo(double[] reflectance, double[] round, double[] out) {
-    for (int w = 0; w < out.length; w++) {
+  static void echo(double[] reflectance, double[] round, double[] out, int count) {
+    for (int w = 0; w < count; w++) {
       out[w] = 1 / (1 - reflectance[w] * round[w]);
     }
   }
@@ -26,16 +26,22 @@ final class IntensityLoops {
       double[] backward,
       double[] round,
       double[] echo,
-      double[] out) {
-    for (int w = 0; w < out.length; w++) {
+      double[] out,
+      int count) {
+    for (int w = 0; w < count; w++) {
       out[w] = reflectance[w] + onward[w] * backward[w] * round[w] * echo[w];
     }
   }
 
   /** Absorbed in a thick medium: from two crossings, and mixed at both faces. */
   static void absorbed(
-      double[] passed, double[] entering, double[] falling, double[] below, double[] out) {
-    for (int w = 0; w < out.length; w++) {
+      double[] passed,
+      double[] entering,
+      double[] falling,
+      double[] below,
+      double[] out,
+      int count) {
+    for (int w = 0; w < count; w++) {
       out[w] = (1 - passed[w]) * (entering[w] + falling[w] * below[w]);
     }
   }
@@ -46,8 +52,9 @@ final class IntensityLoops {
       double[] mixedBelow,
       double[] returning,
       double[] mixedAbove,
-      double[] out) {
-    for (int w = 0; w < out.length; w++) {
+      double[] out,
+      int count) {
+    for (int w = 0; w < count; w++) {
       out[w] += falling[w] * mixedBelow[w] + returning[w] * mixedAbove[w];
     }
   }

@@ -26,6 +26,9 @@ final class MediumRows {
   /** Admittances for p-polarised light. */
   final Admittances p;
 
+  /** [x] whether a wave crosses the medium undiminished at every wavelength. */
+  final boolean[] lossless;
+
   /** [x] differs whenever the rows of place x do. */
   final long[] version;
 
@@ -47,6 +50,7 @@ final class MediumRows {
     decayPerNm = new double[places][count];
     s = new Admittances(places, count);
     p = new Admittances(places, count);
+    lossless = new boolean[places];
     version = new long[places];
     material = new int[places];
     revision = new long[places];
@@ -97,9 +101,11 @@ final class MediumRows {
         root(x, w, n[w], k[w], incident[w], least);
       }
     }
+    lossless[x] = true;
     for (int w = 0; w < n.length; w++) {
       turnsPerNm[x][w] = 2 * s.re[x][w] / wavelengthNm[w];
       decayPerNm[x][w] = -4 * Math.PI / DECAY_PARTS * s.im[x][w] / wavelengthNm[w];
+      lossless[x] &= s.im[x][w] == 0;
     }
     s.findCarried(x);
     if (beam.p() > 0) {

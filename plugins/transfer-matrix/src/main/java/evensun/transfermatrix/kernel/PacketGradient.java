@@ -94,13 +94,11 @@ final class PacketGradient {
     Arrays.fill(nuIm[near], 0);
     for (int j = near; j != far; j += step) {
       int slot = waves.slot(optics, j);
-      double[] rRe = optics.faces.re[slot];
-      double[] rIm = optics.faces.im[slot];
-      down(optics, j, j == near, rRe, rIm);
+      down(optics, j, j == near, slot);
       int next = j + step;
       if (next != far) {
         invert(next);
-        nu(j, next, rRe, rIm);
+        nu(optics, j, next, slot);
         thickness(optics, next);
         if (weighted[next] || (j != near && weighted[j])) {
           sigma(optics, near, next);
@@ -111,50 +109,59 @@ final class PacketGradient {
   }
 
   private void invert(int j) {
-    GradientLoops.reciprocal(waves.uRe[j], waves.uIm[j], inverseRe[j], inverseIm[j]);
+    GradientLoops.reciprocal(waves.uRe[j], waves.uIm[j], inverseRe[j], inverseIm[j], wavelengths);
   }
 
-  private void down(Optics optics, int j, boolean near, double[] rRe, double[] rIm) {
+  private void down(Optics optics, int j, boolean near, int slot) {
+    double[] re = optics.faces.crossedRe[slot];
+    double[] im = optics.faces.crossedIm[slot];
     if (near) {
-      GradientLoops.oneLessSquare(rRe, rIm, downRe[j], downIm[j]);
+      System.arraycopy(re, 0, downRe[j], 0, wavelengths);
+      System.arraycopy(im, 0, downIm[j], 0, wavelengths);
     } else {
       int l = optics.layout.layer[j];
-      GradientLoops.oneLessSquare(rRe, rIm, aRe, aIm);
-      WaveLoops.multiply(aRe, aIm, optics.phases.re[l], optics.phases.im[l], downRe[j], downIm[j]);
+      WaveLoops.multiply(
+          re, im, optics.phases.re[l], optics.phases.im[l], downRe[j], downIm[j], wavelengths);
     }
   }
 
-  private void nu(int j, int next, double[] rRe, double[] rIm) {
-    WaveLoops.multiply(inverseRe[j], inverseIm[j], inverseRe[next], inverseIm[next], aRe, aIm);
-    GradientLoops.multiplySum(
-        nuRe[j], nuIm[j], downRe[j], downIm[j], rRe, rIm, aRe, aIm, nuRe[next], nuIm[next]);
+  private void nu(Optics optics, int j, int next, int slot) {
+    double[] rRe = optics.faces.re[slot];
+    double[] rIm = optics.faces.im[slot];
+    WaveLoops.multiply(
+        inverseRe[j], inverseIm[j], inverseRe[next], inverseIm[next], aRe, aIm, wavelengths);
+    WaveLoops.multiply(rRe, rIm, aRe, aIm, nuRe[next], nuIm[next], wavelengths);
+    WaveLoops.addProduct(
+        nuRe[j], nuIm[j], downRe[j], downIm[j], nuRe[next], nuIm[next], wavelengths);
   }
 
   private void thickness(Optics optics, int j) {
     int x = optics.media.place(optics.layout, j);
-    WaveLoops.multiply(waves.uRe[j], waves.uIm[j], waves.wRe[j], waves.wIm[j], aRe, aIm);
+    WaveLoops.multiply(
+        waves.uRe[j], waves.uIm[j], waves.wRe[j], waves.wIm[j], aRe, aIm, wavelengths);
     GradientLoops.byThickness(
-        optics.media.turnsPerNm[x], optics.media.decayPerNm[x], aRe, aIm, hRe[j], hIm[j]);
-    GradientLoops.loss(optics.media.decayPerNm[x], hRe[j], hIm[j], nuRe[j], nuIm[j], loss[j]);
+        optics.media.turnsPerNm[x],
+        optics.media.decayPerNm[x],
+        aRe,
+        aIm,
+        hRe[j],
+        hIm[j],
+        wavelengths);
+    GradientLoops.loss(
+        optics.media.decayPerNm[x], hRe[j], hIm[j], nuRe[j], nuIm[j], loss[j], wavelengths);
   }
 
   private void sigma(Optics optics, int near, int j) {
     int x = optics.media.place(optics.layout, j);
-    WaveLoops.product(waves.norm[near], waves.through[j], waves.flux[j], flux[j]);
-    GradientLoops.fluxByWave(
-        waves.norm[near],
-        waves.through[j],
-        optics.eta.re[x],
-        optics.eta.im[x],
-        waves.cross,
-        waves.uRe[j],
-        waves.uIm[j],
-        waves.wRe[j],
-        waves.wIm[j],
-        aRe,
-        aIm);
-    GradientLoops.seed(
-        aRe, aIm, inverseRe[j], inverseIm[j], flux[j], nuRe[j], nuIm[j], sigmaRe[j], sigmaIm[j]);
+    double[] re = optics.eta.re[x];
+    double[] im = optics.eta.im[x];
+    WaveLoops.product(waves.norm[near], waves.through[j], row, wavelengths);
+    WaveLoops.product(row, waves.flux[j], flux[j], wavelengths);
+    GradientLoops.straightByWave(row, re, waves.wRe[j], waves.wIm[j], aRe, aIm, wavelengths);
+    GradientLoops.addMixedByWave(
+        row, im, waves.cross, waves.uRe[j], waves.uIm[j], aRe, aIm, wavelengths);
+    WaveLoops.multiply(aRe, aIm, inverseRe[j], inverseIm[j], sigmaRe[j], sigmaIm[j], wavelengths);
+    GradientLoops.subtractTwice(flux[j], nuRe[j], nuIm[j], sigmaRe[j], sigmaIm[j], wavelengths);
   }
 
   /**
@@ -185,7 +192,8 @@ final class PacketGradient {
     int step = waves.step;
     for (int j = near + step; j != far; j += step) {
       if (active) {
-        WaveLoops.multiply(gammaRe, gammaIm, downRe[j - step], downIm[j - step], gammaRe, gammaIm);
+        WaveLoops.multiply(
+            gammaRe, gammaIm, downRe[j - step], downIm[j - step], gammaRe, gammaIm, wavelengths);
       }
       if (changes[j]) {
         seed(j, active);
@@ -197,24 +205,24 @@ final class PacketGradient {
 
   private void seed(int j, boolean active) {
     if (active) {
-      GradientLoops.addScaled(change[j], sigmaRe[j], sigmaIm[j], gammaRe, gammaIm);
+      GradientLoops.addScaled(change[j], sigmaRe[j], sigmaIm[j], gammaRe, gammaIm, wavelengths);
     } else {
-      GradientLoops.scale(change[j], sigmaRe[j], sigmaIm[j], gammaRe, gammaIm);
+      GradientLoops.scale(change[j], sigmaRe[j], sigmaIm[j], gammaRe, gammaIm, wavelengths);
     }
   }
 
   private double derivative(int j, boolean active) {
     if (active) {
-      GradientLoops.realProduct(hRe[j], hIm[j], gammaRe, gammaIm, row);
+      GradientLoops.realProduct(hRe[j], hIm[j], gammaRe, gammaIm, row, wavelengths);
     } else if (rests[j]) {
       Arrays.fill(row, 0);
     } else {
       return 0;
     }
     if (rests[j]) {
-      GradientLoops.subtractProduct(rest[j], loss[j], row);
+      GradientLoops.subtractProduct(rest[j], loss[j], row, wavelengths);
     }
-    return GradientLoops.total(row);
+    return RowSums.total(row);
   }
 
   /** m: what the flux into each medium weighs. */
@@ -234,9 +242,13 @@ final class PacketGradient {
     }
   }
 
-  private static void difference(double[] here, double[] before, double[] out) {
-    for (int w = 0; w < out.length; w++) {
-      out[w] = (here == null ? 0 : here[w]) - (before == null ? 0 : before[w]);
+  private void difference(double[] here, double[] before, double[] out) {
+    if (before == null) {
+      System.arraycopy(here, 0, out, 0, wavelengths);
+    } else if (here == null) {
+      GradientLoops.negative(before, out, wavelengths);
+    } else {
+      GradientLoops.difference(here, before, out, wavelengths);
     }
   }
 
@@ -247,9 +259,9 @@ final class PacketGradient {
       int next = j + step;
       rests[j] = rests[next] || changes[next];
       if (rests[next] && changes[next]) {
-        GradientLoops.multiplyAdd(change[next], flux[next], rest[next], rest[j]);
+        GradientLoops.multiplyAdd(change[next], flux[next], rest[next], rest[j], wavelengths);
       } else if (changes[next]) {
-        WaveLoops.product(change[next], flux[next], rest[j]);
+        WaveLoops.product(change[next], flux[next], rest[j], wavelengths);
       } else if (rests[next]) {
         System.arraycopy(rest[next], 0, rest[j], 0, wavelengths);
       }
@@ -260,7 +272,7 @@ final class PacketGradient {
     int x = optics.media.place(optics.layout, near);
     double[] iRe = inverseRe[near];
     double[] iIm = inverseIm[near];
-    WaveLoops.multiply(waves.wRe[near], waves.wIm[near], iRe, iIm, aRe, aIm);
+    WaveLoops.multiply(waves.wRe[near], waves.wIm[near], iRe, iIm, aRe, aIm, wavelengths);
     GradientLoops.reflectionSeed(
         ofReflectance,
         ofMixed,
@@ -270,8 +282,9 @@ final class PacketGradient {
         aRe,
         aIm,
         bRe,
-        bIm);
-    WaveLoops.multiply(iRe, iIm, iRe, iIm, aRe, aIm);
-    WaveLoops.multiply(aRe, aIm, bRe, bIm, gammaRe, gammaIm);
+        bIm,
+        wavelengths);
+    WaveLoops.multiply(iRe, iIm, iRe, iIm, aRe, aIm, wavelengths);
+    WaveLoops.multiply(aRe, aIm, bRe, bIm, gammaRe, gammaIm, wavelengths);
   }
 }

@@ -1,5 +1,7 @@
 package evensun.transfermatrix.kernel;
 
+import java.util.Arrays;
+
 /**
  * Phase factors exp(2iκd) of the layers, found anew only when thickness or medium changes.
  *
@@ -27,7 +29,10 @@ final class Phases {
   private final double[] sine; // [w] of half the angle
   private final double[] cosine;
 
+  private final int wavelengths;
+
   Phases(int layers, int wavelengths) {
+    this.wavelengths = wavelengths;
     size = new double[layers][wavelengths];
     re = new double[layers][wavelengths];
     im = new double[layers][wavelengths];
@@ -44,11 +49,15 @@ final class Phases {
       int x = media.place(layout, j);
       double nm = layout.thicknessNm[j];
       if (version[l] != media.version[x] || thicknessNm[l] != nm) {
-        decay(media.decayPerNm[x], nm, size[l]);
+        if (media.lossless[x]) {
+          Arrays.fill(size[l], 1); // what decay would find
+        } else {
+          decay(media.decayPerNm[x], nm, size[l], wavelengths);
+        }
         if (layout.coherent[j]) {
-          halfAngle(media.turnsPerNm[x], nm, sine, cosine);
-          imaginary(sine, cosine, size[l], im[l]);
-          real(sine, size[l], re[l]);
+          halfAngle(media.turnsPerNm[x], nm, sine, cosine, wavelengths);
+          imaginary(sine, cosine, size[l], im[l], wavelengths);
+          real(sine, size[l], re[l], wavelengths);
         }
         version[l] = media.version[x];
         thicknessNm[l] = nm;
@@ -56,9 +65,13 @@ final class Phases {
     }
   }
 
-  private static void decay(double[] decayPerNm, double nm, double[] out) {
-    for (int w = 0; w < out.length; w++) {
-      double x = Math.max(decayPerNm[w] * nm, LEAST_EXPONENT);
+  /** exp of an exponent given in parts: expm1 of one part, doubled five times, squared twice. */
+  private static void decay(double[] decayPerNm, double nm, double[] out, int count) {
+    for (int w = 0; w < count; w++) {
+      out[w] = Math.max(decayPerNm[w] * nm, LEAST_EXPONENT);
+    }
+    for (int w = 0; w < count; w++) {
+      double x = out[w];
       double m = 2.3559261160148413e-06 * x + 2.4546395978170872e-05;
       m = m * x + 0.00019832360917346924;
       m = m * x + 0.001388870657726418;
@@ -67,7 +80,10 @@ final class Phases {
       m = m * x + 0.16666666666159283;
       m = m * x + 0.4999999999999335;
       m = m * x + 0.9999999999999999;
-      m = m * x;
+      out[w] = m * x;
+    }
+    for (int w = 0; w < count; w++) {
+      double m = out[w];
       m = m * (m + 2);
       m = m * (m + 2);
       m = m * (m + 2);
@@ -79,17 +95,26 @@ final class Phases {
     }
   }
 
-  private static void halfAngle(double[] turnsPerNm, double nm, double[] sine, double[] cosine) {
-    for (int w = 0; w < sine.length; w++) {
+  /** Sine and cosine of half the angle, from those of its quarter. */
+  private static void halfAngle(
+      double[] turnsPerNm, double nm, double[] sine, double[] cosine, int count) {
+    for (int w = 0; w < count; w++) {
       double turns = turnsPerNm[w] * nm;
-      double x = turns - Math.rint(turns);
+      cosine[w] = turns - Math.rint(turns);
+    }
+    for (int w = 0; w < count; w++) {
+      double x = cosine[w];
       double y = x * x;
       double s = 5.633933781537854e-08 * y - 3.59864335298231e-06;
       s = s * y + 0.0001604411507421909;
       s = s * y - 0.004681754132340976;
       s = s * y + 0.07969262624604301;
       s = s * y - 0.6459640975062443;
-      s = (s * y + 1.5707963267948966) * x;
+      sine[w] = (s * y + 1.5707963267948966) * x;
+    }
+    for (int w = 0; w < count; w++) {
+      double s = sine[w];
+      double y = cosine[w] * cosine[w];
       double c = 4.6552961874867623e-07 * y - 2.520013526428479e-05;
       c = c * y + 0.000919259950041661;
       c = c * y - 0.02086348073494657;
@@ -101,14 +126,15 @@ final class Phases {
     }
   }
 
-  private static void imaginary(double[] sine, double[] cosine, double[] size, double[] out) {
-    for (int w = 0; w < out.length; w++) {
+  private static void imaginary(
+      double[] sine, double[] cosine, double[] size, double[] out, int count) {
+    for (int w = 0; w < count; w++) {
       out[w] = size[w] * (2 * sine[w] * cosine[w]);
     }
   }
 
-  private static void real(double[] sine, double[] size, double[] out) {
-    for (int w = 0; w < out.length; w++) {
+  private static void real(double[] sine, double[] size, double[] out, int count) {
+    for (int w = 0; w < count; w++) {
       out[w] = size[w] * (1 - 2 * sine[w] * sine[w]);
     }
   }

@@ -94,12 +94,12 @@ final class StackGradient {
       if (b == last) {
         onward = transmittance == null ? null : transmittanceBar;
         if (onward != null) {
-          WaveLoops.product(transmittance, intensity, onward);
+          WaveLoops.product(transmittance, intensity, onward, wavelengths);
         }
       }
       boolean lit = b > 0;
       if (lit) {
-        WaveLoops.product(thickWeight[b], intensity, mixedBar);
+        WaveLoops.product(thickWeight[b], intensity, mixedBar, wavelengths);
       }
       front.add(
           optics, near, far, weight, onward, lit ? belowBar[b] : null, mixedBar, into, offset);
@@ -115,7 +115,7 @@ final class StackGradient {
     int far = stack.thick[b];
     double[] intensity = stack.returning[b + 1];
     scale(optics, far, near, absorptance, intensity);
-    WaveLoops.product(thickWeight[b + 1], intensity, mixedBar);
+    WaveLoops.product(thickWeight[b + 1], intensity, mixedBar, wavelengths);
     rear.add(
         optics,
         near,
@@ -134,7 +134,7 @@ final class StackGradient {
       double[] row = absorptance[optics.layout.layer[j]];
       weight[j] = row == null ? null : scaled[j];
       if (row != null) {
-        WaveLoops.product(row, intensity, scaled[j]);
+        WaveLoops.product(row, intensity, scaled[j], wavelengths);
       }
     }
   }
@@ -142,8 +142,8 @@ final class StackGradient {
   private void thick(Optics optics, int b, double[] into, int offset) {
     int j = stack.thick[b];
     double[] decay = optics.media.decayPerNm[optics.media.place(optics.layout, j)];
-    WaveLoops.product(passedBar[b], stack.passed(optics, b), decay, mixedBar);
-    into[offset + optics.layout.layer[j]] += MediumRows.DECAY_PARTS * GradientLoops.total(mixedBar);
+    WaveLoops.product(passedBar[b], stack.passed(optics, b), decay, mixedBar, wavelengths);
+    into[offset + optics.layout.layer[j]] += MediumRows.DECAY_PARTS * RowSums.total(mixedBar);
   }
 
   /** Derivatives of the sum by what the packets do. */
@@ -183,12 +183,13 @@ final class StackGradient {
     }
     if (transmittance != null) {
       double[] transmitted = stack.front.transmittance[stack.thick[last]];
-      GradientLoops.multiplyAdd(transmittance, transmitted, frontValue[last], frontValue[last]);
+      GradientLoops.multiplyAdd(
+          transmittance, transmitted, frontValue[last], frontValue[last], wavelengths);
     }
   }
 
-  private static void addValue(double[] weight, double[] in, double[] out, double[] into) {
-    for (int w = 0; w < into.length; w++) {
+  private void addValue(double[] weight, double[] in, double[] out, double[] into) {
+    for (int w = 0; w < wavelengths; w++) {
       into[w] += weight[w] * (in[w] - out[w]);
     }
   }

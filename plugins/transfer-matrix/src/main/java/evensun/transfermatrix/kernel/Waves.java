@@ -50,8 +50,11 @@ final class Waves {
   private final double[] vRe;
   private final double[] vIm;
 
+  private final int wavelengths;
+
   Waves(int step, int layers, int wavelengths) {
     this.step = step;
+    this.wavelengths = wavelengths;
     cross = 2.0 * step;
     int media = layers + 2;
     uRe = new double[media][wavelengths];
@@ -88,41 +91,52 @@ final class Waves {
   }
 
   private void climb(Optics optics, int near, int far, boolean[] followed) {
-    Faces faces = optics.faces;
     double[] onRe = ones;
     double[] onIm = zeros;
     double[] backRe = zeros;
     double[] backIm = zeros;
-    for (int j = far - step; ; j -= step) {
-      int slot = slot(optics, j);
-      double[] nextRe = j == near ? wRe[j] : vRe;
-      double[] nextIm = j == near ? wIm[j] : vIm;
-      WaveLoops.face(
-          faces.re[slot],
-          faces.im[slot],
-          onRe,
-          onIm,
-          backRe,
-          backIm,
-          uRe[j],
-          uIm[j],
-          nextRe,
-          nextIm);
-      if (j == near) {
-        return;
-      }
+    for (int j = far - step; j != near; j -= step) {
+      face(optics, j, onRe, onIm, backRe, backIm, vRe, vIm);
       int l = optics.layout.layer[j];
-      WaveLoops.multiply(vRe, vIm, optics.phases.re[l], optics.phases.im[l], wRe[j], wIm[j]);
+      WaveLoops.multiply(
+          vRe, vIm, optics.phases.re[l], optics.phases.im[l], wRe[j], wIm[j], wavelengths);
       onRe = uRe[j];
       onIm = uIm[j];
       backRe = wRe[j];
       backIm = wIm[j];
       if (followed[j] || (j - step != near && followed[j - step])) {
-        int x = optics.media.place(optics.layout, j);
-        WaveLoops.flux(
-            optics.eta.re[x], optics.eta.im[x], onRe, onIm, backRe, backIm, cross, flux[j]);
+        flux(optics, j);
       }
     }
+    face(optics, near, onRe, onIm, backRe, backIm, wRe[near], wIm[near]);
+  }
+
+  /** From the pair (u, w) below the face of medium j to the pair above it: u + r w and r u + w. */
+  private void face(
+      Optics optics,
+      int j,
+      double[] onRe,
+      double[] onIm,
+      double[] backRe,
+      double[] backIm,
+      double[] outRe,
+      double[] outIm) {
+    int slot = slot(optics, j);
+    double[] rRe = optics.faces.re[slot];
+    double[] rIm = optics.faces.im[slot];
+    System.arraycopy(onRe, 0, uRe[j], 0, wavelengths);
+    System.arraycopy(onIm, 0, uIm[j], 0, wavelengths);
+    WaveLoops.addProduct(rRe, rIm, backRe, backIm, uRe[j], uIm[j], wavelengths);
+    System.arraycopy(backRe, 0, outRe, 0, wavelengths);
+    System.arraycopy(backIm, 0, outIm, 0, wavelengths);
+    WaveLoops.addProduct(rRe, rIm, onRe, onIm, outRe, outIm, wavelengths);
+  }
+
+  private void flux(Optics optics, int j) {
+    int x = optics.media.place(optics.layout, j);
+    WaveLoops.mixedFlux(
+        optics.eta.im[x], uRe[j], uIm[j], wRe[j], wIm[j], cross, flux[j], wavelengths);
+    WaveLoops.addFlux(optics.eta.re[x], uRe[j], uIm[j], wRe[j], wIm[j], flux[j], wavelengths);
   }
 
   private void descend(Optics optics, int near, int far) {
@@ -131,7 +145,7 @@ final class Waves {
     System.arraycopy(first, 0, through[near + step], 0, first.length);
     for (int j = near + step; j != far; j += step) {
       double[] size = optics.phases.size[optics.layout.layer[j]];
-      WaveLoops.through(through[j], size, passing[slot(optics, j)], through[j + step]);
+      WaveLoops.through(through[j], size, passing[slot(optics, j)], through[j + step], wavelengths);
     }
   }
 
@@ -139,11 +153,15 @@ final class Waves {
     Admittances eta = optics.eta;
     int x = optics.media.place(optics.layout, near);
     double[] carried = eta.carried[x];
-    WaveLoops.norm(uRe[near], uIm[near], carried, norm[near]);
-    WaveLoops.reflectance(wRe[near], wIm[near], norm[near], carried, reflectance[near]);
-    WaveLoops.product(norm[near], through[far], farFlux(optics, far), transmittance[near]);
-    WaveLoops.mixed(
-        uRe[near], uIm[near], wRe[near], wIm[near], eta.im[x], cross, norm[near], mixed[near]);
+    WaveLoops.norm(uRe[near], uIm[near], carried, norm[near], wavelengths);
+    WaveLoops.reflectance(
+        wRe[near], wIm[near], norm[near], carried, reflectance[near], wavelengths);
+    WaveLoops.product(
+        norm[near], through[far], farFlux(optics, far), transmittance[near], wavelengths);
+    // 1 = R + M + flux into the packet, and M is what the mixed part of that flux takes away.
+    WaveLoops.mixedFlux(
+        eta.im[x], uRe[near], uIm[near], wRe[near], wIm[near], -cross, vRe, wavelengths);
+    WaveLoops.product(vRe, norm[near], mixed[near], wavelengths);
   }
 
   /** Flux of the single wave in the far medium, whose pair is (1, 0). */
@@ -160,9 +178,9 @@ final class Waves {
     int next = j + step;
     double[] leaving = next == far ? farFlux(optics, far) : flux[next];
     if (add) {
-      WaveLoops.addAbsorbed(start, through[j], flux[j], through[next], leaving, out);
+      WaveLoops.addAbsorbed(start, through[j], flux[j], through[next], leaving, out, wavelengths);
     } else {
-      WaveLoops.absorbed(start, through[j], flux[j], through[next], leaving, out);
+      WaveLoops.absorbed(start, through[j], flux[j], through[next], leaving, out, wavelengths);
     }
   }
 }
