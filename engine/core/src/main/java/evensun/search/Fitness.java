@@ -1,7 +1,5 @@
 package evensun.search;
 
-import java.util.List;
-
 /**
  * What the genetic algorithm compares: a failure ranks behind every design, a design that breaks a
  * limit behind every one that breaks less, and the aim decides among those that keep all limits.
@@ -45,8 +43,13 @@ final class Fitness implements Comparable<Fitness> {
     return violation <= 0;
   }
 
-  List<Double> aims() {
-    return verdict.aims();
+  /** Number of aims; none for a failure, and failures share one violation and one front. */
+  int objectiveCount() {
+    return verdict.isFailure() ? 0 : verdict.aims().size();
+  }
+
+  double objective(int aim) {
+    return verdict.aims().get(aim);
   }
 
   @Override

@@ -15,6 +15,7 @@ import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.SplittableRandom;
+import java.util.stream.IntStream;
 
 /**
  * One generation after the other. Selection and alteration run on the calling thread with one
@@ -27,11 +28,38 @@ final class Genetic {
   private final Space space;
   private final SearchSettings settings;
   private final Judges judges;
+  private final Selector<DoubleGene, Fitness> survivors;
+  private final Selector<DoubleGene, Fitness> parents;
 
-  Genetic(Space space, SearchSettings settings, Judges judges) {
+  private Genetic(
+      Space space,
+      SearchSettings settings,
+      Judges judges,
+      Selector<DoubleGene, Fitness> survivors,
+      Selector<DoubleGene, Fitness> parents) {
     this.space = space;
     this.settings = settings;
     this.judges = judges;
+    this.survivors = survivors;
+    this.parents = parents;
+  }
+
+  /** For the first aim alone: the best survive, tournaments choose the parents. */
+  static Genetic forOneAim(Space space, SearchSettings settings, Judges judges) {
+    return new Genetic(space, settings, judges, new DistinctBest(), new TournamentSelector<>(3));
+  }
+
+  /** For several aims at once: whole fronts survive, and their better half has the children. */
+  static Genetic forSeveralAims(Space space, SearchSettings settings, Judges judges) {
+    FrontSelector fronts = new FrontSelector();
+    Selector<DoubleGene, Fitness> parents =
+        (population, count, optimize) -> {
+          var half = fronts.select(population, population.length() / 2, optimize);
+          return IntStream.range(0, count)
+              .mapToObj(i -> half.get(i % half.length()))
+              .collect(ISeq.toISeq());
+        };
+    return new Genetic(space, settings, judges, fronts, parents);
   }
 
   /**
@@ -77,17 +105,17 @@ final class Genetic {
    * @param floor see {@link Fitness#of}
    */
   List<Individual> next(List<Individual> present, int generation, double floor, Tally tally) {
-    ISeq<Phenotype<DoubleGene, Fitness>> parents =
+    ISeq<Phenotype<DoubleGene, Fitness>> evaluated =
         present.stream().map(individual -> phenotype(individual, floor)).collect(ISeq.toISeq());
     Engine<DoubleGene, Fitness> engine =
         new Engine.Builder<DoubleGene, Fitness>(
-                population -> evaluated(population, parents, floor, tally),
+                population -> evaluated(population, evaluated, floor, tally),
                 () -> Genes.genotype(new double[space.size()]))
             .executor(Runnable::run)
             .populationSize(present.size())
             .offspringFraction(OFFSPRING_FRACTION)
-            .survivorsSelector(survivors())
-            .offspringSelector(new TournamentSelector<>(3))
+            .survivorsSelector(survivors)
+            .offspringSelector(parents)
             .alterers(new Variation(space, 0.5, 0.3))
             .maximalPhenotypeAge(Long.MAX_VALUE)
             .build();
@@ -96,12 +124,8 @@ final class Genetic {
         Numbers.random(settings.seed(), generation),
         random ->
             result.addAll(
-                individuals(engine.evolve(EvolutionStart.of(parents, generation)).population())));
+                individuals(engine.evolve(EvolutionStart.of(evaluated, generation)).population())));
     return result;
-  }
-
-  private static Selector<DoubleGene, Fitness> survivors() {
-    return new DistinctBest();
   }
 
   private static Phenotype<DoubleGene, Fitness> phenotype(Individual individual, double floor) {

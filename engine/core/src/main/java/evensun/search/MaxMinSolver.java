@@ -11,9 +11,6 @@ import java.util.Arrays;
  */
 final class MaxMinSolver {
 
-  /** Sides below this fraction of the whole box end the climb. */
-  private static final double SMALLEST = 2e-6;
-
   private final MaxMinModel model;
   private final LinearStep linear;
   private Sample here;
@@ -31,9 +28,14 @@ final class MaxMinSolver {
     here = sample(start.clone());
   }
 
-  /** Climbs for at most so many steps and returns the best point. */
-  double[] climb(int steps) {
-    for (int i = 0; i < steps && here.usable && radius > SMALLEST; i++) {
+  /**
+   * Climbs and returns the best point.
+   *
+   * @param steps largest number of steps
+   * @param smallest radius below which it ends
+   */
+  double[] climb(int steps, double smallest) {
+    for (int i = 0; i < steps && here.usable && radius > smallest; i++) {
       step();
     }
     return here.point;

@@ -5,6 +5,12 @@ import java.util.List;
 /** The rules that end a round and a search, computed from the saved history alone. */
 record Rounds(SearchSettings settings) {
 
+  /** So many combining rounds in a row without a gain end the search. */
+  private static final int IDLE = 4;
+
+  /** More combining rounds would only polish noise. */
+  private static final int COMBINING = 12;
+
   /** Rounds that start afresh; fewer where the budget is too small to let each converge. */
   int fresh() {
     int affordable = settings.evaluations() / (20 * settings.populationSize());
@@ -13,7 +19,7 @@ record Rounds(SearchSettings settings) {
 
   /** Rounds at most: after the fresh ones, those that combine what was found. */
   int limit() {
-    return fresh() == 1 && settings.rounds() == 1 ? 1 : fresh() + 4;
+    return settings.rounds() == 1 ? 1 : fresh() + COMBINING;
   }
 
   boolean isFresh(int round) {
@@ -28,7 +34,7 @@ record Rounds(SearchSettings settings) {
 
   private boolean stalled(List<GenerationRecord> own) {
     int last = own.size() - 1;
-    int before = last - settings.stallGenerations();
+    int before = last - patience(own.get(0).round());
     if (before < 0) {
       return false;
     }
@@ -37,6 +43,15 @@ record Rounds(SearchSettings settings) {
     double gain = best - own.get(before).roundBest();
     // Without a feasible design yet there is no gain to measure, and every reason to go on.
     return best > Double.NEGATIVE_INFINITY && !(gain > settings.stallFraction() * scale);
+  }
+
+  /**
+   * Combining rounds are in turn short, for what shows its gain in the refinement, and long, for
+   * what the genetic algorithm has to put together itself.
+   */
+  private int patience(int round) {
+    boolean brief = !isFresh(round) && (round - fresh()) % 2 == 0;
+    return brief ? Math.min(2, settings.stallGenerations()) : settings.stallGenerations();
   }
 
   /** A fresh round may use its share of the budget, so that every round gets its turn. */
@@ -57,15 +72,22 @@ record Rounds(SearchSettings settings) {
     return evaluations + settings.populationSize() > 0.95 * settings.evaluations();
   }
 
-  /** Whether the last round, one that combined, gained nothing worth while. */
+  /** Whether the last rounds, all of which combined, gained nothing worth while. */
   boolean converged(List<Double> roundBests, List<GenerationRecord> history) {
-    int last = roundBests.size() - 1;
-    if (last < fresh()) {
-      return limit() <= roundBests.size();
+    int count = roundBests.size();
+    if (count >= limit()) {
+      return true;
     }
-    double before = roundBests.subList(0, last).stream().mapToDouble(b -> b).max().orElseThrow();
+    if (count < fresh() + IDLE) {
+      return false;
+    }
+    double before = best(roundBests.subList(0, count - IDLE));
     double scale = before - history.get(0).mean();
-    return !(roundBests.get(last) - before > 1e-5 * scale);
+    return !(best(roundBests) - before > 1e-5 * scale);
+  }
+
+  private static double best(List<Double> roundBests) {
+    return roundBests.stream().mapToDouble(b -> b).max().orElseThrow();
   }
 
   boolean tooManyFailures(int evaluations, int failures) {

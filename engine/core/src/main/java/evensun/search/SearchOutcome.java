@@ -13,7 +13,8 @@ import org.jspecify.annotations.Nullable;
  * @param failureCount designs that could not be evaluated
  * @param failures one entry per kind of failure, in the order in which they were met
  * @param history one entry per generation
- * @param refinementGain what the local refinement added to the best first aim
+ * @param refinementGain what the local refinement, and the combining of what it found, added to the
+ *     best first aim of the genetic algorithm alone
  * @param optima distinct good designs, best first
  * @param roundBests best first aim of each round, for the spread over restarts
  * @param state where the search stands; a resumed search continues from it

@@ -69,10 +69,10 @@ public record SearchSettings(
         30_000,
         OptionalDouble.empty(),
         OptionalInt.empty(),
-        3,
-        10,
-        0.01,
+        4,
         8,
+        0.01,
+        24,
         0.5);
   }
 

@@ -13,7 +13,7 @@ import java.util.List;
  * @param population the present generation in order
  * @param optima what the refinement found so far, best first
  * @param roundBests [round] best aim of each finished round
- * @param unrefinedBest best aim that the genetic algorithm alone found
+ * @param unrefinedBest best aim of the genetic algorithm alone, in its fresh rounds
  * @param history one entry per generation
  * @param failures one entry per kind of failure
  * @param tieBreaking whether the tie-break now decides among designs of nearly the best aim

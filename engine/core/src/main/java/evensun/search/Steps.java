@@ -3,7 +3,9 @@ package evensun.search;
 import evensun.search.SearchState.Individual;
 import evensun.search.SearchState.Phase;
 import java.util.ArrayList;
+import java.util.HashSet;
 import java.util.List;
+import java.util.Set;
 
 /**
  * The steps of a search, each from one state to the next: a generation, or the refinement that ends
@@ -26,7 +28,7 @@ final class Steps {
     this.space = space;
     this.settings = settings;
     rounds = new Rounds(settings);
-    genetic = new Genetic(space, settings, judges);
+    genetic = Genetic.forOneAim(space, settings, judges);
     refiner = new Refiner(space, judges, objective.limits().size(), settings.seed());
   }
 
@@ -63,12 +65,19 @@ final class Steps {
             population,
             state.optima(),
             state.roundBests(),
-            Math.max(state.unrefinedBest(), SearchState.bestAim(population)),
+            unrefinedBest(state, population),
             history,
             tally.failures(),
             state.tieBreaking(),
             state.stop());
     return judged(next);
+  }
+
+  /** Combining rounds start from refined designs, so only fresh rounds show the algorithm alone. */
+  private double unrefinedBest(SearchState state, List<Individual> population) {
+    return rounds.isFresh(state.round())
+        ? Math.max(state.unrefinedBest(), SearchState.bestAim(population))
+        : state.unrefinedBest();
   }
 
   private SearchState judged(SearchState next) {
@@ -129,7 +138,7 @@ final class Steps {
     double floor = floor(state);
     int most = Math.max(1, settings.refined());
     List<Individual> starts =
-        Optima.distinct(space, state.population(), floor, DISTINCT_STARTS, most);
+        Optima.distinct(space, unrefined(state), floor, DISTINCT_STARTS, most);
     List<Individual> refined =
         settings.refined() == 0 ? starts : refiner.refine(starts, floor, budget(state), tally);
     List<Individual> all = new ArrayList<>(state.optima());
@@ -138,6 +147,13 @@ final class Steps {
     roundBests.add(SearchState.bestAim(refined));
     return nextRound(
         state, Optima.distinct(space, all, floor, Optima.SAME, Optima.MOST), roundBests, tally);
+  }
+
+  /** What the refinement has returned once, it would return again. */
+  private static List<Individual> unrefined(SearchState state) {
+    Set<List<Double>> known = new HashSet<>();
+    state.optima().forEach(optimum -> known.add(optimum.genes()));
+    return state.population().stream().filter(p -> !known.contains(p.genes())).toList();
   }
 
   /** Never more than the genetic part took, so that an end by time is not long overdue. */

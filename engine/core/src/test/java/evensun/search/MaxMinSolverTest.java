@@ -107,7 +107,8 @@ class MaxMinSolverTest {
 
   @Test
   void findsTheKink() {
-    double[] end = new MaxMinSolver(new Bowls(-1), new double[] {0.05, 0.9}, 0.05, 1e3).climb(80);
+    double[] end =
+        new MaxMinSolver(new Bowls(-1), new double[] {0.05, 0.9}, 0.05, 1e3).climb(80, 2e-6);
     assertThat(end[0]).isCloseTo(0.5, within(1e-6));
     assertThat(end[1]).isCloseTo(0.4, within(1e-3));
   }
@@ -115,7 +116,8 @@ class MaxMinSolverTest {
   /** Witness: with x at least 0.7 the farther bowl decides, and it falls with x: x = 0.7. */
   @Test
   void stopsAtALimitEvenWhenItStartsBeyond() {
-    double[] end = new MaxMinSolver(new Bowls(0.7), new double[] {0.05, 0.9}, 0.05, 1e3).climb(80);
+    double[] end =
+        new MaxMinSolver(new Bowls(0.7), new double[] {0.05, 0.9}, 0.05, 1e3).climb(80, 2e-6);
     assertThat(end[0]).isCloseTo(0.7, within(1e-6));
     assertThat(end[1]).isCloseTo(0.4, within(1e-3));
   }
@@ -124,7 +126,7 @@ class MaxMinSolverTest {
   void anUnusableStartIsReturned() {
     MaxMinModel broken = new Bowls(Double.NaN);
     double[] start = {0.3, 0.3};
-    assertThat(new MaxMinSolver(broken, start, 0.05, 1e3).climb(80)).isEqualTo(start);
+    assertThat(new MaxMinSolver(broken, start, 0.05, 1e3).climb(80, 2e-6)).isEqualTo(start);
     assertThat(Arrays.stream(start).sum()).isCloseTo(0.6, within(1e-12));
   }
 }

@@ -1,0 +1,126 @@
+package evensun.search;
+
+import static evensun.search.Problem.box;
+import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.assertThatThrownBy;
+import static org.assertj.core.api.Assertions.within;
+
+import java.util.List;
+import java.util.concurrent.atomic.AtomicReference;
+import java.util.function.DoubleUnaryOperator;
+import org.junit.jupiter.api.Test;
+
+/**
+ * Witness of the fronts: ZDT1 and ZDT2 of Zitzler, Deb and Thiele, Evol. Comput. 8, 173 (2000),
+ * whose fronts are known in closed form. Both aims are negated, for they are made small there.
+ */
+class ParetoSearchTest {
+
+  private static final int VARIABLES = 30;
+  private static final SearchSettings SETTINGS =
+      SearchSettings.of(3, VARIABLES).withPopulationSize(160).withEvaluations(20_000);
+
+  private static Verdict zdt(double[] x, DoubleUnaryOperator front) {
+    double sum = 0;
+    for (int i = 1; i < x.length; i++) {
+      sum += x[i];
+    }
+    double g = 1 + 9 * sum / (x.length - 1);
+    return new Verdict(List.of(-x[0], -g * front.applyAsDouble(x[0] / g)), 0, 0, "");
+  }
+
+  private static double zdt1(double f1) {
+    return 1 - Math.sqrt(f1);
+  }
+
+  private static double zdt2(double f1) {
+    return 1 - f1 * f1;
+  }
+
+  private static Problem problem(DoubleUnaryOperator front) {
+    return Problem.judged(x -> zdt(x, front), box(VARIABLES, 0, 1)).withAims("f1", "f2");
+  }
+
+  private static ParetoOutcome run(Problem problem, SearchSettings settings) {
+    return new ParetoSearch(problem, settings, SearchListener.NONE, () -> false).run(List.of());
+  }
+
+  private static void reaches(DoubleUnaryOperator front) {
+    ParetoOutcome outcome = run(problem(front), SETTINGS);
+    assertThat(outcome.front()).hasSizeGreaterThan(60);
+    for (Candidate candidate : outcome.front()) {
+      double f1 = -candidate.verdict().aims().get(0);
+      double f2 = -candidate.verdict().aims().get(1);
+      assertThat(f2).isCloseTo(front.applyAsDouble(f1), within(0.01));
+    }
+    for (double f1 = 0; f1 <= 1; f1 += 0.05) {
+      double wanted = f1;
+      assertThat(outcome.front())
+          .anyMatch(c -> Math.abs(-c.verdict().aims().get(0) - wanted) < 0.03);
+    }
+  }
+
+  @Test
+  void reachesAHollowFront() {
+    reaches(ParetoSearchTest::zdt1);
+  }
+
+  @Test
+  void reachesABulgingFront() {
+    reaches(ParetoSearchTest::zdt2);
+  }
+
+  /** Witness: on the front of ZDT1, f1 + f2 is smallest where 1 = 1/(2 √f1), at f1 = 0.25. */
+  @Test
+  void findsTheKnee() {
+    ParetoOutcome outcome = run(problem(ParetoSearchTest::zdt1), SETTINGS);
+    Candidate knee = outcome.front().get(outcome.knee());
+    assertThat(-knee.verdict().aims().get(0)).isCloseTo(0.25, within(0.05));
+  }
+
+  @Test
+  void threadsAndInterruptionsChangeNothing() {
+    SearchSettings small = SETTINGS.withPopulationSize(40).withEvaluations(3000);
+    Problem problem = problem(ParetoSearchTest::zdt1);
+    ParetoOutcome whole = run(problem, small);
+    assertThat(run(problem, small.withThreads(3))).isEqualTo(whole);
+    AtomicReference<String> saved = new AtomicReference<>();
+    SearchListener keeping =
+        new SearchListener() {
+          @Override
+          public void state(SearchState state) {
+            if (state.generation() == 30) {
+              saved.set(SearchStateCodec.write(state));
+            }
+          }
+        };
+    new ParetoSearch(problem, small, keeping, () -> false).run(List.of());
+    assertThat(
+            new ParetoSearch(problem, small, SearchListener.NONE, () -> false)
+                .resume(SearchStateCodec.read(saved.get())))
+        .isEqualTo(whole);
+  }
+
+  /** Witness: with f1 at least 0.3 allowed only, the front is that of ZDT1 from there on. */
+  @Test
+  void keepsLimits() {
+    Problem limited =
+        Problem.judged(
+                x -> Verdict.under(List.of(x[0] - 0.3), zdt(x, ParetoSearchTest::zdt1).aims(), 0),
+                box(5, 0, 1))
+            .withAims("f1", "f2")
+            .withLimits("f1 >= 0.3");
+    ParetoOutcome outcome = run(limited, SETTINGS.withEvaluations(6000));
+    assertThat(outcome.front())
+        .isNotEmpty()
+        .allMatch(c -> -c.verdict().aims().get(0) >= 0.3)
+        .anyMatch(c -> -c.verdict().aims().get(0) < 0.31);
+  }
+
+  @Test
+  void oneAimIsNoFront() {
+    Problem one = Problem.of(TestFunctions::ackley, box(2, -1, 1));
+    assertThatThrownBy(() -> new ParetoSearch(one, SETTINGS, SearchListener.NONE, () -> false))
+        .isInstanceOf(IllegalArgumentException.class);
+  }
+}
