@@ -64,6 +64,23 @@ public final class Spectrum {
     return new Spectrum(name, source, wavelengthNm.clone(), irradianceWPerM2PerNm.clone());
   }
 
+  /**
+   * The same spectrum times a factor.
+   *
+   * @param factor greater than 0
+   * @param why as shown to people behind the name
+   */
+  public Spectrum times(double factor, String why) {
+    if (!(factor > 0) || Double.isInfinite(factor)) {
+      throw new IllegalArgumentException("a spectrum is scaled by more than 0 but was " + factor);
+    }
+    double[] scaled = irradiance.clone();
+    for (int i = 0; i < scaled.length; i++) {
+      scaled[i] *= factor;
+    }
+    return new Spectrum(why.isEmpty() ? name : name + ", " + why, source, wavelengthNm, scaled);
+  }
+
   /** Name as shown to people. */
   public String name() {
     return name;

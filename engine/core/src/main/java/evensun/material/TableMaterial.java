@@ -17,9 +17,15 @@ public final class TableMaterial implements Material {
   private final OpticalTable table;
   private final OptionalDouble bandgapEv;
   private final boolean hold;
+  private final List<Finding> said;
 
   private TableMaterial(
-      MaterialRecord record, OpticalTable table, OptionalDouble bandgapEv, boolean hold) {
+      MaterialRecord record,
+      OpticalTable table,
+      OptionalDouble bandgapEv,
+      boolean hold,
+      List<Finding> said) {
+    this.said = List.copyOf(said);
     this.record = record;
     this.table = table;
     this.bandgapEv = bandgapEv;
@@ -34,13 +40,18 @@ public final class TableMaterial implements Material {
    * @param hold whether the end values hold beyond the table
    */
   public static TableMaterial of(MaterialRecord record, OpticalTable table, boolean hold) {
-    return new TableMaterial(record, table, Bandgap.of(table), hold);
+    return new TableMaterial(record, table, Bandgap.of(table), hold, List.of());
   }
 
   /** A material whose bandgap is stated, or that has none. */
   public static TableMaterial of(
       MaterialRecord record, OpticalTable table, boolean hold, OptionalDouble bandgapEv) {
-    return new TableMaterial(record, table, bandgapEv, hold);
+    return new TableMaterial(record, table, bandgapEv, hold, List.of());
+  }
+
+  /** The same material with findings that hold wherever it is used. */
+  public TableMaterial withFindings(List<Finding> findings) {
+    return new TableMaterial(record, table, bandgapEv, hold, findings);
   }
 
   @Override
@@ -65,7 +76,8 @@ public final class TableMaterial implements Material {
 
   @Override
   public Filler on(double[] wavelengthNm) {
-    List<Finding> findings = new ArrayList<>(RecordFindings.of(record, wavelengthNm));
+    List<Finding> findings = new ArrayList<>(said);
+    findings.addAll(RecordFindings.of(record, wavelengthNm));
     double first = wavelengthNm[0];
     double last = wavelengthNm[wavelengthNm.length - 1];
     if (first < table.fromNm() || last > table.toNm()) {

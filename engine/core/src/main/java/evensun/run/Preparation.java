@@ -47,8 +47,8 @@ public final class Preparation implements AutoCloseable {
    */
   public static Preparation of(Scenario scenario, PluginHost host, BooleanSupplier cancelled) {
     InputFiles files = new InputFiles(scenario.source().folder());
-    ScenarioMaterials materials = new ScenarioMaterials(scenario, files);
     Spectrum spectrum = ScenarioLight.spectrum(scenario, files);
+    ScenarioMaterials materials = new ScenarioMaterials(scenario, files, spectrum);
     return new Preparation(
         files, StackResolver.resolve(scenario, materials, spectrum), host, cancelled);
   }

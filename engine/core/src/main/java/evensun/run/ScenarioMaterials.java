@@ -1,5 +1,6 @@
 package evensun.run;
 
+import evensun.light.Spectrum;
 import evensun.material.Material;
 import evensun.material.MaterialLibrary;
 import evensun.scenario.InputException;
@@ -16,9 +17,11 @@ final class ScenarioMaterials implements MaterialSource {
 
   private final Scenario scenario;
   private final InputFiles files;
+  private final Spectrum spectrum;
   private final Map<String, Material> own = new LinkedHashMap<>();
 
-  ScenarioMaterials(Scenario scenario, InputFiles files) {
+  ScenarioMaterials(Scenario scenario, InputFiles files, Spectrum spectrum) {
+    this.spectrum = spectrum;
     this.scenario = scenario;
     this.files = files;
   }
@@ -27,7 +30,8 @@ final class ScenarioMaterials implements MaterialSource {
   public Material material(String name, Place place) {
     MaterialSpec spec = scenario.materials().get(name);
     if (spec != null) {
-      return own.computeIfAbsent(name, n -> make(n, spec));
+      return own.computeIfAbsent(
+          name, n -> OwnTables.material(n, spec, files, spectrum, scenario.grid()));
     }
     MaterialLibrary library = MaterialLibrary.builtIn();
     return library
@@ -38,12 +42,5 @@ final class ScenarioMaterials implements MaterialSource {
                     place,
                     "material \"%s\" is neither in the scenario nor in the library; the nearest name is %s (evensun materials lists all)"
                         .formatted(name, library.nearest(name))));
-  }
-
-  private Material make(String name, MaterialSpec spec) {
-    if (spec instanceof MaterialSpec.Table table) {
-      return OwnTables.material(name, table, files);
-    }
-    throw new IllegalStateException("unknown kind of material " + spec);
   }
 }

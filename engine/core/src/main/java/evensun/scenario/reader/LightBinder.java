@@ -1,5 +1,6 @@
 package evensun.scenario.reader;
 
+import evensun.light.SpectrumReader.Quantity;
 import evensun.scenario.LightSpec;
 import evensun.scenario.tree.Fields;
 import evensun.scenario.tree.Interval;
@@ -10,12 +11,15 @@ import evensun.spi.Polarisation;
 import java.util.LinkedHashMap;
 import java.util.Map;
 import java.util.Optional;
+import java.util.OptionalDouble;
 
 /** Binds {@code light}. */
 final class LightBinder {
 
   /** Spectra that come with the program. */
-  private static final String[] SPECTRA = {"AM1.5G", "AM1.5D", "AM0"};
+  private static final String[] SPECTRA = {
+    "AM1.5G", "AM1.5D", "AM0", LightSpec.CLEAR_SKY, LightSpec.BLACKBODY
+  };
 
   private LightBinder() {}
 
@@ -27,28 +31,59 @@ final class LightBinder {
           "", Optional.empty(), Double.NaN, Polarisation.UNPOLARISED, root.place("light"));
     }
     Fields fields = light.get();
-    Optional<String> table = table(fields);
+    Optional<TableSource> table = table(fields);
+    String spectrum = table.isPresent() ? "" : spectrum(fields);
     LightSpec spec =
         new LightSpec(
-            table.isPresent() ? "" : spectrum(fields),
-            table,
+            spectrum,
+            table.map(TableSource::path),
+            table.flatMap(TableSource::quantity),
+            SkyBinder.bind(fields, spectrum),
+            temperature(fields, spectrum),
+            fields.number("irradianceWPerM2", Interval.above(0, 1e8, "W per m²")),
+            fields.number("concentrationSuns", Interval.above(0, 1e5, "suns")),
             fields.number("angleDeg", Interval.below(0, 90, "degrees")).orElse(0),
             fields.choice("polarisation", polarisations()).orElse(Polarisation.UNPOLARISED),
             fields.place("spectrum"));
+    if (fields.has("irradianceWPerM2") && fields.has("concentrationSuns")) {
+      fields.fault(
+          fields.place("concentrationSuns"),
+          "light: irradianceWPerM2 and concentrationSuns both scale the spectrum; keep one");
+    }
     fields.finish();
     return spec;
   }
 
-  private static Optional<String> table(Fields light) {
-    light.require("spectrum", "AM1.5G, AM1.5D, AM0, or {table: file.csv}");
+  private static OptionalDouble temperature(Fields fields, String spectrum) {
+    if (spectrum.equals(LightSpec.BLACKBODY)) {
+      return OptionalDouble.of(
+          fields.requiredNumber("temperatureK", Interval.closed(100, 20000, "K")));
+    }
+    if (fields.has("temperatureK")) {
+      fields.fault(
+          fields.place("temperatureK"), "light: temperatureK belongs to spectrum: blackbody");
+      fields.know("temperatureK");
+    }
+    return OptionalDouble.empty();
+  }
+
+  private record TableSource(String path, Optional<Quantity> quantity) {}
+
+  private static Optional<TableSource> table(Fields light) {
+    light.require("spectrum", "AM1.5G, AM1.5D, AM0, clear-sky, blackbody, or {table: file.csv}");
     Optional<Node> spectrum = light.node("spectrum");
     if (spectrum.isEmpty() || !(spectrum.get() instanceof Mapping mapping)) {
       return Optional.empty();
     }
     Fields fields = new Fields("light.spectrum", mapping, light.faults());
     Optional<String> table = fields.requiredText("table", "the name of a CSV file");
+    Map<String, Quantity> quantities = new LinkedHashMap<>();
+    for (Quantity quantity : Quantity.values()) {
+      quantities.put(quantity.key(), quantity);
+    }
+    Optional<Quantity> quantity = fields.choice("quantity", quantities);
     fields.finish();
-    return Optional.of(table.orElse(""));
+    return Optional.of(new TableSource(table.orElse(""), quantity));
   }
 
   private static String spectrum(Fields light) {

@@ -1,0 +1,259 @@
+package evensun.material.table;
+
+import evensun.light.Constants;
+import evensun.light.Spectrum;
+import evensun.spi.Finding;
+import evensun.spi.Severity;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Locale;
+import java.util.OptionalDouble;
+
+/** What is doubtful about a table of n and k, worst first, with what it is worth and a remedy. */
+public final class Examination {
+
+  /** Thickness of the film by which light lost to a false absorption is judged, in nm. */
+  private static final double FILM_NM = 500;
+
+  private static final double KK_WARNING = 0.05;
+  private static final double COARSE_N = 0.03;
+  private static final double COARSE_K = 0.03;
+
+  private final String name;
+  private final Spectrum spectrum;
+  private final List<Finding> findings = new ArrayList<>();
+
+  private Examination(String name, Spectrum spectrum) {
+    this.name = name;
+    this.spectrum = spectrum;
+  }
+
+  /**
+   * Examines the points as they stand in a file.
+   *
+   * @param name of the material or file
+   * @param raw the points
+   * @param spectrum light by which currents are judged
+   * @return findings; none when all is well so far
+   */
+  public static List<Finding> form(String name, RawTable raw, Spectrum spectrum) {
+    Examination examination = new Examination(name, spectrum);
+    examination.form(raw.points());
+    return List.copyOf(examination.findings);
+  }
+
+  /**
+   * Examines a table whose form is in order.
+   *
+   * @param name of the material or file
+   * @param table the table
+   * @param spectrum light by which currents are judged
+   * @param gridFromNm first wavelength it is needed at, in nm
+   * @param gridToNm last wavelength it is needed at, in nm
+   */
+  public static List<Finding> content(
+      String name, OpticalTable table, Spectrum spectrum, double gridFromNm, double gridToNm) {
+    Examination examination = new Examination(name, spectrum);
+    examination.range(table, gridFromNm, gridToNm);
+    examination.floor(table);
+    examination.consistency(table);
+    examination.sampling(table);
+    examination.jumps(table);
+    examination.lowIndex(table);
+    return List.copyOf(examination.findings);
+  }
+
+  private void form(List<RawTable.Point> points) {
+    double last = 0;
+    for (RawTable.Point point : points) {
+      boolean bad =
+          !(point.n() > 0)
+              || !(point.k() >= 0)
+              || Double.isInfinite(point.n())
+              || Double.isInfinite(point.k());
+      if (bad) {
+        findings.add(
+            new Finding(
+                "table-impossible-value",
+                Severity.SERIOUS,
+                name,
+                text(
+                    "line %d: n = %s, k = %s at %s; n must be greater than 0 and k at least 0: remove the"
+                        + " line or correct it",
+                    point.line(), point.n(), point.k(), nm(point.wavelengthNm()))));
+      }
+      if (point.wavelengthNm() == last) {
+        findings.add(
+            new Finding(
+                "table-doubled-wavelength",
+                Severity.SERIOUS,
+                name,
+                text("line %d: %s stands twice; keep one of the two", point.line(), nm(last))));
+      } else if (point.wavelengthNm() < last || !(point.wavelengthNm() > 0)) {
+        findings.add(
+            new Finding(
+                "table-unsorted",
+                Severity.SERIOUS,
+                name,
+                text(
+                    "line %d: %s follows %s; sort the lines by wavelength",
+                    point.line(), nm(point.wavelengthNm()), nm(last))));
+      }
+      last = point.wavelengthNm();
+    }
+  }
+
+  private void range(OpticalTable table, double gridFromNm, double gridToNm) {
+    double missing =
+        spectrum.photonCurrentMaPerCm2(gridFromNm, Math.max(gridFromNm, table.fromNm()))
+            + spectrum.photonCurrentMaPerCm2(Math.min(gridToNm, table.toNm()), gridToNm);
+    if (table.fromNm() > gridFromNm || table.toNm() < gridToNm) {
+      findings.add(
+          new Finding(
+              "table-range",
+              Severity.WARNING,
+              name,
+              text(
+                  "covers %s to %s and leaves %.2f mA cm⁻² of the light between %s and %s uncovered: write"
+                      + " extrapolate: hold, or a shorter grid",
+                  nm(table.fromNm()), nm(table.toNm()), missing, nm(gridFromNm), nm(gridToNm))));
+    }
+  }
+
+  /** Absorption well below the gap that is no tail of the edge. */
+  private void floor(OpticalTable table) {
+    OptionalDouble gap = Bandgap.of(table);
+    if (gap.isEmpty()) {
+      return;
+    }
+    double fromNm = Constants.HC_EV_NM / (gap.getAsDouble() - 0.10);
+    double toNm = Math.min(table.toNm(), Constants.HC_EV_NM / (gap.getAsDouble() - 0.45));
+    double current = 0;
+    double sum = 0;
+    int count = 0;
+    for (double nm = fromNm; nm + 1 <= toNm; nm++) {
+      double absorbed = 1 - Math.exp(-table.alphaPerCmAt(nm + 0.5) * FILM_NM * 1e-7);
+      current += absorbed * spectrum.photonCurrentMaPerCm2(nm, nm + 1);
+      sum += table.kAt(nm + 0.5);
+      count++;
+    }
+    if (count > 0 && sum / count > 1e-3) {
+      findings.add(
+          new Finding(
+              "table-floor-below-gap",
+              Severity.WARNING,
+              name,
+              text(
+                  "k is %.2g on average from %s to %s, below the gap of %.3f eV; in one pass of %s it books"
+                      + " %.2f mA cm⁻² as absorbed: an instrument's floor, unless you know better; write"
+                      + " clean: urbach",
+                  sum / count, nm(fromNm), nm(toNm), gap.getAsDouble(), nm(FILM_NM), current)));
+    }
+  }
+
+  private void consistency(OpticalTable table) {
+    KramersKronig.of(table)
+        .filter(residual -> residual.rms() > KK_WARNING)
+        .ifPresent(
+            residual ->
+                findings.add(
+                    new Finding(
+                        "table-kramers-kronig",
+                        Severity.WARNING,
+                        name,
+                        text(
+                            "n and k do not belong together: %.2f in n (root mean square) cannot be"
+                                + " explained by any absorption outside the table, most (%.2f) near %s;"
+                                + " check that both come from one film and one fit",
+                            residual.rms(), residual.largest(), nm(residual.atNm())))));
+  }
+
+  /** A point that the straight line between its neighbours misses by much. */
+  private void sampling(OpticalTable table) {
+    double[] nm = table.wavelengthNm();
+    double[] n = table.n();
+    double[] k = table.k();
+    double worst = 0;
+    int at = 0;
+    for (int i = 1; i + 1 < nm.length; i++) {
+      double t = (nm[i] - nm[i - 1]) / (nm[i + 1] - nm[i - 1]);
+      double missN = Math.abs(n[i - 1] + t * (n[i + 1] - n[i - 1]) - n[i]) / COARSE_N;
+      double missK = Math.abs(k[i - 1] + t * (k[i + 1] - k[i - 1]) - k[i]) / COARSE_K;
+      // A straight line misses a parabola between two points by a quarter of this.
+      double miss = 0.25 * Math.max(missN, missK);
+      if (miss > worst && nm[i + 1] - nm[i - 1] > 4 && nm[i] > 280 && nm[i] < 2000) {
+        worst = miss;
+        at = i;
+      }
+    }
+    if (worst > 1) {
+      findings.add(
+          new Finding(
+              "table-coarse",
+              Severity.NOTE,
+              name,
+              text(
+                  "the points near %s (%s apart) are far for the curve between them: straight lines miss it"
+                      + " by about %.2g in n or k; add points there",
+                  nm(nm[at]), nm(0.5 * (nm[at + 1] - nm[at - 1])), worst * COARSE_N)));
+    }
+  }
+
+  /** A step between neighbours that is far above those around it. */
+  private void jumps(OpticalTable table) {
+    double[] nm = table.wavelengthNm();
+    double[] n = table.n();
+    double[] k = table.k();
+    for (int i = 2; i + 2 < nm.length; i++) {
+      boolean jump = jump(nm, n, i) || jump(nm, k, i);
+      if (jump) {
+        findings.add(
+            new Finding(
+                "table-jump",
+                Severity.NOTE,
+                name,
+                text(
+                    "n or k jumps between %s and %s; two measurements joined there, or a wrong digit?",
+                    nm(nm[i - 1]), nm(nm[i]))));
+        return;
+      }
+    }
+  }
+
+  private static boolean jump(double[] nm, double[] y, int i) {
+    double step = Math.abs(y[i] - y[i - 1]);
+    double before = Math.abs(y[i - 1] - y[i - 2]) / (nm[i - 1] - nm[i - 2]);
+    double after = Math.abs(y[i + 1] - y[i]) / (nm[i + 1] - nm[i]);
+    double usual = Math.max(before, after) * (nm[i] - nm[i - 1]);
+    return step > 0.05 && step > 8 * usual + 0.02;
+  }
+
+  private void lowIndex(OpticalTable table) {
+    double[] nm = table.wavelengthNm();
+    for (double at : nm) {
+      if (table.nAt(at) < 1 && table.kAt(at) < 0.3) {
+        findings.add(
+            new Finding(
+                "table-low-index",
+                Severity.NOTE,
+                name,
+                text(
+                    "n is %.3f at %s with little absorption: right near the plasma edge of a conductor,"
+                        + " surprising elsewhere; are the columns in the right order?",
+                    table.nAt(at), nm(at))));
+        return;
+      }
+    }
+  }
+
+  private static String text(String message, Object... values) {
+    return String.format(Locale.ROOT, message, values);
+  }
+
+  private static String nm(double nm) {
+    return String.format(Locale.ROOT, "%.5g", nm)
+            .replaceAll("(\\.\\d*?)0+$", "$1")
+            .replaceAll("\\.$", "")
+        + " nm";
+  }
+}
