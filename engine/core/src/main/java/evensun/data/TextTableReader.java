@@ -111,7 +111,7 @@ public final class TextTableReader {
     }
     if (best == null) {
       throw new TableFormatException(
-          0, "holds no rows of numbers; it needs lines such as wavelength_nm,n,k");
+          0, "holds no numbers; it needs lines such as wavelength_nm,n,k");
     }
     return best;
   }

@@ -153,12 +153,25 @@ public final class OpticalTableReader {
     }
     WavelengthUnit named = Columns.unit(block.head(column));
     if (named != null) {
+      refuseTiny(block, column, named);
       said.add("wavelengths in " + named.key() + ", as the header says");
       return named;
     }
     WavelengthUnit guessed = guessed(block.column(column), block.rows().get(0).line());
     said.add("wavelengths in " + guessed.key() + ", judged by their size: no header says it");
     return guessed;
+  }
+
+  /** No table for a solar cell ends below 20 nm; one that seems to is in micrometres. */
+  private static void refuseTiny(TextTable.Block block, int column, WavelengthUnit unit) {
+    double low = Arrays.stream(block.column(column)).min().orElseThrow();
+    double high = Arrays.stream(block.column(column)).max().orElseThrow();
+    if (unit == WavelengthUnit.NM && high < 20) {
+      throw new TableFormatException(
+          block.rows().get(0).line(),
+          "the wavelengths (%s to %s nm) look like micrometres; name um in the header, or write wavelengthUnit: um in the scenario"
+              .formatted(shown(low), shown(high)));
+    }
   }
 
   /** Above 100 only nanometres make sense; µm and eV overlap between 0.45 and 3.2. */
