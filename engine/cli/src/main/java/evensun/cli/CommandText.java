@@ -16,7 +16,8 @@ final class CommandText {
     return text.toString();
   }
 
-  private static String quoted(String word) {
+  /** A word as a Unix shell takes it. */
+  static String quoted(String word) {
     return word.matches("[A-Za-z0-9_./=:,@%+-]+") ? word : "'" + word.replace("'", "'\\''") + "'";
   }
 }

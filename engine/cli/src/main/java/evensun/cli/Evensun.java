@@ -12,6 +12,7 @@ import picocli.CommandLine.Mixin;
     versionProvider = Version.class,
     description = "Balances the currents of the subcells of a multi-junction solar cell.",
     subcommands = {
+      NewCommand.class,
       AssessCommand.class,
       DesignCommand.class,
       PluginsCommand.class,

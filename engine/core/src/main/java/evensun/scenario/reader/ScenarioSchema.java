@@ -8,6 +8,9 @@ import java.nio.charset.StandardCharsets;
 /** The JSON Schema of a scenario, for editors. The reader does not use it. */
 public final class ScenarioSchema {
 
+  /** By which it is known, whatever its file is called. */
+  public static final String ID = "urn:evensun:scenario:1";
+
   private static final String RESOURCE = "/evensun/scenario.schema.json";
 
   private ScenarioSchema() {}

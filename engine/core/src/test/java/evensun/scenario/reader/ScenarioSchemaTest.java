@@ -12,6 +12,7 @@ import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
+import java.util.Set;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -51,6 +52,24 @@ class ScenarioSchemaTest {
   @MethodSource("scenarios")
   void everyScenarioCanBeRead(Path file) {
     assertThat(ScenarioReader.read(file).subcells()).isNotEmpty();
+  }
+
+  static Set<String> templates() {
+    return Templates.names().keySet();
+  }
+
+  @ParameterizedTest
+  @MethodSource("templates")
+  void everyTemplateFitsTheSchemaAndCanBeRead(String name) {
+    String text = Templates.text(name).orElseThrow();
+    assertThat(schema.validate(text, InputFormat.YAML)).isEmpty();
+    assertThat(ScenarioReader.read(ScenarioReaderTest.source(text)).search()).isPresent();
+    assertThat(text).startsWith("# yaml-language-server: $schema=" + Templates.SCHEMA_FILE);
+  }
+
+  @Test
+  void theSchemaHasItsId() {
+    assertThat(ScenarioSchema.text()).contains("\"$id\": \"" + ScenarioSchema.ID + "\"");
   }
 
   @Test

@@ -1,0 +1,120 @@
+package evensun.dist;
+
+import static org.assertj.core.api.Assertions.assertThat;
+
+import java.io.IOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
+import org.junit.jupiter.params.provider.ValueSource;
+import tools.jackson.databind.JsonNode;
+import tools.jackson.databind.json.JsonMapper;
+
+/** What a person meets in the first quarter of an hour. */
+class FirstStepsIT {
+
+  @TempDir Path folder;
+
+  private Program.Run run(String... arguments) {
+    return new Program(folder).run(arguments);
+  }
+
+  private static JsonNode json(Program.Run run) {
+    return JsonMapper.shared().readTree(run.out());
+  }
+
+  @ParameterizedTest
+  @CsvSource({"planar, 2", "all-thin-film, 2", "three-junction, 3", "four-terminal, 2"})
+  void aNewScenarioIsAssessedUnchanged(String like, int subcells) {
+    Program.Run made = run("new", "my cell.yaml", "--like", like);
+    assertThat(made.status()).isZero();
+    assertThat(made.out()).startsWith("my cell.yaml: ").endsWith("assess 'my cell.yaml'\n");
+    Program.Run assessed = run("assess", "my cell.yaml", "--format", "json");
+    assertThat(assessed.err()).isEmpty();
+    assertThat(assessed.status()).isZero();
+    assertThat(json(assessed).get("subcells").size()).isEqualTo(subcells);
+  }
+
+  @Test
+  void theSchemaLineOfANewScenarioPointsToAFile() throws IOException {
+    run("new", "cell.yaml");
+    String first = Files.readAllLines(folder.resolve("cell.yaml")).get(0);
+    Path schema = folder.resolve(first.substring(first.indexOf("$schema=") + 8));
+    assertThat(Files.readString(schema)).isEqualTo(run("schema").out());
+    assertThat(Files.readString(folder.resolve("cell.yaml"))).contains("evensun assess cell.yaml");
+  }
+
+  @Test
+  void aSchemaFileThatIsNotOursStays() throws IOException {
+    Path other = Files.writeString(folder.resolve("evensun-scenario.schema.json"), "{}");
+    assertThat(run("new", "cell.yaml").status()).isZero();
+    assertThat(other).hasContent("{}");
+  }
+
+  @Test
+  void aFileThatExistsStays() throws IOException {
+    Path mine = Files.writeString(folder.resolve("cell.yaml"), "mine");
+    Program.Run run = run("new", "cell.yaml");
+    assertThat(run.status()).isEqualTo(2);
+    assertThat(run.err())
+        .isEqualTo("cell.yaml: exists already and is left as it is; choose another name\n");
+    assertThat(mine).hasContent("mine");
+    assertThat(folder.resolve("evensun-scenario.schema.json")).doesNotExist();
+  }
+
+  @ParameterizedTest
+  @CsvSource(
+      delimiter = '|',
+      value = {
+        "new cell.yaml --like planer | --like: there is no template \"planer\"; did you mean planar?",
+        "new cell.txt | cell.txt: a scenario is YAML; choose a name that ends in .yaml",
+        "new nowhere/cell.yaml | nowhere/cell.yaml: there is no such folder; create it first",
+      })
+  void wrongNamesAreRefused(String arguments, String message) {
+    Program.Run run = run(arguments.split(" "));
+    assertThat(run.status()).isEqualTo(2);
+    assertThat(run.err()).isEqualTo(message + "\n");
+    assertThat(folder).isEmptyDirectory();
+  }
+
+  @Test
+  void aWaferInMicrometresIsAFinding() {
+    Program.Run run =
+        run(
+            "assess",
+            Program.scenario("perovskite-on-silicon.yaml").toString(),
+            "--set",
+            "wafer.thicknessNm=180",
+            "--format",
+            "json");
+    assertThat(json(run).get("findings").findValuesAsString("code"))
+        .contains("thickness-in-micrometres");
+  }
+
+  @Test
+  void everyFindingOfADemoIsExplained() {
+    Program.Run demo =
+        run("assess", Program.scenario("badly-matched.yaml").toString(), "--format", "json");
+    var codes = json(demo).get("findings").findValuesAsString("code");
+    assertThat(codes).isNotEmpty();
+    assertThat(json(run("explain", "--format", "json")).findValuesAsString("code"))
+        .containsAll(codes);
+    assertThat(run("explain", codes.get(0)).out())
+        .startsWith(codes.get(0) + "\n")
+        .contains("What it means", "What it does to the result", "What to do");
+  }
+
+  @ParameterizedTest
+  @ValueSource(strings = {"new", "schema", "explain"})
+  void helpFitsAndItsExampleRuns(String command) {
+    String help = run(command, "--help").out();
+    assertThat(help.lines()).allSatisfy(line -> assertThat(line).hasSizeLessThanOrEqualTo(100));
+    String example =
+        help.lines().filter(l -> l.startsWith("  evensun " + command)).findFirst().orElseThrow();
+    String[] arguments = example.strip().replaceAll(" >.*", "").split(" ");
+    assertThat(run(java.util.Arrays.copyOfRange(arguments, 1, arguments.length)).status()).isZero();
+  }
+}
