@@ -39,6 +39,10 @@ final class PluginsCommand extends BaseCommand {
 
   private static void print(PluginHost host, PrintStream out) {
     out.println("Solver contract " + ContractVersion.current());
+    String home = System.getProperty("evensun.home");
+    if (home != null) {
+      out.println("  EVENSUN_HOME for plugins of your own: " + home);
+    }
     host.loaded().forEach(plugin -> print(plugin, out));
     if (host.loaded().isEmpty()) {
       out.println();
