@@ -9,6 +9,7 @@ import evensun.transfermatrix.kernel.Layout;
 import evensun.transfermatrix.kernel.ReferenceKernel;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
 
 /**
  * Finds where the picture of independent intensities in an absorbing medium is strained.
@@ -31,12 +32,7 @@ final class MixedTerms {
     double[] largest = new double[problem.layerCount()];
     for (Incidence incidence : problem.incidences()) {
       Layout layout = stack.layout(design, incidence.side(), false);
-      for (int j = 1; j <= layout.layerCount; j++) {
-        if (!layout.coherent[j]) {
-          double term = kernel.mixedTerm(layout, Stack.beam(incidence), design.n, design.k, j);
-          largest[layout.layer[j]] = Math.max(largest[layout.layer[j]], term);
-        }
-      }
+      kernel.mixedTerms(layout, Stack.beam(incidence), design.n, design.k, largest);
     }
     for (int l = 0; l < largest.length; l++) {
       if (largest[l] > NOTABLE_FRACTION) {
@@ -51,9 +47,11 @@ final class MixedTerms {
         "mixed-term",
         Severity.WARNING,
         "layer " + layer,
-        "up to %.2g %% of the light is booked to this incoherent layer for waves that are not"
-                .formatted(100 * fraction)
-            + " independent at its faces; the layer absorbs strongly within a wavelength of a"
-            + " face: write coherence: coherent if it is thin, or take the share as uncertain");
+        String.format(
+            Locale.ROOT,
+            "up to %.2g %% of the light is booked to this incoherent layer for waves that are not"
+                + " independent at its faces; the layer absorbs strongly within a wavelength of a"
+                + " face: write coherence: coherent if it is thin, or take the share as uncertain",
+            100 * fraction));
   }
 }

@@ -108,12 +108,9 @@ final class LitStack {
     return falling[b] * front[b].mixed + returning[b] * rear[b - 1].mixed;
   }
 
-  /**
-   * Share of the light that is booked to incoherent layer j because the waves at its faces are not
-   * independent, or for j = 0 the share that is booked to nothing.
-   */
+  /** Share of the light booked to incoherent layer j for waves at its faces not independent. */
   double mixedTerm(int j) {
-    return j == 0 ? front[0].mixed : mixed(packetOf[j] + 1);
+    return mixed(packetOf[j] + 1);
   }
 
   /**

@@ -117,7 +117,7 @@ final class MediumRows {
   private void root(int x, int w, double n, double k, double incident, double least) {
     double re = NormalIndex.squareRe(n, k, incident, beam.cosine());
     double im = NormalIndex.squareIm(n, k);
-    double size = Math.hypot(re, im);
+    double size = Math.sqrt(re * re + im * im);
     double floor = least * (n * n + k * k);
     if (size < floor) {
       s.re[x][w] = Math.sqrt(floor);

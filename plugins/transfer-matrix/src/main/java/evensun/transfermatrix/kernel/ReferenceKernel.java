@@ -91,22 +91,26 @@ public final class ReferenceKernel implements Kernel {
   }
 
   /**
-   * The largest share of the light, over all wavelengths, that medium j takes because incident and
-   * reflected waves in it are not independent: booked to an incoherent layer, and to nothing for
-   * the medium the light comes from (j = 0).
+   * The largest share of the light, over all wavelengths, that each incoherent layer takes because
+   * incident and reflected waves at its faces are not independent.
+   *
+   * @param largest [l] raised to the share found, by index of the layer in the problem
    */
-  public double mixedTerm(Layout layout, Beam beam, double[][] n, double[][] k, int j) {
-    double largest = 0;
+  public void mixedTerms(Layout layout, Beam beam, double[][] n, double[][] k, double[] largest) {
     for (int w = 0; w < wavelengthNm.length; w++) {
-      double term = 0;
-      if (beam.s() > 0) {
-        term += beam.s() * lit(layout, beam, n, k, w, false).mixedTerm(j);
+      LitStack s = beam.s() > 0 ? lit(layout, beam, n, k, w, false) : null;
+      LitStack p = beam.p() > 0 ? lit(layout, beam, n, k, w, true) : null;
+      for (int j = 1; j <= layout.layerCount; j++) {
+        if (!layout.coherent[j]) {
+          double term = mixed(beam.s(), s, j) + mixed(beam.p(), p, j);
+          int l = layout.layer[j];
+          largest[l] = Math.max(largest[l], Math.abs(term));
+        }
       }
-      if (beam.p() > 0) {
-        term += beam.p() * lit(layout, beam, n, k, w, true).mixedTerm(j);
-      }
-      largest = Math.max(largest, Math.abs(term));
     }
-    return largest;
+  }
+
+  private static double mixed(double weight, LitStack lit, int j) {
+    return lit == null ? 0 : weight * lit.mixedTerm(j);
   }
 }
