@@ -54,7 +54,7 @@
 
   function lineColour(role) {
     if (role === 'reflected') { return variable('muted'); }
-    return variable(role.indexOf('sub') === 0 ? 'ink-' + role : role);
+    return variable(role);
   }
 
   function labelColour(role) {
@@ -106,7 +106,7 @@
   }
 
   function pairs(chart, row) {
-    if (chart.kind === 'STACK') { return row.values; }
+    if (chart.kind === 'STACK') { return row.values.map(function (v) { return Math.max(0, v); }); }
     return chart.xs.map(function (x, i) {
       var y = row.values[i];
       return [x, chart.y.logarithmic && !(y > 0) ? null : y];
@@ -165,7 +165,7 @@
           data: [{ coord: spot, label: { show: true, color: labelColour(row.role), fontSize: 12, formatter: clip(row.label, 34) } }] };
       }
     } else if (wide && chart.kind === 'LINES') {
-      made.endLabel = { show: true, color: colour, formatter: clip(row.label, 20), distance: 8, offset: [0, shift] };
+      made.endLabel = { show: true, color: row.role.indexOf('sub') === 0 ? variable('ink-' + row.role) : colour, formatter: clip(row.label, 20), distance: 8, offset: [0, shift] };
     }
     return made;
   }
