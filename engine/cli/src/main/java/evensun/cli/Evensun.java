@@ -15,6 +15,7 @@ import picocli.CommandLine.Mixin;
       NewCommand.class,
       AssessCommand.class,
       DesignCommand.class,
+      MaterialsCommand.class,
       PluginsCommand.class,
       SchemaCommand.class,
       ExplainCommand.class,
