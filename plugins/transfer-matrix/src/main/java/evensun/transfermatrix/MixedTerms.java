@@ -6,7 +6,7 @@ import evensun.spi.Incidence;
 import evensun.spi.Problem;
 import evensun.spi.Severity;
 import evensun.transfermatrix.kernel.Layout;
-import evensun.transfermatrix.kernel.ReferenceKernel;
+import evensun.transfermatrix.kernel.reference.ReferenceKernel;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;

@@ -13,10 +13,10 @@ import evensun.transfermatrix.kernel.Beam;
 import evensun.transfermatrix.kernel.FastKernel;
 import evensun.transfermatrix.kernel.Kernel;
 import evensun.transfermatrix.kernel.Layout;
-import evensun.transfermatrix.kernel.ReferenceKernel;
 import evensun.transfermatrix.kernel.RowSums;
 import evensun.transfermatrix.kernel.Spectra;
 import evensun.transfermatrix.kernel.Weights;
+import evensun.transfermatrix.kernel.reference.ReferenceKernel;
 import java.util.Arrays;
 import java.util.Optional;
 

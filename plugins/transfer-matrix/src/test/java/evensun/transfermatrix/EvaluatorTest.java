@@ -129,7 +129,7 @@ class EvaluatorTest {
     Sample sample = device();
     Incidence[] many = new Incidence[40];
     for (int i = 0; i < many.length; i++) {
-      many[i] = Sample.at(2 * i, Polarisation.values()[i % 3]);
+      many[i] = Sample.at(2 * i, List.of(Polarisation.values()).get(i % 3));
     }
     try (Evaluator evaluator = sample.evaluator("fast", many)) {
       Response all = Response.spectra(40, sample.layers(), sample.wavelengths());

@@ -9,6 +9,7 @@ import evensun.spi.Incidence;
 import evensun.spi.Polarisation;
 import evensun.spi.Response;
 import evensun.spi.Side;
+import java.util.List;
 import java.util.SplittableRandom;
 import org.junit.jupiter.api.Test;
 
@@ -67,7 +68,7 @@ class GradientTest {
       Incidence incidence =
           new Incidence(
               trial % 3 == 0 ? 0 : 75 * random.nextDouble(),
-              Polarisation.values()[random.nextInt(3)],
+              List.of(Polarisation.values()).get(random.nextInt(3)),
               side);
       Response response = sums(sample, random);
       double[] found = new double[3 * layers];

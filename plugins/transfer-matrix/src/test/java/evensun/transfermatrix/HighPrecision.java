@@ -56,7 +56,16 @@ final class HighPrecision {
   }
 
   /** What a packet does with unit intensity from one side. */
-  private record Packet(Dfp reflected, Dfp transmitted, Dfp mixed, Dfp[] absorbed) {}
+  private static final class Packet {
+    Dfp reflected;
+    Dfp transmitted;
+    Dfp mixed;
+    final Dfp[] absorbed; // [j]
+
+    Packet(int media) {
+      absorbed = new Dfp[media];
+    }
+  }
 
   final Dfp[] absorptance;
   final Dfp reflectance;
@@ -194,12 +203,14 @@ final class HighPrecision {
     // Incident wave of unit amplitude: the field at the near face is 1 + r.
     Big one = new Big(FIELD.getOne(), ZERO);
     Dfp scale = one.plus(r).squared().divide(e.squared()).divide(eta[near].re);
-    Dfp[] absorbed = new Dfp[layers + 2];
+    Packet packet = new Packet(layers + 2);
     for (int j = near + step; j != far; j += step) {
-      absorbed[j] = flux[j].subtract(flux[j + step]).multiply(scale);
+      packet.absorbed[j] = flux[j].subtract(flux[j + step]).multiply(scale);
     }
-    Dfp mixed = eta[near].im.divide(eta[near].re).multiply(r.im).multiply(-2);
-    return new Packet(r.squared(), flux[far].multiply(scale), mixed, absorbed);
+    packet.reflected = r.squared();
+    packet.transmitted = flux[far].multiply(scale);
+    packet.mixed = eta[near].im.divide(eta[near].re).multiply(r.im).multiply(-2);
+    return packet;
   }
 
   /** cos δ and −i sin δ of δ = κd, from exp(±iδ). */

@@ -11,7 +11,7 @@ package evensun.transfermatrix.kernel;
 public record Beam(double cosine, double s, double p) {
 
   /** Whether the wave travels along the normal. */
-  boolean normal() {
+  public boolean normal() {
     return cosine == 1;
   }
 

@@ -67,7 +67,7 @@ final class MediumRows {
   /** Makes the rows of all media of a layout right. */
   void refresh(Layout layout, Beam light, double[][] n, double[][] k, long[] revisions) {
     int incident = layout.material[0];
-    if (!light.same(beam) || !light.normal() && incidentChanged(incident, revisions)) {
+    if (!light.same(beam) || (!light.normal() && incidentChanged(incident, revisions))) {
       Arrays.fill(revision, 0);
     }
     beam = light;

@@ -22,7 +22,7 @@ import java.util.Arrays;
  */
 final class PacketGradient {
 
-  /** [j][w] flux into medium j, where {@link #seeded}; at a far medium, the transmittance. */
+  /** [j][w] flux into medium j, next to a weighted layer; at a far medium, the transmittance. */
   final double[][] flux;
 
   private final Waves waves;

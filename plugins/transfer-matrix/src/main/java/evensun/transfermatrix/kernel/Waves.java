@@ -27,7 +27,7 @@ final class Waves {
   final double[][] wRe;
   final double[][] wIm;
 
-  /** [j][w] flux of the pair, where {@link #followed}. */
+  /** [j][w] flux of the pair, where one of the layers it bounds is followed. */
   final double[][] flux;
 
   /** [j][w] how much of the square of the wave in the near medium is left at medium j. */

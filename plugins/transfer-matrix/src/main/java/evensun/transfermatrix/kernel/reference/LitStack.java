@@ -1,4 +1,4 @@
-package evensun.transfermatrix.kernel;
+package evensun.transfermatrix.kernel.reference;
 
 /**
  * A stack at one wavelength and polarisation, lit with unit intensity: waves inside packets of

@@ -1,4 +1,8 @@
-package evensun.transfermatrix.kernel;
+package evensun.transfermatrix.kernel.reference;
+
+import evensun.transfermatrix.kernel.Beam;
+import evensun.transfermatrix.kernel.Layout;
+import evensun.transfermatrix.kernel.NormalIndex;
 
 /**
  * The media of a stack at one wavelength and polarisation: what a plane wave with a given

@@ -1,4 +1,4 @@
-package evensun.transfermatrix.kernel;
+package evensun.transfermatrix.kernel.reference;
 
 /**
  * Coherent layers between two thick media, lit with unit intensity from one of them.

@@ -1,4 +1,10 @@
-package evensun.transfermatrix.kernel;
+package evensun.transfermatrix.kernel.reference;
+
+import evensun.transfermatrix.kernel.Beam;
+import evensun.transfermatrix.kernel.FastKernel;
+import evensun.transfermatrix.kernel.Kernel;
+import evensun.transfermatrix.kernel.Layout;
+import evensun.transfermatrix.kernel.Spectra;
 
 /**
  * The kernel to read: one wavelength at a time, complex numbers as objects, reflection ratios

@@ -1,4 +1,4 @@
-package evensun.transfermatrix.kernel;
+package evensun.transfermatrix.kernel.reference;
 
 /**
  * A complex number, for the kernel that is to be read rather than to be fast.
