@@ -2,6 +2,7 @@ package evensun.device;
 
 import evensun.light.Constants;
 import evensun.scenario.Connection;
+import evensun.scenario.Saturation;
 
 /**
  * The electrical side of the whole device.

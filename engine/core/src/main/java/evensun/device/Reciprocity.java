@@ -1,6 +1,7 @@
 package evensun.device;
 
 import evensun.light.Constants;
+import evensun.scenario.Saturation;
 import evensun.spi.Finding;
 import evensun.spi.Severity;
 import java.util.ArrayList;

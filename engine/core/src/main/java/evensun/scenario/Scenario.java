@@ -19,6 +19,7 @@ import java.util.Optional;
  * @param exit the last stack entry
  * @param subcells in the order the light meets them
  * @param connection how the subcells are connected
+ * @param device the electrical side of the whole device
  * @param solver the solver asked for, or empty for the one the stack needs
  * @param search what to search, or empty
  */
@@ -33,6 +34,7 @@ public record Scenario(
     MediumSpec exit,
     List<SubcellSpec> subcells,
     Connection connection,
+    DeviceSpec device,
     Optional<SolverSpec> solver,
     Optional<SearchSpec> search) {
 
@@ -55,6 +57,7 @@ public record Scenario(
         exit,
         subcells,
         connection,
+        device,
         solver,
         search);
   }
@@ -72,6 +75,7 @@ public record Scenario(
         exit,
         subcells,
         connection,
+        device,
         Optional.of(other),
         search);
   }
@@ -93,6 +97,7 @@ public record Scenario(
         exit.material().equals(name) ? exit.withMaterial(other) : exit,
         subcells,
         connection,
+        device,
         solver,
         search);
   }

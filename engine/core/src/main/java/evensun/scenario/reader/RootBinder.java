@@ -28,6 +28,7 @@ final class RootBinder {
           "stack",
           "subcells",
           "connection",
+          "device",
           "solver",
           "search");
 
@@ -52,6 +53,7 @@ final class RootBinder {
             stack.exit(),
             subcells,
             connection(root, subcells),
+            DeviceBinder.bind(root),
             SolverBinder.bind(root),
             SearchBinder.bind(root, stack));
     root.finish();

@@ -1,5 +1,6 @@
 package evensun.scenario.reader;
 
+import evensun.scenario.DiodeSpec;
 import evensun.scenario.Place;
 import evensun.scenario.SubcellSpec;
 import evensun.scenario.tree.Fields;
@@ -60,8 +61,9 @@ final class SubcellBinder {
     Fields fields = new Fields(who(mapping, index), mapping, root.faults());
     String name = name(fields);
     List<String> absorbers = absorbers(fields, name);
+    DiodeSpec diode = DiodeBinder.bind(fields);
     fields.finish();
-    return Optional.of(new SubcellSpec(name, absorbers, fields.place()));
+    return Optional.of(new SubcellSpec(name, absorbers, diode, fields.place()));
   }
 
   private static String who(Mapping mapping, int index) {

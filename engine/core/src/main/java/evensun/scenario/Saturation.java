@@ -1,4 +1,4 @@
-package evensun.device;
+package evensun.scenario;
 
 /** Where the radiative saturation currents come from. */
 public enum Saturation {
