@@ -61,7 +61,7 @@ final class LinearStep {
     for (int j = 0; j < size; j++) {
       target[j] = Math.min(1, Math.max(0, low[j] + Math.min(span[j], Math.max(0, x[j]))));
     }
-    gain = tangentMerit(target, point, rows, gradient) - merit(rows);
+    gain = merit(tangents(target, point, rows, gradient)) - merit(rows);
     return target;
   }
 
@@ -111,14 +111,15 @@ final class LinearStep {
     return largest;
   }
 
-  private double tangentMerit(double[] target, double[] point, double[] rows, double[][] gradient) {
+  /** The tangents of all functions at a point. */
+  double[] tangents(double[] target, double[] point, double[] rows, double[][] gradient) {
     double[] tangents = rows.clone();
     for (int i = 0; i < tangents.length; i++) {
       for (int j = 0; j < size; j++) {
         tangents[i] += gradient[i][j] * (target[j] - point[j]);
       }
     }
-    return merit(tangents);
+    return tangents;
   }
 
   /** The smallest of the wanted, less the price of the largest breach. */

@@ -5,9 +5,9 @@ import java.util.List;
 
 /**
  * A {@link LocalProblem} as functions with derivatives. Usually the parts of the first aim are
- * wanted and the slacks of the limits kept; when the tie-break decides, it is wanted and the parts
- * are kept above the floor. What the worker offers no derivatives of, is differentiated by finite
- * differences of verdicts.
+ * wanted and the slacks of the limits kept; when the tie-break decides, or when a variable is to be
+ * moved as far as it goes, that is wanted and the parts are kept above the floor. What the worker
+ * offers no derivatives of, is differentiated by finite differences of verdicts.
  */
 final class LocalModel implements MaxMinModel {
 
@@ -17,17 +17,31 @@ final class LocalModel implements MaxMinModel {
   private final int[] free;
   private final int parts;
   private final int limits;
-  private final boolean tieBreaking;
+  private final boolean floored;
+  private final int moved;
+  private final double direction;
   private final double[] genes;
   private final double[] partRow;
   private final double[][] partGradient;
 
   LocalModel(LocalProblem problem, int[] free, int limits) {
+    this(problem, free, limits, -1, 0);
+  }
+
+  /**
+   * A model in which a variable is to be moved as far as the floor lets it.
+   *
+   * @param moved index into {@code free}, or -1 for none
+   * @param direction 1 for upward, -1 for downward
+   */
+  LocalModel(LocalProblem problem, int[] free, int limits, int moved, double direction) {
+    this.moved = moved;
+    this.direction = direction;
     this.problem = problem;
     this.free = free;
     this.limits = limits;
     parts = problem.worker().partCount();
-    tieBreaking = problem.floor() != Double.NEGATIVE_INFINITY;
+    floored = problem.floor() != Double.NEGATIVE_INFINITY;
     genes = problem.best().geneArray();
     partRow = new double[parts];
     partGradient = new double[parts][genes.length];
@@ -40,12 +54,12 @@ final class LocalModel implements MaxMinModel {
 
   @Override
   public int wanted() {
-    return tieBreaking ? 1 : parts;
+    return floored ? 1 : parts;
   }
 
   @Override
   public int kept() {
-    return limits + (tieBreaking ? parts : 0);
+    return limits + (floored ? parts : 0);
   }
 
   double[] pointOf(double[] allGenes) {
@@ -67,13 +81,21 @@ final class LocalModel implements MaxMinModel {
       return false;
     }
     for (int i = 0; i < parts; i++) {
-      int row = tieBreaking ? 1 + i : i;
-      rows[row] = tieBreaking ? partRow[i] - problem.floor() : partRow[i];
+      int row = floored ? 1 + i : i;
+      rows[row] = floored ? partRow[i] - problem.floor() : partRow[i];
       for (int j = 0; j < free.length; j++) {
         gradient[row][j] = partGradient[i][free[j]];
       }
     }
-    return limits == 0 && !tieBreaking || differences(point, all, rows, gradient);
+    if (moved >= 0) {
+      rows[0] = direction * point[moved];
+      gradient[0][moved] = direction;
+    }
+    return limits == 0 && !isTieBreaking() || differences(point, all, rows, gradient);
+  }
+
+  private boolean isTieBreaking() {
+    return floored && moved < 0;
   }
 
   private boolean differences(double[] point, double[] all, double[] rows, double[][] gradient) {
@@ -91,7 +113,7 @@ final class LocalModel implements MaxMinModel {
   }
 
   private void slopes(double[] rows, double[] shifted, double step, int j, double[][] gradient) {
-    if (tieBreaking) {
+    if (isTieBreaking()) {
       gradient[0][j] = (shifted[0] - rows[0]) / step;
     }
     for (int i = rows.length - limits; i < rows.length; i++) {
@@ -103,7 +125,7 @@ final class LocalModel implements MaxMinModel {
     if (verdict.isFailure() || verdict.slacks().size() != limits) {
       return false;
     }
-    if (tieBreaking) {
+    if (isTieBreaking()) {
       rows[0] = verdict.tieBreak();
     }
     List<Double> slacks = verdict.slacks();

@@ -7,12 +7,13 @@ import java.util.Arrays;
  * small box the functions are replaced by their tangents, the best point of the box follows from a
  * linear program, and the box grows or shrinks with how well it was predicted. The kink at which
  * another function becomes the smallest is thereby no obstacle (Madsen, J. Inst. Math. Appl. 16,
- * 321 (1975)).
+ * 321 (1975)). Once the curvature is known, {@link CurvedStep} bends the step.
  */
 final class MaxMinSolver {
 
   private final MaxMinModel model;
   private final LinearStep linear;
+  private final CurvedStep curved;
   private Sample here;
   private double radius;
 
@@ -25,6 +26,7 @@ final class MaxMinSolver {
     this.model = model;
     this.radius = radius;
     linear = new LinearStep(model.size(), model.wanted(), model.kept(), penalty);
+    curved = new CurvedStep(model.size(), model.wanted(), model.kept());
     here = sample(start.clone());
   }
 
@@ -42,19 +44,63 @@ final class MaxMinSolver {
   }
 
   private void step() {
-    double[] target = linear.best(here.point, here.rows, here.gradient, radius);
-    double predicted = linear.gain();
-    if (!(predicted > 1e-9 * Math.max(1, Math.abs(here.merit)))) {
+    double[] straight = linear.best(here.point, here.rows, here.gradient, radius);
+    if (!isWorthwhile(linear.gain())) {
       radius = 0;
       return;
     }
-    Sample there = sample(target);
+    double[] tangents = linear.tangents(straight, here.point, here.rows, here.gradient);
+    double[] bent = curved.best(here.point, here.rows, here.gradient, straight, tangents);
+    double[] target = bent == null ? straight : shortened(bent);
+    double predicted = predicted(target);
+    if (!isWorthwhile(predicted)) {
+      target = bent == null ? halfWay(straight) : straight;
+      predicted = linear.gain();
+    }
+    move(sample(target), predicted);
+  }
+
+  private boolean isWorthwhile(double gain) {
+    return gain > 1e-10 * Math.max(1, Math.abs(here.merit));
+  }
+
+  private double predicted(double[] target) {
+    double[] tangents = linear.tangents(target, here.point, here.rows, here.gradient);
+    return linear.merit(tangents) - here.merit - curved.bend(here.point, target);
+  }
+
+  private double[] halfWay(double[] target) {
+    double[] half = target.clone();
+    for (int j = 0; j < half.length; j++) {
+      half[j] = (half[j] + here.point[j]) / 2;
+    }
+    return half;
+  }
+
+  /** Not farther than the radius, and inside the whole box. */
+  private double[] shortened(double[] target) {
+    double share = Math.min(1, radius / Math.max(1e-300, Numbers.distance(target, here.point)));
+    double[] inside = new double[target.length];
+    for (int j = 0; j < inside.length; j++) {
+      double moved = here.point[j] + share * (target[j] - here.point[j]);
+      inside[j] = Math.min(1, Math.max(0, moved));
+    }
+    return inside;
+  }
+
+  private void move(Sample there, double predicted) {
     double ratio = there.usable ? (there.merit - here.merit) / predicted : -1;
     double length = Numbers.distance(there.point, here.point);
+    if (there.usable) {
+      curved.learn(here.point, there.point, here.gradient, there.gradient);
+    }
     if (ratio > 0.05) {
       here = there;
     }
-    radius = ratio > 0.7 ? Math.min(0.5, 2 * radius) : ratio < 0.3 ? 0.4 * length : radius;
+    radius =
+        ratio > 0.7
+            ? Math.min(0.5, Math.max(radius, 2 * length))
+            : ratio < 0.3 ? 0.4 * length : radius;
   }
 
   private Sample sample(double[] point) {

@@ -88,7 +88,8 @@ final class Space {
     return values;
   }
 
-  private double value(int variable, double gene) {
+  /** Value of a legal gene. */
+  double value(int variable, double gene) {
     if (!isStepped(variable)) {
       return between(variable, gene);
     }
