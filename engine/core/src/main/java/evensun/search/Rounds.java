@@ -6,7 +6,7 @@ import java.util.List;
 record Rounds(SearchSettings settings) {
 
   /** So many combining rounds in a row without a gain end the search. */
-  private static final int IDLE = 4;
+  private static final int IDLE = 5;
 
   /** More combining rounds would only polish noise. */
   private static final int COMBINING = 12;
