@@ -69,6 +69,12 @@ final class PluginBuilder {
     return without(SERVICE);
   }
 
+  /** Compiles against another jar of the contract. */
+  PluginBuilder against(Path contractJar) {
+    classPath.set(0, contractJar);
+    return this;
+  }
+
   PluginBuilder seeing(Path library) {
     classPath.add(library);
     return this;

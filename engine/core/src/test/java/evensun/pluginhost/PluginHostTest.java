@@ -7,13 +7,21 @@ import static evensun.pluginhost.PluginBuilder.working;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;
 
+import evensun.spi.Design;
+import evensun.spi.Evaluator;
+import evensun.spi.Incidence;
 import evensun.spi.OpticalSolver;
+import evensun.spi.PreparedSolver;
+import evensun.spi.Problem;
+import evensun.spi.Response;
+import evensun.spi.Samples;
 import evensun.spi.Traits;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.HexFormat;
 import java.util.List;
+import java.util.Map;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
@@ -112,6 +120,60 @@ class PluginHostTest {
       assertThat(host.rejected()).isEmpty();
       assertThat(host.require("lab")).isInstanceOf(OpticalSolver.class);
     }
+  }
+
+  @Test
+  void aPluginCompiledAgainstTheRecordedContractStillLoadsAndRuns() throws IOException {
+    Path recorded;
+    try (var jars = Files.list(Path.of("..", "..", "plugins", "spi", "recorded"))) {
+      recorded = jars.filter(PluginFile::isJar).findFirst().orElseThrow();
+    }
+    described(work, "mirror")
+        .against(recorded)
+        .source(
+            "lab.Solver",
+"""
+            package lab;
+            import evensun.spi.*;
+            import java.util.List;
+import java.util.Map;
+            public class Solver implements OpticalSolver {
+              public String id() { return "mirror"; }
+              public Traits traits() { return Traits.plain(); }
+              public PreparedSolver prepare(Problem problem, Design start, Services services) {
+                return new PreparedSolver() {
+                  public List<Channel> channels() { return List.of(); }
+                  public Evaluator newEvaluator() {
+                    return (design, into) -> into.reflectance[0][0] = design.n[0][0];
+                  }
+                };
+              }
+            }
+            """)
+        .jar(plugins.resolve("mirror.jar"));
+    Problem problem =
+        new Problem(
+            Samples.of(500),
+            Samples.of(1),
+            List.of(),
+            0,
+            0,
+            1,
+            0,
+            List.of(Incidence.normal()),
+            1,
+            0.01,
+            Map.of());
+    Design design = Design.of(problem);
+    design.n[0][0] = 0.75;
+    Response response = Response.spectra(1, 0, 1);
+    try (PluginHost host = PluginHost.open(List.of(plugins));
+        PreparedSolver prepared =
+            host.require("mirror").prepare(problem, design, host.services(() -> false));
+        Evaluator evaluator = prepared.newEvaluator()) {
+      evaluator.evaluate(design, response);
+    }
+    assertThat(response.reflectance[0][0]).isEqualTo(0.75);
   }
 
   @ParameterizedTest

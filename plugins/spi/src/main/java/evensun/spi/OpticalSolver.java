@@ -16,7 +16,8 @@ public interface OpticalSolver {
   Traits traits();
 
   /**
-   * Does once what does not change during a search.
+   * Does once what does not change during a search. Whatever a solver cannot take, an option it
+   * does not know included, it refuses here and never passes over.
    *
    * @param problem what stays fixed
    * @param start the stack as drawn, a first design; not kept and not written
