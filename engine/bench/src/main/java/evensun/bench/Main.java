@@ -2,6 +2,7 @@ package evensun.bench;
 
 import java.util.Collection;
 import java.util.Locale;
+import java.util.Map;
 import org.openjdk.jmh.profile.GCProfiler;
 import org.openjdk.jmh.results.Result;
 import org.openjdk.jmh.results.RunResult;
@@ -16,7 +17,7 @@ import org.openjdk.jmh.runner.options.VerboseMode;
 public final class Main {
 
   private static final String USAGE =
-      "usage: java -jar evensun-bench.jar [REGEX] [--forks N] [--seconds S]";
+      "usage: java -jar benchmarks.jar [REGEX] [--forks N] [--seconds S]";
 
   private Main() {}
 
@@ -30,14 +31,21 @@ public final class Main {
         switch (args[i]) {
           case "--forks" -> forks = Integer.parseInt(args[++i]);
           case "--seconds" -> seconds = Double.parseDouble(args[++i]);
-          default -> include = args[i];
+          default -> include = regex(args[i]);
         }
       }
-    } catch (NumberFormatException | ArrayIndexOutOfBoundsException e) {
+    } catch (IllegalArgumentException | ArrayIndexOutOfBoundsException e) {
       System.err.println(USAGE);
       System.exit(2);
     }
     print(new Runner(options(include, forks, seconds)).run());
+  }
+
+  private static String regex(String arg) {
+    if (arg.startsWith("-")) {
+      throw new IllegalArgumentException(arg);
+    }
+    return arg;
   }
 
   private static Options options(String include, int forks, double seconds) {
@@ -91,7 +99,7 @@ public final class Main {
   private static Result<?> allocation(RunResult result) {
     return result.getSecondaryResults().entrySet().stream()
         .filter(entry -> entry.getKey().endsWith("gc.alloc.rate.norm"))
-        .map(java.util.Map.Entry::getValue)
+        .map(Map.Entry::getValue)
         .findFirst()
         .orElse(null);
   }
