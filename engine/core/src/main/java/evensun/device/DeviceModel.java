@@ -121,12 +121,14 @@ public final class DeviceModel {
   }
 
   private DeviceState state(DeviceOptics optics, Pairing pairing) {
-    DeviceState state =
+    DeviceState unlit =
         new DeviceState(
             subcells, device, pairing.saturationMaPerCm2(), List.of(), irradianceWPerM2);
-    List<Double> oneSun = Arrays.stream(state.collected(optics.photocurrents())).boxed().toList();
-    return new DeviceState(
-        subcells, device, pairing.saturationMaPerCm2(), oneSun, irradianceWPerM2);
+    return unlit.withOneSun(
+        Arrays.stream(unlit.collected(optics.photocurrents()))
+            .map(current -> current / device.suns())
+            .boxed()
+            .toList());
   }
 
   private Electrical electrical(DeviceState state, Pairing pairing, DeviceOptics optics) {

@@ -12,12 +12,14 @@ import evensun.scenario.Saturation;
  *     independent subcells it lies in the circuit of each
  * @param temperatureK temperature in K, in [50, 1000]
  * @param saturation where the radiative saturation currents come from
+ * @param suns concentration of the light, greater than 0; radiative efficiencies hold at one sun
  */
 public record DeviceParameters(
     Connection connection,
     double seriesResistanceOhmCm2,
     double temperatureK,
-    Saturation saturation) {
+    Saturation saturation,
+    double suns) {
 
   /** Lowest temperature at which saturation currents are still ordinary numbers, in K. */
   public static final double LOWEST_TEMPERATURE_K = 50;
@@ -34,20 +36,24 @@ public record DeviceParameters(
       throw new IllegalArgumentException(
           "temperatureK must be in [50, 1000] K but was " + temperatureK);
     }
+    if (!(suns > 0) || Double.isInfinite(suns)) {
+      throw new IllegalArgumentException("suns must be greater than 0 but was " + suns);
+    }
   }
 
   /** Without resistance, at 298.15 K. */
   public static DeviceParameters of(Connection connection) {
-    return new DeviceParameters(connection, 0, Constants.CELL_TEMPERATURE_K, Saturation.AUTOMATIC);
+    return new DeviceParameters(
+        connection, 0, Constants.CELL_TEMPERATURE_K, Saturation.AUTOMATIC, 1);
   }
 
   /** The same with another connection. */
   public DeviceParameters withConnection(Connection other) {
-    return new DeviceParameters(other, seriesResistanceOhmCm2, temperatureK, saturation);
+    return new DeviceParameters(other, seriesResistanceOhmCm2, temperatureK, saturation, suns);
   }
 
   /** The same with another series resistance in Ω cm². */
   public DeviceParameters withSeriesResistance(double ohmCm2) {
-    return new DeviceParameters(connection, ohmCm2, temperatureK, saturation);
+    return new DeviceParameters(connection, ohmCm2, temperatureK, saturation, suns);
   }
 }

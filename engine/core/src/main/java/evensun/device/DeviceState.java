@@ -38,6 +38,10 @@ record DeviceState(
     return new DeviceState(subcells, device, others, oneSun, irradianceWPerM2);
   }
 
+  DeviceState withOneSun(List<Double> others) {
+    return new DeviceState(subcells, device, saturation, others, irradianceWPerM2);
+  }
+
   /** A circuit of this device under {@code collected} currents in mA cm⁻². */
   Circuit circuit(double[] collected) {
     Circuit circuit = Circuits.of(subcells, device);

@@ -14,6 +14,7 @@ public final class PowerModel {
   private final double temperatureK;
   private final double thermalV;
   private final double irradianceWPerM2;
+  private final double suns;
   private final Circuit circuit;
 
   /**
@@ -36,6 +37,7 @@ public final class PowerModel {
     this.temperatureK = device.temperatureK();
     this.thermalV = BlackBody.thermalVoltageV(temperatureK);
     this.irradianceWPerM2 = irradianceWPerM2;
+    this.suns = device.suns();
     this.circuit = Circuits.of(this.subcells, device);
   }
 
@@ -49,14 +51,32 @@ public final class PowerModel {
    */
   public double efficiencyPercent(double[] photocurrentMaPerCm2, double[] bandgapEv) {
     for (int i = 0; i < bandgapEv.length; i++) {
-      SubcellParameters subcell = subcells.get(i);
-      double collected = Math.max(0, photocurrentMaPerCm2[i]) * subcell.collectionFraction();
-      double radiative = BlackBody.aboveMaPerCm2(bandgapEv[i], temperatureK);
-      Circuits.set(circuit.diodes[i], subcell, thermalV, radiative, collected);
-      circuit.photocurrent[i] = collected;
+      double collected =
+          Math.max(0, photocurrentMaPerCm2[i]) * subcells.get(i).collectionFraction();
+      set(i, collected, BlackBody.aboveMaPerCm2(bandgapEv[i], temperatureK));
     }
     circuit.maximise();
     return percent(circuit.power, irradianceWPerM2);
+  }
+
+  /**
+   * Efficiency at maximum power for given saturation currents.
+   *
+   * @param collectedMaPerCm2 [subcell] collected currents in mA cm⁻², at least 0
+   * @param saturationMaPerCm2 [subcell] radiative saturation currents in mA cm⁻², greater than 0
+   * @return percent of the incident irradiance, at least 0
+   */
+  public double efficiencyPercentAt(double[] collectedMaPerCm2, double[] saturationMaPerCm2) {
+    for (int i = 0; i < saturationMaPerCm2.length; i++) {
+      set(i, collectedMaPerCm2[i], saturationMaPerCm2[i]);
+    }
+    circuit.maximise();
+    return percent(circuit.power, irradianceWPerM2);
+  }
+
+  private void set(int i, double collected, double radiative) {
+    Circuits.set(circuit.diodes[i], subcells.get(i), thermalV, radiative, collected / suns);
+    circuit.photocurrent[i] = collected;
   }
 
   /** Efficiency in percent of a power in mW cm⁻² (1 mW cm⁻² is 10 W m⁻²). */

@@ -55,7 +55,8 @@ public record ScenarioDevice(DeviceModel model, List<Finding> findings) {
             scenario.connection(),
             scenario.device().seriesResistanceOhmCm2(),
             scenario.device().temperatureK(),
-            scenario.device().saturation());
+            scenario.device().saturation(),
+            scenario.light().concentrationSuns().orElse(1));
     return subcells.isEmpty() || !(spectrum.totalWPerM2() > 0)
         ? Optional.empty()
         : Optional.of(new ScenarioDevice(DeviceModel.of(subcells, device, spectrum), findings));

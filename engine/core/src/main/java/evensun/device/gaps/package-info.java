@@ -1,0 +1,5 @@
+/** Which bandgaps to aim at, before any optics. */
+@NullMarked
+package evensun.device.gaps;
+
+import org.jspecify.annotations.NullMarked;
