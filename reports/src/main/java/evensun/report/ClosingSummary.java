@@ -1,8 +1,10 @@
 package evensun.report;
 
+import evensun.report.decision.Sentence;
 import evensun.report.summary.MarkdownLayout;
 import evensun.report.summary.Summary;
 import evensun.report.summary.TextLayout;
+import evensun.report.text.Plain;
 import evensun.result.RunResult;
 
 /** The decision in a few lines, for the end of a command. */
@@ -19,6 +21,11 @@ public final class ClosingSummary {
    */
   public static String text(RunResult result, String reportPath) {
     return TextLayout.of(Summary.of(result), reportPath);
+  }
+
+  /** The decision in one line. */
+  public static String headline(RunResult result) {
+    return Plain.line(Sentence.of(result));
   }
 
   /**

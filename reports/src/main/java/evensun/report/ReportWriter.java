@@ -1,5 +1,6 @@
 package evensun.report;
 
+import evensun.report.page.ReportPage;
 import evensun.result.RunResult;
 import gg.jte.ContentType;
 import gg.jte.TemplateEngine;
@@ -16,10 +17,13 @@ public final class ReportWriter {
 
   /** The page, a function of the result alone. */
   public static String write(RunResult result) {
+    return render(ReportPages.of(result));
+  }
+
+  /** Lays out a page. */
+  static String render(ReportPage page) {
     StringOutput output = new StringOutput();
-    engine()
-        .render(
-            "report.jte", Map.of("page", ReportPages.of(result), "assets", Assets.get()), output);
+    engine().render("report.jte", Map.of("page", page, "assets", Assets.get()), output);
     return output.toString();
   }
 

@@ -17,6 +17,9 @@ import picocli.CommandLine.Mixin;
       DesignCommand.class,
       MaterialsCommand.class,
       PluginsCommand.class,
+      CompareCommand.class,
+      ReportCommand.class,
+      RunsCommand.class,
       SchemaCommand.class,
       ExplainCommand.class,
     })

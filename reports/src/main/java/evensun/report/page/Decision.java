@@ -9,7 +9,7 @@ import org.jspecify.annotations.Nullable;
  *
  * @param sentence what to deposit, what it gives, what limits
  * @param headlines the numbers of the decision
- * @param verdict whether to decide on it
+ * @param verdict whether to decide on it; null where that is not asked
  * @param rules how the verdict is reached
  * @param levels the level picture; null without currents
  * @param levelsCaption what the picture shows
@@ -19,7 +19,7 @@ import org.jspecify.annotations.Nullable;
 public record Decision(
     String sentence,
     List<Headline> headlines,
-    Verdict verdict,
+    @Nullable Verdict verdict,
     List<String> rules,
     @Nullable Figure levels,
     String levelsCaption,

@@ -1,0 +1,188 @@
+package evensun.report.compare;
+
+import evensun.report.compare.Matrix.Row;
+import evensun.report.figure.Budget;
+import evensun.report.figure.Share;
+import evensun.report.text.Clip;
+import evensun.report.text.Numbers;
+import evensun.result.MaterialUse;
+import evensun.result.Outcome;
+import evensun.result.Outcome.StackEntry;
+import evensun.result.Outcome.SubcellOutcome;
+import evensun.result.RunResult;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Objects;
+import java.util.function.Function;
+import org.jspecify.annotations.Nullable;
+
+/** What differs between results, and whether they may be compared at all. */
+final class Comparison {
+
+  /** Fewest runs to compare. */
+  static final int FEWEST = 2;
+
+  /** Most runs to compare. */
+  static final int MOST = 6;
+
+  private final List<NamedRun> runs;
+
+  Comparison(List<NamedRun> runs) {
+    if (runs.size() < FEWEST || runs.size() > MOST) {
+      throw new IllegalArgumentException(
+          "2 to 6 runs can be compared, but there were " + runs.size());
+    }
+    this.runs = List.copyOf(runs);
+  }
+
+  List<NamedRun> runs() {
+    return runs;
+  }
+
+  /** Which passes most, and by how much. */
+  String sentence() {
+    int best = -1;
+    int second = -1;
+    for (int i = 0; i < runs.size(); i++) {
+      Double current = headline(i);
+      if (current == null) {
+        continue;
+      }
+      if (best < 0 || current > Objects.requireNonNull(headline(best))) {
+        second = best;
+        best = i;
+      } else if (second < 0 || current > Objects.requireNonNull(headline(second))) {
+        second = i;
+      }
+    }
+    if (second < 0) {
+      return "These results share no matched current to compare.";
+    }
+    double lead = Objects.requireNonNull(headline(best)) - Objects.requireNonNull(headline(second));
+    String first =
+        Matrix.letter(best) + " passes " + Numbers.ma(Objects.requireNonNull(headline(best)));
+    return lead < 0.005
+        ? first + ", as much as " + Matrix.letter(second) + "."
+        : first + ", " + Numbers.ma(lead) + " more than " + Matrix.letter(second) + ".";
+  }
+
+  private @Nullable Double headline(int run) {
+    return runs.get(run).result().found().matchedCurrentMaPerCm2();
+  }
+
+  /**
+   * Why the results should not be held against each other; empty when nothing speaks against it.
+   */
+  List<String> warnings() {
+    List<String> warnings = new ArrayList<>();
+    warn(warnings, "the spectrum differs", r -> r.spectrum().name());
+    warn(warnings, "the angle of incidence differs", r -> r.spectrum().angleDeg());
+    warn(warnings, "the polarisation differs", r -> r.spectrum().polarisation());
+    warn(warnings, "the wavelengths differ", r -> r.found().spectral().wavelengthNm());
+    warn(warnings, "the solver differs", r -> r.provenance().solver().id());
+    warn(warnings, "the version of the solver differs", r -> r.provenance().solver().version());
+    warn(warnings, "the version of Evensun differs", r -> r.provenance().evensunVersion());
+    warn(warnings, "some are as drawn, others searched", r -> r.search() == null);
+    warn(warnings, "the aim differs", r -> r.search() == null ? "" : r.search().aim());
+    return warnings;
+  }
+
+  private void warn(List<String> warnings, String text, Function<RunResult, Object> of) {
+    if (runs.stream().map(run -> of.apply(run.result())).distinct().count() > 1) {
+      warnings.add(text);
+    }
+  }
+
+  Matrix results() {
+    return new Matrix(runs)
+        .numbers("matched current", 2, r -> r.found().matchedCurrentMaPerCm2())
+        .numbers("mismatch", 2, r -> r.found().mismatchMaPerCm2())
+        .words("limited by", r -> r.found().limitingSubcell())
+        .numbers(
+            "efficiency, %",
+            2,
+            r -> r.found().electrical() == null ? null : r.found().electrical().efficiencyPercent())
+        .each(
+            r -> r.found().subcells().stream().map(SubcellOutcome::name).toList(),
+            (matrix, name) ->
+                matrix.numbers(Clip.to(name, 40), 2, r -> photocurrent(r.found(), name)));
+  }
+
+  private static @Nullable Double photocurrent(Outcome outcome, String subcell) {
+    for (SubcellOutcome each : outcome.subcells()) {
+      if (each.name().equals(subcell)) {
+        return each.photocurrentMaPerCm2();
+      }
+    }
+    return null;
+  }
+
+  Matrix losses() {
+    return new Matrix(runs)
+        .each(
+            r -> losses(r).stream().map(Share::label).toList(),
+            (matrix, label) -> matrix.numbers(Clip.to(label, 60), 3, r -> loss(r, label)));
+  }
+
+  private static List<Share> losses(RunResult result) {
+    return Budget.of(result.found()).map(Budget::losses).orElse(List.of());
+  }
+
+  private static @Nullable Double loss(RunResult result, String label) {
+    return losses(result).stream()
+        .filter(share -> share.label().equals(label))
+        .findFirst()
+        .map(Share::maPerCm2)
+        .orElse(null);
+  }
+
+  Matrix stack() {
+    return new Matrix(runs)
+        .each(
+            r -> r.found().stack().stream().map(StackEntry::name).toList(),
+            (matrix, name) -> matrix.words(Clip.to(name, 60), r -> layer(r, name)));
+  }
+
+  private static @Nullable String layer(RunResult result, String name) {
+    for (StackEntry entry : result.found().stack()) {
+      if (entry.name().equals(name)) {
+        String thickness =
+            entry.thicknessNm() == null ? "" : " " + Numbers.thickness(entry.thicknessNm());
+        String gap =
+            entry.bandgapEv() == null ? "" : ", " + Numbers.quantity(entry.bandgapEv(), "eV");
+        return entry.material() + thickness + gap;
+      }
+    }
+    return null;
+  }
+
+  Matrix assumptions() {
+    return new Matrix(runs)
+        .words("spectrum", r -> r.spectrum().name())
+        .words(
+            "incidence",
+            r -> Numbers.trimmed(r.spectrum().angleDeg(), 2) + "°, " + r.spectrum().polarisation())
+        .words("wavelengths", r -> r.provenance().grid())
+        .words(
+            "solver", r -> r.provenance().solver().id() + " " + r.provenance().solver().version())
+        .words("Evensun", r -> r.provenance().evensunVersion())
+        .words("aim", r -> r.search() == null ? null : r.search().aim())
+        .words("seed", r -> r.provenance().seed() == null ? null : r.provenance().seed().toString())
+        .each(
+            r -> r.materials().stream().map(MaterialUse::name).toList(),
+            (matrix, name) -> matrix.words("material " + Clip.to(name, 60), r -> source(r, name)));
+  }
+
+  private static @Nullable String source(RunResult result, String material) {
+    return result.materials().stream()
+        .filter(use -> use.name().equals(material))
+        .findFirst()
+        .map(use -> use.form().isEmpty() ? use.source() : use.source() + "; " + use.form())
+        .orElse(null);
+  }
+
+  /** The rows that differ, of results, losses and stack, for a summary in words. */
+  List<Row> differing(Matrix matrix) {
+    return matrix.ordered().stream().filter(Row::differs).toList();
+  }
+}

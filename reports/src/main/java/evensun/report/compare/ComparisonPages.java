@@ -1,0 +1,163 @@
+package evensun.report.compare;
+
+import evensun.report.figure.Budget;
+import evensun.report.figure.Figure;
+import evensun.report.figure.LightBar;
+import evensun.report.page.Block;
+import evensun.report.page.Decision;
+import evensun.report.page.ReportPage;
+import evensun.report.page.Section;
+import evensun.report.page.Table;
+import evensun.report.summary.Summary;
+import evensun.report.summary.Summary.Listing;
+import evensun.report.text.Clip;
+import evensun.report.text.Glossary;
+import evensun.report.text.Numbers;
+import evensun.result.RunResult;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+
+/** A comparison as a page and as a summary. */
+public final class ComparisonPages {
+
+  private ComparisonPages() {}
+
+  /**
+   * The page.
+   *
+   * @param runs two to six
+   * @param shortHash first digits of the hash of all results
+   */
+  public static ReportPage page(List<NamedRun> runs, String shortHash) {
+    Comparison comparison = new Comparison(runs);
+    List<Section> sections = new ArrayList<>();
+    sections.add(which(comparison));
+    sections.add(section("results", "Results", "result", comparison.results(), true, "mA cm⁻²"));
+    losses(comparison).ifPresent(sections::add);
+    sections.add(section("stack", "Stack", "layer", comparison.stack(), false, ""));
+    sections.add(
+        section("assumptions", "Assumptions", "assumption", comparison.assumptions(), false, ""));
+    RunResult first = runs.get(0).result();
+    String started = first.provenance().startedUtc();
+    return new ReportPage(
+        "Comparison",
+        Numbers.count(runs.size(), "design") + ": " + Clip.to(first.title(), 80),
+        started.substring(0, Math.min(10, started.length())),
+        shortHash,
+        decision(comparison),
+        sections,
+        Glossary.all(),
+        "Written by Evensun from the result.json of each run.");
+  }
+
+  private static Decision decision(Comparison comparison) {
+    List<String> warnings =
+        comparison.warnings().stream().map(w -> "Not fully comparable: " + w + ".").toList();
+    return new Decision(
+        comparison.sentence(), List.of(), null, List.of(), null, "", List.of(), warnings);
+  }
+
+  private static Section which(Comparison comparison) {
+    Table.Builder table =
+        new Table.Builder("table-runs", "The runs, and the letters they go by here")
+            .words("")
+            .words("run")
+            .words("title")
+            .words("started (UTC)");
+    for (int i = 0; i < comparison.runs().size(); i++) {
+      NamedRun run = comparison.runs().get(i);
+      table.row(
+          Matrix.letter(i),
+          run.name(),
+          Clip.to(run.result().title(), 120),
+          run.result().provenance().startedUtc());
+    }
+    return new Section(
+        "runs",
+        "Runs",
+        "What is compared: " + Numbers.count(comparison.runs().size(), "run"),
+        List.of(new Block.Grid(table.build(), false)));
+  }
+
+  private static Section section(
+      String id, String nav, String noun, Matrix matrix, boolean numeric, String unit) {
+    String caption = unit.isEmpty() ? nav : nav + ", " + unit + " where not said otherwise";
+    return new Section(
+        id,
+        nav,
+        heading(noun, matrix),
+        List.of(new Block.Grid(matrix.table("table-" + id, caption, numeric), false)));
+  }
+
+  private static String heading(String noun, Matrix matrix) {
+    long differences = matrix.differences();
+    return differences == 0
+        ? "Every " + noun + " is the same"
+        : Numbers.count((int) differences, noun) + (differences == 1 ? " differs" : " differ");
+  }
+
+  private static Optional<Section> losses(Comparison comparison) {
+    List<Block> blocks = new ArrayList<>();
+    for (int i = 0; i < comparison.runs().size(); i++) {
+      String letter = Matrix.letter(i);
+      Budget.of(comparison.runs().get(i).result().found())
+          .ifPresent(
+              budget -> {
+                String what = letter + ": the available current, split in the light's order.";
+                Figure figure = Figure.of(new LightBar(null, budget), what);
+                blocks.add(new Block.Picture("fig-light-" + letter, figure, what));
+              });
+    }
+    if (blocks.isEmpty()) {
+      return Optional.empty();
+    }
+    Matrix matrix = comparison.losses();
+    blocks.add(new Block.Grid(matrix.table("table-losses", "Losses, mA cm⁻²", true), false));
+    String heading =
+        matrix.differences() == 0
+            ? "Every loss is the same"
+            : matrix.differences()
+                + (matrix.differences() == 1 ? " loss differs" : " losses differ");
+    return Optional.of(new Section("light", "Light", heading, blocks));
+  }
+
+  /** The summary: differences of results, losses, stack and assumptions. */
+  public static Summary summary(List<NamedRun> runs) {
+    Comparison comparison = new Comparison(runs);
+    List<Listing> tables = new ArrayList<>();
+    List<String> names = new ArrayList<>();
+    for (int i = 0; i < runs.size(); i++) {
+      names.add(Matrix.letter(i) + " = " + runs.get(i).name());
+    }
+    tables.add(listing("currents, " + Numbers.MA, comparison.results(), runs.size()));
+    tables.add(listing("losses, " + Numbers.MA, comparison.losses(), runs.size()));
+    tables.add(listing("stack", comparison.stack(), runs.size()));
+    tables.add(listing("assumptions", comparison.assumptions(), runs.size()));
+    List<String> warnings = comparison.warnings();
+    return new Summary(
+        String.join(", ", names),
+        comparison.sentence(),
+        warnings.isEmpty()
+            ? "Only what differs is listed"
+            : "Not fully comparable: " + String.join(", ", warnings),
+        tables,
+        List.of());
+  }
+
+  private static Listing listing(String head, Matrix matrix, int runs) {
+    List<String> header = new ArrayList<>(List.of(head));
+    for (int i = 0; i < runs; i++) {
+      header.add(Matrix.letter(i));
+    }
+    List<List<String>> rows = new ArrayList<>();
+    for (Matrix.Row row : matrix.ordered()) {
+      if (row.differs()) {
+        List<String> cells = new ArrayList<>(List.of(row.label()));
+        row.cells().forEach(cell -> cells.add(Clip.to(cell, 48)));
+        rows.add(cells);
+      }
+    }
+    return new Listing(header, rows);
+  }
+}

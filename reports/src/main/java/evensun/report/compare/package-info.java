@@ -1,0 +1,5 @@
+/** Several results side by side, differences first. */
+@NullMarked
+package evensun.report.compare;
+
+import org.jspecify.annotations.NullMarked;
