@@ -27,6 +27,11 @@ final class BoundaryValues {
   private final FieldVector<Complex> right;
 
   BoundaryValues(Sample sample, int w, double angleDeg, boolean p) {
+    this(sample, w, angleDeg, p, -1, 0);
+  }
+
+  /** With a phase added to a crossing of layer {@code shifted}, its attenuation kept. */
+  BoundaryValues(Sample sample, int w, double angleDeg, boolean p, int shifted, double phaseRad) {
     layers = sample.layers();
     other = new Complex[layers + 2];
     phase = new Complex[layers + 2];
@@ -39,6 +44,9 @@ final class BoundaryValues {
       other[j] = p ? q.divide(square) : q;
       double nm = j == 0 || j > layers ? 0 : sample.design.thicknessNm[j - 1];
       phase[j] = Complex.I.multiply(q).multiply(k0 * nm).exp();
+    }
+    if (shifted >= 0) {
+      phase[shifted + 1] = phase[shifted + 1].multiply(Complex.I.multiply(phaseRad).exp());
     }
     int size = 2 * layers + 2;
     system = new Array2DRowFieldMatrix<>(ComplexField.getInstance(), size, size);
