@@ -13,6 +13,7 @@ import evensun.spi.Samples;
 import evensun.spi.Services;
 import evensun.spi.Side;
 import evensun.stack.MaterialSlot;
+import evensun.stack.ResolvedKnob;
 import evensun.stack.ResolvedLayer;
 import evensun.stack.ResolvedStack;
 import evensun.stack.ResolvedSubcell;
@@ -76,7 +77,7 @@ public final class Model implements AutoCloseable {
       ResolvedStack stack, Map<String, String> options, long seed, List<Incidence> incidences) {
     List<Layer> layers = new ArrayList<>();
     for (ResolvedLayer layer : stack.layers()) {
-      layers.add(Layer.plain(layer.name(), layer.coherent()));
+      layers.add(new Layer(layer.name(), layer.coherent(), layer.features()));
     }
     return new Problem(
         Samples.of(stack.grid().wavelengthNm()),
@@ -85,7 +86,7 @@ public final class Model implements AutoCloseable {
         stack.incidentSlot(),
         stack.exitSlot(),
         stack.slots().size(),
-        0,
+        stack.knobs().size(),
         incidences,
         seed,
         WANTED_ERROR_MA_PER_CM2,
@@ -163,6 +164,9 @@ public final class Model implements AutoCloseable {
       for (int l = 0; l < stack.layers().size(); l++) {
         design.thicknessNm[l] = stack.layers().get(l).spec().thicknessNm();
         design.material[l] = stack.layers().get(l).slot();
+      }
+      for (ResolvedKnob knob : stack.knobs()) {
+        design.knob[knob.knob().index()] = knob.drawn();
       }
       List<MaterialSlot> slots = stack.slots();
       for (int s = 0; s < slots.size(); s++) {

@@ -35,8 +35,18 @@ public record Parameter(String key, String unit, Kind kind, int index, double dr
     return switch (key.substring(dot + 1)) {
       case "thicknessNm" -> thickness(key, layer, stack);
       case "bandgapEv" -> bandgap(key, layer, stack);
-      default -> Optional.empty();
+      default -> knob(key, stack);
     };
+  }
+
+  private static Optional<Parameter> knob(String key, ResolvedStack stack) {
+    return stack.knobs().stream()
+        .filter(knob -> knob.key().equals(key))
+        .map(
+            knob ->
+                new Parameter(
+                    key, knob.knob().unit(), Kind.KNOB, knob.knob().index(), knob.drawn()))
+        .findFirst();
   }
 
   private static Optional<Parameter> thickness(String key, String layer, ResolvedStack stack) {

@@ -43,7 +43,7 @@ final class ProvenanceBuilder {
         BuildInfo.fingerprint(),
         Runtime.version().toString(),
         solver(preparation.choice().solver().id()),
-        List.of(),
+        preparation.choice().chain().stream().map(this::solver).toList(),
         preparation.choice().options().get("kernel"),
         seed,
         grid(stack),

@@ -61,12 +61,14 @@ final class SecondOpinions {
   }
 
   private void referenceKernel(Scenario scenario, List<Opinion> opinions) {
-    if (!preparation.choice().solver().id().equals(SolverChoice.FLAT)) {
+    SolverChoice choice = preparation.choice();
+    boolean flat = choice.solver().id().equals(SolverChoice.FLAT);
+    if (!flat && !choice.chain().contains(SolverChoice.FLAT)) {
       return;
     }
     Map<String, String> options = new HashMap<>(preparation.choice().options());
     options.put("kernel", "reference");
-    SolverSpec reference = new SolverSpec(SolverChoice.FLAT, options, scenario.grid().place());
+    SolverSpec reference = new SolverSpec(choice.solver().id(), options, scenario.grid().place());
     opinions.add(
         opinion("numerics", "the solver's reference kernel", scenario.withSolver(reference)));
   }

@@ -1,15 +1,18 @@
 package evensun.scenario;
 
+import evensun.scenario.FeatureSpec.ComponentSpec;
+import java.util.List;
 import java.util.OptionalDouble;
 
 /**
  * A finite layer as drawn.
  *
  * @param name unique name
- * @param material material name
+ * @param material material name; empty where the features name the materials instead
  * @param bandgapEv wanted bandgap of a tunable material, in eV
  * @param thicknessNm thickness in nm, at least 0
  * @param coherence what the scenario says about interference inside
+ * @param features what is not flat, uniform and pure about it
  * @param place where it stands
  */
 public record LayerSpec(
@@ -18,11 +21,39 @@ public record LayerSpec(
     OptionalDouble bandgapEv,
     double thicknessNm,
     Coherence coherence,
+    List<FeatureSpec> features,
     Place place) {
 
-  /** This layer of another material. */
-  public LayerSpec withMaterial(String other) {
-    return new LayerSpec(name, other, bandgapEv, thicknessNm, coherence, place);
+  public LayerSpec {
+    features = List.copyOf(features);
+  }
+
+  /** A flat, uniform, pure layer. */
+  public LayerSpec(
+      String name,
+      String material,
+      OptionalDouble bandgapEv,
+      double thicknessNm,
+      Coherence coherence,
+      Place place) {
+    this(name, material, bandgapEv, thicknessNm, coherence, List.of(), place);
+  }
+
+  /** This layer with one material replaced by another. */
+  public LayerSpec withMaterial(String old, String other) {
+    return new LayerSpec(
+        name,
+        material.equals(old) ? other : material,
+        bandgapEv,
+        thicknessNm,
+        coherence,
+        features.stream().map(feature -> feature.withMaterial(old, other)).toList(),
+        place);
+  }
+
+  /** What is mixed in this layer, in the order of the file; empty when it is of one material. */
+  public List<ComponentSpec> components() {
+    return features.stream().flatMap(feature -> feature.components().stream()).toList();
   }
 
   /** What the scenario says about interference inside a layer. */

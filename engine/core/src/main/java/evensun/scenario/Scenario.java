@@ -91,9 +91,7 @@ public record Scenario(
         incidentMedium.material().equals(name)
             ? incidentMedium.withMaterial(other)
             : incidentMedium,
-        stack.stream()
-            .map(layer -> layer.material().equals(name) ? layer.withMaterial(other) : layer)
-            .toList(),
+        stack.stream().map(layer -> layer.withMaterial(name, other)).toList(),
         exit.material().equals(name) ? exit.withMaterial(other) : exit,
         subcells,
         connection,

@@ -17,6 +17,7 @@ import java.util.List;
  * @param layers the finite layers
  * @param exitSlot row of the exit medium
  * @param subcells in the order the light meets them
+ * @param knobs numbers of features that the search moves, by their index in a design
  * @param findings what a reader should know already
  */
 public record ResolvedStack(
@@ -28,12 +29,14 @@ public record ResolvedStack(
     List<ResolvedLayer> layers,
     int exitSlot,
     List<ResolvedSubcell> subcells,
+    List<ResolvedKnob> knobs,
     List<Finding> findings) {
 
   public ResolvedStack {
     slots = List.copyOf(slots);
     layers = List.copyOf(layers);
     subcells = List.copyOf(subcells);
+    knobs = List.copyOf(knobs);
     findings = List.copyOf(findings);
   }
 

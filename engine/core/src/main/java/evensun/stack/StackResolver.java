@@ -25,6 +25,7 @@ public final class StackResolver {
   private final Scenario scenario;
   private final WavelengthGrid grid;
   private final MaterialSlots slots;
+  private final FeatureResolver features;
   private final List<Fault> faults = new ArrayList<>();
   private final List<Finding> findings = new ArrayList<>();
 
@@ -33,6 +34,7 @@ public final class StackResolver {
     GridSpec spec = scenario.grid();
     this.grid = WavelengthGrid.of(spec.fromNm(), spec.toNm(), spec.stepNm());
     this.slots = new MaterialSlots(materials);
+    this.features = new FeatureResolver(scenario, slots);
   }
 
   /**
@@ -56,6 +58,7 @@ public final class StackResolver {
     }
     int exit = medium(scenario.exit());
     stopOnFaults();
+    roughExit(layers);
     checkOptics(spectrum, incident, layers);
     List<ResolvedSubcell> subcells = new ArrayList<>();
     for (SubcellSpec subcell : scenario.subcells()) {
@@ -63,7 +66,16 @@ public final class StackResolver {
     }
     stopOnFaults();
     return new ResolvedStack(
-        scenario, grid, spectrum, slots.slots(), incident, layers, exit, subcells, findings);
+        scenario,
+        grid,
+        spectrum,
+        slots.slots(),
+        incident,
+        layers,
+        exit,
+        subcells,
+        features.knobs(),
+        findings);
   }
 
   private int medium(MediumSpec medium) {
@@ -76,14 +88,30 @@ public final class StackResolver {
   }
 
   private ResolvedLayer layer(LayerSpec layer) {
-    boolean coherent = layer.coherence() != LayerSpec.Coherence.INCOHERENT;
     try {
-      int slot = slots.slot(layer.name(), layer.material(), layer.bandgapEv(), layer.place());
-      return new ResolvedLayer(layer, slot, coherent);
+      return features.layer(layer);
     } catch (InputException e) {
       faults.addAll(e.faults());
-      return new ResolvedLayer(layer, 0, coherent);
+      return new ResolvedLayer(layer, 0, layer.coherence() != LayerSpec.Coherence.INCOHERENT);
     }
+  }
+
+  private void roughExit(List<ResolvedLayer> layers) {
+    scenario
+        .exit()
+        .roughness()
+        .ifPresent(
+            spec -> {
+              int last = layers.size() - 1;
+              if (last < 0) {
+                faults.add(
+                    new Fault(
+                        spec.place(),
+                        "roughnessNm of the exit medium needs a layer above it; draw one of thickness 0"));
+              } else {
+                layers.set(last, layers.get(last).withFeature(FeatureResolver.exitFace(spec)));
+              }
+            });
   }
 
   /** Checks that need n and k on the grid: range of the data, coherence, incident medium. */
@@ -162,7 +190,7 @@ public final class StackResolver {
   }
 
   private Place placeOf(MaterialSlot slot) {
-    String layer = slot.layers().get(0);
+    String layer = slot.layers().get(0).replaceFirst("/.*", "");
     return scenario.stack().stream()
         .filter(spec -> spec.name().equals(layer))
         .map(LayerSpec::place)
@@ -188,12 +216,19 @@ public final class StackResolver {
                 "subcell \"%s\": absorber \"%s\" names no layer, or names one twice"
                     .formatted(spec.name(), absorber)));
       } else {
-        absorbers.add(
-            new ResolvedSubcell.Absorber(
-                index, component, index == layers.size() ? exit : layers.get(index).slot()));
+        int slot = index == layers.size() ? exit : slot(layers.get(index), component);
+        absorbers.add(new ResolvedSubcell.Absorber(index, component, slot));
       }
     }
     return new ResolvedSubcell(spec.name(), absorbers);
+  }
+
+  private static int slot(ResolvedLayer layer, String component) {
+    return layer.components().stream()
+        .filter(c -> c.name().equals(component))
+        .mapToInt(ResolvedLayer.ResolvedComponent::slot)
+        .findFirst()
+        .orElse(layer.slot());
   }
 
   private int indexOf(String layer, List<ResolvedLayer> layers) {

@@ -41,6 +41,10 @@ final class Edits {
     if (!rest.isEmpty() && isLayer(root, head) && !isKeyOfSection(root, head, rest)) {
       return inStack(root, head, rest, value.get());
     }
+    int slash = head.indexOf('/');
+    if (slash > 0 && !rest.isEmpty() && isLayer(root, head.substring(0, slash))) {
+      return inComponent(root, head, rest, value.get());
+    }
     if (RootBinder.KEYS.contains(head) && !(dot >= 0 && rest.isEmpty())) {
       return put(root, segments(setting.key()), value.get());
     }
@@ -99,6 +103,20 @@ final class Edits {
       items.add(meant ? put((Mapping) item, segments(rest), value) : item);
     }
     return replace(root, "stack", new Sequence(items, stack.place()), stack.place());
+  }
+
+  /** A component of a mixed layer, or an end of a graded one. */
+  private static Mapping inComponent(Mapping root, String head, String rest, Node value) {
+    int slash = head.indexOf('/');
+    String layer = head.substring(0, slash);
+    String component = head.substring(slash + 1);
+    boolean graded =
+        ((Sequence) value(root, "stack"))
+            .items().stream()
+                .filter(i -> i instanceof Mapping m && layer.equals(text(value(m, "name"))))
+                .anyMatch(i -> !(value((Mapping) i, "grading") instanceof Broken));
+    String section = graded ? "grading." : "mixture.components.";
+    return inStack(root, layer, section + component + "." + rest, value);
   }
 
   private static Mapping put(Mapping into, List<String> path, Node value) {

@@ -150,13 +150,17 @@ final class StackBinder {
     } else {
       fields.require("thicknessNm", WHAT_THICKNESS);
     }
+    boolean pure = !FeatureBinder.namesMaterials(fields);
+    String material = pure ? material(fields) : "";
+    OptionalDouble gap = pure ? fields.number("bandgapEv", BANDGAP) : OptionalDouble.empty();
     LayerSpec layer =
         new LayerSpec(
             name,
-            fields.requiredName("material", "the name of a material", NameRule.MATERIAL).orElse(""),
-            fields.number("bandgapEv", BANDGAP),
+            material,
+            gap,
             fields.number("thicknessNm", THICKNESS).orElse(Double.NaN),
             fields.choice("coherence", coherences()).orElse(Coherence.DEFAULT),
+            FeatureBinder.bind(fields, material, gap),
             fields.place());
     fields.finish();
     return layer;
@@ -182,15 +186,20 @@ final class StackBinder {
     MediumSpec exit =
         new MediumSpec(
             name,
-            fields.requiredName("material", "the name of a material", NameRule.MATERIAL).orElse(""),
+            material(fields),
             fields.number("bandgapEv", BANDGAP),
+            FeatureBinder.roughness(fields),
             fields.place());
     fields.finish();
     return exit;
   }
 
+  private static String material(Fields fields) {
+    return fields.requiredName("material", "the name of a material", NameRule.MATERIAL).orElse("");
+  }
+
   private void noThickness(Fields exit) {
-    for (String key : List.of("thicknessNm", "coherence")) {
+    for (String key : List.of("thicknessNm", "coherence", "mixture", "grading")) {
       if (exit.has(key)) {
         exit.know(key);
         if (endsTooLate) {

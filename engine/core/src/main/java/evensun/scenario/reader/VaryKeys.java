@@ -1,5 +1,6 @@
 package evensun.scenario.reader;
 
+import evensun.scenario.FeatureSpec;
 import evensun.scenario.LayerSpec;
 import evensun.scenario.tree.Fields;
 import evensun.scenario.tree.Interval;
@@ -17,7 +18,7 @@ final class VaryKeys {
 
   /** The interval of the quantity that a key names; empty, and a fault, when it names none. */
   static Optional<Interval> interval(Fields vary, Entry entry, StackBinder.Stack stack) {
-    if (stack.excuses(entry.key().replaceFirst("\\..*", ""))) {
+    if (stack.excuses(entry.key().replaceFirst("[./].*", ""))) {
       return Optional.empty();
     }
     Map<String, Interval> known = of(stack);
@@ -36,6 +37,7 @@ final class VaryKeys {
       if (layer.bandgapEv().isPresent()) {
         known.put(layer.name() + ".bandgapEv", StackBinder.BANDGAP);
       }
+      layer.features().forEach(feature -> addFeature(layer.name(), feature, known));
     }
     if (stack.exit().bandgapEv().isPresent()) {
       known.put(stack.exit().name() + ".bandgapEv", StackBinder.BANDGAP);
@@ -43,13 +45,30 @@ final class VaryKeys {
     return known;
   }
 
+  private static void addFeature(String layer, FeatureSpec feature, Map<String, Interval> known) {
+    boolean porous = feature instanceof FeatureSpec.MixtureSpec mixture && mixture.porous();
+    if (porous) {
+      known.put(layer + ".mixture.porosity", MixtureBinder.FRACTION);
+      return;
+    }
+    for (FeatureSpec.ComponentSpec component : feature.components()) {
+      String key = layer + "/" + component.name();
+      if (feature instanceof FeatureSpec.MixtureSpec) {
+        known.put(key + ".fraction", MixtureBinder.FRACTION);
+      }
+      if (component.bandgapEv().isPresent()) {
+        known.put(key + ".bandgapEv", StackBinder.BANDGAP);
+      }
+    }
+  }
+
   private static String complaint(
       String key, StackBinder.Stack stack, Map<String, Interval> known) {
     int dot = key.indexOf('.');
-    String layer = dot < 0 ? key : key.substring(0, dot);
+    String layer = (dot < 0 ? key : key.substring(0, dot)).replaceFirst("/.*", "");
     String quantity = dot < 0 ? "" : key.substring(dot + 1);
     if (stack.position(layer) < 0) {
-      return "names no layer of the stack" + Nearest.hint(dot < 0 ? key : layer, stack.names());
+      return "names no layer of the stack" + Nearest.hint(layer, stack.names());
     }
     if (quantity.equals("thicknessNm")) {
       return "cannot vary: the exit medium has no thickness";
