@@ -180,15 +180,17 @@ public final class Outcomes {
             .map(ResolvedSubcell::name)
             .findFirst()
             .orElse(null);
+    boolean finite = role.equals("layer");
+    ResolvedLayer drawn = finite ? stack.layers().get(layer) : null;
     return new StackEntry(
         name,
-        material.name(),
+        drawn == null ? material.name() : LayerWords.material(stack, drawn),
         role,
         nm,
         material.tunable() ? bench.bandgapEv(slot) : null,
         coherent,
         subcell,
-        List.of());
+        drawn == null ? List.of() : LayerWords.features(stack, drawn, bench.design()));
   }
 
   private Spectral spectral() {

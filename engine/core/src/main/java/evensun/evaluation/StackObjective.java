@@ -12,7 +12,8 @@ public final class StackObjective implements Objective {
   /** Matched currents closer than this do not decide a bandgap, in mA cm⁻². */
   public static final double GAP_TIE_MA_PER_CM2 = 0.02;
 
-  private static final double GAP_STEP_EV = 1e-4;
+  /** Step of the differences by bandgap in eV, and by the fractions of mixtures. */
+  private static final double DIFFERENCE_STEP = 1e-4;
 
   private final Model model;
   private final List<Parameter> parameters;
@@ -101,11 +102,7 @@ public final class StackObjective implements Objective {
 
     @Override
     public int partCount() {
-      return aim.isSmallestCurrent() && bench.hasGradient() && !variesKnob() ? subcells : 0;
-    }
-
-    private boolean variesKnob() {
-      return parameters.stream().anyMatch(p -> p.kind() == Parameter.Kind.KNOB);
+      return aim.isSmallestCurrent() && bench.hasGradient() ? subcells : 0;
     }
 
     @Override
@@ -120,7 +117,7 @@ public final class StackObjective implements Objective {
           if (parameters.get(v).kind() == Parameter.Kind.THICKNESS) {
             byThickness(v, gradient);
           } else {
-            byGap(values, v, gradient);
+            byDifference(values, v, gradient);
           }
         }
         return true;
@@ -137,10 +134,10 @@ public final class StackObjective implements Objective {
     }
 
     /** Central difference, one-sided at a bound. */
-    private void byGap(double[] values, int v, double[][] gradient) {
+    private void byDifference(double[] values, int v, double[][] gradient) {
       Variable variable = variables.get(v);
-      double up = Math.min(values[v] + GAP_STEP_EV, variable.high());
-      double down = Math.max(values[v] - GAP_STEP_EV, variable.low());
+      double up = Math.min(values[v] + DIFFERENCE_STEP, variable.high());
+      double down = Math.max(values[v] - DIFFERENCE_STEP, variable.low());
       bench.set(parameters.get(v), up);
       bench.currents(currents);
       bench.set(parameters.get(v), down);

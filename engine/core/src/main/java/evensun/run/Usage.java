@@ -23,6 +23,7 @@ final class Usage {
     for (int s = 0; s < stack.slots().size(); s++) {
       uses.add(use(bench, s, stack.slots().get(s)));
     }
+    uses.addAll(EffectiveMedia.of(bench));
     return uses;
   }
 

@@ -150,7 +150,11 @@ final class Fit {
     for (int c = 0; c < fractions[l].length; c++) {
       setComponent(design, blend, c, mixture.components().get(c).material());
     }
-    Fractions.fill(mixture, plan.layerName(l), design, fractions[l]);
+    try {
+      mixture.fractions(design, fractions[l]);
+    } catch (EvaluationFailed e) {
+      throw new EvaluationFailed("layer \"" + plan.layerName(l) + "\": " + e.getMessage());
+    }
     blend.mix(0, fractions[l]);
     plain.revision[plan.pieces().get(plan.firstPiece(l)).row()] = blend.revision(0);
   }

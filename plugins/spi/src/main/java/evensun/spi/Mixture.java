@@ -89,6 +89,39 @@ public record Mixture(
     return components.stream().flatMap(c -> c.fraction().knob().stream()).toList();
   }
 
+  /**
+   * The volume fractions of a design; allocates nothing.
+   *
+   * @param design the candidate
+   * @param into [component] out: fractions of sum 1
+   * @throws EvaluationFailed where a moved fraction leaves [0, 1], or all together exceed 1
+   */
+  public void fractions(Design design, double[] into) {
+    double moved = 0;
+    double fixed = 0;
+    for (int c = 0; c < into.length; c++) {
+      Parameter fraction = components.get(c).fraction();
+      into[c] = fraction.in(design);
+      if (!(into[c] >= 0 && into[c] <= 1)) {
+        throw new EvaluationFailed(
+            "the fraction of "
+                + components.get(c).name()
+                + " must be in [0, 1] but was "
+                + into[c]);
+      }
+      moved += fraction.knob().isPresent() ? into[c] : 0;
+      fixed += fraction.knob().isPresent() ? 0 : into[c];
+    }
+    if (moved > 1 + SUM_TOLERANCE) {
+      throw new EvaluationFailed(
+          "the fractions that vary must not exceed 1 together but sum to " + moved);
+    }
+    double scale = Math.max(0, 1 - moved) / fixed;
+    for (int c = 0; c < into.length; c++) {
+      into[c] *= components.get(c).fraction().knob().isPresent() ? 1 : scale;
+    }
+  }
+
   private static void requireDifferentNames(List<Component> components) {
     Set<String> names = new HashSet<>();
     for (Component component : components) {
