@@ -10,7 +10,7 @@ public final class Keys {
   /** The layer, or {@code layer/component}, a key belongs to; the whole key if it has no dot. */
   public static String layer(String key) {
     int dot = key.lastIndexOf('.');
-    return dot < 0 ? key : key.substring(0, dot);
+    return dot < 0 ? key : key.substring(0, dot).replaceFirst("\\.mixture$", "");
   }
 
   /** What of the layer varies: {@code thickness}, {@code bandgap}, and so on. */
