@@ -42,6 +42,8 @@ public final class PluginHost implements AutoCloseable {
 
   /** The solver of that id, or empty when none is loaded. */
   public Optional<OpticalSolver> solver(String solverId) {
+    // The file may be replaced while a search runs; what counts is what was loaded.
+    pluginOf(solverId).ifPresent(LoadedPlugin::sha256);
     return Optional.ofNullable(solvers.get(solverId));
   }
 
@@ -173,7 +175,7 @@ public final class PluginHost implements AutoCloseable {
       if (other.isPresent()) {
         throw duplicate("solver", made.id(), other.get());
       }
-      byPluginId.put(id, describe(file, made));
+      byPluginId.put(id, new LoadedPlugin(file, made.id(), made.traits()));
       solvers.put(made.id(), made.solver());
     } catch (Rejection e) {
       manager.unloadPlugin(id);
@@ -229,22 +231,5 @@ public final class PluginHost implements AutoCloseable {
           "make a plugin of each, or one solver that takes solver.options");
     }
     return new SolverClass(declared.iterator().next(), manager.getPluginClassLoader(id));
-  }
-
-  private static LoadedPlugin describe(PluginFile file, SolverClass.Made made) throws Rejection {
-    try {
-      return new LoadedPlugin(
-          file.property("plugin.id"),
-          file.property("plugin.version"),
-          file.property("plugin.requires"),
-          file.property("plugin.description"),
-          file.path(),
-          Fingerprint.of(file.path()),
-          made.id(),
-          made.traits());
-    } catch (IOException e) {
-      throw new Rejection(
-          "unreadable", "it cannot be read (" + OneLine.of(e) + ")", "check its access rights");
-    }
   }
 }

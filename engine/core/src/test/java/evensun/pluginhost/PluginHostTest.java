@@ -47,17 +47,18 @@ class PluginHostTest {
       // The hash of the JDK's own digest over the whole file at once.
       byte[] digest =
           java.security.MessageDigest.getInstance("SHA-256").digest(Files.readAllBytes(jar));
-      assertThat(host.loaded())
-          .containsExactly(
-              new LoadedPlugin(
-                  "lab",
-                  "2.3.4",
-                  ">=1.0.0 & <2.0.0",
-                  "",
-                  jar,
-                  HexFormat.of().formatHex(digest),
-                  "lab",
-                  Traits.plain()));
+      LoadedPlugin plugin = host.loaded().get(0);
+      assertThat(plugin.sha256()).isEqualTo(HexFormat.of().formatHex(digest));
+      assertThat(plugin)
+          .extracting(
+              LoadedPlugin::id,
+              LoadedPlugin::version,
+              LoadedPlugin::requires,
+              LoadedPlugin::description,
+              LoadedPlugin::file,
+              LoadedPlugin::solverId,
+              LoadedPlugin::traits)
+          .containsExactly("lab", "2.3.4", ">=1.0.0 & <2.0.0", "", jar, "lab", Traits.plain());
       assertThat(host.solver("lab")).get().extracting(OpticalSolver::id).isEqualTo("lab");
       assertThat(host.pluginOf("lab")).isPresent();
     }
@@ -72,6 +73,18 @@ class PluginHostTest {
     try (PluginHost host = PluginHost.open(List.of(plugins))) {
       assertThat(host.rejected()).isEmpty();
       assertThat(host.loaded()).extracting(LoadedPlugin::id).containsExactly("a", "b", "c");
+    }
+  }
+
+  @Test
+  void theHashIsThatOfTheFileThatWasLoaded() throws IOException {
+    Path jar = working(work, "lab").jar(plugins.resolve("lab.jar"));
+    String before = Fingerprint.of(jar);
+    try (PluginHost host = PluginHost.open(List.of(plugins))) {
+      host.require("lab");
+      working(work, "lab").text("more", "content").jar(jar);
+      assertThat(host.loaded().get(0).sha256()).isEqualTo(before);
+      assertThat(Fingerprint.of(jar)).isNotEqualTo(before);
     }
   }
 
