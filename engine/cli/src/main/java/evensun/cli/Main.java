@@ -1,5 +1,7 @@
 package evensun.cli;
 
+import java.util.Locale;
+
 /** Entry point of the program. */
 public final class Main {
 
@@ -7,6 +9,7 @@ public final class Main {
 
   /** Runs one command and ends the process with its exit status. */
   public static void main(String[] args) {
+    Locale.setDefault(Locale.ROOT); // numbers read the same on every machine
     int status = run(Console.system(), args);
     Interruption.finished();
     System.exit(status);

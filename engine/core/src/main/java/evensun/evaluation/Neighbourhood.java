@@ -9,6 +9,7 @@ import java.util.Comparator;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import org.jspecify.annotations.Nullable;
 
 /** What happens around a design when one quantity moves and the others stay. */
 public final class Neighbourhood implements AutoCloseable {
@@ -24,6 +25,7 @@ public final class Neighbourhood implements AutoCloseable {
   private final List<Variable> variables;
   private final double[] centre;
   private final Aim aim;
+  private final @Nullable Aim efficiency;
   private final List<ResolvedSubcell> subcells;
 
   /**
@@ -34,14 +36,21 @@ public final class Neighbourhood implements AutoCloseable {
    * @param variables its bounds, in the same order
    * @param centre [parameter] the design
    * @param aim what is wanted
+   * @param efficiency efficiency, where the device has one
    */
   public Neighbourhood(
-      Model model, List<Parameter> parameters, List<Variable> variables, double[] centre, Aim aim) {
+      Model model,
+      List<Parameter> parameters,
+      List<Variable> variables,
+      double[] centre,
+      Aim aim,
+      @Nullable Aim efficiency) {
     this.bench = model.newBench();
     this.parameters = List.copyOf(parameters);
     this.variables = List.copyOf(variables);
     this.centre = centre.clone();
     this.aim = aim;
+    this.efficiency = efficiency;
     this.subcells = model.stack().subcells();
   }
 
@@ -85,7 +94,7 @@ public final class Neighbourhood implements AutoCloseable {
         up.aim() - here.aim(),
         down.aim() - here.aim(),
         currents,
-        null,
+        efficiency == null ? null : up.efficiency() - here.efficiency(),
         tolerance,
         worse - here.aim());
   }
@@ -130,7 +139,8 @@ public final class Neighbourhood implements AutoCloseable {
     double[] gaps = new double[subcells.size()];
     bench.currents(currents);
     bench.subcellGaps(gaps);
-    return new Point(aim.value(currents, gaps), currents);
+    double percent = efficiency == null ? 0 : efficiency.value(currents, gaps);
+    return new Point(aim.value(currents, gaps), percent, currents);
   }
 
   /** A bandgap cannot leave the range of its material, a knob not its own. */
@@ -153,5 +163,5 @@ public final class Neighbourhood implements AutoCloseable {
   }
 
   @SuppressWarnings("ArrayRecordComponent") // never leaves this class
-  private record Point(double aim, double[] currents) {}
+  private record Point(double aim, double efficiency, double[] currents) {}
 }

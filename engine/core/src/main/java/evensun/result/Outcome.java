@@ -37,6 +37,22 @@ public record Outcome(
   /** Subcells whose currents differ by less than this are called balanced, in mA cm⁻². */
   public static final double BALANCED_MA_PER_CM2 = 0.05;
 
+  /** This outcome with its electrical side and the currents after collection. */
+  public Outcome withElectrical(List<SubcellOutcome> collected, Electrical device) {
+    return new Outcome(
+        incidentMaPerCm2,
+        collected,
+        matchedCurrentMaPerCm2,
+        mismatchMaPerCm2,
+        limitingSubcell,
+        losses,
+        design,
+        stack,
+        spectral,
+        quantities,
+        device);
+  }
+
   /**
    * A subcell.
    *
@@ -53,7 +69,19 @@ public record Outcome(
       @Nullable Double bandgapEv,
       @Nullable Double photocurrentMaPerCm2,
       @Nullable Double standardErrorMaPerCm2,
-      @Nullable Double collectedMaPerCm2) {}
+      @Nullable Double collectedMaPerCm2) {
+
+    /** This subcell when so much of its absorbed light is collected. */
+    public SubcellOutcome collected(double fraction) {
+      return new SubcellOutcome(
+          name,
+          absorbers,
+          bandgapEv,
+          photocurrentMaPerCm2,
+          standardErrorMaPerCm2,
+          photocurrentMaPerCm2 == null ? null : fraction * photocurrentMaPerCm2);
+    }
+  }
 
   /**
    * Light that no subcell absorbs. Reflected + transmitted + parasitic + subcells = incident.

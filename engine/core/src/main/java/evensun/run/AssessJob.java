@@ -46,8 +46,10 @@ public final class AssessJob {
     ProvenanceBuilder provenance = new ProvenanceBuilder(preparation);
     Model model = preparation.model();
     try (Bench bench = model.newBench()) {
-      Outcome outcome = Outcomes.of(bench, List.of());
+      Electrics.Powered powered = Electrics.power(Outcomes.of(bench, List.of()), bench);
+      Outcome outcome = powered.outcome();
       Findings findings = new Findings();
+      findings.addAll(powered.findings());
       findings.about(preparation.stack(), model, bench.design());
       findings.about(outcome);
       return new RunResult(

@@ -55,7 +55,7 @@ public final class DesignJob {
                     new InputException(
                         Place.of(stack.scenario().source().name()),
                         "the scenario has no search: section; add one with vary:, or use evensun assess for the stack as drawn"));
-    this.aim = Aims.of(spec, stack);
+    this.aim = Aims.of(spec, preparation.model());
     this.varied = Varied.of(spec, stack);
     this.objective =
         new StackObjective(preparation.model(), varied.parameters(), varied.variables(), aim);
@@ -121,11 +121,13 @@ public final class DesignJob {
         Neighbourhood around = around(best)) {
       Outcome asDrawn = asDrawn(bench, findings);
       set(bench, best);
-      Outcome found = Outcomes.of(bench, varied.parameters());
+      Electrics.Powered powered = Electrics.power(Outcomes.of(bench, varied.parameters()), bench);
+      Outcome found = powered.outcome();
       SearchRecord record =
           new SearchRecords(varied, aim)
               .record(outcome, best, asDrawn == null ? null : aimOf(asDrawn));
       findings.about(preparation.stack(), model, bench.design());
+      findings.addAll(powered.findings());
       findings.about(found);
       findings.about(record);
       gapNotDecided(findings);
@@ -151,7 +153,12 @@ public final class DesignJob {
 
   private Neighbourhood around(Candidate best) {
     return new Neighbourhood(
-        preparation.model(), varied.parameters(), varied.variables(), best.toArray(), aim);
+        preparation.model(),
+        varied.parameters(),
+        varied.variables(),
+        best.toArray(),
+        aim,
+        Aims.efficiency(preparation.model()).orElse(null));
   }
 
   private void set(Bench bench, Candidate best) {
@@ -163,7 +170,7 @@ public final class DesignJob {
   /** The stack as drawn; when it cannot be evaluated the search's result still counts. */
   private @Nullable Outcome asDrawn(Bench bench, Findings findings) {
     try {
-      return Outcomes.of(bench, varied.parameters());
+      return Electrics.power(Outcomes.of(bench, varied.parameters()), bench).outcome();
     } catch (EvaluationFailed e) {
       findings.add(
           new Finding(

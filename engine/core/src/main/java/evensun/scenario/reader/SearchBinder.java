@@ -22,7 +22,7 @@ import java.util.stream.Collectors;
 final class SearchBinder {
 
   /** Aims by the name they are written with. */
-  static final List<String> AIMS = List.of("matched-current", "current-sum");
+  static final List<String> AIMS = List.of("matched-current", "current-sum", "efficiency");
 
   private SearchBinder() {}
 
@@ -32,15 +32,22 @@ final class SearchBinder {
       return Optional.empty();
     }
     Fields fields = search.get();
+    List<VarySpec> vary = vary(fields, stack);
     SearchSpec spec =
         new SearchSpec(
-            vary(fields, stack),
-            fields.choice("aim", aims()).orElse(AIMS.get(0)),
+            vary,
+            fields.choice("aim", aims()).orElse(usualAim(vary)),
             fields.whole("seed", 0, Long.MAX_VALUE).orElse(1),
             fields.count("evaluations", 1),
             fields.place());
     fields.finish();
     return Optional.of(spec);
+  }
+
+  /** Matched current cannot decide a bandgap, efficiency can. */
+  private static String usualAim(List<VarySpec> vary) {
+    boolean gap = vary.stream().anyMatch(v -> v.key().endsWith(".bandgapEv"));
+    return gap ? "efficiency" : AIMS.get(0);
   }
 
   private static List<VarySpec> vary(Fields search, StackBinder.Stack stack) {
