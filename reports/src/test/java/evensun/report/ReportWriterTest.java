@@ -2,20 +2,95 @@ package evensun.report;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
-import java.io.IOException;
-import java.nio.file.Files;
-import java.nio.file.Path;
+import evensun.report.compare.NamedRun;
+import evensun.result.ResultJson;
+import evensun.result.RunResult;
+import java.nio.charset.StandardCharsets;
+import java.security.MessageDigest;
+import java.util.ArrayList;
+import java.util.Base64;
+import java.util.List;
+import java.util.regex.Matcher;
+import java.util.regex.Pattern;
 import org.junit.jupiter.api.Test;
 
+/** The written page. Outside witness: the text itself, and hashes computed here anew. */
 class ReportWriterTest {
 
+  private static final int MOST_BYTES = 3_000_000;
+
   @Test
-  void writesOnePage() throws IOException {
+  void aStoredResultGivesThePageOfTheLivingOne() {
+    RunResult run = SampleRuns.full();
+    RunResult stored = ResultJson.parse(ResultJson.write(run), "stored");
+    assertThat(ReportWriter.write(stored)).isEqualTo(ReportWriter.write(run));
+  }
+
+  @Test
+  void everyPageStaysUnderThreeMegabytes() {
+    for (RunResult run :
+        List.of(SampleRuns.full(), AwkwardRuns.sixtyLayers(), AwkwardRuns.hostile())) {
+      assertThat(ReportWriter.write(run).getBytes(StandardCharsets.UTF_8))
+          .hasSizeLessThan(MOST_BYTES);
+    }
+  }
+
+  @Test
+  void thePolicyNamesTheHashOfEveryScriptAndStyleAndNothingElse() throws Exception {
     String html = ReportWriter.write(SampleRuns.full());
-    assertThat(html).startsWith("<!DOCTYPE html>");
-    Files.createDirectories(Path.of("target/pages"));
-    Files.writeString(Path.of("target/pages/full.html"), html);
-    Files.writeString(
-        Path.of("target/pages/assess.html"), ReportWriter.write(SampleRuns.assessment()));
+    String policy =
+        first(html, "Content-Security-Policy\" content=\"([^\"]*)\"").replace("&#39;", "'");
+    assertThat(policy).startsWith("default-src 'none'; ").contains("base-uri 'none'");
+    List<String> inside = new ArrayList<>();
+    collect(html, "(?s)<script>(.*?)</script>", inside);
+    collect(html, "(?s)<style>(.*?)</style>", inside);
+    assertThat(inside).hasSize(3);
+    for (String text : inside) {
+      byte[] hash =
+          MessageDigest.getInstance("SHA-256").digest(text.getBytes(StandardCharsets.UTF_8));
+      assertThat(policy).contains("'sha256-" + Base64.getEncoder().encodeToString(hash) + "'");
+    }
+    assertThat(policy.split("sha256-", -1)).hasSize(4);
+  }
+
+  @Test
+  void noTextOfAScenarioBecomesMarkup() {
+    String html = ReportWriter.write(AwkwardRuns.hostile());
+    String quiet = ReportWriter.write(SampleRuns.full());
+    // The page's own script and style elements and no more; the hostile image nowhere.
+    assertThat(count(html, "<script>")).isEqualTo(count(quiet, "<script>")).isEqualTo(2);
+    String withoutOwnScripts = html.replaceAll("(?s)<script>.*?</script>", "");
+    assertThat(withoutOwnScripts).doesNotContain("<img").doesNotContain("<script>");
+    assertThat(html).contains("&lt;/script&gt;").contains("\\u003c/script>");
+  }
+
+  @Test
+  void aComparisonNamesWhatDiffers() {
+    List<NamedRun> runs =
+        List.of(
+            new NamedRun("first", SampleRuns.assessment()),
+            new NamedRun("second", SampleRuns.full()));
+    assertThat(CompareWriter.write(runs)).contains("not fully comparable", "table-stack");
+    assertThat(CompareWriter.text(runs, ""))
+        .contains("B passes")
+        .contains("some are as drawn, others searched")
+        .containsPattern("front-contact +indium-tin-oxide 80 nm +indium-tin-oxide 40 nm");
+  }
+
+  private static int count(String text, String part) {
+    return text.split(Pattern.quote(part), -1).length - 1;
+  }
+
+  private static String first(String text, String pattern) {
+    Matcher matcher = Pattern.compile(pattern).matcher(text);
+    assertThat(matcher.find()).isTrue();
+    return matcher.group(1);
+  }
+
+  private static void collect(String text, String pattern, List<String> into) {
+    Matcher matcher = Pattern.compile(pattern).matcher(text);
+    while (matcher.find()) {
+      into.add(matcher.group(1));
+    }
   }
 }

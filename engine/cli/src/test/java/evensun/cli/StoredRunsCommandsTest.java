@@ -87,7 +87,7 @@ class StoredRunsCommandsTest {
   void compareWritesItsPageOnlyWhereNothingIsLost() throws IOException {
     String page = folder.resolve("both.html").toString();
     assertThat(run("compare", at("old"), at("new"), "--out", page)).isZero();
-    assertThat(Files.readString(Path.of(page))).contains("Not fully comparable");
+    assertThat(Files.readString(Path.of(page))).contains("not fully comparable");
     assertThat(run("compare", at("old"), at("new"), "--out", page)).isEqualTo(2);
     assertThat(err.toString(StandardCharsets.UTF_8)).contains("exists", "--force").hasLineCount(1);
     assertThat(run("compare", at("old"), at("new"), "--out", page, "--force")).isZero();

@@ -52,10 +52,8 @@ public final class ComparisonPages {
   }
 
   private static Decision decision(Comparison comparison) {
-    List<String> warnings =
-        comparison.warnings().stream().map(w -> "Not fully comparable: " + w + ".").toList();
     return new Decision(
-        comparison.sentence(), List.of(), null, List.of(), null, "", List.of(), warnings);
+        comparison.sentence(), List.of(), null, List.of(), null, "", List.of(), List.of());
   }
 
   private static Section which(Comparison comparison) {
@@ -73,11 +71,19 @@ public final class ComparisonPages {
           Clip.to(run.result().title(), 120),
           run.result().provenance().startedUtc());
     }
-    return new Section(
-        "runs",
-        "Runs",
-        "What is compared: " + Numbers.count(comparison.runs().size(), "run"),
-        List.of(new Block.Grid(table.build(), false)));
+    List<Block.Point> warnings =
+        comparison.warnings().stream()
+            .map(warning -> new Block.Point("warning", "comparison", warning, ""))
+            .toList();
+    List<Block> blocks = new ArrayList<>();
+    if (!warnings.isEmpty()) {
+      blocks.add(new Block.Points(warnings));
+    }
+    blocks.add(new Block.Grid(table.build(), false));
+    String what = Numbers.count(comparison.runs().size(), "run");
+    String heading =
+        warnings.isEmpty() ? what + ", computed alike" : what + " that are not fully comparable";
+    return new Section("runs", "Runs", heading, blocks);
   }
 
   private static Section section(

@@ -13,6 +13,7 @@ public final class Numbers {
   private static final String NBSP = "\u00a0";
   private static final char MINUS = '\u2212';
   private static final double MICROMETRE_FROM_NM = 10_000;
+  private static final double MILLIMETRE_FROM_NM = 1_000_000;
 
   private Numbers() {}
 
@@ -82,8 +83,11 @@ public final class Numbers {
     return withUnit(signed(maPerCm2, 2), MA);
   }
 
-  /** A thickness with its unit, in µm from 10 µm. */
+  /** A thickness with its unit, in µm from 10 µm, in mm from 1 mm. */
   public static String thickness(double nm) {
+    if (nm >= MILLIMETRE_FROM_NM) {
+      return trimmed(nm / 1e6, 2) + NBSP + "mm";
+    }
     return nm >= MICROMETRE_FROM_NM
         ? trimmed(nm / 1000, 2) + NBSP + "µm"
         : trimmed(nm, 1) + NBSP + "nm";

@@ -1,0 +1,54 @@
+package evensun.report.text;
+
+import static org.assertj.core.api.Assertions.assertThat;
+
+import java.util.Locale;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
+
+/** Spelling of numbers; each expectation was worked out by hand. */
+class NumbersTest {
+
+  @ParameterizedTest
+  @CsvSource({"19.305, 2, 19.31", "-0.004, 2, 0.00", "-1.5, 1, −1.5", "2.5, 0, 3", "NaN, 2, –"})
+  void fixedRoundsHalfUpAndKnowsNoNegativeZero(double value, int decimals, String text) {
+    assertThat(Numbers.fixed(value, decimals)).isEqualTo(text);
+  }
+
+  @ParameterizedTest
+  @CsvSource({"0.012, +0.01", "-0.012, −0.01", "0.001, 0.00", "-0.001, 0.00", "0, 0.00"})
+  void aSignStandsOnlyBeforeWhatIsNotZero(double value, String text) {
+    assertThat(Numbers.signed(value, 2)).isEqualTo(text);
+  }
+
+  @ParameterizedTest
+  @CsvSource({
+    "0, 4, 0",
+    "12345, 3, 12300",
+    "0.000012345, 3, 1.23 × 10⁻⁵",
+    "4.2e21, 3, 4.2 × 10²¹",
+    "-3e-7, 2, −3 × 10⁻⁷",
+    "0.12349, 3, 0.123"
+  })
+  void significantDigits(double value, int digits, String text) {
+    assertThat(Numbers.significant(value, digits)).isEqualTo(text);
+  }
+
+  @ParameterizedTest
+  @CsvSource({"431.24, 431.2 nm", "180000, 180 µm", "3000000, 3 mm", "40, 40 nm"})
+  void thicknessesAreSaidAsPeopleSayThem(double nm, String text) {
+    assertThat(Numbers.thickness(nm).replace('\u00a0', ' ')).isEqualTo(text);
+  }
+
+  @Test
+  void theLocaleChangesNothing() {
+    Locale before = Locale.getDefault();
+    try {
+      Locale.setDefault(Locale.GERMANY);
+      assertThat(Numbers.ma(1234.5)).isEqualTo("1234.50\u00a0mA\u00a0cm⁻²");
+    } finally {
+      Locale.setDefault(before);
+    }
+  }
+}
