@@ -101,7 +101,7 @@ final class MaterialPage {
             .formatted(colour, DASHES.get(index % DASHES.size()), points.toString().strip()));
     page.append(
         "<text x=\"%d\" y=\"%d\" text-anchor=\"end\" style=\"fill:%s\">%s</text>\n"
-            .formatted(WIDTH - 12, 18 + 16 * index, colour, escaped(curves.label())));
+            .formatted(WIDTH - 24, 18 + 16 * index, colour, escaped(curves.label())));
   }
 
   /** Axes of one chart. */
@@ -127,7 +127,7 @@ final class MaterialPage {
     }
 
     double x(double nm) {
-      return LEFT + (nm - fromNm) / (toNm - fromNm) * (WIDTH - LEFT - 12);
+      return LEFT + (nm - fromNm) / (toNm - fromNm) * (WIDTH - LEFT - 24);
     }
 
     double y(double value) {
@@ -147,7 +147,7 @@ final class MaterialPage {
                 Locale.ROOT,
                 "<line class=\"grid\" x1=\"%d\" x2=\"%d\" y1=\"%.1f\" y2=\"%.1f\"/><text x=\"%d\" y=\"%.1f\" text-anchor=\"end\">%s</text>%n",
                 LEFT,
-                WIDTH - 12,
+                WIDTH - 24,
                 y(value),
                 y(value),
                 LEFT - 6,
@@ -165,7 +165,7 @@ final class MaterialPage {
       }
       page.append(
           "<path class=\"axis\" d=\"M%d 8V%dH%d\"/><text x=\"%d\" y=\"%d\" text-anchor=\"middle\">wavelength (nm)</text>\n"
-              .formatted(LEFT, HEIGHT - BOTTOM, WIDTH - 12, (LEFT + WIDTH) / 2, HEIGHT - 6));
+              .formatted(LEFT, HEIGHT - BOTTOM, WIDTH - 24, (LEFT + WIDTH) / 2, HEIGHT - 6));
     }
   }
 

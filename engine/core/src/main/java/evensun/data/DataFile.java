@@ -86,7 +86,7 @@ public final class DataFile {
       int from = 0;
       for (int c = 0; c < count; c++) {
         int to = c + 1 < count ? line.indexOf(',', from) : line.length();
-        columns[c][size] = Double.parseDouble(line.substring(from, to));
+        columns[c][size] = Decimals.parse(line, from, to);
         from = to + 1;
       }
       size++;

@@ -36,30 +36,39 @@ record EdgeShape(
         file.column(3));
   }
 
-  /** ε₂ at an energy in eV, never below 0. */
-  double imaginaryAt(double ev) {
-    return Math.max(0, at(imaginary, ev));
-  }
-
-  /** r at an energy in eV. */
-  double resonantAt(double ev) {
-    return at(resonant, ev);
-  }
-
-  /** a at an energy in eV. */
-  double antiresonantAt(double ev) {
-    return at(antiresonant, ev);
-  }
-
-  /** Cubic through four mesh points, continuous with its slope (Catmull and Rom). */
-  private double at(double[] values, double ev) {
-    double position = (ev - fromEv) / stepEv;
-    int i = Math.min(Math.max((int) position, 1), values.length - 3);
-    double t = position - i;
-    double a = values[i - 1];
-    double b = values[i];
-    double c = values[i + 1];
-    double d = values[i + 2];
-    return b + 0.5 * t * (c - a + t * (2 * a - 5 * b + 4 * c - d + t * (3 * (b - c) + d - a)));
+  /**
+   * Adds a share of the permittivity of this shape moved by δ; allocates nothing.
+   *
+   * @param shiftEv δ in eV
+   * @param share factor
+   * @param energyEv [w] photon energies in eV
+   * @param real [w] added to
+   * @param loss [w] added to, ε₂ at least 0
+   */
+  void add(double shiftEv, double share, double[] energyEv, double[] real, double[] loss) {
+    double perStep = 1 / stepEv;
+    int last = imaginary.length - 3;
+    for (int w = 0; w < energyEv.length; w++) {
+      double position = (energyEv[w] - shiftEv - fromEv) * perStep;
+      int i = Math.min(Math.max((int) position, 1), last);
+      double t = position - i;
+      double square = t * t;
+      double cube = square * t;
+      // Cubic through four mesh points, continuous with its slope (Catmull and Rom).
+      double a = square - 0.5 * (cube + t);
+      double b = 1.5 * cube - 2.5 * square + 1;
+      double c = 2 * square - 1.5 * cube + 0.5 * t;
+      double d = 0.5 * (cube - square);
+      double lost =
+          a * imaginary[i - 1] + b * imaginary[i] + c * imaginary[i + 1] + d * imaginary[i + 2];
+      double near =
+          a * resonant[i - 1] + b * resonant[i] + c * resonant[i + 1] + d * resonant[i + 2];
+      // The antiresonant part has no edge: straight lines between mesh points miss it by 1e-6.
+      double mirrored = (energyEv[w] + shiftEv - fromEv) * perStep;
+      int j = Math.min(Math.max((int) mirrored, 0), last);
+      double far = antiresonant[j] + (mirrored - j) * (antiresonant[j + 1] - antiresonant[j]);
+      real[w] += share * (near + far);
+      loss[w] += share * Math.max(0, lost);
+    }
   }
 }

@@ -40,7 +40,9 @@ final class LibraryFile {
     List<String> notes = new ArrayList<>();
     for (String key : List.of("cleaned", "extended", "bandgap-note", "note")) {
       String lead = key.equals("cleaned") || key.equals("extended") ? key + " " : "";
-      file.values(key).forEach(value -> notes.add(lead + value));
+      for (String value : file.values(key)) {
+        notes.add(lead.concat(value));
+      }
     }
     file.value("largest-interpolation-error")
         .ifPresent(value -> notes.add("largest interpolation error: " + value));
@@ -82,7 +84,8 @@ final class LibraryFile {
         record,
         tuning(file),
         curves,
-        file.values("marked-ev").stream().map(LibraryFile::marked).toList());
+        file.values("marked-ev").stream().map(LibraryFile::marked).toList(),
+        file.value("miss-ev").map(LibraryFile::numbers).orElse(new double[0]));
   }
 
   private static Material ideal(DataFile file, MaterialRecord record) {

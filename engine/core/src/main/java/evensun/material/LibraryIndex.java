@@ -21,11 +21,13 @@ final class LibraryIndex {
       if (stream == null) {
         throw new IllegalStateException("the list of materials is missing from the program");
       }
-      new BufferedReader(new InputStreamReader(stream, StandardCharsets.UTF_8))
-          .lines()
-          .skip(2)
-          .map(line -> line.split(","))
-          .forEach(parts -> fileOf.put(parts[0], parts[1]));
+      BufferedReader in = new BufferedReader(new InputStreamReader(stream, StandardCharsets.UTF_8));
+      in.readLine();
+      in.readLine();
+      for (String line = in.readLine(); line != null; line = in.readLine()) {
+        int comma = line.indexOf(',');
+        fileOf.put(line.substring(0, comma), line.substring(comma + 1));
+      }
     } catch (IOException e) {
       throw new UncheckedIOException(e);
     }

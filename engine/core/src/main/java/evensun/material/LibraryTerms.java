@@ -4,7 +4,9 @@ import evensun.data.DataFile;
 import evensun.material.dispersion.Dispersion;
 import evensun.material.dispersion.Term;
 import evensun.material.dispersion.TermKind;
+import java.util.ArrayList;
 import java.util.HashMap;
+import java.util.List;
 import java.util.Map;
 
 /** Dispersion terms as the data files write them: {@code model=lorentz peakEv=3.5 ...}. */
@@ -12,22 +14,26 @@ final class LibraryTerms {
 
   private LibraryTerms() {}
 
+  // Plain loops here and in the index: a scenario waits for them, and lambdas are slow to start.
   static Dispersion dispersion(DataFile file) {
-    return new Dispersion(
-        Double.parseDouble(file.value("epsilon-infinity").orElse("1")),
-        file.values("term").stream().map(LibraryTerms::term).toList());
+    List<Term> terms = new ArrayList<>();
+    for (String text : file.values("term")) {
+      terms.add(term(text));
+    }
+    return new Dispersion(Double.parseDouble(file.value("epsilon-infinity").orElse("1")), terms);
   }
 
   private static Term term(String text) {
     Map<String, String> values = new HashMap<>();
     for (String pair : text.split(" ")) {
-      String[] parts = pair.split("=", 2);
-      values.put(parts[0], parts[1]);
+      int sign = pair.indexOf('=');
+      values.put(pair.substring(0, sign), pair.substring(sign + 1));
     }
     TermKind kind = TermKind.named(values.get("model")).orElseThrow();
-    return kind.of(
-        kind.parameters().stream()
-            .mapToDouble(key -> Double.parseDouble(values.get(key)))
-            .toArray());
+    double[] parameters = new double[kind.parameters().size()];
+    for (int i = 0; i < parameters.length; i++) {
+      parameters[i] = Double.parseDouble(values.get(kind.parameters().get(i)));
+    }
+    return kind.of(parameters);
   }
 }

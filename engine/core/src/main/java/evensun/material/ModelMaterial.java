@@ -19,12 +19,10 @@ public final class ModelMaterial implements Material {
 
   private final MaterialRecord record;
   private final Dispersion dispersion;
-  private final OptionalDouble bandgapEv;
 
   private ModelMaterial(MaterialRecord record, Dispersion dispersion) {
     this.record = record;
     this.dispersion = dispersion;
-    this.bandgapEv = Bandgap.of(this::alphaPerCm, LOWEST_EV, HIGHEST_EV);
   }
 
   /** A material of a formula; its record says over which wavelengths the formula holds. */
@@ -55,7 +53,7 @@ public final class ModelMaterial implements Material {
 
   @Override
   public OptionalDouble bandgapEv() {
-    return bandgapEv;
+    return Bandgap.of(this::alphaPerCm, LOWEST_EV, HIGHEST_EV);
   }
 
   @Override

@@ -1,5 +1,6 @@
 package evensun.material;
 
+import java.util.Arrays;
 import java.util.List;
 
 /**
@@ -24,26 +25,17 @@ final class MovedEdge implements GapCurves {
     EdgeShape a = anchors.get(lower);
     EdgeShape b = anchors.get(Math.min(lower + 1, anchors.size() - 1));
     double share = share(a, b, gapEv);
-    for (int w = 0; w < energyEv.length; w++) {
-      double real = real(a, gapEv, energyEv[w]);
-      double imaginary = imaginary(a, gapEv, energyEv[w]);
-      if (share > 0) {
-        real += share * (real(b, gapEv, energyEv[w]) - real);
-        imaginary += share * (imaginary(b, gapEv, energyEv[w]) - imaginary);
-      }
-      double modulus = Math.sqrt(real * real + imaginary * imaginary);
-      n[w] = Math.sqrt(0.5 * (modulus + real));
-      k[w] = 0.5 * imaginary / n[w];
+    Arrays.fill(n, 0);
+    Arrays.fill(k, 0);
+    a.add(gapEv - a.bandgapEv(), 1 - share, energyEv, n, k);
+    if (share > 0) {
+      b.add(gapEv - b.bandgapEv(), share, energyEv, n, k);
     }
-  }
-
-  private static double real(EdgeShape shape, double gapEv, double ev) {
-    double shift = gapEv - shape.bandgapEv();
-    return shape.resonantAt(ev - shift) + shape.antiresonantAt(ev + shift);
-  }
-
-  private static double imaginary(EdgeShape shape, double gapEv, double ev) {
-    return shape.imaginaryAt(ev - (gapEv - shape.bandgapEv()));
+    for (int w = 0; w < energyEv.length; w++) {
+      double modulus = Math.sqrt(n[w] * n[w] + k[w] * k[w]);
+      n[w] = Math.sqrt(0.5 * (modulus + n[w]));
+      k[w] = 0.5 * k[w] / n[w];
+    }
   }
 
   private int lower(double gapEv) {

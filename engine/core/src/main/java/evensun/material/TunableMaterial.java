@@ -25,13 +25,23 @@ final class TunableMaterial implements Material {
   /** A range of the gap in which the numbers deserve a word. */
   record MarkedRange(double lowEv, double highEv, String what) {}
 
+  /**
+   * A tunable absorber.
+   *
+   * @param missEv by how much the curves miss the gap, from the lowest gap up in steps of 0.02 eV;
+   *     found here when it is empty, which takes a while
+   */
   TunableMaterial(
-      MaterialRecord record, Tuning tuning, GapCurves curves, List<MarkedRange> marked) {
+      MaterialRecord record,
+      Tuning tuning,
+      GapCurves curves,
+      List<MarkedRange> marked,
+      double[] missEv) {
     this.record = record;
     this.tuning = tuning;
     this.curves = curves;
     this.marked = List.copyOf(marked);
-    this.missEv = missEv();
+    this.missEv = missEv.length == meshSize() ? missEv.clone() : missEv();
   }
 
   @Override
@@ -88,8 +98,13 @@ final class TunableMaterial implements Material {
     }
   }
 
-  private double[] missEv() {
-    double[] miss = new double[(int) Math.ceil((tuning.highEv() - tuning.lowEv()) / MESH_EV) + 1];
+  private int meshSize() {
+    return (int) Math.ceil((tuning.highEv() - tuning.lowEv()) / MESH_EV) + 1;
+  }
+
+  /** By how much the curves miss the gap on the mesh; a fresh array. */
+  double[] missEv() {
+    double[] miss = new double[meshSize()];
     double[] energyEv = new double[1];
     double[] n = new double[1];
     double[] k = new double[1];
