@@ -108,7 +108,7 @@ final class SubcellBinder {
 
   private boolean exists(Fields fields, Node item, String absorber) {
     String layer = layerOf(absorber);
-    if (stack.excuses(layer) || stack.position(layer) >= 0 && layer.equals(absorber)) {
+    if (stack.excuses(layer) || (stack.position(layer) >= 0 && layer.equals(absorber))) {
       return true;
     }
     if (stack.position(layer) < 0) {
