@@ -20,6 +20,7 @@ import org.jspecify.annotations.Nullable;
  * @param sensitivities what a small change of each varied quantity does, largest first
  * @param whatIf the aim against each varied quantity
  * @param secondOpinion the found design evaluated in other ways
+ * @param measured measured curves beside the model of the stack as drawn, if there are any
  * @param findings what a reader should know, most severe first
  * @param cautions hazards and limits that apply to this stack
  * @param provenance how the result came about and how to repeat it
@@ -38,10 +39,49 @@ public record RunResult(
     @Nullable List<Sensitivity> sensitivities,
     @Nullable List<WhatIf> whatIf,
     @Nullable List<Opinion> secondOpinion,
+    @Nullable List<Measured> measured,
     List<FindingRecord> findings,
     List<Caution> cautions,
     Provenance provenance) {
 
   /** The version of the format that this program writes. */
   public static final int FORMAT = 1;
+
+  /** A result without measured curves. */
+  public RunResult(
+      int formatVersion,
+      String kind,
+      String title,
+      Outcome found,
+      @Nullable Outcome asDrawn,
+      @Nullable SearchRecord search,
+      List<MaterialUse> materials,
+      SpectrumUse spectrum,
+      @Nullable List<DepthLayer> depth,
+      @Nullable Angular angular,
+      @Nullable List<Sensitivity> sensitivities,
+      @Nullable List<WhatIf> whatIf,
+      @Nullable List<Opinion> secondOpinion,
+      List<FindingRecord> findings,
+      List<Caution> cautions,
+      Provenance provenance) {
+    this(
+        formatVersion,
+        kind,
+        title,
+        found,
+        asDrawn,
+        search,
+        materials,
+        spectrum,
+        depth,
+        angular,
+        sensitivities,
+        whatIf,
+        secondOpinion,
+        null,
+        findings,
+        cautions,
+        provenance);
+  }
 }

@@ -7,6 +7,7 @@ import evensun.evaluation.Model;
 import evensun.evaluation.Outcomes;
 import evensun.result.Angular;
 import evensun.result.DepthLayer;
+import evensun.result.Measured;
 import evensun.result.Outcome;
 import evensun.result.RunResult;
 import java.util.List;
@@ -52,6 +53,7 @@ public final class AssessJob {
       findings.addAll(powered.findings());
       findings.about(preparation.stack(), model, bench.design());
       findings.about(outcome);
+      List<Measured> measured = preparation.measurements().against(outcome, findings);
       return new RunResult(
           RunResult.FORMAT,
           "assess",
@@ -66,6 +68,7 @@ public final class AssessJob {
           null,
           null,
           null,
+          measured,
           findings.records(),
           Cautions.of(preparation.stack()),
           provenance.build(null, repeatCommand, Map.of()));

@@ -6,6 +6,7 @@ import evensun.evaluation.Model;
 import evensun.evaluation.Neighbourhood;
 import evensun.evaluation.Outcomes;
 import evensun.evaluation.StackObjective;
+import evensun.result.Measured;
 import evensun.result.Outcome;
 import evensun.result.RunResult;
 import evensun.result.SearchRecord;
@@ -23,6 +24,7 @@ import evensun.spi.Finding;
 import evensun.spi.Severity;
 import evensun.stack.ResolvedStack;
 import java.util.LinkedHashMap;
+import java.util.List;
 import java.util.Map;
 import java.util.concurrent.CancellationException;
 import java.util.function.BooleanSupplier;
@@ -131,6 +133,8 @@ public final class DesignJob {
       findings.about(found);
       findings.about(record);
       gapNotDecided(findings);
+      List<Measured> measured =
+          asDrawn == null ? null : preparation.measurements().against(asDrawn, findings);
       return new RunResult(
           RunResult.FORMAT,
           "design",
@@ -145,6 +149,7 @@ public final class DesignJob {
           around.sensitivities(),
           around.curves(),
           new SecondOpinions(preparation, varied, aim, best).opinions(),
+          measured,
           findings.records(),
           Cautions.of(preparation.stack()),
           provenance.build(spec.seed(), repeatCommand, settingsOf(settings)));

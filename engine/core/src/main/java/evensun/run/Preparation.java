@@ -19,6 +19,7 @@ public final class Preparation implements AutoCloseable {
   private static final long DEFAULT_SEED = 1;
 
   private final InputFiles files;
+  private final Measurements measurements;
   private final ResolvedStack stack;
   private final SolverChoice choice;
   private final PluginHost host;
@@ -26,8 +27,13 @@ public final class Preparation implements AutoCloseable {
   private final Model model;
 
   private Preparation(
-      InputFiles files, ResolvedStack stack, PluginHost host, BooleanSupplier cancelled) {
+      InputFiles files,
+      Measurements measurements,
+      ResolvedStack stack,
+      PluginHost host,
+      BooleanSupplier cancelled) {
     this.files = files;
+    this.measurements = measurements;
     this.stack = stack;
     this.host = host;
     this.services = host.services(cancelled);
@@ -49,8 +55,9 @@ public final class Preparation implements AutoCloseable {
     InputFiles files = new InputFiles(scenario.source().folder());
     Spectrum spectrum = ScenarioLight.spectrum(scenario, files);
     ScenarioMaterials materials = new ScenarioMaterials(scenario, files, spectrum);
+    Measurements measurements = Measurements.read(scenario, files);
     return new Preparation(
-        files, StackResolver.resolve(scenario, materials, spectrum), host, cancelled);
+        files, measurements, StackResolver.resolve(scenario, materials, spectrum), host, cancelled);
   }
 
   /** Seed of the search, and of whatever a solver draws at random. */
@@ -71,6 +78,10 @@ public final class Preparation implements AutoCloseable {
   /** The same stack for other directions of the light; the caller closes it. */
   Model modelFor(List<Incidence> incidences) {
     return Model.of(stack, choice.solver(), choice.options(), seed(), services, incidences);
+  }
+
+  Measurements measurements() {
+    return measurements;
   }
 
   SolverChoice choice() {

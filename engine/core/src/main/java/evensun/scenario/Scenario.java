@@ -22,6 +22,7 @@ import java.util.Optional;
  * @param device the electrical side of the whole device
  * @param solver the solver asked for, or empty for the one the stack needs
  * @param search what to search, or empty
+ * @param measured measured curves of a device built as drawn
  */
 public record Scenario(
     Source source,
@@ -36,12 +37,14 @@ public record Scenario(
     Connection connection,
     DeviceSpec device,
     Optional<SolverSpec> solver,
-    Optional<SearchSpec> search) {
+    Optional<SearchSpec> search,
+    List<MeasuredSpec> measured) {
 
   public Scenario {
     materials = Collections.unmodifiableMap(new LinkedHashMap<>(materials));
     stack = List.copyOf(stack);
     subcells = List.copyOf(subcells);
+    measured = List.copyOf(measured);
   }
 
   /** This scenario on another grid. */
@@ -59,7 +62,8 @@ public record Scenario(
         connection,
         device,
         solver,
-        search);
+        search,
+        measured);
   }
 
   /** This scenario with another solver. */
@@ -77,7 +81,8 @@ public record Scenario(
         connection,
         device,
         Optional.of(other),
-        search);
+        search,
+        measured);
   }
 
   /** This scenario with one material replaced by another wherever it stands. */
@@ -97,6 +102,7 @@ public record Scenario(
         connection,
         device,
         solver,
-        search);
+        search,
+        measured);
   }
 }

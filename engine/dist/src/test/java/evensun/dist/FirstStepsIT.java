@@ -1,6 +1,7 @@
 package evensun.dist;
 
 import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.within;
 
 import java.io.IOException;
 import java.nio.file.Files;
@@ -92,6 +93,41 @@ class FirstStepsIT {
             "json");
     assertThat(json(run).get("findings").findValuesAsString("code"))
         .contains("thickness-in-micrometres");
+  }
+
+  /** The program's own prediction, written down as an instrument would, must be found again. */
+  @Test
+  void measuredCurvesAreLaidOverThePrediction() throws IOException {
+    String demo = Program.scenario("perovskite-on-silicon.yaml").toString();
+    JsonNode predicted = json(run("assess", demo, "--format", "json"));
+    JsonNode spectral = predicted.get("spectral");
+    StringBuilder reflectance = new StringBuilder("energy_eV;reflectance_%\n");
+    StringBuilder efficiency = new StringBuilder();
+    for (int w = 0; w < spectral.get("wavelengthNm").size(); w++) {
+      double nm = spectral.get("wavelengthNm").get(w).asDouble();
+      reflectance.append(1239.841984 / nm).append(';');
+      reflectance.append(100 * spectral.get("reflectance").get(w).asDouble()).append('\n');
+      efficiency.append(nm).append(',');
+      efficiency.append(spectral.get("absorptance").get("perovskite").get(w).asDouble());
+      efficiency.append('\n');
+    }
+    Files.writeString(folder.resolve("r.csv"), reflectance);
+    Files.writeString(folder.resolve("eqe.csv"), efficiency);
+    String scenario = Files.readString(Path.of(demo));
+    Files.writeString(
+        folder.resolve("tandem.yaml"),
+        scenario + "measured: {reflectance: r.csv, subcells: {top: eqe.csv}}\n");
+
+    JsonNode measured = json(run("assess", "tandem.yaml", "--format", "json")).get("measured");
+
+    assertThat(measured.get(0).get("readAs").asString())
+        .isEqualTo("percent against photon energy in eV");
+    assertThat(measured.get(1).get("readAs").asString())
+        .isEqualTo("fraction against wavelength in nm");
+    assertThat(measured.get(0).get("rmsDifference").asDouble()).isLessThan(1e-3);
+    assertThat(measured.get(1).get("rmsDifference").asDouble()).isLessThan(1e-12);
+    double current = predicted.get("subcells").get(0).get("photocurrentMaPerCm2").asDouble();
+    assertThat(measured.get(1).get("measuredMaPerCm2").asDouble()).isCloseTo(current, within(1e-9));
   }
 
   @Test

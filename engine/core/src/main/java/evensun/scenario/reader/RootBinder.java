@@ -30,7 +30,8 @@ final class RootBinder {
           "connection",
           "device",
           "solver",
-          "search");
+          "search",
+          "measured");
 
   private static final int LONGEST_TITLE = 200;
 
@@ -55,7 +56,8 @@ final class RootBinder {
             connection(root, subcells),
             DeviceBinder.bind(root),
             SolverBinder.bind(root),
-            SearchBinder.bind(root, stack));
+            SearchBinder.bind(root, stack),
+            MeasuredBinder.bind(root, subcells));
     root.finish();
     return scenario;
   }

@@ -117,7 +117,8 @@ public final class Fields {
 
   /** A whole number; empty when it is absent or after a fault. */
   public OptionalLong whole(String key, long low, long high) {
-    Interval in = Interval.closed(
+    Interval in =
+        Interval.closed(
             Math.max((double) low, -LARGEST_LONG), Math.min((double) high, LARGEST_LONG), "");
     OptionalDouble number = number(key, in);
     if (number.isEmpty() || Double.isNaN(number.getAsDouble())) {
