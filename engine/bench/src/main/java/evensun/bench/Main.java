@@ -2,9 +2,7 @@ package evensun.bench;
 
 import java.util.Collection;
 import java.util.Locale;
-import java.util.Map;
 import org.openjdk.jmh.profile.GCProfiler;
-import org.openjdk.jmh.results.Result;
 import org.openjdk.jmh.results.RunResult;
 import org.openjdk.jmh.runner.Runner;
 import org.openjdk.jmh.runner.RunnerException;
@@ -85,7 +83,6 @@ public final class Main {
     String[] parts = (size == null ? "12x181" : size).split("x", -1);
     double elements = Double.parseDouble(parts[0]) * Double.parseDouble(parts[1]);
     double median = result.getPrimaryResult().getStatistics().getPercentile(50);
-    Result<?> bytes = allocation(result);
     System.out.printf(
         Locale.ROOT,
         "%-46s %10.2f %10.2f %14.3f %12.3f%n",
@@ -93,14 +90,15 @@ public final class Main {
         median,
         result.getPrimaryResult().getStatistics().getMin(),
         1000 * median / elements,
-        bytes == null ? Double.NaN : bytes.getScore());
+        allocatedBytes(result));
   }
 
-  private static Result<?> allocation(RunResult result) {
-    return result.getSecondaryResults().entrySet().stream()
-        .filter(entry -> entry.getKey().endsWith("gc.alloc.rate.norm"))
-        .map(Map.Entry::getValue)
-        .findFirst()
-        .orElse(null);
+  private static double allocatedBytes(RunResult result) {
+    for (var entry : result.getSecondaryResults().entrySet()) {
+      if (entry.getKey().endsWith("gc.alloc.rate.norm")) {
+        return entry.getValue().getScore();
+      }
+    }
+    return Double.NaN;
   }
 }
