@@ -86,7 +86,7 @@ class ArchitectureTest {
   }
 
   @ParameterizedTest
-  @ValueSource(strings = {"transfermatrix", "effectivemedium", "raytrace", "externalprocess"})
+  @ValueSource(strings = {"transfermatrix", "effectivemedium", "externalprocess"})
   void aSolverSeesTheContractAndItself(String name) {
     String own = "evensun." + name + "..";
     classes()

@@ -1,2 +1,0 @@
-/** The ray-trace part of the plugins. */
-package evensun.raytrace;
