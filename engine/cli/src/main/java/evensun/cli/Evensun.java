@@ -20,6 +20,7 @@ import picocli.CommandLine.Mixin;
       CompareCommand.class,
       ReportCommand.class,
       RunsCommand.class,
+      GapsCommand.class,
       SchemaCommand.class,
       ExplainCommand.class,
     })

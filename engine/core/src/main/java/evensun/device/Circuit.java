@@ -7,7 +7,7 @@ package evensun.device;
 abstract sealed class Circuit permits SeriesCircuit, ParallelCircuit, IndependentCircuit {
 
   /** Precision of a root relative to itself; the power is flat there and far more precise. */
-  static final double PRECISION = 1e-11;
+  static final double PRECISION = 1e-9;
 
   /** [i] the subcells, the light meets the first one first. */
   final Diode[] diodes;
