@@ -17,6 +17,7 @@ import evensun.report.section.DepthSection;
 import evensun.report.section.ElectricalSection;
 import evensun.report.section.FindingsSection;
 import evensun.report.section.LightSection;
+import evensun.report.section.MeasuredSection;
 import evensun.report.section.OpinionSection;
 import evensun.report.section.ProvenanceSection;
 import evensun.report.section.SearchSection;
@@ -52,6 +53,7 @@ final class ReportPages {
           OpinionSection::of,
           DepthSection::of,
           AngleSection::of,
+          MeasuredSection::of,
           FindingsSection::of,
           AssumptionSection::of,
           ProvenanceSection::of,
