@@ -76,6 +76,19 @@ final class VaryKeys {
     if (quantity.equals("bandgapEv")) {
       return "cannot vary: write bandgapEv in the layer first, as the value to start from";
     }
-    return "names nothing that can vary" + Nearest.hint(key, known.keySet());
+    return "names nothing that can vary"
+        + sameQuantity(key, layer, known)
+            .map(meant -> "; did you mean " + meant + "?")
+            .orElse(Nearest.hint(key, known.keySet()));
+  }
+
+  /** A key of the same layer for the same quantity, written another way. */
+  private static Optional<String> sameQuantity(
+      String key, String layer, Map<String, Interval> known) {
+    String last = key.substring(key.lastIndexOf('.'));
+    return known.keySet().stream()
+        .filter(k -> k.startsWith(layer) && "./".indexOf(k.charAt(layer.length())) >= 0)
+        .filter(k -> k.endsWith(last))
+        .findFirst();
   }
 }
