@@ -42,6 +42,8 @@ class ArchitectureTest {
         "report",
         "testkit",
         "transfermatrix",
+        "effectivemedium",
+        "externalprocess",
         "transfermatrix.kernel"
       })
   void everyPackageThatARuleNamesHoldsClasses(String name) {
