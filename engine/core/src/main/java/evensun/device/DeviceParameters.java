@@ -56,4 +56,20 @@ public record DeviceParameters(
   public DeviceParameters withSeriesResistance(double ohmCm2) {
     return new DeviceParameters(connection, ohmCm2, temperatureK, saturation, suns);
   }
+
+  /** The same at another temperature in K. */
+  public DeviceParameters withTemperature(double kelvin) {
+    return new DeviceParameters(connection, seriesResistanceOhmCm2, kelvin, saturation, suns);
+  }
+
+  /** The same under concentrated light. */
+  public DeviceParameters withSuns(double factor) {
+    return new DeviceParameters(
+        connection, seriesResistanceOhmCm2, temperatureK, saturation, factor);
+  }
+
+  /** The same with saturation currents from elsewhere. */
+  public DeviceParameters withSaturation(Saturation other) {
+    return new DeviceParameters(connection, seriesResistanceOhmCm2, temperatureK, other, suns);
+  }
 }
