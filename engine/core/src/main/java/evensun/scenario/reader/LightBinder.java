@@ -48,7 +48,7 @@ final class LightBinder {
     if (fields.has("irradianceWPerM2") && fields.has("concentrationSuns")) {
       fields.fault(
           fields.place("concentrationSuns"),
-          "light: irradianceWPerM2 and concentrationSuns both scale the spectrum; keep one");
+          "irradianceWPerM2 and concentrationSuns both scale the spectrum; keep one");
     }
     fields.finish();
     return spec;
@@ -60,8 +60,7 @@ final class LightBinder {
           fields.requiredNumber("temperatureK", Interval.closed(100, 20000, "K")));
     }
     if (fields.has("temperatureK")) {
-      fields.fault(
-          fields.place("temperatureK"), "light: temperatureK belongs to spectrum: blackbody");
+      fields.fault(fields.place("temperatureK"), "temperatureK belongs to spectrum: blackbody");
       fields.know("temperatureK");
     }
     return OptionalDouble.empty();
@@ -93,7 +92,7 @@ final class LightBinder {
     }
     return light
         .node("spectrum")
-        .flatMap(n -> Values.choice("light: spectrum", n, known, light.faults()))
+        .flatMap(n -> Values.choice("spectrum", n, known, light.faults()))
         .orElse("");
   }
 

@@ -27,7 +27,7 @@ final class SkyBinder {
     if (!spectrum.equals(LightSpec.CLEAR_SKY)) {
       for (String key : KEYS) {
         if (light.has(key)) {
-          light.fault(light.place(key), "light: " + key + " belongs to spectrum: clear-sky");
+          light.fault(light.place(key), "" + key + " belongs to spectrum: clear-sky");
           light.know(key);
         }
       }
@@ -53,13 +53,13 @@ final class SkyBinder {
     if (airMass > 0 && airMass < 1) {
       light.fault(
           light.place("airMass"),
-          "light: airMass must be 0 (outside the atmosphere) or in [1, 38] but was " + airMass);
+          "airMass must be 0 (outside the atmosphere) or in [1, 38] but was " + airMass);
     }
     double zenith = number(light, "solarZenithDeg", 0, 89, "degrees", Double.NaN);
     if (both) {
       light.fault(
           light.place("solarZenithDeg"),
-          "light: airMass and solarZenithDeg say the same in two ways; keep one");
+          "airMass and solarZenithDeg say the same in two ways; keep one");
     }
     return light.has("solarZenithDeg") && !Double.isNaN(zenith)
         ? Math.max(1, SkyConditions.airMass(zenith))

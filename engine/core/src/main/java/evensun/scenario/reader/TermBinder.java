@@ -17,7 +17,7 @@ import java.util.Optional;
 /** Binds a material given by {@code terms} and {@code epsilonInfinity}. */
 final class TermBinder {
 
-  private static final Interval ANY = Interval.closed(-1e9, 1e9, "");
+  private static final Map<String, Interval> RANGES = ranges();
 
   private TermBinder() {}
 
@@ -60,7 +60,9 @@ final class TermBinder {
 
   private static Optional<Term> term(TermKind kind, Fields fields) {
     double[] values =
-        kind.parameters().stream().mapToDouble(key -> fields.requiredNumber(key, ANY)).toArray();
+        kind.parameters().stream()
+            .mapToDouble(key -> fields.requiredNumber(key, RANGES.get(key)))
+            .toArray();
     fields.finish();
     for (double value : values) {
       if (Double.isNaN(value)) {
@@ -73,6 +75,26 @@ final class TermBinder {
       fields.fault(fields.place(), e.getMessage());
       return Optional.empty();
     }
+  }
+
+  /** Widest range of each parameter over the models; a model may narrow it. */
+  private static Map<String, Interval> ranges() {
+    Map<String, Interval> ranges = new LinkedHashMap<>();
+    ranges.put("refractiveIndex", Interval.closed(0.01, 20, ""));
+    ranges.put("extinctionCoefficient", Interval.closed(0, 20, ""));
+    ranges.put("indexAtLongWavelength", Interval.closed(0.5, 10, ""));
+    ranges.put("dispersionUm2", Interval.closed(-10, 10, "µm²"));
+    ranges.put("dispersionUm4", Interval.closed(-10, 10, "µm⁴"));
+    ranges.put("strength", Interval.closed(0, 1000, ""));
+    ranges.put("resonanceNm", Interval.closed(0, 1e6, "nm"));
+    ranges.put("plasmaEnergyEv", Interval.closed(0, 50, "eV"));
+    ranges.put("dampingEv", Interval.closed(1e-4, 10, "eV"));
+    ranges.put("peakEv", Interval.closed(1e-3, 100, "eV"));
+    ranges.put("broadeningEv", Interval.closed(1e-4, 50, "eV"));
+    ranges.put("strengthEv", Interval.closed(0, 10000, "eV"));
+    ranges.put("gapEv", Interval.closed(0, 50, "eV"));
+    ranges.put("indexAtHighEnergy", Interval.closed(0.1, 10, ""));
+    return ranges;
   }
 
   private static Map<String, TermKind> models() {
