@@ -92,7 +92,7 @@ final class LightBinder {
     }
     return light
         .node("spectrum")
-        .flatMap(n -> Values.choice("spectrum", n, known, light.faults()))
+        .flatMap(n -> Values.choice("light: spectrum", n, known, light.faults()))
         .orElse("");
   }
 
