@@ -85,7 +85,7 @@ final class VaryKeys {
   /** A key of the same layer for the same quantity, written another way. */
   private static Optional<String> sameQuantity(
       String key, String layer, Map<String, Interval> known) {
-    String last = key.substring(key.lastIndexOf('.'));
+    String last = key.substring(Math.max(0, key.lastIndexOf('.')));
     return known.keySet().stream()
         .filter(k -> k.startsWith(layer) && "./".indexOf(k.charAt(layer.length())) >= 0)
         .filter(k -> k.endsWith(last))
