@@ -23,6 +23,7 @@ public final class Bench implements AutoCloseable {
   private final Evaluator evaluator;
   private final Response sums;
   private final Optional<Gradient> gradient;
+  private final Tie[] ties;
 
   Bench(Model model, Model.Filling filling) {
     this.model = model;
@@ -32,6 +33,7 @@ public final class Bench implements AutoCloseable {
     this.evaluator = model.prepared().newEvaluator();
     this.sums = currentSums(model);
     this.gradient = evaluator.ability(Gradient.class);
+    this.ties = Tie.of(model.stack()).toArray(Tie[]::new);
   }
 
   private static Response currentSums(Model model) {
@@ -59,8 +61,17 @@ public final class Bench implements AutoCloseable {
     return model;
   }
 
-  /** Sets one number, in the unit of the parameter. */
+  /** Sets one number, in the unit of the parameter, and those that are tied to it. */
   public void set(Parameter parameter, double value) {
+    write(parameter, value);
+    for (Tie tie : ties) {
+      if (tie.leader().kind() == parameter.kind() && tie.leader().index() == parameter.index()) {
+        write(tie.follower(), tie.ratio() * value);
+      }
+    }
+  }
+
+  private void write(Parameter parameter, double value) {
     switch (parameter.kind()) {
       case THICKNESS -> design.thicknessNm[parameter.index()] = value;
       case BANDGAP -> setBandgap(parameter.index(), value);

@@ -57,6 +57,9 @@ public final class Outcomes {
     Double mismatch = series ? extreme(subcells, false) - matched : null;
     Map<String, Double> design = new LinkedHashMap<>();
     varied.forEach(parameter -> design.put(parameter.key(), bench.get(parameter)));
+    if (!varied.isEmpty()) {
+      Tie.of(stack).forEach(t -> design.put(t.follower().key(), bench.get(t.follower())));
+    }
     return new Outcome(
         spectraOnly ? null : Arrays.stream(bins).sum(),
         subcells,

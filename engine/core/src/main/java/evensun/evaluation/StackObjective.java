@@ -19,6 +19,14 @@ public final class StackObjective implements Objective {
   private final List<Parameter> parameters;
   private final List<Variable> variables;
   private final Aim aim;
+  private final List<Limit> limits;
+  private final List<Tie> ties;
+
+  /** An objective without limits. */
+  public StackObjective(
+      Model model, List<Parameter> parameters, List<Variable> variables, Aim aim) {
+    this(model, parameters, variables, aim, List.of());
+  }
 
   /**
    * An objective.
@@ -27,9 +35,16 @@ public final class StackObjective implements Objective {
    * @param parameters what may vary
    * @param variables their bounds, in the same order
    * @param aim what is wanted
+   * @param limits what every design must keep
    */
   public StackObjective(
-      Model model, List<Parameter> parameters, List<Variable> variables, Aim aim) {
+      Model model,
+      List<Parameter> parameters,
+      List<Variable> variables,
+      Aim aim,
+      List<Limit> limits) {
+    this.limits = List.copyOf(limits);
+    this.ties = Tie.of(model.stack());
     this.model = model;
     this.parameters = List.copyOf(parameters);
     this.variables = List.copyOf(variables);
@@ -49,6 +64,11 @@ public final class StackObjective implements Objective {
   @Override
   public List<String> aims() {
     return List.of(aim.name());
+  }
+
+  @Override
+  public List<String> limits() {
+    return limits.stream().map(Limit::text).toList();
   }
 
   @Override
@@ -79,11 +99,19 @@ public final class StackObjective implements Objective {
         bench.subcellGaps(gaps);
         double value = own.value(currents, gaps);
         return Double.isFinite(value)
-            ? Verdict.of(value, tieBreak())
+            ? Verdict.under(slacks(), List.of(value), tieBreak())
             : Verdict.failed("the solver returned a current that is no number");
       } catch (EvaluationFailed e) {
         return Verdict.failed(String.valueOf(e.getMessage()));
       }
+    }
+
+    private List<Double> slacks() {
+      if (limits.isEmpty()) {
+        return List.of();
+      }
+      double[] thicknessNm = bench.design().thicknessNm;
+      return limits.stream().map(l -> l.slack(l.value(thicknessNm, currents, gaps))).toList();
     }
 
     private void set(double[] values) {
@@ -130,6 +158,11 @@ public final class StackObjective implements Objective {
       int layers = model.problem().layerCount();
       for (int s = 0; s < subcells; s++) {
         gradient[s][v] = byThickness[s * layers + parameters.get(v).index()];
+        for (Tie tie : ties) {
+          if (tie.leader().key().equals(parameters.get(v).key())) {
+            gradient[s][v] += tie.ratio() * byThickness[s * layers + tie.follower().index()];
+          }
+        }
       }
     }
 

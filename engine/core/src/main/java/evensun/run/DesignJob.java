@@ -2,6 +2,7 @@ package evensun.run;
 
 import evensun.evaluation.Aim;
 import evensun.evaluation.Bench;
+import evensun.evaluation.Limit;
 import evensun.evaluation.Model;
 import evensun.evaluation.Neighbourhood;
 import evensun.evaluation.Outcomes;
@@ -14,11 +15,14 @@ import evensun.scenario.InputException;
 import evensun.scenario.Place;
 import evensun.scenario.SearchSpec;
 import evensun.search.Candidate;
+import evensun.search.Freedom;
+import evensun.search.Proof;
 import evensun.search.Search;
 import evensun.search.SearchListener;
 import evensun.search.SearchOutcome;
 import evensun.search.SearchSettings;
 import evensun.search.SearchState;
+import evensun.search.StopReason;
 import evensun.spi.EvaluationFailed;
 import evensun.spi.Finding;
 import evensun.spi.Severity;
@@ -37,6 +41,7 @@ public final class DesignJob {
   private final SearchSpec spec;
   private final Aim aim;
   private final Varied varied;
+  private final List<Limit> limits;
   private final StackObjective objective;
 
   /**
@@ -59,8 +64,10 @@ public final class DesignJob {
                         "the scenario has no search: section; add one with vary:, or use evensun assess for the stack as drawn"));
     this.aim = Aims.of(spec, preparation.model());
     this.varied = Varied.of(spec, stack);
+    this.limits = Limits.of(spec, stack);
     this.objective =
-        new StackObjective(preparation.model(), varied.parameters(), varied.variables(), aim);
+        new StackObjective(
+            preparation.model(), varied.parameters(), varied.variables(), aim, limits);
   }
 
   /** Unit of the aim. */
@@ -72,8 +79,11 @@ public final class DesignJob {
   public SearchSettings settings(int threads) {
     SearchSettings settings =
         SearchSettings.of(spec.seed(), varied.variables().size()).withThreads(threads);
-    return spec.evaluations().isPresent()
-        ? settings.withEvaluations(spec.evaluations().getAsInt())
+    if (spec.evaluations().isPresent()) {
+      settings = settings.withEvaluations(spec.evaluations().getAsInt());
+    }
+    return spec.timeSeconds().isPresent()
+        ? settings.withTimeSeconds(spec.timeSeconds().getAsDouble())
         : settings;
   }
 
@@ -125,9 +135,14 @@ public final class DesignJob {
       set(bench, best);
       Electrics.Powered powered = Electrics.power(Outcomes.of(bench, varied.parameters()), bench);
       Outcome found = powered.outcome();
+      SearchRecords records = new SearchRecords(varied, aim);
       SearchRecord record =
-          new SearchRecords(varied, aim)
-              .record(outcome, best, asDrawn == null ? null : aimOf(asDrawn));
+          records.record(
+              outcome,
+              best,
+              asDrawn == null ? null : aimOf(asDrawn),
+              freedoms(outcome, best, records.equallyGoodLoss(), settings.threads()),
+              Limits.records(limits, bench.design().thicknessNm, found));
       findings.about(preparation.stack(), model, bench.design());
       findings.addAll(powered.findings());
       findings.about(found);
@@ -154,6 +169,13 @@ public final class DesignJob {
           Cautions.of(preparation.stack()),
           provenance.build(spec.seed(), repeatCommand, settingsOf(settings)));
     }
+  }
+
+  /** Not for an interrupted search: whoever stops it wants to leave. */
+  private List<Freedom> freedoms(SearchOutcome outcome, Candidate best, double loss, int threads) {
+    return outcome.stop() == StopReason.INTERRUPTED || !best.isFeasible()
+        ? List.of()
+        : new Proof(objective, threads, outcome.evaluations(), () -> false).freedoms(best, loss);
   }
 
   private Neighbourhood around(Candidate best) {

@@ -3,6 +3,7 @@ package evensun.run;
 import evensun.evaluation.Aim;
 import evensun.result.SearchRecord;
 import evensun.search.Candidate;
+import evensun.search.Freedom;
 import evensun.search.SearchOutcome;
 import evensun.search.Variable;
 import java.util.ArrayList;
@@ -18,6 +19,9 @@ final class SearchRecords {
   /** A value this close to a bound, as a share of the range, stands on it. */
   private static final double ON_BOUND = 1e-6;
 
+  /** Far below what a deposition repeats, in the unit of the aim. */
+  private static final double EQUALLY_GOOD = 0.02;
+
   private final Varied varied;
   private final Aim aim;
 
@@ -26,7 +30,19 @@ final class SearchRecords {
     this.aim = aim;
   }
 
-  SearchRecord record(SearchOutcome outcome, Candidate best, @Nullable Double asDrawn) {
+  /**
+   * The record.
+   *
+   * @param asDrawn the aim of the stack as drawn, null where it could not be evaluated
+   * @param freedoms how far each value may move, empty when that is not known
+   * @param constraints the limits at the design found
+   */
+  SearchRecord record(
+      SearchOutcome outcome,
+      Candidate best,
+      @Nullable Double asDrawn,
+      List<Freedom> freedoms,
+      List<SearchRecord.ConstraintRecord> constraints) {
     return new SearchRecord(
         aim.name(),
         aim.unit(),
@@ -43,16 +59,14 @@ final class SearchRecords {
                     new SearchRecord.Generation(
                         g.generation(), g.evaluations(), g.best(), g.mean()))
             .toList(),
-        variables(best),
+        variables(best, freedoms),
         outcome.optima().stream().map(this::optimum).toList(),
-        List.of(),
+        constraints,
         null,
-        outcome.failures().stream()
-            .map(f -> f.count() + " designs: " + f.first().verdict().failure())
-            .toList());
+        notes(outcome, freedoms));
   }
 
-  private List<SearchRecord.VariableRecord> variables(Candidate best) {
+  private List<SearchRecord.VariableRecord> variables(Candidate best, List<Freedom> freedoms) {
     List<SearchRecord.VariableRecord> records = new ArrayList<>();
     for (int v = 0; v < varied.variables().size(); v++) {
       Variable variable = varied.variables().get(v);
@@ -66,11 +80,67 @@ final class SearchRecords {
               variable.step(),
               variable.drawn(),
               found,
-              null,
-              null,
+              freedoms.isEmpty() ? null : freedoms.get(v).low(),
+              freedoms.isEmpty() ? null : freedoms.get(v).high(),
               bound(variable, found)));
     }
     return records;
+  }
+
+  private List<String> notes(SearchOutcome outcome, List<Freedom> freedoms) {
+    List<String> notes = new ArrayList<>();
+    outcome
+        .failures()
+        .forEach(f -> notes.add(f.count() + " designs: " + f.first().verdict().failure()));
+    if (!freedoms.isEmpty()) {
+      notes.add(
+          String.format(
+              Locale.ROOT,
+              "equally good: the other values chosen anew, at most %s %s less",
+              equallyGoodLoss(),
+              aim.unit()));
+    }
+    freedoms.stream()
+        .filter(f -> !f.bound().isEmpty() && f.gainPerUnit() > 0)
+        .forEach(f -> notes.add(atBound(f)));
+    if (outcome.roundBests().size() > 1) {
+      notes.add(spread(outcome.roundBests()));
+    }
+    return notes;
+  }
+
+  /** Loss up to which a design counts as equally good, in the unit of the aim. */
+  double equallyGoodLoss() {
+    return EQUALLY_GOOD;
+  }
+
+  private String atBound(Freedom freedom) {
+    Variable variable =
+        varied.variables().stream().filter(v -> v.key().equals(freedom.key())).findAny().get();
+    double width = (variable.high() - variable.low()) / 10;
+    return String.format(
+        Locale.ROOT,
+        "%s stands on its %s bound; moving that by %.3g %s would gain about %.2f %s",
+        freedom.key(),
+        freedom.bound().equals("low") ? "lower" : "upper",
+        width,
+        variable.unit(),
+        freedom.gainPerUnit() * width,
+        aim.unit());
+  }
+
+  private String spread(List<Double> roundBests) {
+    double best = roundBests.stream().mapToDouble(b -> b).max().orElseThrow();
+    double worst = roundBests.stream().mapToDouble(b -> b).min().orElseThrow();
+    long reached = roundBests.stream().filter(b -> best - b <= EQUALLY_GOOD).count();
+    return String.format(
+        Locale.ROOT,
+        "%d of %d rounds came within %s %s of the best, the worst within %.2f",
+        reached,
+        roundBests.size(),
+        EQUALLY_GOOD,
+        aim.unit(),
+        best - worst);
   }
 
   private static @Nullable String bound(Variable variable, double found) {

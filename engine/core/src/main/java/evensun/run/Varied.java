@@ -32,16 +32,23 @@ record Varied(List<Parameter> parameters, List<Variable> variables) {
     List<Parameter> parameters = new ArrayList<>();
     List<Variable> variables = new ArrayList<>();
     List<Fault> faults = new ArrayList<>();
-    for (SearchSpec.VarySpec vary : search.vary()) {
+    for (SearchSpec.VarySpec vary : search.ranges()) {
       Parameter parameter = Parameter.of(vary.key(), stack).orElse(null);
       if (parameter == null) {
         faults.add(new Fault(vary.place(), notVariable(vary.key(), stack)));
       } else {
         check(vary, parameter, stack, faults);
+      }
+      if (parameter != null && !vary.isTied()) {
         parameters.add(parameter);
         variables.add(
             new Variable(
-                vary.key(), parameter.unit(), vary.low(), vary.high(), 0, parameter.drawn()));
+                vary.key(),
+                parameter.unit(),
+                vary.low(),
+                vary.high(),
+                vary.step(),
+                parameter.drawn()));
       }
     }
     if (!faults.isEmpty()) {

@@ -1,31 +1,95 @@
 package evensun.scenario;
 
 import java.util.List;
+import java.util.OptionalDouble;
 import java.util.OptionalInt;
 
 /**
  * What to search.
  *
  * @param vary what may vary, in the order of the file
+ * @param limits what a design must keep
  * @param aim name of the aim
  * @param seed seed of the search
  * @param evaluations largest number of evaluations, if the scenario sets one
+ * @param timeSeconds time the search may take, if the scenario sets one
  * @param place where it stands
  */
 public record SearchSpec(
-    List<VarySpec> vary, String aim, long seed, OptionalInt evaluations, Place place) {
+    List<VarySpec> vary,
+    List<LimitSpec> limits,
+    String aim,
+    long seed,
+    OptionalInt evaluations,
+    OptionalDouble timeSeconds,
+    Place place) {
 
   public SearchSpec {
     vary = List.copyOf(vary);
+    limits = List.copyOf(limits);
+  }
+
+  /** Every quantity with its own range; that of a tied one follows from what it follows. */
+  public List<VarySpec> ranges() {
+    return vary.stream().map(this::withRange).toList();
+  }
+
+  private VarySpec withRange(VarySpec spec) {
+    return vary.stream()
+        .filter(leader -> spec.isTied() && leader.key().equals(spec.sameAs()))
+        .findFirst()
+        .map(leader -> spec.between(spec.ratio() * leader.low(), spec.ratio() * leader.high()))
+        .orElse(spec);
   }
 
   /**
    * One quantity that may vary.
    *
    * @param key such as {@code perovskite.thicknessNm}
-   * @param low lower bound in the unit of the key
-   * @param high upper bound in the unit of the key, at least {@code low}
+   * @param low lower bound in the unit of the key; of a tied quantity 0
+   * @param high upper bound in the unit of the key, at least {@code low}; of a tied quantity 0
+   * @param step what the deposition tool can set: values are {@code low} plus multiples; 0 for any
+   * @param sameAs key of the quantity that this one follows, empty when it varies by itself
+   * @param ratio what the followed value is multiplied by
    * @param place where it stands
    */
-  public record VarySpec(String key, double low, double high, Place place) {}
+  public record VarySpec(
+      String key, double low, double high, double step, String sameAs, double ratio, Place place) {
+
+    /** Any value in a range. */
+    public VarySpec(String key, double low, double high, Place place) {
+      this(key, low, high, 0, "", 1, place);
+    }
+
+    VarySpec between(double newLow, double newHigh) {
+      return new VarySpec(key, newLow, newHigh, step, sameAs, ratio, place);
+    }
+
+    /** Whether it follows another quantity. */
+    public boolean isTied() {
+      return !sameAs.isEmpty();
+    }
+  }
+
+  /**
+   * A limit that a design must keep.
+   *
+   * @param quantity {@code mismatchMaPerCm2}, {@code photocurrentMaPerCm2}, {@code thicknessNm} or
+   *     {@code bandgapEv}
+   * @param of subcells, or layers of a thickness; empty for all that have the quantity
+   * @param atLeast lower limit in the unit of the quantity, if set
+   * @param atMost upper limit in the unit of the quantity, if set
+   * @param place where it stands
+   */
+  public record LimitSpec(
+      String quantity,
+      List<String> of,
+      OptionalDouble atLeast,
+      OptionalDouble atMost,
+      Place place) {
+
+    public LimitSpec {
+      of = List.copyOf(of);
+    }
+  }
 }

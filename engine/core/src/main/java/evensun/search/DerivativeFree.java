@@ -20,6 +20,9 @@ import org.apache.commons.math3.random.Well19937c;
 /** Local methods that need values alone; the problem remembers the best design they meet. */
 final class DerivativeFree {
 
+  /** The library ends at once for any other value that is never reached, such as infinity. */
+  private static final double NO_TARGET = 0;
+
   private final LocalProblem problem;
   private final int[] free;
   private final double[] genes;
@@ -86,7 +89,7 @@ final class DerivativeFree {
     try {
       new CMAESOptimizer(
               evaluations,
-              Double.NEGATIVE_INFINITY,
+              NO_TARGET,
               true,
               0,
               1,

@@ -26,14 +26,18 @@ public final class Proof {
   private final int threads;
   private final BooleanSupplier cancelled;
   private final int limits;
+  private final int evaluations;
 
   /**
    * A look around.
    *
    * @param threads number of threads, changes the time only
+   * @param evaluations roughly the most it may evaluate; with too few the ranges come out narrower
+   *     than they are, never wider
    * @param cancelled asked before every evaluation, from any thread
    */
-  public Proof(Objective objective, int threads, BooleanSupplier cancelled) {
+  public Proof(Objective objective, int threads, int evaluations, BooleanSupplier cancelled) {
+    this.evaluations = evaluations;
     this.objective = objective;
     this.threads = threads;
     this.cancelled = cancelled;
@@ -136,7 +140,7 @@ public final class Proof {
     Individual at = start;
     double tried = bad;
     int bisections = 0;
-    while (bisections < BISECTIONS && Math.abs(bad - good) > 1e-5) {
+    while (local.left > 0 && bisections < BISECTIONS && Math.abs(bad - good) > 1e-5) {
       Individual held = held(local, at, variable, tried);
       if (Fitness.of(held.verdict(), floor).isFeasible()) {
         good = tried;
@@ -159,6 +163,7 @@ public final class Proof {
     LocalProblem problem = local.problem(start, Double.NEGATIVE_INFINITY);
     int[] free = IntStream.of(problem.continuous()).filter(i -> i != variable).toArray();
     if (free.length == 0) {
+      local.left--;
       return problem.best();
     }
     if (local.worker.partCount() > 0) {
@@ -166,8 +171,10 @@ public final class Proof {
       double[] point = model.pointOf(genes);
       problem.judge(model.genesOf(new MaxMinSolver(model, point, 0.02, 1e3).climb(60, 1e-6)));
     } else {
-      new DerivativeFree(problem, free).quadratic(0.02, 1e-5, 20 * (free.length + 1));
+      new DerivativeFree(problem, free)
+          .quadratic(0.02, 1e-5, Math.min(local.left, 20 * (free.length + 1)));
     }
+    local.left -= 1 + problem.tally().evaluations();
     return problem.best();
   }
 
@@ -188,6 +195,7 @@ public final class Proof {
   private final class Local {
     final Judges judges;
     final Objective.Worker worker;
+    int left = evaluations / (3 * space.size());
 
     Local(Judges judges, Objective.Worker worker) {
       this.judges = judges;
@@ -195,7 +203,7 @@ public final class Proof {
     }
 
     LocalProblem problem(Individual start, double floor) {
-      return new LocalProblem(space, judges, worker, start, floor, Integer.MAX_VALUE);
+      return new LocalProblem(space, judges, worker, start, floor, Math.max(2, left));
     }
   }
 

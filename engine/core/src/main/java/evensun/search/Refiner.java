@@ -13,7 +13,7 @@ final class Refiner {
   private static final double PENALTY = 1e3;
   private static final double DISTINCT = 0.03;
   private static final int POLISHED = 8;
-  private static final int CLOUDS = 2;
+  private static final int CLOUDS = 1;
 
   private final Space space;
   private final Judges judges;
@@ -142,7 +142,7 @@ final class Refiner {
     boolean rough = effort == Effort.ROUGH;
     new DerivativeFree(problem, free).quadratic(rough ? 0.03 : 0.01, rough ? 1e-3 : 1e-7, share);
     if (!rough && index < CLOUDS) {
-      int most = Math.min(problem.left(), 300 * (free.length + 1));
+      int most = Math.min(problem.left(), 100 * (free.length + 1));
       new DerivativeFree(problem, free).cloud(0.01, seed + index, most);
     }
   }

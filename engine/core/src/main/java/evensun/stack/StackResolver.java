@@ -152,7 +152,7 @@ public final class StackResolver {
   private double thickestNm(LayerSpec layer) {
     String key = layer.name() + ".thicknessNm";
     return scenario.search().stream()
-        .flatMap(search -> search.vary().stream())
+        .flatMap(search -> search.ranges().stream())
         .filter(vary -> vary.key().equals(key))
         .mapToDouble(SearchSpec.VarySpec::high)
         .reduce(layer.thicknessNm(), Math::max);

@@ -77,4 +77,64 @@ class StackObjectiveTest {
       assertThat(Parameter.of("upper", model.stack())).isEmpty();
     }
   }
+
+  /** Witness: the currents and thicknesses that the bench itself has for the same values. */
+  @Test
+  void limitsTellHowFarADesignIsFromThem() {
+    try (Model model = Cells.model(Cells.twoCells(300, 900), new BeerLambertSolver());
+        Bench bench = model.newBench()) {
+      Parameter upper = Parameter.of("upper.thicknessNm", model.stack()).orElseThrow();
+      bench.set(upper, 500);
+      double[] currents = new double[2];
+      bench.currents(currents);
+      double mismatch = Math.abs(currents[0] - currents[1]);
+      List<Limit> limits =
+          List.of(
+              Limit.of("mismatchMaPerCm2", List.of(), 2, true, model.stack()),
+              Limit.of("thicknessNm", List.of("upper", "lower"), 1000, true, model.stack()),
+              Limit.of("photocurrentMaPerCm2", List.of("bottom"), 1, false, model.stack()));
+      StackObjective objective =
+          new StackObjective(
+              model,
+              List.of(upper),
+              List.of(new Variable(upper.key(), "nm", 0, 2000, 0, 300)),
+              Aim.matchedCurrent(),
+              limits);
+      assertThat(objective.limits())
+          .containsExactly(
+              "mismatchMaPerCm2 ≤ 2 mA cm⁻²",
+              "thicknessNm of upper, lower ≤ 1000 nm",
+              "photocurrentMaPerCm2 of bottom ≥ 1 mA cm⁻²");
+      try (Objective.Worker worker = objective.newWorker()) {
+        Verdict verdict = worker.judge(new double[] {500});
+        assertThat(verdict.slacks())
+            .containsExactly((2 - mismatch) / 2, (1000 - 1400) / 1000.0, currents[1] - 1);
+        assertThat(verdict.violation()).isGreaterThanOrEqualTo(0.4);
+      }
+    }
+  }
+
+  /** Witness: setting both layers by hand. */
+  @Test
+  void aTiedLayerFollows() {
+    String yaml =
+        Cells.twoCells(300, 900)
+            + """
+            search:
+              vary:
+                upper.thicknessNm: [0, 500]
+                lower.thicknessNm: {sameAs: upper.thicknessNm, ratio: 2}
+            """;
+    try (Model tied = Cells.model(yaml, new BeerLambertSolver());
+        Model plain = Cells.model(Cells.twoCells(300, 900), new BeerLambertSolver());
+        Bench bench = plain.newBench();
+        Objective.Worker worker = objective(tied, Aim.matchedCurrent()).newWorker()) {
+      bench.set(Parameter.of("upper.thicknessNm", plain.stack()).orElseThrow(), 200);
+      bench.set(Parameter.of("lower.thicknessNm", plain.stack()).orElseThrow(), 400);
+      double[] currents = new double[2];
+      bench.currents(currents);
+      assertThat(worker.judge(new double[] {200}).aims())
+          .containsExactly(Math.min(currents[0], currents[1]));
+    }
+  }
 }

@@ -52,7 +52,7 @@ class KnownOptimaTest {
     SearchOutcome outcome = run(slope, 1);
     assertThat(outcome.best().values().get(0)).isEqualTo(2);
     assertThat(outcome.best().values().get(1)).isCloseTo(0.25, within(1e-4));
-    Freedom x = new Proof(slope, 2, () -> false).freedoms(outcome.best(), 0.01).get(0);
+    Freedom x = new Proof(slope, 2, 20_000, () -> false).freedoms(outcome.best(), 0.01).get(0);
     // The slope is one per unit; of a loss of 0.01 the range is 0.01 long, up to bisection.
     assertThat(x.bound()).isEqualTo("high");
     assertThat(x.highIsBound()).isTrue();
@@ -81,11 +81,12 @@ class KnownOptimaTest {
     Objective ridge = new Ridge();
     SearchOutcome outcome = run(ridge, 4);
     assertThat(outcome.best().aim()).isCloseTo(1, within(1e-6));
-    Freedom x = new Proof(ridge, 1, () -> false).freedoms(outcome.best(), 0.1).get(0);
+    Freedom x = new Proof(ridge, 1, 20_000, () -> false).freedoms(outcome.best(), 0.1).get(0);
     assertThat(x.low()).isCloseTo(0.9, within(2e-3)).isGreaterThanOrEqualTo(0.9);
     assertThat(x.high()).isCloseTo(1.1, within(2e-3)).isLessThanOrEqualTo(1.1);
     assertThat(x.bound()).isEmpty();
-    assertThat(new Proof(ridge, 3, () -> false).freedoms(outcome.best(), 0.1).get(0)).isEqualTo(x);
+    assertThat(new Proof(ridge, 3, 20_000, () -> false).freedoms(outcome.best(), 0.1).get(0))
+        .isEqualTo(x);
   }
 
   private static final class Ridge implements Objective {

@@ -50,8 +50,8 @@ final class TestFunctions {
   }
 
   /**
-   * The smaller of two shifted Rastrigin functions on [-5.12, 5.12]: the optimum lies on the kink
-   * between them. By symmetry about 0.25 it is where all variables ... are equal in both.
+   * The smaller of two Rastrigin functions, shifted by half a period to either side, on [-5.12,
+   * 5.12]: its optimum lies on the kink between them.
    */
   static double kinked(double[] x) {
     double[] left = x.clone();

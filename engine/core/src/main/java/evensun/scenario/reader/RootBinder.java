@@ -56,7 +56,7 @@ final class RootBinder {
             connection(root, subcells),
             DeviceBinder.bind(root),
             SolverBinder.bind(root),
-            SearchBinder.bind(root, stack),
+            SearchBinder.bind(root, stack, subcells),
             MeasuredBinder.bind(root, subcells));
     root.finish();
     return scenario;

@@ -8,6 +8,7 @@ import evensun.scenario.LayerSpec.Coherence;
 import evensun.scenario.MaterialSpec;
 import evensun.scenario.Place;
 import evensun.scenario.Scenario;
+import evensun.scenario.SearchSpec;
 import evensun.scenario.SearchSpec.VarySpec;
 import evensun.scenario.Source;
 import evensun.spi.Polarisation;
@@ -47,6 +48,22 @@ class ScenarioReaderTest {
         seed: 7
         evaluations: 20000
       """;
+
+  static final String WITH_LIMITS =
+      PLANAR
+          .replace("[40, 120]", "{low: 40, high: 120, step: 5}")
+          .replace(
+              "perovskite.bandgapEv: [1.6, 1.8]",
+              "perovskite.thicknessNm: {sameAs: front-contact.thicknessNm, ratio: 2}")
+          .replace(
+              "  seed: 7\n",
+              """
+                seed: 7
+                timeSeconds: 2.5
+                limits:
+                  - {quantity: mismatchMaPerCm2, atMost: 0.3}
+                  - {quantity: thicknessNm, of: [perovskite], atLeast: 100, atMost: 900}
+              """);
 
   static Source source(String text) {
     return new Source("tandem.yaml", Path.of("."), text);
@@ -97,6 +114,19 @@ class ScenarioReaderTest {
         .containsExactly("front-contact.thicknessNm", "perovskite.bandgapEv");
     assertThat(scenario.search().orElseThrow().seed()).isEqualTo(7);
     assertThat(scenario.search().orElseThrow().evaluations()).hasValue(20000);
+  }
+
+  @Test
+  void searchTakesStepsTiesAndLimits() {
+    SearchSpec search = ScenarioReader.read(source(WITH_LIMITS)).search().orElseThrow();
+    assertThat(search.vary().get(0).step()).isEqualTo(5);
+    assertThat(search.vary().get(0).high()).isEqualTo(120);
+    assertThat(search.vary().get(1).isTied()).isTrue();
+    assertThat(search.vary().get(1).ratio()).isEqualTo(2);
+    assertThat(search.limits()).hasSize(2);
+    assertThat(search.limits().get(0).atMost()).hasValue(0.3);
+    assertThat(search.limits().get(1).of()).containsExactly("perovskite");
+    assertThat(search.timeSeconds()).hasValue(2.5);
   }
 
   @Test

@@ -126,6 +126,12 @@ class ScenarioSchemaTest {
         "seed: 7 | seed: 7.5",
         "seed: 7 | seed: -1",
         "evaluations: 20000 | evaluations: 0",
+        "evaluations: 20000 | timeSeconds: 0",
+        "[40, 120] | '{low: 40}'",
+        "[40, 120] | '{low: 40, high: 120, step: 0}'",
+        "[40, 120] | '{sameAs: perovskite.bandgapEv, ratio: 0}'",
+        "evaluations: 20000 | 'limits: [{quantity: mismatch, atMost: 1}]'",
+        "evaluations: 20000 | 'limits: [{quantity: mismatchMaPerCm2}]'",
       })
   void bothRefuse(String right, String wrong) {
     String text = ScenarioReaderTest.PLANAR.replace(right, wrong == null ? "" : wrong);
@@ -136,5 +142,11 @@ class ScenarioSchemaTest {
 
   private static void read(String text) {
     ScenarioReader.read(ScenarioReaderTest.source(text));
+  }
+
+  @Test
+  void bothTakeStepsTiesAndLimits() {
+    assertThat(schema.validate(ScenarioReaderTest.WITH_LIMITS, InputFormat.YAML)).isEmpty();
+    read(ScenarioReaderTest.WITH_LIMITS);
   }
 }
