@@ -210,6 +210,38 @@ class MixingRulesTest {
   }
 
   @Test
+  void rowsAreTheirWavelengthsOneByOne() {
+    // Independent calculation: every wavelength alone, without the root at the one before; the
+    // components swing between dielectric, absorber and metal, and jump once.
+    int wavelengths = 400;
+    Blend rows = new Blend(BRUGGEMAN, -1, Mixture.SPHERE, 3, 1, wavelengths);
+    double[][] n = new double[3][wavelengths];
+    double[][] k = new double[3][wavelengths];
+    for (int w = 0; w < wavelengths; w++) {
+      n[0][w] = 1.5 + 0.2 * Math.sin(w / 30.0);
+      n[1][w] = 2.5 + Math.sin(w / 17.0);
+      k[1][w] = w < 200 ? 0.6 * Math.pow(Math.sin(w / 40.0), 2) : 3;
+      n[2][w] = 0.1 + Math.pow(Math.cos(w / 60.0), 2);
+      k[2][w] = 6 * Math.pow(Math.sin(w / 60.0), 2);
+    }
+    for (int c = 0; c < 3; c++) {
+      rows.component(c, n[c], k[c], 1 + c);
+    }
+    double[] f = {0.4, 0.3, 0.3};
+    rows.mix(0, f);
+    for (int w = 0; w < wavelengths; w++) {
+      Eps alone =
+          Mixing.mix(
+              BRUGGEMAN,
+              f,
+              Eps.ofIndex(n[0][w], k[0][w]),
+              Eps.ofIndex(n[1][w], k[1][w]),
+              Eps.ofIndex(n[2][w], k[2][w]));
+      assertThat(Eps.ofIndex(rows.n(0)[w], rows.k(0)[w]).distance(alone)).isLessThan(1e-12);
+    }
+  }
+
+  @Test
   void equalComponentsMayBeMerged() {
     // Law: whether a component is listed once or in two parts does not matter; two components are
     // solved in closed form, three by iteration.
