@@ -112,10 +112,12 @@ final class Spectra {
     return exit ? outcome.spectral().transmittance() : Collections.emptyList();
   }
 
+  /** Current of a channel; for a single wavelength, which carries none, its share. */
   private static double carried(Outcome outcome, List<Double> share) {
+    boolean single = outcome.incidentMaPerCm2() == null;
     double sum = 0;
     for (int i = 0; i < share.size(); i++) {
-      sum += share.get(i) * outcome.spectral().incidentMaPerCm2().get(i);
+      sum += share.get(i) * (single ? 1 : outcome.spectral().incidentMaPerCm2().get(i));
     }
     return sum;
   }

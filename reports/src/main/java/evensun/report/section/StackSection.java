@@ -159,26 +159,32 @@ public final class StackSection {
   }
 
   private static Table layers(RunResult result) {
+    boolean compared = result.asDrawn() != null;
     Table.Builder table =
         new Table.Builder("table-layers", "Every layer, in the order the light meets them")
             .words("layer")
             .words("material")
-            .words("part of")
-            .numbers("as drawn", "nm")
-            .numbers("found", "nm")
-            .numbers("bandgap", "eV")
-            .words("waves")
-            .words("further");
+            .words("part of");
+    if (compared) {
+      table.numbers("as drawn", "nm");
+    }
+    table
+        .numbers(compared ? "found" : "thickness", "nm")
+        .numbers("bandgap", "eV")
+        .words("waves")
+        .words("further");
     for (StackEntry entry : result.found().stack()) {
-      table.row(
-          entry.name(),
-          entry.material(),
-          partOf(entry),
-          drawnNm(result, entry.name()),
-          nm(entry.thicknessNm()),
-          entry.bandgapEv() == null ? "" : Numbers.fixed(entry.bandgapEv(), 3),
-          entry.role().equals("layer") ? (entry.coherent() ? "interfere" : "incoherent") : "",
-          String.join("; ", entry.features()));
+      List<String> cells = new ArrayList<>();
+      cells.addAll(List.of(entry.name(), entry.material(), partOf(entry)));
+      if (compared) {
+        cells.add(drawnNm(result, entry.name()));
+      }
+      cells.add(nm(entry.thicknessNm()));
+      cells.add(entry.bandgapEv() == null ? "" : Numbers.fixed(entry.bandgapEv(), 3));
+      cells.add(
+          entry.role().equals("layer") ? (entry.coherent() ? "interfere" : "incoherent") : "");
+      cells.add(String.join("; ", entry.features()));
+      table.row(cells);
     }
     return table.build();
   }
