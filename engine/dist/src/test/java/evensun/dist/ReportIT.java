@@ -128,8 +128,10 @@ class ReportIT {
     return browser.manage().logs().get(log).getAll().stream().map(LogEntry::getMessage).toList();
   }
 
+  /** Whether the page, not the browser's own first page, asked for something outside itself. */
   private static boolean asksElsewhere(String message, Path page) {
     return message.contains("\"Network.requestWillBeSent\"")
+        && message.contains("\"documentURL\":\"" + page.toUri() + "\"")
         && !message.contains("\"url\":\"" + page.toUri() + "\"")
         && !message.contains("\"url\":\"data:");
   }
