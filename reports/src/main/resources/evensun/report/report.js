@@ -73,9 +73,15 @@
     return step === null || Math.abs(value / step - Math.round(value / step)) < 1e-6;
   }
 
+  /* A round step that starts and ends on the axis' own ends, where there is one. */
+  function evenStep(low, high) {
+    var steps = [5, 7, 10].map(function (wanted) { return roundStep(low, high, wanted); });
+    return steps.filter(function (step) { return onStep(low, step) && onStep(high, step); })[0] || steps[0];
+  }
+
   function axis(spec, index, width) {
     var across = index === 0;
-    var step = spec.logarithmic ? null : roundStep(spec.min, spec.max, across ? (width > 560 ? 9 : 4) : 5);
+    var step = spec.logarithmic ? null : across ? roundStep(spec.min, spec.max, width > 560 ? 9 : 4) : evenStep(spec.min, spec.max);
     return {
       type: spec.logarithmic ? 'log' : 'value',
       min: spec.min,

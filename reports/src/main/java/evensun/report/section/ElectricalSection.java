@@ -62,15 +62,17 @@ public final class ElectricalSection {
   private static String heading(Electrical electrical) {
     String efficiency = Numbers.quantity(electrical.efficiencyPercent(), "%");
     double lost = electrical.independentEfficiencyPercent() - electrical.efficiencyPercent();
-    return electrical.connection().equals("independent")
-        ? "Efficiency " + efficiency + ", each subcell at its own maximum power"
-        : "Efficiency "
-            + efficiency
-            + "; the "
-            + electrical.connection()
-            + " connection costs "
-            + Numbers.fixed(lost, 2)
-            + " points against independent subcells";
+    if (electrical.connection().equals("independent")) {
+      return "Efficiency " + efficiency + ", each subcell at its own maximum power";
+    }
+    String cost = lost < 0.005 ? "nothing" : Numbers.fixed(lost, 2) + " points";
+    return "Efficiency "
+        + efficiency
+        + "; the "
+        + electrical.connection()
+        + " connection costs "
+        + cost
+        + " against independent subcells";
   }
 
   private static Chart curve(Electrical found, @Nullable Electrical drawn) {
@@ -79,15 +81,8 @@ public final class ElectricalSection {
     series.add(
         Series.of(
             "found", "ink", found.curve().stream().map(CurvePoint::currentMaPerCm2).toList()));
-    boolean same =
-        drawn != null && drawn.curve().stream().map(CurvePoint::voltageV).toList().equals(volts);
-    if (drawn != null && same) {
-      series.add(
-          Series.of(
-                  "as drawn",
-                  "muted",
-                  drawn.curve().stream().map(CurvePoint::currentMaPerCm2).toList())
-              .asDashed());
+    if (drawn != null && drawn.curve().size() > 1) {
+      series.add(new Series("as drawn", "muted", true, along(volts, drawn.curve())));
     }
     double top =
         series.stream()
@@ -99,6 +94,27 @@ public final class ElectricalSection {
     Axis x = Axis.linear("voltage", "V", 0, volts.get(volts.size() - 1));
     Axis y = Axis.covering("current", Numbers.MA, 0, top * 1.03);
     return new Chart("jv", Kind.LINES, curveTitle(found), x, y, volts, series, List.of());
+  }
+
+  /** A curve read off at other voltages, linearly between its points; null beyond its ends. */
+  private static List<@Nullable Double> along(List<Double> volts, List<CurvePoint> curve) {
+    List<@Nullable Double> values = new ArrayList<>();
+    for (double volt : volts) {
+      values.add(at(volt, curve));
+    }
+    return values;
+  }
+
+  private static @Nullable Double at(double volt, List<CurvePoint> curve) {
+    for (int i = 1; i < curve.size(); i++) {
+      CurvePoint a = curve.get(i - 1);
+      CurvePoint b = curve.get(i);
+      if (a.voltageV() <= volt && volt <= b.voltageV() && a.voltageV() < b.voltageV()) {
+        double part = (volt - a.voltageV()) / (b.voltageV() - a.voltageV());
+        return a.currentMaPerCm2() + part * (b.currentMaPerCm2() - a.currentMaPerCm2());
+      }
+    }
+    return null;
   }
 
   private static String curveTitle(Electrical e) {
