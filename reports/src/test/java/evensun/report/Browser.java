@@ -85,6 +85,19 @@ final class Browser implements AutoCloseable {
     driver.executeCdpCommand("Emulation.setDeviceMetricsOverride", metrics);
   }
 
+  /** Processor time that the page's thread has used so far, in s. */
+  double busySeconds() {
+    driver.executeCdpCommand("Performance.enable", Map.of("timeDomain", "threadTicks"));
+    List<?> metrics =
+        (List<?>) driver.executeCdpCommand("Performance.getMetrics", Map.of()).get("metrics");
+    return metrics.stream()
+        .map(metric -> (Map<?, ?>) metric)
+        .filter(metric -> metric.get("name").equals("TaskDuration"))
+        .mapToDouble(metric -> ((Number) metric.get("value")).doubleValue())
+        .findFirst()
+        .orElseThrow();
+  }
+
   Object run(String script, Object... arguments) {
     return ((JavascriptExecutor) driver).executeScript(script, arguments);
   }

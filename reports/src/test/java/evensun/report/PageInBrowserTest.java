@@ -224,15 +224,15 @@ class PageInBrowserTest {
     }
   }
 
+  /** Two seconds of the browser's processor, whatever else the machine does; charts included. */
   @Test
-  void aPageIsUsableSoon() throws IOException {
+  void aPageIsUsableWithinTwoSecondsOfProcessorTime() throws IOException {
     Path file = folder.resolve("soon.html");
     Files.writeString(file, ReportWriter.write(SampleRuns.full()));
+    browser.width(1280);
     browser.open(file);
-    double interactiveMs =
-        ((Number)
-                browser.run("return performance.getEntriesByType('navigation')[0].domInteractive"))
-            .doubleValue();
-    assertThat(interactiveMs).isLessThan(2000);
+    double before = browser.busySeconds();
+    browser.open(file);
+    assertThat(browser.busySeconds() - before).isBetween(0.01, 2.0);
   }
 }
