@@ -43,7 +43,14 @@ class GapsCommandTest {
     Path html = folder.resolve("gaps.html");
     int status =
         run(
-            "gaps", "--subcells", "3", "--step-ev", "0.1", "--csv", csv.toString(), "--html",
+            "gaps",
+            "--subcells",
+            "3",
+            "--step-ev",
+            "0.1",
+            "--csv",
+            csv.toString(),
+            "--html",
             html.toString());
     assertThat(status).isZero();
     List<String> lines = Files.readAllLines(csv);
