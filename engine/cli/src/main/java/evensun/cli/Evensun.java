@@ -22,6 +22,7 @@ import picocli.CommandLine.Mixin;
       RunsCommand.class,
       GapsCommand.class,
       SchemaCommand.class,
+      VerifyCommand.class,
       ExplainCommand.class,
     })
 final class Evensun implements Callable<Integer> {

@@ -10,7 +10,9 @@ public final class Main {
   /** Runs one command and ends the process with its exit status. */
   public static void main(String[] args) {
     Locale.setDefault(Locale.ROOT); // numbers read the same on every machine
-    int status = run(Console.system(), args);
+    Console console = Console.system();
+    System.setOut(System.err); // a plugin that prints must not spoil results
+    int status = run(console, args);
     Interruption.finished();
     System.exit(status);
   }
