@@ -4,8 +4,10 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
 import java.io.IOException;
+import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import org.junit.jupiter.api.Assumptions;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -141,6 +143,29 @@ class FirstStepsIT {
     assertThat(run("explain", codes.get(0)).out())
         .startsWith(codes.get(0) + "\n")
         .contains("What it means", "What it does to the result", "What to do");
+  }
+
+  @Test
+  void thePythonExampleRunsAsWritten() throws Exception {
+    String readme = Files.readString(Program.scenario("README.md"));
+    int start = readme.indexOf("```python\n") + "```python\n".length();
+    String example = readme.substring(start, readme.indexOf("```", start));
+    Assumptions.assumeTrue(hasPython(), "SKIPPED: no python3 in PATH");
+    ProcessBuilder python =
+        new ProcessBuilder("python3", "-c", example).directory(Program.folder().toFile());
+    python.environment().put("EVENSUN", Program.folder().resolve("bin/evensun").toString());
+    Process process = python.redirectError(ProcessBuilder.Redirect.INHERIT).start();
+    String out = new String(process.getInputStream().readAllBytes(), StandardCharsets.UTF_8);
+    assertThat(process.waitFor()).isZero();
+    assertThat(out.lines()).hasSize(7).allMatch(l -> l.matches("\\d+ nm  top .* mA/cm2"));
+  }
+
+  private static boolean hasPython() {
+    try {
+      return new ProcessBuilder("python3", "--version").start().waitFor() == 0;
+    } catch (IOException | InterruptedException e) {
+      return false;
+    }
   }
 
   @ParameterizedTest

@@ -13,11 +13,14 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Set;
+import java.util.TreeSet;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.MethodSource;
+import tools.jackson.databind.JsonNode;
+import tools.jackson.databind.json.JsonMapper;
 
 /** The schema is written by hand, so it is held against the reader from both sides. */
 class ScenarioSchemaTest {
@@ -65,6 +68,23 @@ class ScenarioSchemaTest {
     assertThat(schema.validate(text, InputFormat.YAML)).isEmpty();
     assertThat(ScenarioReader.read(ScenarioReaderTest.source(text)).search()).isPresent();
     assertThat(text).startsWith("# yaml-language-server: $schema=" + Templates.SCHEMA_FILE);
+  }
+
+  /** README.md of the scenarios is where people look keys up. */
+  @Test
+  void everyKeyOfTheSchemaIsInTheReadme() throws IOException {
+    String readme = Files.readString(SCENARIOS.resolve("README.md"));
+    Set<String> keys = new TreeSet<>();
+    collectKeys(JsonMapper.shared().readTree(ScenarioSchema.text()), keys);
+    assertThat(keys).hasSizeGreaterThan(40);
+    assertThat(keys).allSatisfy(key -> assertThat(readme).contains(key));
+  }
+
+  private static void collectKeys(JsonNode node, Set<String> keys) {
+    if (node.has("properties")) {
+      keys.addAll(node.get("properties").propertyNames());
+    }
+    node.forEach(child -> collectKeys(child, keys));
   }
 
   @Test
