@@ -1,5 +1,6 @@
 package evensun.cli;
 
+import evensun.data.DecimalText;
 import evensun.data.TableFormatException;
 import evensun.light.Spectra;
 import evensun.light.Spectrum;
@@ -97,10 +98,10 @@ final class TableCheck {
       OpticalTable table = raw.table();
       out.printf(
           Locale.ROOT,
-          "  %d points, %.6g to %.6g nm%n",
+          "  %d points, %s to %s nm%n",
           table.size(),
-          table.fromNm(),
-          table.toNm());
+          DecimalText.of(table.fromNm(), 6),
+          DecimalText.of(table.toNm(), 6));
       Bandgap.of(table).ifPresent(ev -> out.printf(Locale.ROOT, "  bandgap %.3f eV%n", ev));
     }
     out.println();

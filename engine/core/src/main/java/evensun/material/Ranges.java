@@ -1,6 +1,6 @@
 package evensun.material;
 
-import java.util.Locale;
+import evensun.data.DecimalText;
 
 /** Sentences about ranges of wavelengths. */
 final class Ranges {
@@ -8,7 +8,7 @@ final class Ranges {
   private Ranges() {}
 
   static String nm(double nm) {
-    return String.format(Locale.ROOT, "%.6g", nm).replaceAll("\\.?0+$", "") + " nm";
+    return DecimalText.of(nm, 6) + " nm";
   }
 
   /** Refuses a grid that leaves the range of a record. */

@@ -6,7 +6,6 @@ import evensun.spi.Finding;
 import evensun.spi.Severity;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Locale;
 import java.util.Optional;
 import java.util.OptionalDouble;
 
@@ -99,18 +98,20 @@ public final class TableMaterial implements Material {
   }
 
   private Finding held(double firstNm, double lastNm) {
+    String ends =
+        firstNm < table.fromNm() && lastNm > table.toNm()
+            ? Ranges.nm(table.fromNm()) + " and " + Ranges.nm(table.toNm())
+            : Ranges.nm(firstNm < table.fromNm() ? table.fromNm() : table.toNm());
     return new Finding(
         "table-held",
         Severity.WARNING,
         record.name(),
-        String.format(
-            Locale.ROOT,
-            "the data ends at %s and the grid goes on (%.6g to %.6g nm): the end values of n and k"
-                + " are held there, as asked",
-            firstNm < table.fromNm() && lastNm > table.toNm()
-                ? Ranges.nm(table.fromNm()) + " and " + Ranges.nm(table.toNm())
-                : Ranges.nm(firstNm < table.fromNm() ? table.fromNm() : table.toNm()),
-            firstNm,
-            lastNm));
+        "the data ends at "
+            + ends
+            + " and the grid goes on ("
+            + Ranges.nm(firstNm)
+            + " to "
+            + Ranges.nm(lastNm)
+            + "): the end values of n and k are held there, as asked");
   }
 }

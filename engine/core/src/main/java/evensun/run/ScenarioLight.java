@@ -1,5 +1,6 @@
 package evensun.run;
 
+import evensun.data.DecimalText;
 import evensun.data.TableFormatException;
 import evensun.light.Blackbody;
 import evensun.light.ClearSky;
@@ -12,7 +13,6 @@ import evensun.scenario.InputFiles;
 import evensun.scenario.LightSpec;
 import evensun.scenario.Place;
 import evensun.scenario.Scenario;
-import java.util.Locale;
 
 /** The light of a scenario: built in, modelled, or a table of its own, scaled when it says so. */
 final class ScenarioLight {
@@ -87,6 +87,6 @@ final class ScenarioLight {
   }
 
   private static String shown(double value) {
-    return String.format(Locale.ROOT, "%.7g", value).replaceAll("\\.?0+$", "");
+    return DecimalText.of(value, 7);
   }
 }

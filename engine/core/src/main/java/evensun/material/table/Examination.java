@@ -1,5 +1,6 @@
 package evensun.material.table;
 
+import evensun.data.DecimalText;
 import evensun.light.Constants;
 import evensun.light.Spectrum;
 import evensun.spi.Finding;
@@ -251,9 +252,6 @@ public final class Examination {
   }
 
   private static String nm(double nm) {
-    return String.format(Locale.ROOT, "%.5g", nm)
-            .replaceAll("(\\.\\d*?)0+$", "$1")
-            .replaceAll("\\.$", "")
-        + " nm";
+    return DecimalText.of(nm, 5) + " nm";
   }
 }

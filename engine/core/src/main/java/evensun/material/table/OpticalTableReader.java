@@ -1,5 +1,6 @@
 package evensun.material.table;
 
+import evensun.data.DecimalText;
 import evensun.data.TableFormatException;
 import evensun.data.TextTable;
 import evensun.data.TextTableReader;
@@ -213,6 +214,6 @@ public final class OpticalTableReader {
   }
 
   private static String shown(double value) {
-    return String.format(java.util.Locale.ROOT, "%.6g", value).replaceAll("\\.?0+$", "");
+    return DecimalText.of(value, 6);
   }
 }
