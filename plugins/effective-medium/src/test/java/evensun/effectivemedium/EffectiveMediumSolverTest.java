@@ -277,16 +277,20 @@ class EffectiveMediumSolverTest {
     Response sums = weighted(stack, prepared);
     Response spectra = Response.spectra(1, prepared.channels().size(), 6);
     Design design = stack.design();
-    long bytes = 0;
-    for (int i = 0; i < 6000; i++) {
-      design.knob[0] = 0.3 + 0.001 * (i % 100);
-      design.thicknessNm[0] = 80 + i % 7;
+    long fewest = Long.MAX_VALUE;
+    for (int round = 0; round < 12; round++) {
       long before = allocatedBytes();
-      evaluator.evaluate(design, sums);
-      evaluator.evaluate(design, spectra);
-      bytes += i < 5000 ? 0 : allocatedBytes() - before;
+      for (int i = 0; i < 500; i++) {
+        design.knob[0] = 0.3 + 0.001 * (i % 100);
+        design.thicknessNm[0] = 80 + i % 7;
+        evaluator.evaluate(design, sums);
+        evaluator.evaluate(design, spectra);
+      }
+      // What an evaluation allocates shows in every round; what the JVM allocates now and then for
+      // itself does not.
+      fewest = Math.min(fewest, allocatedBytes() - before);
     }
-    assertThat(bytes).isZero();
+    assertThat(fewest).isZero();
   }
 
   private static long allocatedBytes() {

