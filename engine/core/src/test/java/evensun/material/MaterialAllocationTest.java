@@ -13,9 +13,7 @@ class MaterialAllocationTest {
   private static final double[] GRID_NM =
       IntStream.rangeClosed(0, 180).mapToDouble(i -> 300 + 5.0 * i).toArray();
 
-  // A law of the contract between search and materials: a fill costs nothing but time, and little
-  // of
-  // it (20 µs wanted on an idle machine; three times that allowed here for a busy one).
+  // A law of the contract between search and materials; witness: the JVM's own count of bytes.
   @ParameterizedTest
   @ValueSource(
       strings = {
