@@ -57,6 +57,12 @@ final class DesignCommand extends BaseCommand {
       description = "Stops searching after this time with what was found.")
   Double timeSeconds;
 
+  @Option(
+      names = "--generations",
+      paramLabel = "N",
+      description = "Ends after so many generations; repeats a run that was stopped by its time.")
+  Integer generations;
+
   @Override
   public Integer call() {
     GlobalOptions global = global();
@@ -73,7 +79,11 @@ final class DesignCommand extends BaseCommand {
       report = RunFiles.results(folder, result);
     }
     output.tell(console(), global, result, report);
-    return interruption.getAsBoolean() ? ExitStatus.INTERRUPTED : ExitStatus.DONE;
+    if (interruption.getAsBoolean()) {
+      return ExitStatus.INTERRUPTED;
+    }
+    boolean failing = result.search() != null && result.search().stopped().equals("failures");
+    return failing ? ExitStatus.WRONG_PLUGIN : ExitStatus.DONE;
   }
 
   private Scenario scenario() {
@@ -103,8 +113,11 @@ final class DesignCommand extends BaseCommand {
   private RunResult search(
       DesignJob job, RunFolder folder, GlobalOptions global, Interruption interruption) {
     SearchSettings searchSettings = job.settings(global.threadCount());
-    if (timeSeconds != null) {
-      searchSettings = searchSettings.withTimeSeconds(timeSeconds);
+    if (generations != null) {
+      searchSettings =
+          searchSettings.withoutTime().withGenerations(positive("--generations", generations));
+    } else if (timeSeconds != null) {
+      searchSettings = searchSettings.withTimeSeconds(positive("--time-seconds", timeSeconds));
     }
     boolean live = console().errIsTerminal() && !global.quiet;
     PrintStream terminal = live ? console().err() : null;
@@ -115,6 +128,13 @@ final class DesignCommand extends BaseCommand {
       progress.end();
       progress.save();
     }
+  }
+
+  private static <N extends Number> N positive(String option, N value) {
+    if (!(value.doubleValue() > 0)) {
+      throw new InputException(Place.option(option), "must be greater than 0 but was " + value);
+    }
+    return value;
   }
 
   private @Nullable SearchState savedState() {

@@ -148,6 +148,7 @@ public final class DesignJob {
       findings.about(found);
       findings.about(record);
       gapNotDecided(findings);
+      limitsBroken(best, findings);
       List<Measured> measured =
           asDrawn == null ? null : preparation.measurements().against(asDrawn, findings);
       return new RunResult(
@@ -167,8 +168,15 @@ public final class DesignJob {
           measured,
           findings.records(),
           Cautions.of(preparation.stack()),
-          provenance.build(spec.seed(), repeatCommand, settingsOf(settings)));
+          provenance.build(spec.seed(), repeat(repeatCommand, outcome), settingsOf(settings)));
     }
+  }
+
+  /** A search that was ended by the clock is repeated by the number of its generations. */
+  private static String repeat(String command, SearchOutcome outcome) {
+    return outcome.stop() == StopReason.TIME
+        ? command + " --generations " + outcome.generations()
+        : command;
   }
 
   /** Not for an interrupted search: whoever stops it wants to leave. */
@@ -228,6 +236,17 @@ public final class DesignJob {
               "search.aim",
               "matched current alone cannot decide a bandgap, since thickness trades for it; among designs within %s mA cm⁻² the one with the largest sum of gaps was taken"
                   .formatted(StackObjective.GAP_TIE_MA_PER_CM2)));
+    }
+  }
+
+  private static void limitsBroken(Candidate best, Findings findings) {
+    if (!best.isFeasible()) {
+      findings.add(
+          new Finding(
+              "limit-broken",
+              Severity.SERIOUS,
+              "search.limits",
+              "no design was found that keeps every limit; this one comes nearest: widen a range or a limit"));
     }
   }
 

@@ -37,13 +37,26 @@ final class Findings {
     addAll(Slips.of(stack));
     addAll(model.prepared().examine(design));
     if (!stack.isMonochromatic() && !stack.subcells().isEmpty()) {
+      perfectCollection(stack);
+      outsideGrid(stack);
+    }
+  }
+
+  private void perfectCollection(ResolvedStack stack) {
+    boolean stated =
+        stack.scenario().subcells().stream()
+            .map(subcell -> subcell.diode())
+            .allMatch(
+                diode ->
+                    diode.collectionFraction().isPresent()
+                        || diode.diffusionLengthNm().isPresent());
+    if (!stated) {
       add(
           new Finding(
               "perfect-collection",
               Severity.NOTE,
               "all subcells",
               "photocurrents are absorbed light; every absorbed photon is assumed to be collected"));
-      outsideGrid(stack);
     }
   }
 

@@ -125,6 +125,22 @@ public record SearchSettings(
         failureFraction);
   }
 
+  /** The same without a budget of time. */
+  public SearchSettings withoutTime() {
+    return new SearchSettings(
+        seed,
+        threads,
+        populationSize,
+        evaluations,
+        OptionalDouble.empty(),
+        generations,
+        rounds,
+        stallGenerations,
+        stallFraction,
+        refined,
+        failureFraction);
+  }
+
   /** The same, ended after so many generations. */
   public SearchSettings withGenerations(int count) {
     return new SearchSettings(
