@@ -83,7 +83,7 @@ class DesignIT {
     JsonNode whole = design(PLANAR, "--threads", "1", "--set", "grid.stepNm=1");
     Path broken = folder.resolve("broken");
     Process process =
-        Program.builder(
+        Program.builderWithSignals(
                 folder,
                 "design",
                 Program.scenario(PLANAR).toString(),

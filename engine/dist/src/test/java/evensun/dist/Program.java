@@ -40,6 +40,17 @@ final class Program {
     return new ProcessBuilder(command).directory(workingFolder.toFile());
   }
 
+  /**
+   * As above, with Ctrl-C as a terminal gives it: a build in the background hands the signal down
+   * as ignored, and a Java process then never sees it.
+   */
+  static ProcessBuilder builderWithSignals(Path workingFolder, String... arguments) {
+    ProcessBuilder builder = builder(workingFolder, arguments);
+    List<String> command = new ArrayList<>(List.of("env", "--default-signal=INT"));
+    command.addAll(builder.command());
+    return builder.command(command);
+  }
+
   Run run(String... arguments) {
     return runWithInput("", arguments);
   }
