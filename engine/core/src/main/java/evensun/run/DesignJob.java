@@ -2,6 +2,7 @@ package evensun.run;
 
 import evensun.evaluation.Aim;
 import evensun.evaluation.Bench;
+import evensun.evaluation.EfficiencyAim;
 import evensun.evaluation.Limit;
 import evensun.evaluation.Model;
 import evensun.evaluation.Neighbourhood;
@@ -149,6 +150,7 @@ public final class DesignJob {
       findings.about(record);
       gapNotDecided(findings);
       limitsBroken(best, findings);
+      pairingOfTheAim(found, findings);
       List<Measured> measured =
           asDrawn == null ? null : preparation.measurements().against(asDrawn, findings);
       return new RunResult(
@@ -236,6 +238,21 @@ public final class DesignJob {
               "search.aim",
               "matched current alone cannot decide a bandgap, since thickness trades for it; among designs within %s mA cm⁻² the one with the largest sum of gaps was taken"
                   .formatted(StackObjective.GAP_TIE_MA_PER_CM2)));
+    }
+  }
+
+  /** The search always works with step edges; the report may have something better. */
+  private void pairingOfTheAim(Outcome found, Findings findings) {
+    if (aim instanceof EfficiencyAim
+        && found.electrical() != null
+        && !found.electrical().pairing().contains("step edge")) {
+      findings.add(
+          new Finding(
+              "aim-from-step-edges",
+              Severity.WARNING,
+              "search.aim",
+              "the search ranked designs with saturation currents from step edges, the reported efficiency uses %s; set device.saturation: step-edge to have both alike"
+                  .formatted(found.electrical().pairing())));
     }
   }
 
