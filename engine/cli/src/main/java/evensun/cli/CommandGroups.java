@@ -36,7 +36,8 @@ final class CommandGroups {
       CommandLine command = left.remove(name);
       if (command != null && !command.getCommandSpec().usageMessage().hidden()) {
         String[] description = command.getCommandSpec().usageMessage().description();
-        String first = description.length == 0 ? "" : description[0].replaceAll("[.:;] .*", ".");
+        String first =
+            description.length == 0 ? "" : description[0].replaceAll("([.:;]|, and) .*", ".");
         lines.append("  %-10s %s%n".formatted(name, first));
       }
     }

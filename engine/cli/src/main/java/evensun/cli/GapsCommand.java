@@ -32,7 +32,7 @@ import picocli.CommandLine.Option;
     name = "gaps",
     description = {
       "Shows which bandgaps to aim at: detailed-balance efficiency of two or three junctions.",
-      "Prints the optimum and what is within 1 % of it; --html and --csv write the whole map."
+      "Prints the optimum and what is within 1 %% of it; --html and --csv write the whole map."
     },
     footer = {
       "",

@@ -24,7 +24,8 @@ import picocli.CommandLine.Parameters;
       "Lists the library: source, range, bandgap, hazards; or shows materials in full.",
       "With --check it examines a table of your own and ends with the lines to paste into a"
           + " scenario."
-    })
+    },
+    footer = {"", "Example:", "  evensun materials crystalline-silicon"})
 final class MaterialsCommand extends BaseCommand {
 
   private static final List<String> KINDS =

@@ -22,7 +22,8 @@ import tools.jackson.databind.node.ObjectNode;
       "Lists the solver plugins: what is loaded, from where, and what did not load and why.",
       "A plugin is code that runs with your rights. Plugins come from the distribution and from"
           + " folders named with --plugins, from nowhere else."
-    })
+    },
+    footer = {"", "Example:", "  evensun plugins --format json"})
 final class PluginsCommand extends BaseCommand {
 
   @Override
