@@ -12,17 +12,29 @@ import java.util.Set;
  * @param oblique whether it takes incidences away from the normal
  * @param incoherent whether it takes incoherent layers
  * @param statistical whether its results carry a statistical error
+ * @param diffuse whether it takes diffuse light, {@link Incidence#diffuse}
  */
 public record Traits(
     Set<String> features,
     Set<Class<?>> abilities,
     boolean oblique,
     boolean incoherent,
-    boolean statistical) {
+    boolean statistical,
+    boolean diffuse) {
 
   public Traits {
     features = Set.copyOf(features);
     abilities = Set.copyOf(abilities);
+  }
+
+  /** A solver that takes no diffuse light. */
+  public Traits(
+      Set<String> features,
+      Set<Class<?>> abilities,
+      boolean oblique,
+      boolean incoherent,
+      boolean statistical) {
+    this(features, abilities, oblique, incoherent, statistical, false);
   }
 
   /** A solver for flat coherent layers at normal incidence, without further abilities. */
