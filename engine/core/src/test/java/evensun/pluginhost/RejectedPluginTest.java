@@ -152,7 +152,7 @@ class RejectedPluginTest {
   }
 
   @ParameterizedTest
-  @CsvSource({">=1.0.0 & <2.0.0", "1.x", "^1.0.0", "~1.0", "1.0.0 - 1.9.9", "=1.0.0"})
+  @CsvSource({">=1.0.0 & <2.0.0", "1.x", "^1.0.0", "~1.1", "1.0.0 - 1.9.9", "=1.1.0"})
   void closedVersionRangesThatAreMet(String requires) {
     working(work, "x").descriptor("x", requires).jar(plugins.resolve("good.jar"));
     try (PluginHost host = PluginHost.open(List.of(plugins))) {
