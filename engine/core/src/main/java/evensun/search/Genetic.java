@@ -67,7 +67,7 @@ final class Genetic {
    */
   List<Individual> first(List<double[]> given, int generation, Tally tally) {
     SplittableRandom random = Numbers.random(settings.seed(), generation);
-    int count = settings.populationSize();
+    int count = settings.effort().populationSize();
     double[][] cube = latinHypercube(count, random);
     List<Phenotype<DoubleGene, Fitness>> population = new ArrayList<>(count);
     for (int i = 0; i < count; i++) {

@@ -88,7 +88,8 @@ public final class ParetoSearch {
       if (rounds.tooManyFailures(state.evaluations(), state.failureCount())) {
         return outcome(state, StopReason.FAILURES);
       }
-      if (state.evaluations() + settings.populationSize() / 2 > settings.evaluations()) {
+      if (state.evaluations() + settings.effort().populationSize() / 2
+          > settings.budget().evaluations()) {
         return outcome(state, StopReason.EVALUATIONS);
       }
       if (stopwatch.timeIsUp() || rounds.timeSpent(state.history())) {

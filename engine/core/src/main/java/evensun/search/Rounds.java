@@ -13,13 +13,13 @@ record Rounds(SearchSettings settings) {
 
   /** Rounds that start afresh; fewer where the budget is too small to let each converge. */
   int fresh() {
-    int affordable = settings.evaluations() / (20 * settings.populationSize());
-    return Math.max(1, Math.min(settings.rounds(), affordable));
+    int affordable = settings.budget().evaluations() / (20 * settings.effort().populationSize());
+    return Math.max(1, Math.min(settings.effort().rounds(), affordable));
   }
 
   /** Rounds at most: after the fresh ones, those that combine what was found. */
   int limit() {
-    return settings.rounds() == 1 ? 1 : fresh() + COMBINING;
+    return settings.effort().rounds() == 1 ? 1 : fresh() + COMBINING;
   }
 
   boolean isFresh(int round) {
@@ -42,7 +42,7 @@ record Rounds(SearchSettings settings) {
     double scale = best - own.get(0).mean();
     double gain = best - own.get(before).roundBest();
     // Without a feasible design yet there is no gain to measure, and every reason to go on.
-    return best > Double.NEGATIVE_INFINITY && !(gain > settings.stallFraction() * scale);
+    return best > Double.NEGATIVE_INFINITY && !(gain > settings.effort().stallFraction() * scale);
   }
 
   /**
@@ -51,25 +51,29 @@ record Rounds(SearchSettings settings) {
    */
   private int patience(int round) {
     boolean brief = !isFresh(round) && (round - fresh()) % 2 == 0;
-    return brief ? Math.min(2, settings.stallGenerations()) : settings.stallGenerations();
+    return brief
+        ? Math.min(2, settings.effort().stallGenerations())
+        : settings.effort().stallGenerations();
   }
 
   /** A fresh round may use its share of the budget, so that every round gets its turn. */
   private boolean spent(int round, List<GenerationRecord> history) {
     double share =
         isFresh(round)
-            ? 0.7 * settings.evaluations() * (round + 1) / fresh()
-            : 0.95 * settings.evaluations();
-    return history.get(history.size() - 1).evaluations() + settings.populationSize() > share;
+            ? 0.7 * settings.budget().evaluations() * (round + 1) / fresh()
+            : 0.95 * settings.budget().evaluations();
+    return history.get(history.size() - 1).evaluations() + settings.effort().populationSize()
+        > share;
   }
 
   boolean timeSpent(List<GenerationRecord> history) {
-    return settings.generations().isPresent()
-        && history.size() >= settings.generations().getAsInt();
+    return settings.budget().generations().isPresent()
+        && history.size() >= settings.budget().generations().getAsInt();
   }
 
   boolean budgetSpent(int evaluations) {
-    return evaluations + settings.populationSize() > 0.95 * settings.evaluations();
+    return evaluations + settings.effort().populationSize()
+        > 0.95 * settings.budget().evaluations();
   }
 
   /** Whether the last rounds, all of which combined, gained nothing worth while. */
@@ -91,6 +95,6 @@ record Rounds(SearchSettings settings) {
   }
 
   boolean tooManyFailures(int evaluations, int failures) {
-    return evaluations >= 50 && failures > settings.failureFraction() * evaluations;
+    return evaluations >= 50 && failures > settings.effort().failureFraction() * evaluations;
   }
 }

@@ -121,7 +121,7 @@ final class Steps {
     }
     if (!rounds.isFresh(state.round())) {
       state.optima().stream()
-          .limit(settings.populationSize() / 2)
+          .limit(settings.effort().populationSize() / 2)
           .forEach(optimum -> given.add(optimum.geneArray()));
     }
     return given;
@@ -136,11 +136,13 @@ final class Steps {
   private SearchState refinement(SearchState state) {
     Tally tally = new Tally(state.evaluations(), state.failures());
     double floor = floor(state);
-    int most = Math.max(1, settings.refined());
+    int most = Math.max(1, settings.effort().refined());
     List<Individual> starts =
         Optima.distinct(space, unrefined(state), floor, DISTINCT_STARTS, most);
     List<Individual> refined =
-        settings.refined() == 0 ? starts : refiner.refine(starts, floor, budget(state), tally);
+        settings.effort().refined() == 0
+            ? starts
+            : refiner.refine(starts, floor, budget(state), tally);
     List<Individual> all = new ArrayList<>(state.optima());
     all.addAll(refined);
     List<Double> roundBests = new ArrayList<>(state.roundBests());
@@ -158,7 +160,7 @@ final class Steps {
 
   /** Never more than the genetic part took, so that an end by time is not long overdue. */
   private int budget(SearchState state) {
-    return Math.min(settings.evaluations() - state.evaluations(), state.evaluations());
+    return Math.min(settings.budget().evaluations() - state.evaluations(), state.evaluations());
   }
 
   private SearchState nextRound(

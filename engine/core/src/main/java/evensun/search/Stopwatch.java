@@ -18,8 +18,8 @@ final class Stopwatch {
 
   /** Whether the genetic part must end so that the refinement fits into the time as well. */
   boolean timeIsUp() {
-    return settings.timeSeconds().isPresent()
-        && elapsedSeconds() > 0.7 * settings.timeSeconds().getAsDouble();
+    return settings.budget().timeSeconds().isPresent()
+        && elapsedSeconds() > 0.7 * settings.budget().timeSeconds().getAsDouble();
   }
 
   Progress progress(SearchState state) {
@@ -39,8 +39,8 @@ final class Stopwatch {
     if (done <= 0) {
       return Double.NaN;
     }
-    double byEvaluations = elapsed / done * (settings.evaluations() - state.evaluations());
-    double byTime = settings.timeSeconds().orElse(Double.POSITIVE_INFINITY) - elapsed;
+    double byEvaluations = elapsed / done * (settings.budget().evaluations() - state.evaluations());
+    double byTime = settings.budget().timeSeconds().orElse(Double.POSITIVE_INFINITY) - elapsed;
     return Math.max(0, Math.min(byEvaluations, byTime));
   }
 }
