@@ -231,7 +231,9 @@ final class AwkwardRuns {
             List.of(),
             List.of(),
             null,
-            List.of());
+            List.of(),
+            null,
+            null);
     return with(
         r,
         "Failed search",

@@ -231,7 +231,9 @@ final class SampleRuns {
             new Optimum(aim - 0.21, Map.of(COATING, 71.0, CONTACT, 41.5, ABSORBER, 512.0))),
         List.of(),
         null,
-        List.of("Two distinct optima were found; the second is 0.21 mA cm⁻² worse."));
+        List.of("Two distinct optima were found; the second is 0.21 mA cm⁻² worse."),
+        null,
+        null);
   }
 
   private static List<MaterialUse> materials(Outcome found) {

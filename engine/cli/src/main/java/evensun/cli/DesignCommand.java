@@ -63,6 +63,14 @@ final class DesignCommand extends BaseCommand {
       description = "Ends after so many generations; repeats a run that was stopped by its time.")
   Integer generations;
 
+  @Option(
+      names = "--exhaustive",
+      description = {
+        "Also looks at every point of a grid, for up to four varied quantities, and says whether the",
+        "search had missed something; done unasked where it takes less than two seconds."
+      })
+  boolean exhaustive;
+
   @Override
   public Integer call() {
     GlobalOptions global = global();
@@ -123,7 +131,8 @@ final class DesignCommand extends BaseCommand {
     PrintStream terminal = live ? console().err() : null;
     ProgressLine progress = new ProgressLine(terminal, folder, job.aimUnit());
     try {
-      return job.run(searchSettings, progress, savedState(), interruption, repeatCommand());
+      return job.run(
+          searchSettings, progress, savedState(), interruption, exhaustive, repeatCommand());
     } finally {
       progress.end();
       progress.save();
@@ -152,6 +161,7 @@ final class DesignCommand extends BaseCommand {
   }
 
   private String repeatCommand() {
-    return CommandText.of("design", RunFiles.SCENARIO, settings);
+    String command = CommandText.of("design", RunFiles.SCENARIO, settings);
+    return exhaustive ? command + " --exhaustive" : command;
   }
 }

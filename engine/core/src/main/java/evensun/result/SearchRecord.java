@@ -23,6 +23,9 @@ import org.jspecify.annotations.Nullable;
  * @param constraints limits kept
  * @param front designs none of which is better in every aim, when several aims were given
  * @param notes what the search says about its result, in words
+ * @param grid what an exhaustive grid found, where one was tried
+ * @param stepCost what standing on the tool's steps costs, in the unit of the aim: against the best
+ *     design nearby that disregards them; null where nothing stands on steps or it is not known
  */
 public record SearchRecord(
     String aim,
@@ -39,7 +42,9 @@ public record SearchRecord(
     List<Optimum> optima,
     List<ConstraintRecord> constraints,
     @Nullable Front front,
-    List<String> notes) {
+    List<String> notes,
+    @Nullable Grid grid,
+    @Nullable Double stepCost) {
 
   /**
    * One generation.
@@ -111,4 +116,22 @@ public record SearchRecord(
    * @param values value of each varied quantity by key
    */
   public record FrontPoint(List<Double> aims, Map<String, Double> values) {}
+
+  /**
+   * Every point of a grid over the ranges, its best points refined.
+   *
+   * @param points number of points of each varied quantity, in their order
+   * @param evaluations designs evaluated
+   * @param best its best design; null where none could be evaluated
+   * @param better whether that is better than the design found by more than the tolerance
+   * @param complete whether every point was seen; false when it was interrupted
+   * @param asked whether it was asked for; else it was tried because it takes little time
+   */
+  public record Grid(
+      List<Integer> points,
+      long evaluations,
+      @Nullable Optimum best,
+      boolean better,
+      boolean complete,
+      boolean asked) {}
 }

@@ -16,6 +16,7 @@ import evensun.scenario.InputException;
 import evensun.scenario.Place;
 import evensun.scenario.SearchSpec;
 import evensun.search.Candidate;
+import evensun.search.Exhaustive;
 import evensun.search.Freedom;
 import evensun.search.Proof;
 import evensun.search.Search;
@@ -95,6 +96,7 @@ public final class DesignJob {
    * @param listener hears about progress and states
    * @param resumed where an earlier run stood, if it is to go on
    * @param cancelled whether the user asked to stop
+   * @param exhaustive whether to check the result on a grid whatever time that takes
    * @param repeatCommand command that repeats the run
    * @throws EvaluationFailed when not a single design could be evaluated
    * @throws CancellationException when it was stopped before the first one
@@ -104,7 +106,9 @@ public final class DesignJob {
       SearchListener listener,
       @Nullable SearchState resumed,
       BooleanSupplier cancelled,
+      boolean exhaustive,
       String repeatCommand) {
+    checkVariableCount(exhaustive);
     ProvenanceBuilder provenance = new ProvenanceBuilder(preparation);
     Search search = new Search(objective, settings, listener, cancelled);
     SearchOutcome outcome = resumed == null ? search.run() : search.resume(resumed);
@@ -119,12 +123,47 @@ public final class DesignJob {
               : "no design could be evaluated: "
                   + outcome.failures().get(0).first().verdict().failure());
     }
-    return result(outcome, best, settings, provenance, repeatCommand);
+    Look look = look(outcome, best, settings.threads(), exhaustive, cancelled);
+    return result(outcome, best, look, settings, provenance, repeatCommand);
+  }
+
+  private void checkVariableCount(boolean exhaustive) {
+    int count = varied.variables().size();
+    if (exhaustive && count > Exhaustive.MOST_VARIABLES) {
+      throw new InputException(
+          Place.option("--exhaustive"),
+          "a grid takes at most %d varied quantities, but %d vary; fix some of them in search.vary"
+              .formatted(Exhaustive.MOST_VARIABLES, count));
+    }
+  }
+
+  /** What a look around the result says. */
+  private record Look(List<Freedom> freedoms, Checks checks) {}
+
+  /** Not for an interrupted search: whoever stops it wants to leave. */
+  private Look look(
+      SearchOutcome outcome,
+      Candidate best,
+      int threads,
+      boolean exhaustive,
+      BooleanSupplier cancelled) {
+    if (outcome.stop() == StopReason.INTERRUPTED) {
+      return new Look(List.of(), Checks.NONE);
+    }
+    int evaluations = outcome.evaluations();
+    List<Freedom> freedoms =
+        best.isFeasible()
+            ? new Proof(objective, threads, evaluations, cancelled)
+                .freedoms(best, SearchRecords.EQUALLY_GOOD)
+            : List.of();
+    return new Look(
+        freedoms, Checks.of(objective, best, exhaustive, evaluations, threads, cancelled));
   }
 
   private RunResult result(
       SearchOutcome outcome,
       Candidate best,
+      Look look,
       SearchSettings settings,
       ProvenanceBuilder provenance,
       String repeatCommand) {
@@ -142,8 +181,9 @@ public final class DesignJob {
               outcome,
               best,
               asDrawn == null ? null : aimOf(asDrawn),
-              freedoms(outcome, best, records.equallyGoodLoss(), settings.threads()),
-              Limits.records(limits, bench.design().thicknessNm, found));
+              look.freedoms(),
+              Limits.records(limits, bench.design().thicknessNm, found),
+              look.checks());
       findings.about(preparation.stack(), model, bench.design());
       findings.addAll(powered.findings());
       findings.about(found);
@@ -179,13 +219,6 @@ public final class DesignJob {
     return outcome.stop() == StopReason.TIME
         ? command + " --generations " + outcome.generations()
         : command;
-  }
-
-  /** Not for an interrupted search: whoever stops it wants to leave. */
-  private List<Freedom> freedoms(SearchOutcome outcome, Candidate best, double loss, int threads) {
-    return outcome.stop() == StopReason.INTERRUPTED || !best.isFeasible()
-        ? List.of()
-        : new Proof(objective, threads, outcome.evaluations(), () -> false).freedoms(best, loss);
   }
 
   private Neighbourhood around(Candidate best) {
@@ -269,12 +302,12 @@ public final class DesignJob {
 
   private static Map<String, String> settingsOf(SearchSettings settings) {
     Map<String, String> map = new LinkedHashMap<>();
-    map.put("search.populationSize", String.valueOf(settings.populationSize()));
-    map.put("search.evaluations", String.valueOf(settings.evaluations()));
-    map.put("search.rounds", String.valueOf(settings.rounds()));
-    map.put("search.stallGenerations", String.valueOf(settings.stallGenerations()));
-    map.put("search.stallFraction", String.valueOf(settings.stallFraction()));
-    map.put("search.refined", String.valueOf(settings.refined()));
+    map.put("search.populationSize", String.valueOf(settings.effort().populationSize()));
+    map.put("search.evaluations", String.valueOf(settings.budget().evaluations()));
+    map.put("search.rounds", String.valueOf(settings.effort().rounds()));
+    map.put("search.stallGenerations", String.valueOf(settings.effort().stallGenerations()));
+    map.put("search.stallFraction", String.valueOf(settings.effort().stallFraction()));
+    map.put("search.refined", String.valueOf(settings.effort().refined()));
     return map;
   }
 }

@@ -14,6 +14,8 @@ import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Locale;
 import java.util.Set;
+import java.util.stream.Collectors;
+import org.jspecify.annotations.Nullable;
 
 /** Collects what a reader should know about a result, most severe first. */
 final class Findings {
@@ -122,6 +124,7 @@ final class Findings {
               "the search stopped before it had converged (%s); repeat it with a larger budget or resume it"
                   .formatted(search.stopped())));
     }
+    about(search.grid(), search);
     if (search.failures() > 0) {
       add(
           new Finding(
@@ -131,6 +134,29 @@ final class Findings {
               "%d of %d designs could not be evaluated and were left out"
                   .formatted(search.failures(), search.evaluations())));
     }
+  }
+
+  private void about(SearchRecord.@Nullable Grid grid, SearchRecord search) {
+    if (grid != null && grid.better() && grid.best() != null) {
+      add(
+          new Finding(
+              "grid-found-better",
+              Severity.SERIOUS,
+              "search",
+              "an exhaustive grid found a better design: %s %.4f %s against %.4f, at %s; search again with another seed or a larger budget"
+                  .formatted(
+                      search.aim(),
+                      grid.best().aim(),
+                      search.aimUnit(),
+                      search.aimFound(),
+                      values(grid.best()))));
+    }
+  }
+
+  private static String values(SearchRecord.Optimum optimum) {
+    return optimum.values().entrySet().stream()
+        .map(entry -> entry.getKey() + " " + number(entry.getValue()))
+        .collect(Collectors.joining(", "));
   }
 
   /** A number as people write it: no trailing zeros, no exponent for usual sizes. */

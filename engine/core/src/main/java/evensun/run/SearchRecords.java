@@ -19,8 +19,8 @@ final class SearchRecords {
   /** A value this close to a bound, as a share of the range, stands on it. */
   private static final double ON_BOUND = 1e-6;
 
-  /** Far below what a deposition repeats, in the unit of the aim. */
-  private static final double EQUALLY_GOOD = 0.02;
+  /** Loss up to which designs count as equally good, in the unit of the aim. */
+  static final double EQUALLY_GOOD = 0.02;
 
   private final Varied varied;
   private final Aim aim;
@@ -36,13 +36,15 @@ final class SearchRecords {
    * @param asDrawn the aim of the stack as drawn, null where it could not be evaluated
    * @param freedoms how far each value may move, empty when that is not known
    * @param constraints the limits at the design found
+   * @param checks what further checks say
    */
   SearchRecord record(
       SearchOutcome outcome,
       Candidate best,
       @Nullable Double asDrawn,
       List<Freedom> freedoms,
-      List<SearchRecord.ConstraintRecord> constraints) {
+      List<SearchRecord.ConstraintRecord> constraints,
+      Checks checks) {
     return new SearchRecord(
         aim.name(),
         aim.unit(),
@@ -63,7 +65,9 @@ final class SearchRecords {
         outcome.optima().stream().map(this::optimum).toList(),
         constraints,
         null,
-        notes(outcome, freedoms));
+        notes(outcome, freedoms),
+        checks.grid(this),
+        checks.stepCost());
   }
 
   private List<SearchRecord.VariableRecord> variables(Candidate best, List<Freedom> freedoms) {
@@ -97,7 +101,7 @@ final class SearchRecords {
           String.format(
               Locale.ROOT,
               "equally good: the other values chosen anew, at most %s %s less",
-              equallyGoodLoss(),
+              EQUALLY_GOOD,
               aim.unit()));
     }
     freedoms.stream()
@@ -107,11 +111,6 @@ final class SearchRecords {
       notes.add(spread(outcome.roundBests()));
     }
     return notes;
-  }
-
-  /** Loss up to which a design counts as equally good, in the unit of the aim. */
-  double equallyGoodLoss() {
-    return EQUALLY_GOOD;
   }
 
   private String atBound(Freedom freedom) {
@@ -154,7 +153,7 @@ final class SearchRecords {
     return found >= variable.high() - margin ? "high" : null;
   }
 
-  private SearchRecord.Optimum optimum(Candidate candidate) {
+  SearchRecord.Optimum optimum(Candidate candidate) {
     Map<String, Double> values = new LinkedHashMap<>();
     for (int v = 0; v < varied.variables().size(); v++) {
       values.put(varied.variables().get(v).key(), candidate.values().get(v));

@@ -45,6 +45,11 @@ public record Variable(
     return new Variable(key, "", 0, choices.size() - 1, 1, drawn, choices);
   }
 
+  /** The same number between the same bounds, free of its steps. */
+  Variable withoutSteps() {
+    return new Variable(key, unit, low, high, 0, drawn);
+  }
+
   /** Whether the value is an index into {@link #choices}. */
   public boolean isChoice() {
     return !choices.isEmpty();

@@ -141,7 +141,9 @@ final class SampleResult {
             List.of("mA cm⁻²", "nm"),
             List.of(new SearchRecord.FrontPoint(List.of(1.0, 2.0), map("x", 3.0))),
             0),
-        List.of("One optimum."));
+        List.of("One optimum."),
+        null,
+        null);
   }
 
   private static MaterialUse material() {

@@ -35,6 +35,20 @@ class FreedomsOfChoiceTest {
     }
   }
 
+  /** Closed form: the hill of height 0 at (61.2, 0.33) loses (1.2/50)² + 0.03² at the steps. */
+  @Test
+  void stepsHaveTheirCost() {
+    Problem stepped =
+        Problem.of(
+            x -> -Math.pow((x[0] - 61.2) / 50, 2) - Math.pow(x[1] - 0.33, 2),
+            new Variable("a", "nm", 40, 120, 5, 40),
+            new Variable("b", "", 0, 0.95, 0.1, 0));
+    Candidate best = run(stepped, 1).best();
+    assertThat(StepCost.of(stepped, best, 2, 2000, () -> false).getAsDouble())
+        .isCloseTo(1.2 * 1.2 / 2500 + 0.03 * 0.03, within(1e-7));
+    assertThat(StepCost.of(limited(8), best, 2, 2000, () -> false)).isEmpty(); // no steps
+  }
+
   /** Closed form: a narrow valley along a + b = 100 on steps of 7; the pair must move together. */
   @Test
   void stepsMoveInPairs() {

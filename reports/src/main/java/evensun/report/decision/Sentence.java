@@ -34,7 +34,7 @@ public final class Sentence {
         search.variables().isEmpty()
             ? "Deposit the stack as listed"
             : "Deposit " + Deposit.phrase(search.variables());
-    return deposit + ": " + gives(result, search) + ".";
+    return deposit + ": " + gives(result, search) + GridWords.headline(search) + ".";
   }
 
   /** Whether a search could evaluate no design at all. */

@@ -4,6 +4,7 @@ import evensun.report.chart.Axis;
 import evensun.report.chart.Chart;
 import evensun.report.chart.Kind;
 import evensun.report.chart.Series;
+import evensun.report.decision.GridWords;
 import evensun.report.page.Block;
 import evensun.report.page.Section;
 import evensun.report.page.Table;
@@ -36,6 +37,8 @@ public final class SearchSection {
     List<Block> blocks = new ArrayList<>();
     blocks.add(new Block.Prose(story(search)));
     search.notes().forEach(note -> blocks.add(new Block.Prose(note)));
+    stepCost(search).ifPresent(text -> blocks.add(new Block.Prose(text)));
+    GridWords.of(search).ifPresent(text -> blocks.add(new Block.Prose(text + ".")));
     if (search.history().size() > 1) {
       blocks.add(Tables.plot(convergence(search)));
     }
@@ -82,6 +85,15 @@ public final class SearchSection {
           .append(" could not be evaluated");
     }
     return text.append('.').toString();
+  }
+
+  private static Optional<String> stepCost(SearchRecord search) {
+    return Optional.ofNullable(search.stepCost())
+        .map(
+            cost ->
+                "Standing on the steps of the tool costs "
+                    + Numbers.withUnit(Numbers.fixed(cost, 4), search.aimUnit())
+                    + " against the best design nearby that disregards them.");
   }
 
   private static Chart convergence(SearchRecord search) {
@@ -143,9 +155,12 @@ public final class SearchSection {
         new Table.Builder("table-constraints", "Limits kept")
             .words("limit")
             .numbers("at the found design", "")
-            .words("binds");
+            .words("state");
     for (ConstraintRecord c : search.constraints()) {
-      table.row(c.text(), Numbers.significant(c.value(), 5), c.active() ? "yes" : "no");
+      table.row(
+          c.text(),
+          Numbers.significant(c.value(), 5),
+          c.active() ? "active: it holds the design" : "slack");
     }
     return table.build();
   }

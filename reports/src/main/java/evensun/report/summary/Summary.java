@@ -1,5 +1,6 @@
 package evensun.report.summary;
 
+import evensun.report.decision.GridWords;
 import evensun.report.decision.Sentence;
 import evensun.report.decision.VerdictRules;
 import evensun.report.figure.Budget;
@@ -59,7 +60,7 @@ public record Summary(
         Sentence.of(result),
         verdict.level().words() + points,
         tables,
-        List.of(findings(result.findings())));
+        closing(result));
   }
 
   private static Listing currents(RunResult result) {
@@ -180,6 +181,16 @@ public record Summary(
             ? List.of(head, "as drawn", "found", "change")
             : List.of(head, "as drawn"),
         rows);
+  }
+
+  private static List<String> closing(RunResult result) {
+    List<String> lines = new ArrayList<>();
+    SearchRecord search = result.search();
+    if (search != null) {
+      GridWords.of(search).ifPresent(text -> lines.add(text + "."));
+    }
+    lines.add(findings(result.findings()));
+    return lines;
   }
 
   private static String findings(List<FindingRecord> findings) {
