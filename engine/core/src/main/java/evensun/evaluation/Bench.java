@@ -32,7 +32,9 @@ public final class Bench implements AutoCloseable {
     this.bandgapEv = model.stack().slots().stream().mapToDouble(s -> s.fillValue()).toArray();
     this.evaluator = model.prepared().newEvaluator();
     this.sums = currentSums(model);
-    this.gradient = evaluator.ability(Gradient.class);
+    // A row that changes with a thickness is unknown to the solver, and so to its derivatives.
+    this.gradient =
+        filling.followsThickness() ? Optional.empty() : evaluator.ability(Gradient.class);
     this.ties = Tie.of(model.stack()).toArray(Tie[]::new);
   }
 
@@ -73,7 +75,7 @@ public final class Bench implements AutoCloseable {
 
   private void write(Parameter parameter, double value) {
     switch (parameter.kind()) {
-      case THICKNESS -> design.thicknessNm[parameter.index()] = value;
+      case THICKNESS -> setThickness(parameter.index(), value);
       case BANDGAP -> setBandgap(parameter.index(), value);
       case KNOB -> design.knob[parameter.index()] = value;
     }
@@ -113,12 +115,21 @@ public final class Bench implements AutoCloseable {
     }
   }
 
+  private void setThickness(int layer, double value) {
+    if (value != design.thicknessNm[layer]) {
+      design.thicknessNm[layer] = value;
+      filling.followThickness(design, layer, bandgapEv);
+    }
+  }
+
   /** Takes over the design of another bench of the same stack. */
   public void copyFrom(Bench other) {
+    for (int layer = 0; layer < design.thicknessNm.length; layer++) {
+      setThickness(layer, other.design.thicknessNm[layer]);
+    }
     for (int slot = 0; slot < bandgapEv.length; slot++) {
       setBandgap(slot, other.bandgapEv[slot]);
     }
-    System.arraycopy(other.design.thicknessNm, 0, design.thicknessNm, 0, design.thicknessNm.length);
     System.arraycopy(other.design.material, 0, design.material, 0, design.material.length);
     System.arraycopy(other.design.knob, 0, design.knob, 0, design.knob.length);
   }

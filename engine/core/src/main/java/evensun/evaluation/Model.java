@@ -149,14 +149,35 @@ public final class Model implements AutoCloseable {
 
     private final ResolvedStack stack;
     private final Material.Filler[] fillers;
+    private final int[] layerOf;
 
     Filling(ResolvedStack stack) {
       this.stack = stack;
+      this.layerOf = stack.layersOfSlots();
       double[] wavelengthNm = stack.grid().wavelengthNm();
       this.fillers =
           stack.slots().stream()
-              .map(slot -> slot.material().on(wavelengthNm))
+              .map(slot -> slot.material().on(wavelengthNm, stack.spectrum()))
               .toArray(Material.Filler[]::new);
+    }
+
+    /** Whether a row of optical constants depends on the thickness of its layer. */
+    boolean followsThickness() {
+      for (Material.Filler filler : fillers) {
+        if (filler.followsThickness()) {
+          return true;
+        }
+      }
+      return false;
+    }
+
+    /** Writes the rows that depend on the thickness of a layer. */
+    void followThickness(Design design, int layer, double[] bandgapEv) {
+      for (int slot = 0; slot < fillers.length; slot++) {
+        if (fillers[slot].followsThickness() && layerOf[slot] == layer) {
+          fill(design, slot, bandgapEv[slot]);
+        }
+      }
     }
 
     /** Writes the stack as drawn into a design. */
@@ -177,7 +198,8 @@ public final class Model implements AutoCloseable {
 
     /** Writes one row of optical constants. */
     void fill(Design design, int slot, double bandgapEv) {
-      fillers[slot].fill(bandgapEv, design.n[slot], design.k[slot]);
+      double thicknessNm = layerOf[slot] < 0 ? 0 : design.thicknessNm[layerOf[slot]];
+      fillers[slot].fill(bandgapEv, thicknessNm, design.n[slot], design.k[slot]);
       if (slot == stack.incidentSlot()) {
         java.util.Arrays.fill(design.k[slot], 0); // below 1e-6 by the check of the resolver
       }

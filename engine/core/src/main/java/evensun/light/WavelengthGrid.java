@@ -63,10 +63,16 @@ public final class WavelengthGrid {
 
   /** [w + 1] edges of the bins in nm; a fresh array. */
   public double[] edgesNm() {
-    double[] edges = new double[wavelengthNm.length + 1];
-    edges[0] = fromNm();
-    edges[wavelengthNm.length] = toNm();
-    for (int i = 1; i < wavelengthNm.length; i++) {
+    return edgesNm(wavelengthNm);
+  }
+
+  /** [w + 1] edges of the bins around any rising wavelengths in nm; a fresh array. */
+  public static double[] edgesNm(double[] wavelengthNm) {
+    int size = wavelengthNm.length;
+    double[] edges = new double[size + 1];
+    edges[0] = wavelengthNm[0];
+    edges[size] = wavelengthNm[size - 1];
+    for (int i = 1; i < size; i++) {
       edges[i] = 0.5 * (wavelengthNm[i - 1] + wavelengthNm[i]);
     }
     return edges;

@@ -1,16 +1,20 @@
 package evensun.material;
 
 import evensun.light.Constants;
+import evensun.light.Spectrum;
+import evensun.light.WavelengthGrid;
 import evensun.spi.Finding;
 import evensun.spi.Severity;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import org.jspecify.annotations.Nullable;
 
 /**
  * An absorber of a chosen constant index whose absorption coefficient steps from zero to a constant
- * at the gap; in the bin that holds the gap it is weighed by the part of the bin above the gap, so
- * that currents are continuous in the gap.
+ * at the gap; in the bin that holds the gap one pass through the layer absorbs as if only the
+ * photons above the gap were there to absorb, so that currents are smooth in the gap and do not
+ * depend on the step of the grid.
  */
 public final class IdealAbsorber implements Material {
 
@@ -75,23 +79,67 @@ public final class IdealAbsorber implements Material {
 
   @Override
   public Filler on(double[] wavelengthNm) {
-    double[] edgesNm = new double[wavelengthNm.length + 1];
-    edgesNm[0] = wavelengthNm[0];
-    edgesNm[wavelengthNm.length] = wavelengthNm[wavelengthNm.length - 1];
-    for (int w = 1; w < wavelengthNm.length; w++) {
-      edgesNm[w] = 0.5 * (wavelengthNm[w - 1] + wavelengthNm[w]);
-    }
-    double[] grid = wavelengthNm.clone();
-    return (bandgapEv, n, k) -> fill(bandgapEv, grid, edgesNm, n, k);
+    return new StepFiller(wavelengthNm, WavelengthGrid.edgesNm(wavelengthNm), Optional.empty());
   }
 
-  private void fill(double bandgapEv, double[] gridNm, double[] edgesNm, double[] n, double[] k) {
-    double gapNm = Constants.HC_EV_NM / bandgapEv;
-    for (int w = 0; w < gridNm.length; w++) {
-      double width = edgesNm[w + 1] - edgesNm[w];
-      double above = width > 0 ? (gapNm - edgesNm[w]) / width : gapNm - gridNm[w];
-      n[w] = index;
-      k[w] = Math.min(Math.max(above, 0), 1) * absorptionPerCm * gridNm[w] / (4e7 * Math.PI);
+  @Override
+  public Filler on(double[] wavelengthNm, Spectrum light) {
+    return new StepFiller(wavelengthNm, WavelengthGrid.edgesNm(wavelengthNm), Optional.of(light));
+  }
+
+  private final class StepFiller implements Filler {
+
+    private final double[] gridNm;
+    private final double[] edgesNm;
+    private final @Nullable Spectrum light;
+
+    StepFiller(double[] gridNm, double[] edgesNm, Optional<Spectrum> light) {
+      this.gridNm = gridNm.clone();
+      this.edgesNm = edgesNm;
+      this.light = light.orElse(null);
     }
+
+    @Override
+    public void fill(double bandgapEv, double[] n, double[] k) {
+      fill(bandgapEv, 0, n, k);
+    }
+
+    @Override
+    public void fill(double bandgapEv, double thicknessNm, double[] n, double[] k) {
+      double gapNm = Constants.HC_EV_NM / bandgapEv;
+      for (int w = 0; w < gridNm.length; w++) {
+        n[w] = index;
+        k[w] = weighed(above(w, gapNm), thicknessNm) * gridNm[w] / (4e7 * Math.PI);
+      }
+    }
+
+    @Override
+    public boolean followsThickness() {
+      return true;
+    }
+
+    /** Part of the photons of a bin above the gap; of its width where there are none. */
+    private double above(int w, double gapNm) {
+      double from = edgesNm[w];
+      double to = edgesNm[w + 1];
+      if (gapNm <= from || gapNm >= to) {
+        return gridNm[w] <= gapNm ? 1 : 0;
+      }
+      double all = light == null ? 0 : light.photonCurrentMaPerCm2(from, to);
+      return all > 0
+          ? light.photonCurrentMaPerCm2(from, gapNm) / all
+          : (gapNm - from) / (to - from);
+    }
+  }
+
+  /**
+   * Absorption coefficient with which one pass absorbs the given part of what the full step would:
+   * −ln(1 − f (1 − exp(−αd)))/d, in cm⁻¹.
+   */
+  private double weighed(double part, double thicknessNm) {
+    double depth = absorptionPerCm * thicknessNm * 1e-7;
+    return part <= 0 || part >= 1 || !(depth > 0)
+        ? part * absorptionPerCm
+        : -Math.log1p(part * Math.expm1(-depth)) / (thicknessNm * 1e-7);
   }
 }

@@ -17,6 +17,11 @@ final class LibraryFile {
     return record(DataFile.header(LibraryFile.class, resource));
   }
 
+  /** Whether the data are another doping or composition than those of the same family. */
+  static boolean isDistinct(String resource) {
+    return DataFile.header(LibraryFile.class, resource).value("distinct").isPresent();
+  }
+
   static Material material(String resource) {
     DataFile file = DataFile.resource(LibraryFile.class, resource);
     MaterialRecord record = record(file);

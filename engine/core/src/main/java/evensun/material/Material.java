@@ -1,5 +1,6 @@
 package evensun.material;
 
+import evensun.light.Spectrum;
 import evensun.spi.Finding;
 import java.util.List;
 import java.util.Optional;
@@ -28,6 +29,16 @@ public interface Material {
   Filler on(double[] wavelengthNm);
 
   /**
+   * A filler for a fixed grid under a known light.
+   *
+   * @param wavelengthNm [w] vacuum wavelengths in nm, increasing
+   * @param light by which a step inside a bin is weighed
+   */
+  default Filler on(double[] wavelengthNm, Spectrum light) {
+    return on(wavelengthNm);
+  }
+
+  /**
    * What a user should know about a chosen bandgap, such as that it lies where the numbers are an
    * estimate.
    *
@@ -49,6 +60,20 @@ public interface Material {
      * @param k [w] out: extinction coefficient
      */
     void fill(double bandgapEv, double[] n, double[] k);
+
+    /**
+     * Writes n and k for a layer of known thickness.
+     *
+     * @param thicknessNm in nm; makes a difference only where {@link #followsThickness()}
+     */
+    default void fill(double bandgapEv, double thicknessNm, double[] n, double[] k) {
+      fill(bandgapEv, n, k);
+    }
+
+    /** Whether n and k depend on the thickness of the layer. */
+    default boolean followsThickness() {
+      return false;
+    }
 
     /** What a user should know about this material on this grid. */
     default List<Finding> findings() {

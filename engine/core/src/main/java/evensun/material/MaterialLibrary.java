@@ -47,14 +47,18 @@ public final class MaterialLibrary {
 
   /**
    * Other sources or preparations of the same material: names that agree up to the first dot and
-   * hold other data.
+   * hold other data, those left out that are another doping or composition.
    */
   public List<String> alternatives(String name) {
     String family = family(name);
     String own = fileOf.get(name);
+    if (own == null || LibraryFile.isDistinct(own)) {
+      return List.of();
+    }
     return fileOf.entrySet().stream()
         .filter(entry -> family(entry.getKey()).equals(family) && entry.getKey().contains("."))
         .filter(entry -> !entry.getValue().equals(own))
+        .filter(entry -> !LibraryFile.isDistinct(entry.getValue()))
         .map(Map.Entry::getKey)
         .toList();
   }

@@ -4,6 +4,7 @@ import evensun.light.Spectrum;
 import evensun.light.WavelengthGrid;
 import evensun.scenario.Scenario;
 import evensun.spi.Finding;
+import java.util.Arrays;
 import java.util.List;
 
 /**
@@ -53,5 +54,18 @@ public record ResolvedStack(
   /** Name of a layer by index, the exit medium included. */
   public String layerName(int layer) {
     return layer == exitLayer() ? scenario.exit().name() : layers.get(layer).name();
+  }
+
+  /** [slot] the finite layer that a row of optical constants belongs to first, or −1. */
+  public int[] layersOfSlots() {
+    int[] layerOf = new int[slots.size()];
+    Arrays.fill(layerOf, -1);
+    for (int l = layers.size() - 1; l >= 0; l--) {
+      layerOf[layers.get(l).slot()] = l;
+      for (ResolvedLayer.ResolvedComponent component : layers.get(l).components()) {
+        layerOf[component.slot()] = l;
+      }
+    }
+    return layerOf;
   }
 }

@@ -74,8 +74,12 @@ final class Cells {
   }
 
   static Model model(String yaml, BeerLambertSolver solver) {
+    return model(stack(yaml), solver);
+  }
+
+  static Model model(ResolvedStack stack, BeerLambertSolver solver) {
     return Model.of(
-        stack(yaml),
+        stack,
         solver,
         java.util.Map.of(),
         1,

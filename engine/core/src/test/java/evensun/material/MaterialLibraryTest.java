@@ -105,6 +105,23 @@ class MaterialLibraryTest {
     assertThat(got).isCloseTo(reflectance, within(0.003));
   }
 
+  // Doping and composition make another film; only another measurement of the same one is a second
+  // opinion on it.
+  @Test
+  void namesOtherSourcesOfTheSameFilmOnly() {
+    MaterialLibrary library = MaterialLibrary.builtIn();
+    assertThat(library.alternatives("hydrogenated-amorphous-silicon.n")).isEmpty();
+    assertThat(library.alternatives("hydrogenated-amorphous-silicon")).isEmpty();
+    assertThat(library.alternatives("lead-halide-perovskite")).isEmpty();
+    assertThat(library.alternatives("lead-halide-perovskite.caesium")).isEmpty();
+    assertThat(library.alternatives("crystalline-silicon"))
+        .containsExactly("crystalline-silicon.295-k");
+    assertThat(library.alternatives("methylammonium-lead-iodide.spun"))
+        .containsExactly(
+            "methylammonium-lead-iodide.crystal", "methylammonium-lead-iodide.vapour-reacted");
+    assertThat(library.alternatives("nothing-of-the-kind")).isEmpty();
+  }
+
   @Test
   void suggestsTheNearestName() {
     assertThat(MaterialLibrary.builtIn().nearest("Magnesium flouride"))

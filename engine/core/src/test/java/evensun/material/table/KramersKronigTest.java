@@ -59,6 +59,8 @@ class KramersKronigTest {
     "lead-halide-perovskite, 1.62, 0.02",
     "lead-halide-perovskite, 1.80, 0.02",
     "lead-halide-perovskite, 2.20, 0.02",
+    "lead-halide-perovskite.caesium, 1.72, 0.02",
+    "lead-halide-perovskite.caesium, 2.00, 0.02",
     "gallium-indium-phosphide, 1.80, 0.04",
     "gallium-indium-phosphide, 1.95, 0.04",
     "aluminium-gallium-arsenide, 1.60, 0.06",
