@@ -2,7 +2,7 @@ package evensun.evaluation;
 
 import evensun.result.Sensitivity;
 import evensun.result.WhatIf;
-import evensun.search.Variable;
+import evensun.search.problem.Variable;
 import evensun.stack.ResolvedSubcell;
 import java.util.ArrayList;
 import java.util.Comparator;

@@ -1,8 +1,8 @@
 package evensun.evaluation;
 
-import evensun.search.Objective;
-import evensun.search.Variable;
-import evensun.search.Verdict;
+import evensun.search.problem.Objective;
+import evensun.search.problem.Variable;
+import evensun.search.problem.Verdict;
 import evensun.spi.EvaluationFailed;
 import java.util.List;
 

@@ -1,11 +1,11 @@
 package evensun.run;
 
 import evensun.result.SearchRecord;
-import evensun.search.Candidate;
-import evensun.search.Exhaustive;
-import evensun.search.ExhaustiveOutcome;
-import evensun.search.Objective;
-import evensun.search.StepCost;
+import evensun.search.problem.Candidate;
+import evensun.search.problem.Objective;
+import evensun.search.proof.Exhaustive;
+import evensun.search.proof.ExhaustiveOutcome;
+import evensun.search.proof.StepCost;
 import java.util.OptionalDouble;
 import java.util.function.BooleanSupplier;
 import org.jspecify.annotations.Nullable;

@@ -2,10 +2,10 @@ package evensun.run;
 
 import evensun.evaluation.Aim;
 import evensun.result.SearchRecord;
-import evensun.search.Candidate;
-import evensun.search.Freedom;
 import evensun.search.SearchOutcome;
-import evensun.search.Variable;
+import evensun.search.problem.Candidate;
+import evensun.search.problem.Variable;
+import evensun.search.proof.Freedom;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;

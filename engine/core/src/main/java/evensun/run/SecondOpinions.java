@@ -9,7 +9,7 @@ import evensun.scenario.GridSpec;
 import evensun.scenario.InputException;
 import evensun.scenario.Scenario;
 import evensun.scenario.SolverSpec;
-import evensun.search.Candidate;
+import evensun.search.problem.Candidate;
 import evensun.spi.EvaluationFailed;
 import evensun.spi.UnsupportedProblem;
 import evensun.stack.MaterialSlot;

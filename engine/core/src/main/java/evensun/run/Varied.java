@@ -5,7 +5,7 @@ import evensun.scenario.Fault;
 import evensun.scenario.InputException;
 import evensun.scenario.Place;
 import evensun.scenario.SearchSpec;
-import evensun.search.Variable;
+import evensun.search.problem.Variable;
 import evensun.stack.ResolvedStack;
 import java.util.ArrayList;
 import java.util.List;

@@ -1,5 +1,6 @@
 package evensun.search;
 
+import evensun.search.problem.Candidate;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;

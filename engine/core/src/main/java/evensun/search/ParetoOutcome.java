@@ -1,5 +1,7 @@
 package evensun.search;
 
+import evensun.search.problem.Candidate;
+import evensun.search.problem.FailureRecord;
 import java.util.List;
 
 /**

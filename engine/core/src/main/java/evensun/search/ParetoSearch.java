@@ -1,7 +1,14 @@
 package evensun.search;
 
-import evensun.search.SearchState.Individual;
 import evensun.search.SearchState.Phase;
+import evensun.search.population.Genetic;
+import evensun.search.problem.Candidate;
+import evensun.search.problem.Individual;
+import evensun.search.problem.Judges;
+import evensun.search.problem.Objective;
+import evensun.search.problem.SearchInterruptedException;
+import evensun.search.problem.Space;
+import evensun.search.problem.Tally;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.function.BooleanSupplier;
@@ -47,7 +54,9 @@ public final class ParetoSearch {
    */
   public ParetoOutcome run(List<Candidate> given) {
     try (Judges judges = new Judges(objective, settings.threads(), cancelled)) {
-      Genetic genetic = Genetic.forSeveralAims(space, settings, judges);
+      Genetic genetic =
+          Genetic.forSeveralAims(
+              space, settings.seed(), settings.effort().populationSize(), judges);
       List<double[]> genes = new ArrayList<>();
       given.forEach(candidate -> genes.add(space.genes(candidate.toArray())));
       Tally tally = new Tally(0, List.of());
@@ -70,7 +79,10 @@ public final class ParetoSearch {
       throw new IllegalArgumentException("the saved state belongs to another search");
     }
     try (Judges judges = new Judges(objective, settings.threads(), cancelled)) {
-      return loop(Genetic.forSeveralAims(space, settings, judges), saved);
+      return loop(
+          Genetic.forSeveralAims(
+              space, settings.seed(), settings.effort().populationSize(), judges),
+          saved);
     }
   }
 

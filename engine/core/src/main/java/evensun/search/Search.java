@@ -1,7 +1,13 @@
 package evensun.search;
 
-import evensun.search.SearchState.Individual;
 import evensun.search.SearchState.Phase;
+import evensun.search.problem.Candidate;
+import evensun.search.problem.Individual;
+import evensun.search.problem.Judges;
+import evensun.search.problem.Objective;
+import evensun.search.problem.Optima;
+import evensun.search.problem.SearchInterruptedException;
+import evensun.search.problem.Space;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.function.BooleanSupplier;

@@ -1,5 +1,7 @@
 package evensun.search;
 
+import evensun.search.problem.FailureRecord;
+import evensun.search.problem.Individual;
 import java.util.List;
 
 /**
@@ -39,27 +41,6 @@ public record SearchState(
     GENETIC,
     REFINE,
     DONE
-  }
-
-  /**
-   * A member of the population.
-   *
-   * @param birth generation in which it was born
-   * @param genes [variable] in [0, 1]
-   * @param verdict what became of it
-   */
-  public record Individual(long birth, List<Double> genes, Verdict verdict) {
-    public Individual {
-      genes = List.copyOf(genes);
-    }
-
-    boolean isFeasible() {
-      return !verdict.isFailure() && verdict.violation() <= 0;
-    }
-
-    double[] geneArray() {
-      return Numbers.array(genes);
-    }
   }
 
   public SearchState {

@@ -1,7 +1,10 @@
 package evensun.search;
 
-import evensun.search.SearchState.Individual;
 import evensun.search.SearchState.Phase;
+import evensun.search.problem.Candidate;
+import evensun.search.problem.FailureRecord;
+import evensun.search.problem.Individual;
+import evensun.search.problem.Verdict;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.function.Function;

@@ -1,7 +1,14 @@
 package evensun.search;
 
-import evensun.search.SearchState.Individual;
 import evensun.search.SearchState.Phase;
+import evensun.search.population.Genetic;
+import evensun.search.problem.Individual;
+import evensun.search.problem.Judges;
+import evensun.search.problem.Objective;
+import evensun.search.problem.Optima;
+import evensun.search.problem.Space;
+import evensun.search.problem.Tally;
+import evensun.search.refine.Refiner;
 import java.util.ArrayList;
 import java.util.HashSet;
 import java.util.List;
@@ -28,7 +35,7 @@ final class Steps {
     this.space = space;
     this.settings = settings;
     rounds = new Rounds(settings);
-    genetic = Genetic.forOneAim(space, settings, judges);
+    genetic = Genetic.forOneAim(space, settings.seed(), settings.effort().populationSize(), judges);
     refiner = new Refiner(space, judges, objective.limits().size(), settings.seed());
   }
 

@@ -2,9 +2,9 @@ package evensun.evaluation;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
-import evensun.search.Objective;
-import evensun.search.Variable;
-import evensun.search.Verdict;
+import evensun.search.problem.Objective;
+import evensun.search.problem.Variable;
+import evensun.search.problem.Verdict;
 import java.util.List;
 import org.junit.jupiter.api.Test;
 

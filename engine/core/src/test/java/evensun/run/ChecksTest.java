@@ -2,10 +2,10 @@ package evensun.run;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
-import evensun.search.Candidate;
-import evensun.search.Objective;
-import evensun.search.Variable;
-import evensun.search.Verdict;
+import evensun.search.problem.Candidate;
+import evensun.search.problem.Objective;
+import evensun.search.problem.Variable;
+import evensun.search.problem.Verdict;
 import java.util.List;
 import org.junit.jupiter.api.Test;
 

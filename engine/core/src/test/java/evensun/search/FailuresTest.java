@@ -3,6 +3,8 @@ package evensun.search;
 import static evensun.search.Problem.box;
 import static org.assertj.core.api.Assertions.assertThat;
 
+import evensun.search.problem.FailureRecord;
+import evensun.search.problem.Verdict;
 import org.junit.jupiter.api.Test;
 
 class FailuresTest {

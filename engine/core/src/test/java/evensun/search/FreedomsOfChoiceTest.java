@@ -4,6 +4,11 @@ import static evensun.search.Problem.variable;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
+import evensun.search.problem.Candidate;
+import evensun.search.problem.Objective;
+import evensun.search.problem.Variable;
+import evensun.search.problem.Verdict;
+import evensun.search.proof.StepCost;
 import java.util.List;
 import org.junit.jupiter.api.Test;
 

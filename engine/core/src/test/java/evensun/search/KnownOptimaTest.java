@@ -6,6 +6,13 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;
 import static org.assertj.core.api.Assertions.within;
 
+import evensun.search.problem.Objective;
+import evensun.search.problem.Variable;
+import evensun.search.problem.Verdict;
+import evensun.search.proof.Exhaustive;
+import evensun.search.proof.ExhaustiveOutcome;
+import evensun.search.proof.Freedom;
+import evensun.search.proof.Proof;
 import java.util.List;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;

@@ -1,5 +1,7 @@
 package evensun.search;
 
+import evensun.search.problem.Objective;
+import evensun.search.problem.Space;
 import java.util.Arrays;
 import java.util.LinkedHashMap;
 import java.util.Locale;
