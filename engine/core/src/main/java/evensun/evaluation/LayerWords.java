@@ -1,12 +1,17 @@
 package evensun.evaluation;
 
+import evensun.data.DecimalText;
 import evensun.spi.Design;
 import evensun.spi.Feature;
 import evensun.spi.Grading;
+import evensun.spi.HeightMap;
+import evensun.spi.IdealFace;
 import evensun.spi.Mixture;
 import evensun.spi.Profile;
 import evensun.spi.Roughness;
+import evensun.spi.Scatter;
 import evensun.spi.Side;
+import evensun.spi.Texture;
 import evensun.stack.ResolvedLayer;
 import evensun.stack.ResolvedLayer.ResolvedComponent;
 import evensun.stack.ResolvedStack;
@@ -49,9 +54,41 @@ public final class LayerWords {
         words.add(grading(stack, layer, grading));
       } else if (feature instanceof Roughness roughness) {
         words.add(roughness(roughness));
+      } else if (feature instanceof Texture texture) {
+        words.add(texture(texture, design));
+      } else if (feature instanceof Scatter scatter) {
+        words.add(scatter(scatter));
+      } else if (feature instanceof IdealFace) {
+        words.add("boundary is the ideal of light trapping");
       }
     }
     return words;
+  }
+
+  private static String texture(Texture texture, Design design) {
+    if (texture.heightMap().isPresent()) {
+      HeightMap map = texture.heightMap().get();
+      return text(
+          "boundary shaped by a measured surface of %d × %d points, %s µm apart",
+          map.columns(), map.rows(), map.pitchUm());
+    }
+    return text(
+        "boundary of %s %s pointing %s, facets at %.2f°, base %s µm",
+        texture.arrangement() == Texture.Arrangement.GRID ? "regular" : "scattered",
+        texture.shape().id() + "s",
+        texture.points().name().toLowerCase(Locale.ROOT),
+        texture.facetAngleDeg().in(design),
+        number(texture.baseUm()));
+  }
+
+  private static String scatter(Scatter scatter) {
+    return text(
+        "boundary scatters %s %% of its light, intensity by the cosine to the power %s",
+        number(100 * (1 - scatter.specularFraction())), number(scatter.cosinePower()));
+  }
+
+  private static String number(double value) {
+    return DecimalText.of(value, 6);
   }
 
   private static String mixture(

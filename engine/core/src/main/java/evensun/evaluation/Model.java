@@ -1,7 +1,6 @@
 package evensun.evaluation;
 
 import evensun.material.Material;
-import evensun.scenario.LightSpec;
 import evensun.spi.Channel;
 import evensun.spi.Design;
 import evensun.spi.Incidence;
@@ -11,7 +10,6 @@ import evensun.spi.PreparedSolver;
 import evensun.spi.Problem;
 import evensun.spi.Samples;
 import evensun.spi.Services;
-import evensun.spi.Side;
 import evensun.stack.MaterialSlot;
 import evensun.stack.ResolvedKnob;
 import evensun.stack.ResolvedLayer;
@@ -55,8 +53,7 @@ public final class Model implements AutoCloseable {
       Map<String, String> options,
       long seed,
       Services services) {
-    LightSpec light = stack.scenario().light();
-    Incidence incidence = new Incidence(light.angleDeg(), light.polarisation(), Side.FRONT);
+    Incidence incidence = stack.scenario().light().incidence();
     return of(stack, solver, options, seed, services, List.of(incidence));
   }
 

@@ -71,7 +71,10 @@ public final class AssessJob {
           measured,
           findings.records(),
           Cautions.of(preparation.stack()),
-          provenance.build(null, repeatCommand, Map.of()));
+          provenance.build(
+              preparation.choice().statistical() ? preparation.seed() : null,
+              repeatCommand,
+              Map.of()));
     }
   }
 
@@ -85,7 +88,8 @@ public final class AssessJob {
   static @Nullable Angular angular(Preparation preparation, Bench bench, double stepDeg) {
     boolean useful =
         preparation.choice().solver().traits().oblique()
-            && !preparation.choice().solver().traits().statistical()
+            && !preparation.choice().statistical()
+            && !preparation.stack().scenario().light().diffuse()
             && !preparation.stack().isMonochromatic();
     if (!useful) {
       return null;

@@ -56,8 +56,9 @@ public final class Preparation implements AutoCloseable {
     Spectrum spectrum = ScenarioLight.spectrum(scenario, files);
     ScenarioMaterials materials = new ScenarioMaterials(scenario, files, spectrum);
     Measurements measurements = Measurements.read(scenario, files);
-    return new Preparation(
-        files, measurements, StackResolver.resolve(scenario, materials, spectrum), host, cancelled);
+    ResolvedStack stack =
+        StackResolver.resolve(scenario, materials, new ScenarioSurfaces(files), spectrum);
+    return new Preparation(files, measurements, stack, host, cancelled);
   }
 
   /** Seed of the search, and of whatever a solver draws at random. */

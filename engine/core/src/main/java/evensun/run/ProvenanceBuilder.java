@@ -30,7 +30,7 @@ final class ProvenanceBuilder {
   /**
    * The record.
    *
-   * @param seed seed of the search, null where nothing was drawn at random
+   * @param seed seed of the search and of rays, null where nothing was drawn at random
    * @param repeatCommand command that repeats the run
    * @param settings further settings
    */

@@ -6,7 +6,8 @@ import java.util.List;
 import java.util.OptionalDouble;
 
 /** What is not flat, uniform and pure about a layer as drawn. */
-public sealed interface FeatureSpec {
+public sealed interface FeatureSpec
+    permits FeatureSpec.MixtureSpec, FeatureSpec.GradingSpec, FaceSpec {
 
   /** Where it stands. */
   Place place();
@@ -110,27 +111,6 @@ public sealed interface FeatureSpec {
           tolerance,
           featureSizeNm,
           place);
-    }
-  }
-
-  /**
-   * A rough upper face.
-   *
-   * @param rmsNm root mean square of the height in nm, greater than 0
-   * @param correlationLengthNm lateral correlation length in nm, greater than 0
-   * @param place where it stands
-   */
-  record RoughnessSpec(double rmsNm, double correlationLengthNm, Place place)
-      implements FeatureSpec {
-
-    @Override
-    public List<ComponentSpec> components() {
-      return List.of();
-    }
-
-    @Override
-    public RoughnessSpec withMaterial(String name, String other) {
-      return this;
     }
   }
 }

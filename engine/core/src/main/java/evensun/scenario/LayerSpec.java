@@ -63,6 +63,13 @@ public record LayerSpec(
     /** Written: waves interfere. */
     COHERENT,
     /** Written: intensities add. */
-    INCOHERENT
+    INCOHERENT,
+    /** Fills a texture below and is flat on top ({@code planarises: true}): intensities add. */
+    PLANARISES;
+
+    /** Whether waves interfere inside. */
+    public boolean interferes() {
+      return this == DEFAULT || this == COHERENT;
+    }
   }
 }

@@ -2,7 +2,9 @@ package evensun.scenario;
 
 import evensun.light.SkyConditions;
 import evensun.light.SpectrumReader;
+import evensun.spi.Incidence;
 import evensun.spi.Polarisation;
+import evensun.spi.Side;
 import java.util.Optional;
 import java.util.OptionalDouble;
 
@@ -19,6 +21,7 @@ import java.util.OptionalDouble;
  * @param concentrationSuns factor the spectrum is scaled by
  * @param angleDeg angle of incidence to the normal in the incident medium, degrees, in [0, 90)
  * @param polarisation polarisation
+ * @param diffuse whether light comes from every direction of the half space alike (Lambertian)
  * @param place where it stands
  */
 public record LightSpec(
@@ -31,6 +34,7 @@ public record LightSpec(
     OptionalDouble concentrationSuns,
     double angleDeg,
     Polarisation polarisation,
+    boolean diffuse,
     Place place) {
 
   /** Spectrum name of the clear-sky model. */
@@ -56,6 +60,12 @@ public record LightSpec(
         OptionalDouble.empty(),
         angleDeg,
         polarisation,
+        false,
         place);
+  }
+
+  /** Where the light comes from, as solvers see it. */
+  public Incidence incidence() {
+    return new Incidence(angleDeg, polarisation, Side.FRONT, diffuse);
   }
 }

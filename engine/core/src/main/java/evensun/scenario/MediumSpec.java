@@ -1,7 +1,6 @@
 package evensun.scenario;
 
-import evensun.scenario.FeatureSpec.RoughnessSpec;
-import java.util.Optional;
+import java.util.List;
 import java.util.OptionalDouble;
 
 /**
@@ -10,23 +9,23 @@ import java.util.OptionalDouble;
  * @param name layer name; the incident medium is named after its material
  * @param material material name
  * @param bandgapEv wanted bandgap of a tunable material, in eV
- * @param roughness of its face to the stack, where that is rough
+ * @param faces what is not flat about its face to the stack
  * @param place where it stands
  */
 public record MediumSpec(
-    String name,
-    String material,
-    OptionalDouble bandgapEv,
-    Optional<RoughnessSpec> roughness,
-    Place place) {
+    String name, String material, OptionalDouble bandgapEv, List<FaceSpec> faces, Place place) {
+
+  public MediumSpec {
+    faces = List.copyOf(faces);
+  }
 
   /** A medium with a flat face. */
   public MediumSpec(String name, String material, OptionalDouble bandgapEv, Place place) {
-    this(name, material, bandgapEv, Optional.empty(), place);
+    this(name, material, bandgapEv, List.of(), place);
   }
 
   /** This medium of another material. */
   public MediumSpec withMaterial(String other) {
-    return new MediumSpec(name, other, bandgapEv, roughness, place);
+    return new MediumSpec(name, other, bandgapEv, faces, place);
   }
 }

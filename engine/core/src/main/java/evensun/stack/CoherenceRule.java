@@ -47,7 +47,7 @@ final class CoherenceRule {
    */
   static Optional<Finding> check(
       LayerSpec layer, WavelengthGrid grid, double[] n, double[] k, double thicknessNm) {
-    if (grid.size() == 1 || layer.coherence() == LayerSpec.Coherence.INCOHERENT) {
+    if (grid.size() == 1 || !layer.coherence().interferes()) {
       return Optional.empty();
     }
     double fringe = finestFringeNm(grid, n, k, thicknessNm);

@@ -1,22 +1,28 @@
 package evensun.stack;
 
+import evensun.scenario.FaceSpec;
+import evensun.scenario.FaceSpec.RoughnessSpec;
+import evensun.scenario.FaceSpec.ScatterSpec;
+import evensun.scenario.FaceSpec.TextureSpec;
 import evensun.scenario.Fault;
 import evensun.scenario.FeatureSpec;
 import evensun.scenario.FeatureSpec.ComponentSpec;
 import evensun.scenario.FeatureSpec.GradingSpec;
 import evensun.scenario.FeatureSpec.MixtureSpec;
-import evensun.scenario.FeatureSpec.RoughnessSpec;
 import evensun.scenario.InputException;
 import evensun.scenario.LayerSpec;
 import evensun.scenario.Scenario;
 import evensun.scenario.SearchSpec.VarySpec;
 import evensun.spi.Feature;
 import evensun.spi.Grading;
+import evensun.spi.IdealFace;
 import evensun.spi.Knob;
 import evensun.spi.Mixture;
 import evensun.spi.Parameter;
 import evensun.spi.Roughness;
+import evensun.spi.Scatter;
 import evensun.spi.Side;
+import evensun.spi.Texture;
 import evensun.stack.ResolvedLayer.ResolvedComponent;
 import java.util.ArrayList;
 import java.util.List;
@@ -30,11 +36,13 @@ final class FeatureResolver {
 
   private final Scenario scenario;
   private final MaterialSlots slots;
+  private final SurfaceSource surfaces;
   private final List<ResolvedKnob> knobs = new ArrayList<>();
 
-  FeatureResolver(Scenario scenario, MaterialSlots slots) {
+  FeatureResolver(Scenario scenario, MaterialSlots slots, SurfaceSource surfaces) {
     this.scenario = scenario;
     this.slots = slots;
+    this.surfaces = surfaces;
   }
 
   /** Every number of a feature that the search moves. */
@@ -48,7 +56,7 @@ final class FeatureResolver {
    * @throws InputException with every fault of its features
    */
   ResolvedLayer layer(LayerSpec spec) {
-    boolean coherent = spec.coherence() != LayerSpec.Coherence.INCOHERENT;
+    boolean coherent = spec.coherence().interferes();
     List<ResolvedComponent> components = components(spec);
     int slot =
         components.isEmpty()
@@ -61,9 +69,15 @@ final class FeatureResolver {
     return new ResolvedLayer(spec, slot, coherent, features, components);
   }
 
-  /** A rough face of the exit medium: it stands on the last layer. */
-  static Roughness exitFace(RoughnessSpec spec) {
-    return new Roughness(spec.rmsNm(), spec.correlationLengthNm(), Side.REAR);
+  /**
+   * What is not flat about the face of the exit medium, as it stands on the last layer.
+   *
+   * @param spec as drawn
+   * @param films whether the last layer is a film of that boundary
+   */
+  Feature exitFace(FaceSpec spec, boolean films) {
+    boolean ownFace = spec instanceof RoughnessSpec || !films;
+    return face(scenario.exit().name(), spec, ownFace ? Side.REAR : Side.FRONT);
   }
 
   private List<ResolvedComponent> components(LayerSpec spec) {
@@ -101,8 +115,30 @@ final class FeatureResolver {
     if (spec instanceof GradingSpec grading) {
       return grading(grading, components);
     }
-    RoughnessSpec roughness = (RoughnessSpec) spec;
-    return new Roughness(roughness.rmsNm(), roughness.correlationLengthNm(), Side.FRONT);
+    return face(layer.name(), (FaceSpec) spec, Side.FRONT);
+  }
+
+  private Feature face(String layer, FaceSpec spec, Side side) {
+    if (spec instanceof RoughnessSpec roughness) {
+      return new Roughness(roughness.rmsNm(), roughness.correlationLengthNm(), side);
+    }
+    if (spec instanceof ScatterSpec scatter) {
+      return new Scatter(scatter.specularFraction(), scatter.cosinePower(), side);
+    }
+    return spec instanceof TextureSpec texture
+        ? texture(layer, texture, side)
+        : new IdealFace(side);
+  }
+
+  private Texture texture(String layer, TextureSpec spec, Side side) {
+    return new Texture(
+        spec.shape(),
+        spec.points(),
+        spec.arrangement(),
+        moved(layer + ".texture.facetAngleDeg", spec.facetAngleDeg(), "facetAngleDeg", "degrees"),
+        spec.baseUm(),
+        spec.heightMap().map(surfaces::heightMap),
+        side);
   }
 
   private static Grading grading(GradingSpec spec, List<ResolvedComponent> components) {
@@ -156,16 +192,21 @@ final class FeatureResolver {
         spec.porous()
             ? layer.name() + (component.name().equals("pores") ? ".mixture.porosity" : "/")
             : layer.name() + "/" + component.name() + ".fraction";
+    return moved(key, component.fraction(), "fraction", "");
+  }
+
+  /** A number of a feature: a knob where the search moves it. */
+  private Parameter moved(String key, double drawn, String name, String unit) {
     Optional<VarySpec> vary =
         scenario.search().stream()
-            .flatMap(search -> search.vary().stream())
+            .flatMap(search -> search.ranges().stream())
             .filter(v -> v.key().equals(key))
             .findFirst();
     if (vary.isEmpty()) {
-      return Parameter.fixed(component.fraction());
+      return Parameter.fixed(drawn);
     }
-    Knob knob = new Knob(knobs.size(), "fraction", "", vary.get().low(), vary.get().high());
-    knobs.add(new ResolvedKnob(key, knob, component.fraction()));
-    return Parameter.moved(component.fraction(), knob);
+    Knob knob = new Knob(knobs.size(), name, unit, vary.get().low(), vary.get().high());
+    knobs.add(new ResolvedKnob(key, knob, drawn));
+    return Parameter.moved(drawn, knob);
   }
 }

@@ -3,6 +3,7 @@ package evensun.stack;
 import evensun.light.Spectrum;
 import evensun.light.WavelengthGrid;
 import evensun.material.MaterialRangeException;
+import evensun.scenario.FaceSpec;
 import evensun.scenario.Fault;
 import evensun.scenario.GridSpec;
 import evensun.scenario.InputException;
@@ -10,7 +11,6 @@ import evensun.scenario.LayerSpec;
 import evensun.scenario.MediumSpec;
 import evensun.scenario.Place;
 import evensun.scenario.Scenario;
-import evensun.scenario.SearchSpec;
 import evensun.scenario.SubcellSpec;
 import evensun.spi.Finding;
 import evensun.spi.Severity;
@@ -29,12 +29,12 @@ public final class StackResolver {
   private final List<Fault> faults = new ArrayList<>();
   private final List<Finding> findings = new ArrayList<>();
 
-  private StackResolver(Scenario scenario, MaterialSource materials) {
+  private StackResolver(Scenario scenario, MaterialSource materials, SurfaceSource surfaces) {
     this.scenario = scenario;
     GridSpec spec = scenario.grid();
     this.grid = WavelengthGrid.of(spec.fromNm(), spec.toNm(), spec.stepNm());
     this.slots = new MaterialSlots(materials);
-    this.features = new FeatureResolver(scenario, slots);
+    this.features = new FeatureResolver(scenario, slots, surfaces);
   }
 
   /**
@@ -42,12 +42,23 @@ public final class StackResolver {
    *
    * @param scenario as read
    * @param materials where its materials come from
+   * @param surfaces where its measured surfaces come from
    * @param spectrum its light
    * @throws InputException with every fault found
    */
   public static ResolvedStack resolve(
+      Scenario scenario, MaterialSource materials, SurfaceSource surfaces, Spectrum spectrum) {
+    return new StackResolver(scenario, materials, surfaces).resolve(spectrum);
+  }
+
+  /** As above, for a scenario without measured surfaces. */
+  public static ResolvedStack resolve(
       Scenario scenario, MaterialSource materials, Spectrum spectrum) {
-    return new StackResolver(scenario, materials).resolve(spectrum);
+    SurfaceSource none =
+        spec -> {
+          throw new InputException(spec.place(), "measured surfaces are not read here");
+        };
+    return resolve(scenario, materials, none, spectrum);
   }
 
   private ResolvedStack resolve(Spectrum spectrum) {
@@ -58,7 +69,8 @@ public final class StackResolver {
     }
     int exit = medium(scenario.exit());
     stopOnFaults();
-    roughExit(layers);
+    exitFaces(layers);
+    new FaceRules(scenario, layers, faults, findings).check();
     checkOptics(spectrum, incident, layers);
     List<ResolvedSubcell> subcells = new ArrayList<>();
     for (SubcellSpec subcell : scenario.subcells()) {
@@ -92,26 +104,27 @@ public final class StackResolver {
       return features.layer(layer);
     } catch (InputException e) {
       faults.addAll(e.faults());
-      return new ResolvedLayer(layer, 0, layer.coherence() != LayerSpec.Coherence.INCOHERENT);
+      return new ResolvedLayer(layer, 0, layer.coherence().interferes());
     }
   }
 
-  private void roughExit(List<ResolvedLayer> layers) {
-    scenario
-        .exit()
-        .roughness()
-        .ifPresent(
-            spec -> {
-              int last = layers.size() - 1;
-              if (last < 0) {
-                faults.add(
-                    new Fault(
-                        spec.place(),
-                        "roughnessNm of the exit medium needs a layer above it; draw one of thickness 0"));
-              } else {
-                layers.set(last, layers.get(last).withFeature(FeatureResolver.exitFace(spec)));
-              }
-            });
+  private void exitFaces(List<ResolvedLayer> layers) {
+    int last = layers.size() - 1;
+    for (FaceSpec face : scenario.exit().faces()) {
+      if (last < 0) {
+        faults.add(
+            new Fault(
+                face.place(),
+                "an exit medium whose face is not flat needs a layer above it; draw one of thickness 0"));
+        continue;
+      }
+      try {
+        ResolvedLayer layer = layers.get(last);
+        layers.set(last, layer.withFeature(features.exitFace(face, layer.coherent())));
+      } catch (InputException e) {
+        faults.addAll(e.faults());
+      }
+    }
   }
 
   /** Checks that need n and k on the grid: range of the data, coherence, incident medium. */
@@ -150,12 +163,7 @@ public final class StackResolver {
   }
 
   private double thickestNm(LayerSpec layer) {
-    String key = layer.name() + ".thicknessNm";
-    return scenario.search().stream()
-        .flatMap(search -> search.ranges().stream())
-        .filter(vary -> vary.key().equals(key))
-        .mapToDouble(SearchSpec.VarySpec::high)
-        .reduce(layer.thicknessNm(), Math::max);
+    return Reach.of(scenario, layer.name() + ".thicknessNm", layer.thicknessNm()).high();
   }
 
   private void checkIncident(double[] k) {

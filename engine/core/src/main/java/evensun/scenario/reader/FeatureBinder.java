@@ -1,7 +1,6 @@
 package evensun.scenario.reader;
 
 import evensun.scenario.FeatureSpec;
-import evensun.scenario.FeatureSpec.RoughnessSpec;
 import evensun.scenario.tree.Fields;
 import evensun.scenario.tree.Interval;
 import evensun.scenario.tree.Shown;
@@ -10,22 +9,14 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
-import java.util.Optional;
 import java.util.OptionalDouble;
 
-/** Binds what is mixed, graded or rough about a layer. */
+/** Binds what is not flat, uniform and pure about a layer. */
 final class FeatureBinder {
 
   static final Interval FEATURE_SIZE = Interval.above(0, 1e6, "nm");
 
-  private static final Interval ROUGHNESS = Interval.closed(0, 1e4, "nm");
-  private static final Interval CORRELATION_LENGTH = Interval.above(0, 1e7, "nm");
-
   private FeatureBinder() {}
-
-  /** Keys of a layer that describe features. */
-  static final List<String> KEYS =
-      List.of("mixture", "grading", "roughnessNm", "correlationLengthNm");
 
   /**
    * The features of a finite layer.
@@ -45,35 +36,13 @@ final class FeatureBinder {
       MixtureBinder.bind(layer, material, bandgapEv).ifPresent(features::add);
       GradingBinder.bind(layer).ifPresent(features::add);
     }
-    roughness(layer).ifPresent(features::add);
+    features.addAll(FaceBinder.bind(layer));
     return features;
   }
 
   /** Whether the features of a layer name its materials, so that it has none of its own. */
   static boolean namesMaterials(Fields layer) {
     return layer.has("grading") || MixtureBinder.namesMaterials(layer);
-  }
-
-  /** The roughness of the upper face of a layer, or of the exit medium; 0 is a flat face. */
-  static Optional<RoughnessSpec> roughness(Fields layer) {
-    OptionalDouble rmsNm = layer.number("roughnessNm", ROUGHNESS);
-    OptionalDouble lengthNm = layer.number("correlationLengthNm", CORRELATION_LENGTH);
-    if (rmsNm.isPresent() != lengthNm.isPresent()) {
-      String missing = rmsNm.isPresent() ? "correlationLengthNm" : "roughnessNm";
-      String present = rmsNm.isPresent() ? "roughnessNm" : "correlationLengthNm";
-      String what =
-          rmsNm.isPresent() ? "lateral correlation length" : "root mean square of the height";
-      layer.fault(
-          layer.place(present),
-          present + " needs " + missing + " beside it, the " + what + " of the face in nm");
-      return Optional.empty();
-    }
-    boolean rough = rmsNm.isPresent() && rmsNm.getAsDouble() != 0;
-    return rough
-        ? Optional.of(
-            new RoughnessSpec(
-                rmsNm.getAsDouble(), lengthNm.getAsDouble(), layer.place("roughnessNm")))
-        : Optional.empty();
   }
 
   /** The mixing rules by name. */

@@ -9,6 +9,7 @@ import evensun.scenario.tree.Node.Mapping;
 import evensun.scenario.tree.Values;
 import evensun.spi.Polarisation;
 import java.util.LinkedHashMap;
+import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
@@ -44,6 +45,7 @@ final class LightBinder {
             fields.number("concentrationSuns", Interval.above(0, 1e5, "suns")),
             fields.number("angleDeg", Interval.below(0, 90, "degrees")).orElse(0),
             fields.choice("polarisation", polarisations()).orElse(Polarisation.UNPOLARISED),
+            diffuse(fields),
             fields.place("spectrum"));
     if (fields.has("irradianceWPerM2") && fields.has("concentrationSuns")) {
       fields.fault(
@@ -52,6 +54,16 @@ final class LightBinder {
     }
     fields.finish();
     return spec;
+  }
+
+  private static boolean diffuse(Fields light) {
+    boolean diffuse = light.flag("diffuse");
+    if (diffuse) {
+      for (String key : List.of("angleDeg", "polarisation")) {
+        FeatureBinder.refuse(light, key, "says nothing about diffuse light");
+      }
+    }
+    return diffuse;
   }
 
   private static OptionalDouble temperature(Fields fields, String spectrum) {

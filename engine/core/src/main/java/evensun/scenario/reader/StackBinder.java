@@ -159,7 +159,7 @@ final class StackBinder {
             material,
             gap,
             fields.number("thicknessNm", THICKNESS).orElse(Double.NaN),
-            fields.choice("coherence", coherences()).orElse(Coherence.DEFAULT),
+            coherence(fields),
             FeatureBinder.bind(fields, material, gap),
             fields.place());
     fields.finish();
@@ -188,7 +188,7 @@ final class StackBinder {
             name,
             material(fields),
             fields.number("bandgapEv", BANDGAP),
-            FeatureBinder.roughness(fields),
+            FaceBinder.bind(fields),
             fields.place());
     fields.finish();
     return exit;
@@ -199,7 +199,7 @@ final class StackBinder {
   }
 
   private void noThickness(Fields exit) {
-    for (String key : List.of("thicknessNm", "coherence", "mixture", "grading")) {
+    for (String key : List.of("thicknessNm", "coherence", "mixture", "grading", "planarises")) {
       if (exit.has(key)) {
         exit.know(key);
         if (endsTooLate) {
@@ -278,6 +278,25 @@ final class StackBinder {
 
   private static LayerSpec noLayer(Place place) {
     return new LayerSpec("", "", OptionalDouble.empty(), Double.NaN, Coherence.DEFAULT, place);
+  }
+
+  private static Coherence coherence(Fields fields) {
+    Coherence written = fields.choice("coherence", coherences()).orElse(Coherence.DEFAULT);
+    if (!fields.flag("planarises")) {
+      return written;
+    }
+    for (String key : List.of("coherence", "grading", "texture")) {
+      FeatureBinder.refuse(fields, key, "does not go with planarises: true" + why(key));
+    }
+    return Coherence.PLANARISES;
+  }
+
+  private static String why(String key) {
+    return switch (key) {
+      case "coherence" -> ", since intensities add in a film that fills a texture";
+      case "texture" -> ", whose upper face is flat; the texture belongs to a layer below";
+      default -> ", since its thickness differs from place to place";
+    };
   }
 
   private static Map<String, Coherence> coherences() {

@@ -1,5 +1,6 @@
 package evensun.scenario.reader;
 
+import evensun.scenario.FaceSpec;
 import evensun.scenario.FeatureSpec;
 import evensun.scenario.LayerSpec;
 import evensun.scenario.tree.Fields;
@@ -39,6 +40,7 @@ final class VaryKeys {
       }
       layer.features().forEach(feature -> addFeature(layer.name(), feature, known));
     }
+    stack.exit().faces().forEach(face -> addFeature(stack.exit().name(), face, known));
     if (stack.exit().bandgapEv().isPresent()) {
       known.put(stack.exit().name() + ".bandgapEv", StackBinder.BANDGAP);
     }
@@ -46,6 +48,10 @@ final class VaryKeys {
   }
 
   private static void addFeature(String layer, FeatureSpec feature, Map<String, Interval> known) {
+    if (feature instanceof FaceSpec.TextureSpec texture && texture.heightMap().isEmpty()) {
+      known.put(layer + ".texture.facetAngleDeg", FaceBinder.FACET_ANGLE);
+      return;
+    }
     boolean porous = feature instanceof FeatureSpec.MixtureSpec mixture && mixture.porous();
     if (porous) {
       known.put(layer + ".mixture.porosity", MixtureBinder.FRACTION);

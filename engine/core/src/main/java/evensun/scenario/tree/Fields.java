@@ -26,6 +26,8 @@ public final class Fields {
 
   private static final double LARGEST_LONG = 9007199254740991d;
 
+  private static final Map<String, Boolean> FLAGS = flags();
+
   private final String who;
   private final Mapping mapping;
   private final Faults faults;
@@ -159,6 +161,11 @@ public final class Fields {
     return node(key).flatMap(n -> Values.choice(label(key), n, choices, faults));
   }
 
+  /** Whether a key is there and true. */
+  public boolean flag(String key) {
+    return choice(key, FLAGS).orElse(false);
+  }
+
   /** A mapping under a key; empty when it is absent or after a fault. */
   public Optional<Mapping> mapping(String key) {
     Optional<Node> node = node(key);
@@ -244,6 +251,13 @@ public final class Fields {
   private static boolean isDecimalPart(Entry entry) {
     boolean digits = !entry.key().isEmpty() && entry.key().chars().allMatch(Character::isDigit);
     return digits && entry.value() instanceof Scalar s && s.isNothing();
+  }
+
+  private static Map<String, Boolean> flags() {
+    Map<String, Boolean> flags = new LinkedHashMap<>();
+    flags.put("true", true);
+    flags.put("false", false);
+    return flags;
   }
 
   private static String unitHint(String key, String nearest) {

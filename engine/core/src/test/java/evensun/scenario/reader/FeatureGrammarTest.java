@@ -8,11 +8,11 @@ import static org.assertj.core.api.Assertions.within;
 import com.networknt.schema.InputFormat;
 import com.networknt.schema.SchemaRegistry;
 import com.networknt.schema.SpecificationVersion;
+import evensun.scenario.FaceSpec.RoughnessSpec;
 import evensun.scenario.Fault;
 import evensun.scenario.FeatureSpec.ComponentSpec;
 import evensun.scenario.FeatureSpec.GradingSpec;
 import evensun.scenario.FeatureSpec.MixtureSpec;
-import evensun.scenario.FeatureSpec.RoughnessSpec;
 import evensun.scenario.InputException;
 import evensun.scenario.LayerSpec;
 import evensun.scenario.Scenario;
@@ -106,7 +106,8 @@ class FeatureGrammarTest {
     RoughnessSpec wafer = (RoughnessSpec) scenario.stack().get(3).features().get(0);
     assertThat(wafer.rmsNm()).isEqualTo(3);
     assertThat(wafer.correlationLengthNm()).isEqualTo(20);
-    assertThat(scenario.exit().roughness().orElseThrow().correlationLengthNm()).isEqualTo(9000);
+    RoughnessSpec mirror = (RoughnessSpec) scenario.exit().faces().get(0);
+    assertThat(mirror.correlationLengthNm()).isEqualTo(9000);
   }
 
   @Test

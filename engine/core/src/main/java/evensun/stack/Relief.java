@@ -1,0 +1,66 @@
+package evensun.stack;
+
+import evensun.spi.HeightMap;
+import evensun.spi.Texture;
+import evensun.spi.Texture.Direction;
+import evensun.spi.Texture.Shape;
+
+/**
+ * How far a texture reaches from its mean plane, as one feature beside the other does; scattered
+ * ones may reach further.
+ *
+ * @param aboveUm highest point above the mean plane in µm
+ * @param belowUm lowest point below the mean plane in µm
+ */
+public record Relief(double aboveUm, double belowUm) {
+
+  /** Height from the lowest to the highest point in µm. */
+  public double heightUm() {
+    return aboveUm + belowUm;
+  }
+
+  /**
+   * The relief of a texture.
+   *
+   * @param texture the texture
+   * @param facetAngleDeg angle of its facets in degrees, in (0, 90)
+   */
+  public static Relief of(Texture texture, double facetAngleDeg) {
+    if (texture.heightMap().isPresent()) {
+      return of(texture.heightMap().get());
+    }
+    double heightUm = heightUm(texture.shape(), texture.baseUm(), facetAngleDeg);
+    double mean = meanFraction(texture.shape(), texture.baseUm(), heightUm) * heightUm;
+    return texture.points() == Direction.UP
+        ? new Relief(heightUm - mean, mean)
+        : new Relief(mean, heightUm - mean);
+  }
+
+  private static double heightUm(Shape shape, double baseUm, double facetAngleDeg) {
+    double angle = Math.toRadians(facetAngleDeg);
+    return 0.5 * baseUm * (shape == Shape.DIMPLE ? Math.tan(0.5 * angle) : Math.tan(angle));
+  }
+
+  /** Mean height over the height: of a pyramid a third, of a ridge half, of a cap by its volume. */
+  private static double meanFraction(Shape shape, double baseUm, double heightUm) {
+    return switch (shape) {
+      case PYRAMID -> 1.0 / 3;
+      case GROOVE -> 0.5;
+      default -> Math.PI * (0.75 * baseUm * baseUm + heightUm * heightUm) / (6 * baseUm * baseUm);
+    };
+  }
+
+  private static Relief of(HeightMap map) {
+    double[] heightUm = map.heightUm().toArray();
+    double low = Double.POSITIVE_INFINITY;
+    double high = Double.NEGATIVE_INFINITY;
+    double sum = 0;
+    for (double height : heightUm) {
+      low = Math.min(low, height);
+      high = Math.max(high, height);
+      sum += height;
+    }
+    double mean = sum / heightUm.length;
+    return new Relief(high - mean, mean - low);
+  }
+}
