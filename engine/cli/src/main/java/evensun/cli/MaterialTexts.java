@@ -3,6 +3,7 @@ package evensun.cli;
 import evensun.material.Material;
 import evensun.material.MaterialLibrary;
 import evensun.material.MaterialRecord;
+import evensun.material.Tuning;
 import evensun.spi.Finding;
 import java.util.List;
 import java.util.Locale;
@@ -180,6 +181,10 @@ final class MaterialTexts {
     material
         .tuning()
         .ifPresent(t -> node.putArray("bandgapRangeEv").add(t.lowEv()).add(t.highEv()));
+    material
+        .tuning()
+        .flatMap(Tuning::composition)
+        .ifPresent(c -> node.put("compositionFractionOf", c.element()));
     ArrayNode hazards = node.putArray("hazards");
     record.hazards().forEach(hazards::add);
     ArrayNode notes = node.putArray("notes");

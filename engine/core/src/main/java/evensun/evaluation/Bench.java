@@ -1,5 +1,6 @@
 package evensun.evaluation;
 
+import evensun.material.Composition;
 import evensun.spi.Channel;
 import evensun.spi.Design;
 import evensun.spi.Evaluator;
@@ -77,6 +78,8 @@ public final class Bench implements AutoCloseable {
     switch (parameter.kind()) {
       case THICKNESS -> setThickness(parameter.index(), value);
       case BANDGAP -> setBandgap(parameter.index(), value);
+      case COMPOSITION ->
+          setBandgap(parameter.index(), composition(parameter.index()).bandgapEv(value));
       case KNOB -> design.knob[parameter.index()] = value;
     }
   }
@@ -86,6 +89,7 @@ public final class Bench implements AutoCloseable {
     return switch (parameter.kind()) {
       case THICKNESS -> design.thicknessNm[parameter.index()];
       case BANDGAP -> bandgapEv[parameter.index()];
+      case COMPOSITION -> composition(parameter.index()).fraction(bandgapEv[parameter.index()]);
       case KNOB -> design.knob[parameter.index()];
     };
   }
@@ -106,6 +110,10 @@ public final class Bench implements AutoCloseable {
       List<ResolvedSubcell.Absorber> absorbers = subcells.get(s).absorbers();
       into[s] = absorbers.isEmpty() ? 0 : bandgapEv[absorbers.get(0).slot()];
     }
+  }
+
+  private Composition composition(int slot) {
+    return model.stack().slots().get(slot).tuning().composition().orElseThrow();
   }
 
   private void setBandgap(int slot, double value) {

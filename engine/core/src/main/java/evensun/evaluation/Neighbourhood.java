@@ -103,7 +103,7 @@ public final class Neighbourhood implements AutoCloseable {
     return switch (parameter.kind()) {
       case THICKNESS -> THICKNESS_STEP_NM;
       case BANDGAP -> GAP_STEP_EV;
-      case KNOB -> KNOB_STEP;
+      case COMPOSITION, KNOB -> KNOB_STEP;
     };
   }
 
@@ -149,10 +149,10 @@ public final class Neighbourhood implements AutoCloseable {
     if (parameter.kind() == Parameter.Kind.THICKNESS) {
       return value;
     }
-    if (parameter.kind() == Parameter.Kind.BANDGAP) {
-      var slot = bench.model().stack().slots().get(parameter.index());
-      var tuning = slot.material().tuning().orElseThrow();
-      return Math.max(tuning.lowEv(), Math.min(tuning.highEv(), value));
+    if (parameter.setsGap()) {
+      var stack = bench.model().stack();
+      double inside = Math.min(parameter.materialHigh(stack), value);
+      return Math.max(parameter.materialLow(stack), inside);
     }
     return Math.max(variables.get(v).low(), Math.min(variables.get(v).high(), value));
   }

@@ -10,7 +10,7 @@ import java.util.Optional;
  * @param key as in the scenario, such as {@code perovskite.thicknessNm}
  * @param unit as shown to people
  * @param kind what it is
- * @param index layer of a thickness, slot of a bandgap, index of a knob
+ * @param index layer of a thickness, slot of a bandgap or composition, index of a knob
  * @param drawn value as drawn
  */
 public record Parameter(String key, String unit, Kind kind, int index, double drawn) {
@@ -21,6 +21,8 @@ public record Parameter(String key, String unit, Kind kind, int index, double dr
     THICKNESS,
     /** Bandgap of a tunable material in eV. */
     BANDGAP,
+    /** Composition of a tunable alloy, a fraction. */
+    COMPOSITION,
     /** Knob of a feature. */
     KNOB
   }
@@ -34,7 +36,8 @@ public record Parameter(String key, String unit, Kind kind, int index, double dr
     String layer = key.substring(0, dot);
     return switch (key.substring(dot + 1)) {
       case "thicknessNm" -> thickness(key, layer, stack);
-      case "bandgapEv" -> bandgap(key, layer, stack);
+      case "bandgapEv" -> tunable(key, "eV", Kind.BANDGAP, layer, stack);
+      case "compositionFraction" -> tunable(key, "", Kind.COMPOSITION, layer, stack);
       default -> knob(key, stack);
     };
   }
@@ -59,13 +62,42 @@ public record Parameter(String key, String unit, Kind kind, int index, double dr
     return Optional.empty();
   }
 
-  private static Optional<Parameter> bandgap(String key, String layer, ResolvedStack stack) {
+  private static Optional<Parameter> tunable(
+      String key, String unit, Kind kind, String layer, ResolvedStack stack) {
     for (int s = 0; s < stack.slots().size(); s++) {
       MaterialSlot slot = stack.slots().get(s);
       if (slot.tunable() && slot.layers().contains(layer)) {
-        return Optional.of(new Parameter(key, "eV", Kind.BANDGAP, s, slot.fillValue()));
+        int index = s;
+        return drawn(kind, slot).map(drawn -> new Parameter(key, unit, kind, index, drawn));
       }
     }
     return Optional.empty();
+  }
+
+  private static Optional<Double> drawn(Kind kind, MaterialSlot slot) {
+    return kind == Kind.BANDGAP
+        ? Optional.of(slot.fillValue())
+        : slot.tuning().composition().map(c -> c.fraction(slot.fillValue()));
+  }
+
+  /** Whether it sets a bandgap, as such or by a composition. */
+  public boolean setsGap() {
+    return kind == Kind.BANDGAP || kind == Kind.COMPOSITION;
+  }
+
+  /** Smallest value that the material of a bandgap or composition allows, in its unit. */
+  public double materialLow(ResolvedStack stack) {
+    return inOwnUnit(stack, stack.slots().get(index).tuning().lowEv());
+  }
+
+  /** Largest value that the material of a bandgap or composition allows, in its unit. */
+  public double materialHigh(ResolvedStack stack) {
+    return inOwnUnit(stack, stack.slots().get(index).tuning().highEv());
+  }
+
+  private double inOwnUnit(ResolvedStack stack, double bandgapEv) {
+    return kind == Kind.COMPOSITION
+        ? stack.slots().get(index).tuning().composition().orElseThrow().fraction(bandgapEv)
+        : bandgapEv;
   }
 }

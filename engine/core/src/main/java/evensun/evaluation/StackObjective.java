@@ -12,7 +12,7 @@ public final class StackObjective implements Objective {
   /** Matched currents closer than this do not decide a bandgap, in mA cm⁻². */
   public static final double GAP_TIE_MA_PER_CM2 = 0.02;
 
-  /** Step of the differences by bandgap in eV, and by the fractions of mixtures. */
+  /** Step of the differences by bandgap in eV, and by fractions. */
   private static final double DIFFERENCE_STEP = 1e-4;
 
   private final Model model;
@@ -53,7 +53,7 @@ public final class StackObjective implements Objective {
 
   /** Whether a bandgap varies. */
   public boolean variesGap() {
-    return parameters.stream().anyMatch(p -> p.kind() == Parameter.Kind.BANDGAP);
+    return parameters.stream().anyMatch(Parameter::setsGap);
   }
 
   @Override

@@ -103,7 +103,15 @@ final class LibraryFile {
 
   private static Tuning tuning(DataFile file) {
     double[] tuning = numbers(file.required("tuning-ev"));
-    return new Tuning(tuning[0], tuning[1], tuning[2]);
+    return new Tuning(
+        tuning[0], tuning[1], tuning[2], file.value("composition").map(LibraryFile::composition));
+  }
+
+  /** Element and the three coefficients of the bandgap by its fraction. */
+  private static Composition composition(String value) {
+    String[] parts = value.split(",", 2);
+    double[] ev = numbers(parts[1]);
+    return new Composition(parts[0], ev[0], ev[1], ev[2]);
   }
 
   private static TunableMaterial.MarkedRange marked(String value) {

@@ -1,5 +1,6 @@
 package evensun.run;
 
+import evensun.data.DecimalText;
 import evensun.evaluation.Parameter;
 import evensun.scenario.Fault;
 import evensun.scenario.InputException;
@@ -58,6 +59,10 @@ record Varied(List<Parameter> parameters, List<Variable> variables) {
   }
 
   private static String notVariable(String key, ResolvedStack stack) {
+    if (key.endsWith(".compositionFraction")) {
+      return "\"%s\" cannot vary: the material of that layer has no composition to choose by (evensun materials NAME says which has)"
+          .formatted(key);
+    }
     if (key.endsWith(".bandgapEv")) {
       return "\"%s\" cannot vary: the material of that layer has no bandgap that can be chosen (evensun materials lists the tunable ones)"
           .formatted(key);
@@ -69,36 +74,48 @@ record Varied(List<Parameter> parameters, List<Variable> variables) {
 
   private static void check(
       SearchSpec.VarySpec vary, Parameter parameter, ResolvedStack stack, List<Fault> faults) {
-    if (parameter.kind() != Parameter.Kind.BANDGAP) {
-      return;
-    }
-    var tuning = stack.slots().get(parameter.index()).material().tuning().orElseThrow();
-    if (vary.low() < tuning.lowEv() || vary.high() > tuning.highEv()) {
+    if (parameter.setsGap()
+        && (vary.low() < parameter.materialLow(stack)
+            || vary.high() > parameter.materialHigh(stack))) {
       faults.add(
           new Fault(
               vary.place(),
-              "\"%s\": the range must lie in [%s, %s] eV, the range of the material, but was [%s, %s] eV"
+              "\"%s\": the range must lie in %s, the range of the material, but was [%s, %s]%s"
                   .formatted(
-                      vary.key(), tuning.lowEv(), tuning.highEv(), vary.low(), vary.high())));
+                      vary.key(),
+                      materialRange(parameter, stack),
+                      vary.low(),
+                      vary.high(),
+                      unit(parameter))));
     }
   }
 
   /**
-   * Checks one value of a bandgap against the range of its material.
+   * Checks one value of a bandgap or composition against the range of its material.
    *
    * @throws InputException when it lies outside
    */
   static void checkInTuning(Parameter parameter, double value, ResolvedStack stack, Place place) {
-    if (parameter.kind() != Parameter.Kind.BANDGAP) {
-      return;
-    }
-    var tuning = stack.slots().get(parameter.index()).material().tuning().orElseThrow();
-    if (!(value >= tuning.lowEv() && value <= tuning.highEv())) {
+    if (parameter.setsGap()
+        && !(value >= parameter.materialLow(stack) && value <= parameter.materialHigh(stack))) {
       throw new InputException(
           place,
-          "%s must be in [%s, %s] eV, the range of the material, but was %s eV"
-              .formatted(parameter.key(), tuning.lowEv(), tuning.highEv(), value));
+          "%s must be in %s, the range of the material, but was %s%s"
+              .formatted(parameter.key(), materialRange(parameter, stack), value, unit(parameter)));
     }
+  }
+
+  private static String materialRange(Parameter parameter, ResolvedStack stack) {
+    return "["
+        + DecimalText.of(parameter.materialLow(stack), 5)
+        + ", "
+        + DecimalText.of(parameter.materialHigh(stack), 5)
+        + "]"
+        + unit(parameter);
+  }
+
+  private static String unit(Parameter parameter) {
+    return parameter.unit().isEmpty() ? "" : " " + parameter.unit();
   }
 
   /** The values as drawn, moved into the bounds. */

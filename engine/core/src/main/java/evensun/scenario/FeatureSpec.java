@@ -23,17 +23,14 @@ public sealed interface FeatureSpec
    *
    * @param name unique in the layer; {@code layer/name} elsewhere
    * @param material material name
-   * @param bandgapEv wanted bandgap of a tunable material, in eV
+   * @param gap how the bandgap of a tunable material is chosen
    * @param fraction volume fraction as drawn, in [0, 1]; 1 at an end of a grading
    * @param place where it stands
    */
-  record ComponentSpec(
-      String name, String material, OptionalDouble bandgapEv, double fraction, Place place) {
+  record ComponentSpec(String name, String material, GapChoice gap, double fraction, Place place) {
 
     ComponentSpec withMaterial(String old, String other) {
-      return material.equals(old)
-          ? new ComponentSpec(name, other, bandgapEv, fraction, place)
-          : this;
+      return material.equals(old) ? new ComponentSpec(name, other, gap, fraction, place) : this;
     }
   }
 

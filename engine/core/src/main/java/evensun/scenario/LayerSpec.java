@@ -2,14 +2,13 @@ package evensun.scenario;
 
 import evensun.scenario.FeatureSpec.ComponentSpec;
 import java.util.List;
-import java.util.OptionalDouble;
 
 /**
  * A finite layer as drawn.
  *
  * @param name unique name
  * @param material material name; empty where the features name the materials instead
- * @param bandgapEv wanted bandgap of a tunable material, in eV
+ * @param gap how the bandgap of a tunable material is chosen
  * @param thicknessNm thickness in nm, at least 0
  * @param coherence what the scenario says about interference inside
  * @param features what is not flat, uniform and pure about it
@@ -18,7 +17,7 @@ import java.util.OptionalDouble;
 public record LayerSpec(
     String name,
     String material,
-    OptionalDouble bandgapEv,
+    GapChoice gap,
     double thicknessNm,
     Coherence coherence,
     List<FeatureSpec> features,
@@ -32,11 +31,11 @@ public record LayerSpec(
   public LayerSpec(
       String name,
       String material,
-      OptionalDouble bandgapEv,
+      GapChoice gap,
       double thicknessNm,
       Coherence coherence,
       Place place) {
-    this(name, material, bandgapEv, thicknessNm, coherence, List.of(), place);
+    this(name, material, gap, thicknessNm, coherence, List.of(), place);
   }
 
   /** This layer with one material replaced by another. */
@@ -44,7 +43,7 @@ public record LayerSpec(
     return new LayerSpec(
         name,
         material.equals(old) ? other : material,
-        bandgapEv,
+        gap,
         thicknessNm,
         coherence,
         features.stream().map(feature -> feature.withMaterial(old, other)).toList(),

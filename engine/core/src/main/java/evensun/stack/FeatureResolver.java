@@ -60,7 +60,7 @@ final class FeatureResolver {
     List<ResolvedComponent> components = components(spec);
     int slot =
         components.isEmpty()
-            ? slots.slot(spec.name(), spec.material(), spec.bandgapEv(), spec.place())
+            ? slots.slot(spec.name(), spec.material(), spec.gap(), spec.place())
             : components.get(0).slot();
     List<Feature> features = new ArrayList<>();
     for (FeatureSpec feature : spec.features()) {
@@ -104,7 +104,7 @@ final class FeatureResolver {
     // A porous layer has one material and a bandgap of its own, under the layer's name.
     boolean own = !layer.material().isEmpty() && component.name().equals("solid");
     String user = own ? layer.name() : layer.name() + "/" + component.name();
-    int slot = slots.slot(user, material, component.bandgapEv(), component.place());
+    int slot = slots.slot(user, material, component.gap(), component.place());
     return new ResolvedComponent(component.name(), slot);
   }
 

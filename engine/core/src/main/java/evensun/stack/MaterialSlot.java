@@ -1,6 +1,7 @@
 package evensun.stack;
 
 import evensun.material.Material;
+import evensun.material.Tuning;
 import java.util.List;
 import java.util.OptionalDouble;
 
@@ -23,6 +24,11 @@ public record MaterialSlot(
   /** Whether the bandgap may be chosen. */
   public boolean tunable() {
     return material.tuning().isPresent();
+  }
+
+  /** How the bandgap of a tunable material may be chosen. */
+  public Tuning tuning() {
+    return material.tuning().orElseThrow();
   }
 
   /** The number handed to the material's filler: the bandgap, or 0 where it has none. */

@@ -1,7 +1,10 @@
 package evensun.stack;
 
+import evensun.data.DecimalText;
+import evensun.material.Composition;
 import evensun.material.Material;
 import evensun.material.Tuning;
+import evensun.scenario.GapChoice;
 import evensun.scenario.InputException;
 import evensun.scenario.Place;
 import java.util.ArrayList;
@@ -23,12 +26,12 @@ final class MaterialSlots {
   }
 
   /** The slot of a layer's material, made when it is not there yet. */
-  int slot(String layer, String name, OptionalDouble bandgapEv, Place place) {
+  int slot(String layer, String name, GapChoice choice, Place place) {
     Material material = source.material(name, place);
     OptionalDouble gap =
         material.tuning().isPresent()
-            ? chosenGap(material, bandgapEv, layer, place)
-            : fixedGap(material, bandgapEv, layer, name, place);
+            ? chosenGap(material, choice, layer, place)
+            : fixedGap(material, choice, layer, name, place);
     for (int i = 0; i < slots.size(); i++) {
       MaterialSlot slot = slots.get(i);
       if (slot.name().equals(name) && !slot.tunable()) {
@@ -41,25 +44,65 @@ final class MaterialSlots {
   }
 
   private static OptionalDouble chosenGap(
-      Material material, OptionalDouble wanted, String layer, Place place) {
+      Material material, GapChoice choice, String layer, Place place) {
     Tuning tuning = material.tuning().orElseThrow();
-    double gap = wanted.orElse(tuning.defaultEv());
-    if (gap < tuning.lowEv() || gap > tuning.highEv()) {
-      throw new InputException(
-          place,
-          "layer \"%s\": bandgapEv must be in [%s, %s] eV for %s but was %s"
-              .formatted(layer, tuning.lowEv(), tuning.highEv(), material.record().name(), gap));
+    return switch (choice.key()) {
+      case NONE -> OptionalDouble.of(tuning.defaultEv());
+      case BANDGAP -> {
+        within(material, choice, tuning.lowEv(), tuning.highEv(), "eV", layer, place);
+        yield OptionalDouble.of(choice.value());
+      }
+      case COMPOSITION -> {
+        Composition composition = composition(material, tuning, layer, place);
+        double low = composition.fraction(tuning.lowEv());
+        within(material, choice, low, composition.fraction(tuning.highEv()), "", layer, place);
+        yield OptionalDouble.of(composition.bandgapEv(choice.value()));
+      }
+    };
+  }
+
+  private static Composition composition(
+      Material material, Tuning tuning, String layer, Place place) {
+    return tuning
+        .composition()
+        .orElseThrow(
+            () ->
+                new InputException(
+                    place,
+                    "layer \"%s\": %s has no composition to choose by; write bandgapEv instead"
+                        .formatted(layer, material.record().name())));
+  }
+
+  private static void within(
+      Material material,
+      GapChoice choice,
+      double low,
+      double high,
+      String unit,
+      String layer,
+      Place place) {
+    if (!(choice.value() >= low && choice.value() <= high)) {
+      String message =
+          "layer \"%s\": %s must be in [%s, %s] %s for %s but was %s"
+              .formatted(
+                  layer,
+                  choice.key().word(),
+                  DecimalText.of(low, 5),
+                  DecimalText.of(high, 5),
+                  unit,
+                  material.record().name(),
+                  choice.value());
+      throw new InputException(place, message.replace("]  for", "] for"));
     }
-    return OptionalDouble.of(gap);
   }
 
   private static OptionalDouble fixedGap(
-      Material material, OptionalDouble wanted, String layer, String name, Place place) {
-    if (wanted.isPresent()) {
+      Material material, GapChoice choice, String layer, String name, Place place) {
+    if (choice.isPresent()) {
       throw new InputException(
           place,
-          "layer \"%s\": the bandgap of %s cannot be chosen; leave bandgapEv out or take a tunable"
-                  .formatted(layer, name)
+          "layer \"%s\": the bandgap of %s cannot be chosen; leave %s out or take a tunable"
+                  .formatted(layer, name, choice.key().word())
               + " material (evensun materials lists them)");
     }
     return material.bandgapEv();

@@ -92,7 +92,7 @@ public final class StackResolver {
 
   private int medium(MediumSpec medium) {
     try {
-      return slots.slot(medium.name(), medium.material(), medium.bandgapEv(), medium.place());
+      return slots.slot(medium.name(), medium.material(), medium.gap(), medium.place());
     } catch (InputException e) {
       faults.addAll(e.faults());
       return 0;

@@ -1,6 +1,7 @@
 package evensun.evaluation;
 
 import evensun.light.Spectrum;
+import evensun.material.Composition;
 import evensun.material.Material;
 import evensun.material.MaterialRecord;
 import evensun.material.Tuning;
@@ -22,6 +23,9 @@ final class Cells {
   /** Irradiance in W m⁻² nm⁻¹ of the flat test spectrum. */
   static final double FLAT = 1.5;
 
+  private static final Tuning ALLOY =
+      new Tuning(1, 2, 1.5, Optional.of(new Composition("any", 1.2, 0.6, 0.2)));
+
   private Cells() {}
 
   /** A flat spectrum, so that photon currents have the closed form q/(hc)·E·(λ₂² − λ₁²)/2. */
@@ -29,13 +33,16 @@ final class Cells {
     return Spectrum.of("flat", "invented", new double[] {200, 2000}, new double[] {FLAT, FLAT});
   }
 
-  /** Materials by name: air, grey (k = 0.05), clear (k = 0), edge (tunable: k = gap/100). */
+  /**
+   * Materials by name: air, grey (k = 0.05), clear (k = 0), edge and alloy (tunable: k = gap/100).
+   */
   static MaterialSource materials() {
     return (name, place) ->
         switch (name) {
           case "air", "clear" -> grey(name, 0, Optional.empty());
           case "grey" -> grey(name, 0.05, Optional.empty());
           case "edge" -> grey(name, 0, Optional.of(new Tuning(1, 2, 1.5)));
+          case "alloy" -> grey(name, 0, Optional.of(ALLOY));
           default -> throw new evensun.scenario.InputException(place, "no material " + name);
         };
   }

@@ -1,6 +1,7 @@
 package evensun.evaluation;
 
 import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.within;
 
 import evensun.search.problem.Objective;
 import evensun.search.problem.Variable;
@@ -67,6 +68,24 @@ class StackObjectiveTest {
       assertThat(bench.design().k[upper.index()][0]).isEqualTo(1.8 / 100);
       assertThat(bench.design().k[lower.index()][0]).isEqualTo(1.5 / 100);
     }
+  }
+
+  // By hand: k of the alloy is its gap over 100, and its gap 1.2 + 0.6 x + 0.2 x² eV.
+  @Test
+  void aCompositionMovesTheBandgapOfItsLayer() {
+    Model model =
+        Cells.model(
+            Cells.twoCells(100, 100)
+                .replace(
+                    "name: upper, material: grey",
+                    "name: upper, material: alloy, compositionFraction: 0.5"),
+            new BeerLambertSolver());
+    Parameter share = Parameter.of("upper.compositionFraction", model.stack()).orElseThrow();
+    Bench bench = model.newBench();
+    assertThat(bench.design().k[share.index()][0]).isCloseTo(0.0155, within(1e-12));
+    bench.set(share, 1);
+    assertThat(bench.design().k[share.index()][0]).isCloseTo(0.02, within(1e-12));
+    assertThat(bench.get(share)).isCloseTo(1, within(1e-12));
   }
 
   @Test

@@ -1,6 +1,7 @@
 package evensun.scenario.reader;
 
 import evensun.scenario.FeatureSpec;
+import evensun.scenario.GapChoice;
 import evensun.scenario.tree.Fields;
 import evensun.scenario.tree.Interval;
 import evensun.scenario.tree.Shown;
@@ -9,12 +10,14 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
-import java.util.OptionalDouble;
 
 /** Binds what is not flat, uniform and pure about a layer. */
 final class FeatureBinder {
 
   static final Interval FEATURE_SIZE = Interval.above(0, 1e6, "nm");
+
+  /** Keys of a layer that speak of its own material. */
+  static final List<String> MATERIAL_KEYS = List.of("material", "bandgapEv", "compositionFraction");
 
   private FeatureBinder() {}
 
@@ -23,9 +26,9 @@ final class FeatureBinder {
    *
    * @param layer its keys
    * @param material its own material, empty where the features name the materials
-   * @param bandgapEv bandgap of that material, if it is chosen
+   * @param gap bandgap of that material, if it is chosen
    */
-  static List<FeatureSpec> bind(Fields layer, String material, OptionalDouble bandgapEv) {
+  static List<FeatureSpec> bind(Fields layer, String material, GapChoice gap) {
     List<FeatureSpec> features = new ArrayList<>();
     if (layer.has("mixture") && layer.has("grading")) {
       layer.know("mixture", "grading");
@@ -33,7 +36,7 @@ final class FeatureBinder {
           layer.place("grading"),
           "a layer takes a mixture or a grading, not both; split it into two layers");
     } else {
-      MixtureBinder.bind(layer, material, bandgapEv).ifPresent(features::add);
+      MixtureBinder.bind(layer, material, gap).ifPresent(features::add);
       GradingBinder.bind(layer).ifPresent(features::add);
     }
     features.addAll(FaceBinder.bind(layer));

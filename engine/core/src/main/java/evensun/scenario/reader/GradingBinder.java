@@ -2,6 +2,7 @@ package evensun.scenario.reader;
 
 import evensun.scenario.FeatureSpec.ComponentSpec;
 import evensun.scenario.FeatureSpec.GradingSpec;
+import evensun.scenario.GapChoice;
 import evensun.scenario.tree.Fields;
 import evensun.scenario.tree.Interval;
 import evensun.scenario.tree.NameRule;
@@ -58,7 +59,7 @@ final class GradingBinder {
 
   private Optional<GradingSpec> grading() {
     int before = fields.faults().count();
-    for (String key : List.of("material", "bandgapEv")) {
+    for (String key : FeatureBinder.MATERIAL_KEYS) {
       FeatureBinder.refuse(layer, key, "goes into the ends of the grading");
     }
     if (layer.has("coherence")
@@ -90,12 +91,12 @@ final class GradingBinder {
     if (!(node.get() instanceof Mapping mapping)) {
       return fields
           .requiredName(key, "a material", NameRule.MATERIAL)
-          .map(name -> new ComponentSpec(key, name, OptionalDouble.empty(), 1, node.get().place()));
+          .map(name -> new ComponentSpec(key, name, GapChoice.NONE, 1, node.get().place()));
     }
     Fields own = new Fields(fields.who() + "." + key, mapping, fields.faults());
     Optional<String> material =
         own.requiredName("material", "the name of a material", NameRule.MATERIAL);
-    OptionalDouble gap = own.number("bandgapEv", StackBinder.BANDGAP);
+    GapChoice gap = GapBinder.bind(own);
     own.finish();
     return material.map(name -> new ComponentSpec(key, name, gap, 1, own.place()));
   }

@@ -2,6 +2,7 @@ package evensun.scenario.reader;
 
 import evensun.scenario.FeatureSpec.ComponentSpec;
 import evensun.scenario.FeatureSpec.MixtureSpec;
+import evensun.scenario.GapChoice;
 import evensun.scenario.tree.Fields;
 import evensun.scenario.tree.Interval;
 import evensun.scenario.tree.NameRule;
@@ -31,13 +32,13 @@ final class MixtureBinder {
   private final Fields fields;
 
   private final String material;
-  private final OptionalDouble bandgapEv;
+  private final GapChoice gap;
 
-  private MixtureBinder(Fields layer, Fields fields, String material, OptionalDouble bandgapEv) {
+  private MixtureBinder(Fields layer, Fields fields, String material, GapChoice gap) {
     this.layer = layer;
     this.fields = fields;
     this.material = material;
-    this.bandgapEv = bandgapEv;
+    this.gap = gap;
   }
 
   /** Whether the mixture of a layer lists components, so that the layer has no material. */
@@ -50,10 +51,10 @@ final class MixtureBinder {
             .orElse(true);
   }
 
-  static Optional<MixtureSpec> bind(Fields layer, String material, OptionalDouble bandgapEv) {
+  static Optional<MixtureSpec> bind(Fields layer, String material, GapChoice gap) {
     return layer
         .section("mixture")
-        .flatMap(fields -> new MixtureBinder(layer, fields, material, bandgapEv).mixture());
+        .flatMap(fields -> new MixtureBinder(layer, fields, material, gap).mixture());
   }
 
   private Optional<MixtureSpec> mixture() {
@@ -79,14 +80,13 @@ final class MixtureBinder {
             ? "air"
             : fields.requiredName("pores", "a material", NameRule.MATERIAL).orElse("");
     return List.of(
-        new ComponentSpec("solid", material, bandgapEv, 1 - porosity, layer.place("material")),
-        new ComponentSpec(
-            "pores", pores, OptionalDouble.empty(), porosity, fields.place("porosity")));
+        new ComponentSpec("solid", material, gap, 1 - porosity, layer.place("material")),
+        new ComponentSpec("pores", pores, GapChoice.NONE, porosity, fields.place("porosity")));
   }
 
   private List<ComponentSpec> components() {
     FeatureBinder.refuse(fields, "pores", "goes with porosity");
-    for (String key : List.of("material", "bandgapEv")) {
+    for (String key : FeatureBinder.MATERIAL_KEYS) {
       FeatureBinder.refuse(layer, key, "goes into the components of the mixture");
     }
     fields.require("components", "at least two, such as {absorber: {material: …, fraction: 0.6}}");
@@ -130,7 +130,7 @@ final class MixtureBinder {
         new ComponentSpec(
             name,
             own.requiredName("material", "the name of a material", NameRule.MATERIAL).orElse(""),
-            own.number("bandgapEv", StackBinder.BANDGAP),
+            GapBinder.bind(own),
             own.number("fraction", FRACTION).orElse(REST),
             own.has("fraction") ? own.place("fraction") : own.place());
     own.finish();
@@ -162,7 +162,7 @@ final class MixtureBinder {
   }
 
   private static ComponentSpec withFraction(ComponentSpec c, double fraction) {
-    return new ComponentSpec(c.name(), c.material(), c.bandgapEv(), fraction, c.place());
+    return new ComponentSpec(c.name(), c.material(), c.gap(), fraction, c.place());
   }
 
   private String host(MixingRule rule, List<ComponentSpec> components) {

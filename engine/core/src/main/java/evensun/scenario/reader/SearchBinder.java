@@ -44,7 +44,9 @@ final class SearchBinder {
 
   /** Matched current cannot decide a bandgap, efficiency can. */
   private static String usualAim(List<VarySpec> vary) {
-    boolean gap = vary.stream().anyMatch(v -> v.key().endsWith(".bandgapEv"));
+    boolean gap =
+        vary.stream()
+            .anyMatch(v -> GapBinder.KEYS.stream().anyMatch(k -> v.key().endsWith("." + k)));
     return gap ? "efficiency" : AIMS.get(0);
   }
 

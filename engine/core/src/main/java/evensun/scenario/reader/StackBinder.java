@@ -1,5 +1,6 @@
 package evensun.scenario.reader;
 
+import evensun.scenario.GapChoice;
 import evensun.scenario.LayerSpec;
 import evensun.scenario.LayerSpec.Coherence;
 import evensun.scenario.MediumSpec;
@@ -20,7 +21,6 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import java.util.OptionalDouble;
 import java.util.Set;
 
 /** Binds {@code stack}. */
@@ -94,7 +94,7 @@ final class StackBinder {
             root.place("stack"),
             "stack must have at least two entries, {medium: air} first and the exit medium last");
       }
-      MediumSpec none = new MediumSpec("", "", OptionalDouble.empty(), root.place("stack"));
+      MediumSpec none = new MediumSpec("", "", GapChoice.NONE, root.place("stack"));
       return new Stack(none, List.of(), none, Set.of(), false);
     }
     return binder.stack();
@@ -112,7 +112,7 @@ final class StackBinder {
   private MediumSpec incident(Node node) {
     Optional<Fields> opened = open(0);
     if (opened.isEmpty()) {
-      return new MediumSpec("", "", OptionalDouble.empty(), node.place());
+      return new MediumSpec("", "", GapChoice.NONE, node.place());
     }
     Fields fields = opened.get();
     if (!fields.has("medium")) {
@@ -120,11 +120,11 @@ final class StackBinder {
       fields.fault(
           fields.place(),
           "the first entry must be the medium the light comes from, such as {medium: air}");
-      return new MediumSpec("", "", OptionalDouble.empty(), fields.place());
+      return new MediumSpec("", "", GapChoice.NONE, fields.place());
     }
     String material = fields.requiredName("medium", "a material", NameRule.MATERIAL).orElse("");
     fields.finish();
-    return new MediumSpec(material, material, OptionalDouble.empty(), fields.place("medium"));
+    return new MediumSpec(material, material, GapChoice.NONE, fields.place("medium"));
   }
 
   private LayerSpec layer(int index) {
@@ -152,7 +152,7 @@ final class StackBinder {
     }
     boolean pure = !FeatureBinder.namesMaterials(fields);
     String material = pure ? material(fields) : "";
-    OptionalDouble gap = pure ? fields.number("bandgapEv", BANDGAP) : OptionalDouble.empty();
+    GapChoice gap = pure ? GapBinder.bind(fields) : GapChoice.NONE;
     LayerSpec layer =
         new LayerSpec(
             name,
@@ -170,7 +170,7 @@ final class StackBinder {
     int index = entries.size() - 1;
     Optional<Fields> opened = open(index);
     if (opened.isEmpty()) {
-      return new MediumSpec("", "", OptionalDouble.empty(), entries.get(index).place());
+      return new MediumSpec("", "", GapChoice.NONE, entries.get(index).place());
     }
     Fields fields = opened.get();
     if (fields.has("medium")) {
@@ -179,7 +179,7 @@ final class StackBinder {
           "the last entry has a name for the ledger; write {name: rear, material: "
               + (value(fields, "medium").isEmpty() ? "…" : value(fields, "medium"))
               + "}");
-      return new MediumSpec("", "", OptionalDouble.empty(), fields.place());
+      return new MediumSpec("", "", GapChoice.NONE, fields.place());
     }
     String name = name(fields);
     noThickness(fields);
@@ -187,7 +187,7 @@ final class StackBinder {
         new MediumSpec(
             name,
             material(fields),
-            fields.number("bandgapEv", BANDGAP),
+            GapBinder.bind(fields),
             FaceBinder.bind(fields),
             fields.place());
     fields.finish();
@@ -277,7 +277,7 @@ final class StackBinder {
   }
 
   private static LayerSpec noLayer(Place place) {
-    return new LayerSpec("", "", OptionalDouble.empty(), Double.NaN, Coherence.DEFAULT, place);
+    return new LayerSpec("", "", GapChoice.NONE, Double.NaN, Coherence.DEFAULT, place);
   }
 
   private static Coherence coherence(Fields fields) {

@@ -2,6 +2,7 @@ package evensun.scenario.reader;
 
 import evensun.scenario.FaceSpec;
 import evensun.scenario.FeatureSpec;
+import evensun.scenario.GapChoice;
 import evensun.scenario.LayerSpec;
 import evensun.scenario.tree.Fields;
 import evensun.scenario.tree.Interval;
@@ -35,16 +36,18 @@ final class VaryKeys {
     Map<String, Interval> known = new LinkedHashMap<>();
     for (LayerSpec layer : stack.layers()) {
       known.put(layer.name() + ".thicknessNm", StackBinder.THICKNESS);
-      if (layer.bandgapEv().isPresent()) {
-        known.put(layer.name() + ".bandgapEv", StackBinder.BANDGAP);
-      }
+      addGap(layer.name(), layer.gap(), known);
       layer.features().forEach(feature -> addFeature(layer.name(), feature, known));
     }
     stack.exit().faces().forEach(face -> addFeature(stack.exit().name(), face, known));
-    if (stack.exit().bandgapEv().isPresent()) {
-      known.put(stack.exit().name() + ".bandgapEv", StackBinder.BANDGAP);
-    }
+    addGap(stack.exit().name(), stack.exit().gap(), known);
     return known;
+  }
+
+  private static void addGap(String name, GapChoice gap, Map<String, Interval> known) {
+    if (gap.isPresent()) {
+      known.put(name + "." + gap.key().word(), GapBinder.interval(gap.key()));
+    }
   }
 
   private static void addFeature(String layer, FeatureSpec feature, Map<String, Interval> known) {
@@ -62,9 +65,7 @@ final class VaryKeys {
       if (feature instanceof FeatureSpec.MixtureSpec) {
         known.put(key + ".fraction", MixtureBinder.FRACTION);
       }
-      if (component.bandgapEv().isPresent()) {
-        known.put(key + ".bandgapEv", StackBinder.BANDGAP);
-      }
+      addGap(key, component.gap(), known);
     }
   }
 
@@ -79,8 +80,8 @@ final class VaryKeys {
     if (quantity.equals("thicknessNm")) {
       return "cannot vary: the exit medium has no thickness";
     }
-    if (quantity.equals("bandgapEv")) {
-      return "cannot vary: write bandgapEv in the layer first, as the value to start from";
+    if (GapBinder.KEYS.contains(quantity)) {
+      return "cannot vary: write " + quantity + " in the layer first, as the value to start from";
     }
     return "names nothing that can vary"
         + sameQuantity(key, layer, known)

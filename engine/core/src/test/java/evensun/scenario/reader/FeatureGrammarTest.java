@@ -87,7 +87,7 @@ class FeatureGrammarTest {
     assertThat(scaffold.material()).isEmpty();
     assertThat(mixture.host()).isEqualTo("titania");
     assertThat(mixture.featureSizeNm()).hasValue(12);
-    assertThat(mixture.components().get(0).bandgapEv()).hasValue(1.6);
+    assertThat(mixture.components().get(0).gap().value()).isEqualTo(1.6);
     assertThat(mixture.components().get(1).fraction()).isEqualTo(0.75);
   }
 

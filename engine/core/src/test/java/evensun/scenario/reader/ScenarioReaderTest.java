@@ -94,7 +94,7 @@ class ScenarioReaderTest {
     assertThat(layers)
         .extracting(LayerSpec::name)
         .containsExactly("front-contact", "perovskite", "wafer");
-    assertThat(layers.get(1).bandgapEv()).hasValue(1.68);
+    assertThat(layers.get(1).gap().value()).isEqualTo(1.68);
     assertThat(layers.get(1).coherence()).isEqualTo(Coherence.DEFAULT);
     assertThat(layers.get(2).coherence()).isEqualTo(Coherence.INCOHERENT);
     assertThat(layers.get(2).thicknessNm()).isEqualTo(180000);

@@ -128,6 +128,8 @@ class ScenarioSchemaTest {
         "name: perovskite | name: pérovskite",
         "name: perovskite | name: 1",
         "bandgapEv: 1.68 | bandgapEv: 738",
+        "bandgapEv: 1.68 | compositionFraction: 1.5",
+        "bandgapEv: 1.68 | 'bandgapEv: 1.68, compositionFraction: 0.2'",
         "coherence: incoherent | coherence: partly",
         "material: silver | materail: silver",
         "absorbers: [perovskite] | absorbers: []",

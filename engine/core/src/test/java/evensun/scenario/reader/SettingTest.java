@@ -44,7 +44,7 @@ class SettingTest {
   void aKeyThatIsNotWrittenIsAdded() {
     Scenario scenario = with("front-contact.coherence=incoherent", "wafer.bandgapEv=1.1");
     assertThat(scenario.stack().get(0).coherence().name()).isEqualTo("INCOHERENT");
-    assertThat(scenario.stack().get(2).bandgapEv()).hasValue(1.1);
+    assertThat(scenario.stack().get(2).gap().value()).isEqualTo(1.1);
   }
 
   @Test
