@@ -40,7 +40,7 @@ final class FaceRules {
   void check() {
     for (int b = 0; b < boundaries.size(); b++) {
       List<Written> written = written(boundaries.get(b));
-      onePerKind(b, written);
+      onlyOne(b, written);
       ideal(b, written);
       films(b);
     }
@@ -66,42 +66,25 @@ final class FaceRules {
     return written;
   }
 
-  private void onePerKind(int b, List<Written> written) {
-    for (int i = 0; i < written.size(); i++) {
-      for (int j = 0; j < i; j++) {
-        Written first = written.get(j);
-        Written second = written.get(i);
-        if (first.face().getClass() == second.face().getClass()) {
-          String key = second.face() instanceof TextureSpec ? "texture" : "scatter";
-          fault(
-              second,
-              key
-                  + " of the boundary between "
-                  + between(b)
-                  + " stands in layer \""
-                  + first.layer()
-                  + "\" already; it means the whole boundary with all its films, keep one");
-        }
-      }
+  private void onlyOne(int b, List<Written> written) {
+    for (int i = 1; i < written.size(); i++) {
+      fault(
+          written.get(i),
+          "the boundary between "
+              + between(b)
+              + " has a texture or scatter already, in layer \""
+              + written.get(0).layer()
+              + "\"; either means the whole boundary with all its films, keep one");
     }
   }
 
   private void ideal(int b, List<Written> written) {
     for (Written one : written) {
-      if (one.face() instanceof IdealSpec) {
-        if (b > 0 && b < boundaries.size() - 1) {
-          fault(
-              one,
-              "scatter: ideal is the limit of an outer boundary, but this one lies between "
-                  + between(b));
-        }
-        if (written.stream().anyMatch(other -> !(other.face() instanceof IdealSpec))) {
-          fault(
-              one,
-              "scatter: ideal stands for the boundary between "
-                  + between(b)
-                  + " as a whole; remove the texture or the other scatter there");
-        }
+      if (one.face() instanceof IdealSpec && b > 0 && b < boundaries.size() - 1) {
+        fault(
+            one,
+            "scatter: ideal is the limit of an outer boundary, but this one lies between "
+                + between(b));
       }
     }
   }

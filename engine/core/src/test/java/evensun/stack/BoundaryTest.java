@@ -128,11 +128,11 @@ class BoundaryTest {
   @CsvSource(
       delimiter = '|',
       value = {
-        "'thicknessNm: 100}' | 'thicknessNm: 100, texture: {shape: groove}}' | cell.yaml:8: layer \"contact\": texture of the boundary between \"air\" and \"wafer\" stands in layer \"coating\" already",
-        "coherence: incoherent} | 'coherence: incoherent, texture: {shape: groove}}' | cell.yaml:9: layer \"wafer\": texture of the boundary between \"air\" and \"wafer\" stands in layer \"contact\" already",
+        "'thicknessNm: 100}' | 'thicknessNm: 100, texture: {shape: groove}}' | cell.yaml:8: layer \"contact\": the boundary between \"air\" and \"wafer\" has a texture or scatter already, in layer \"coating\"",
+        "coherence: incoherent} | 'coherence: incoherent, texture: {shape: groove}}' | cell.yaml:9: layer \"wafer\": the boundary between \"air\" and \"wafer\" has a texture or scatter already, in layer \"contact\"",
         "thicknessNm: 100000 | thicknessNm: 1000 | cell.yaml:9: layer \"wafer\": thicknessNm, counted between mean planes, must exceed the 1732 nm that the textures",
         "baseUm: 6 | baseUm: 0.5 | cell.yaml:8: layer \"contact\": texture must be higher than its films are thick, 300 nm together where they are thickest, but is 91 nm high",
-        "'thicknessNm: 100}' | 'thicknessNm: 100, scatter: ideal}' | cell.yaml:7: layer \"coating\": scatter: ideal stands for the boundary between \"air\" and \"wafer\" as a whole",
+        "'thicknessNm: 100}' | 'thicknessNm: 100, scatter: ideal}' | cell.yaml:8: layer \"contact\": the boundary between \"air\" and \"wafer\" has a texture or scatter already, in layer \"coating\"",
         "'thicknessNm: 100}' | 'thicknessNm: 1000, planarises: true, scatter: {}}\n  - {name: film, material: silicon-nitride, thicknessNm: 10, scatter: ideal}' | cell.yaml:8: layer \"film\": scatter: ideal is the limit of an outer boundary, but this one lies between \"coating\" and \"wafer\"",
         "coherence: incoherent | planarises: true | cell.yaml:9: layer \"wafer\": planarises: true needs a texture below it, but the boundary between \"wafer\" and \"mirror\" is flat",
       })

@@ -6,6 +6,8 @@ import evensun.spi.Design;
 import evensun.spi.EffectiveIndex;
 import evensun.spi.Evaluator;
 import evensun.spi.Gradient;
+import evensun.spi.RaySection;
+import evensun.spi.ReflectanceParts;
 import evensun.spi.Response;
 import java.util.Arrays;
 import java.util.Optional;
@@ -191,7 +193,27 @@ final class ChainedEvaluator implements Evaluator {
     if (type == DepthProfile.class) {
       return below.ability(DepthProfile.class).map(inner -> type.cast(depthProfile(inner)));
     }
+    if (type == ReflectanceParts.class) {
+      return below.ability(ReflectanceParts.class).map(inner -> type.cast(parts(inner)));
+    }
+    if (type == RaySection.class) {
+      return below.ability(RaySection.class).map(inner -> type.cast(section(inner)));
+    }
     return Optional.empty();
+  }
+
+  private ReflectanceParts parts(ReflectanceParts inner) {
+    return (design, incidence, neverEntered, cameBack) -> {
+      update(design);
+      inner.evaluate(fit.plain(), incidence, neverEntered, cameBack);
+    };
+  }
+
+  private RaySection section(RaySection inner) {
+    return (design, incidence, wavelength, rayCount) -> {
+      update(design);
+      return inner.view(fit.plain(), incidence, wavelength, rayCount);
+    };
   }
 
   private Gradient gradient(Gradient inner) {
