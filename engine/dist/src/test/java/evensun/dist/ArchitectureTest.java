@@ -44,7 +44,9 @@ class ArchitectureTest {
         "transfermatrix",
         "effectivemedium",
         "externalprocess",
-        "transfermatrix.kernel"
+        "raytrace",
+        "transfermatrix.kernel",
+        "raytrace.kernel"
       })
   void everyPackageThatARuleNamesHoldsClasses(String name) {
     assertThat(code.that(resideInAPackage("evensun." + name)))
@@ -88,7 +90,7 @@ class ArchitectureTest {
   }
 
   @ParameterizedTest
-  @ValueSource(strings = {"transfermatrix", "effectivemedium", "externalprocess"})
+  @ValueSource(strings = {"transfermatrix", "effectivemedium", "externalprocess", "raytrace"})
   void aSolverSeesTheContractAndItself(String name) {
     String own = "evensun." + name + "..";
     classes()

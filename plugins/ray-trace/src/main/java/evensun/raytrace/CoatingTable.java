@@ -1,0 +1,196 @@
+package evensun.raytrace;
+
+import evensun.raytrace.kernel.Weighing;
+import evensun.spi.Design;
+import evensun.spi.Evaluator;
+import evensun.spi.Incidence;
+import evensun.spi.Layer;
+import evensun.spi.OpticalSolver;
+import evensun.spi.Polarisation;
+import evensun.spi.PreparedSolver;
+import evensun.spi.Problem;
+import evensun.spi.Response;
+import evensun.spi.Samples;
+import evensun.spi.Services;
+import evensun.spi.Side;
+import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.List;
+import java.util.Map;
+
+/**
+ * The films of a boundary against the angle, seen from one side: asked of the solver below for the
+ * wavelengths that come to it, and kept while nothing about them changes. Owned by one thread.
+ */
+final class CoatingTable implements AutoCloseable {
+
+  /** Directions per question: the solver below keeps what materials decide for so many. */
+  private static final int NODES_PER_QUESTION = 7;
+
+  private final Problem problem;
+  private final Device device;
+  private final int boundary;
+  private final List<Integer> films;
+  private final int[] wavelengths;
+  private final List<Question> questions = new ArrayList<>();
+  private final Design films1;
+  private final long[] seen; // [material of the question] revision
+  private final double[] thickness; // [film] as answered last
+  private boolean fresh;
+
+  /** Some directions asked together. */
+  private record Question(
+      int firstNode, int nodes, PreparedSolver prepared, Evaluator evaluator, Response answer) {}
+
+  /** Rows of one table that answers go to. */
+  interface Target {
+
+    /**
+     * Takes the answer for one node and wavelength.
+     *
+     * @param node index in this table
+     * @param w index of the wavelength in the whole spectrum
+     * @param quantity as in {@link Weighing}, s before p
+     */
+    void coating(int node, int w, int quantity, double value);
+
+    /** Takes the absorptance of a film; the number of films stands for what is booked outside. */
+    void film(int node, int w, int film, int polarisation, double value);
+  }
+
+  CoatingTable(
+      Problem problem,
+      Device device,
+      int boundary,
+      Side side,
+      double[] cosines,
+      int[] wavelengths,
+      Services services) {
+    this.problem = problem;
+    this.device = device;
+    this.boundary = boundary;
+    this.wavelengths = wavelengths;
+    films = device.boundaries().get(boundary).films();
+    seen = new long[films.size() + 2];
+    thickness = new double[films.size()];
+    OpticalSolver below = TransferMatrix.from(services);
+    Problem question = question();
+    films1 = Design.of(question);
+    for (int f = 0; f < films.size(); f++) {
+      films1.material[f] = f + 2;
+    }
+    for (int at = 0; at < cosines.length; at += NODES_PER_QUESTION) {
+      int end = Math.min(cosines.length, at + NODES_PER_QUESTION);
+      List<Incidence> incidences = incidences(Arrays.copyOfRange(cosines, at, end), side);
+      PreparedSolver prepared =
+          below.prepare(question.withIncidences(incidences), films1, services);
+      Response answer = Response.spectra(incidences.size(), films.size(), wavelengths.length);
+      questions.add(new Question(at, end - at, prepared, prepared.newEvaluator(), answer));
+    }
+  }
+
+  private Problem question() {
+    double[] nm = new double[wavelengths.length];
+    double[] light = new double[wavelengths.length];
+    for (int i = 0; i < nm.length; i++) {
+      nm[i] = problem.wavelengthNm().at(wavelengths[i]);
+      light[i] = problem.incidentMaPerCm2().at(wavelengths[i]);
+    }
+    List<Layer> plain =
+        films.stream().map(l -> Layer.plain(problem.layers().get(l).name(), true)).toList();
+    return new Problem(
+        Samples.of(nm),
+        Samples.of(light),
+        plain,
+        0,
+        1,
+        films.size() + 2,
+        0,
+        List.of(Incidence.normal()),
+        problem.seed(),
+        problem.wantedErrorMaPerCm2(),
+        Map.of());
+  }
+
+  private static List<Incidence> incidences(double[] cosines, Side side) {
+    List<Incidence> incidences = new ArrayList<>();
+    for (double cosine : cosines) {
+      double angleDeg = cosine >= 1 ? 0 : Math.toDegrees(Math.acos(cosine));
+      incidences.add(new Incidence(angleDeg, Polarisation.S, side));
+      incidences.add(new Incidence(angleDeg, Polarisation.P, side));
+    }
+    return incidences;
+  }
+
+  /** Asks again where a film or a medium has changed. */
+  void refresh(Design design, Target into) {
+    if (!takeOver(design)) {
+      return;
+    }
+    for (Question question : questions) {
+      question.evaluator().evaluate(films1, question.answer());
+      for (int node = 0; node < question.nodes(); node++) {
+        for (int polarisation = 0; polarisation < 2; polarisation++) {
+          report(question, node, polarisation, into);
+        }
+      }
+    }
+  }
+
+  /** Copies what the films are; whether anything changed. */
+  private boolean takeOver(Design design) {
+    boolean changed = !fresh;
+    changed |= takeOver(design, 0, device.material(design, boundary));
+    changed |= takeOver(design, 1, device.material(design, boundary + 1));
+    for (int f = 0; f < films.size(); f++) {
+      int l = films.get(f);
+      changed |= takeOver(design, f + 2, design.material[l]);
+      changed |= thickness[f] != design.thicknessNm[l];
+      thickness[f] = design.thicknessNm[l];
+      films1.thicknessNm[f] = design.thicknessNm[l];
+    }
+    fresh = true;
+    return changed;
+  }
+
+  private boolean takeOver(Design design, int to, int material) {
+    if (seen[to] == design.revision[material] && seen[to] != 0) {
+      return false;
+    }
+    seen[to] = design.revision[material];
+    for (int i = 0; i < wavelengths.length; i++) {
+      films1.n[to][i] = design.n[material][wavelengths[i]];
+      films1.k[to][i] = design.k[material][wavelengths[i]];
+    }
+    films1.revision[to] = Design.nextRevision();
+    return true;
+  }
+
+  private void report(Question question, int node, int polarisation, Target into) {
+    int i = 2 * node + polarisation;
+    Response answer = question.answer();
+    int count = films.size();
+    for (int at = 0; at < wavelengths.length; at++) {
+      int w = wavelengths[at];
+      double r = answer.reflectance[i][at];
+      double t = answer.transmittance[i][at];
+      double rest = 1 - r - t;
+      into.coating(question.firstNode() + node, w, polarisation, r);
+      into.coating(question.firstNode() + node, w, 2 + polarisation, t);
+      for (int f = 0; f < count; f++) {
+        double share = answer.absorptance[i * count + f][at];
+        into.film(question.firstNode() + node, w, f, polarisation, share);
+        rest -= share;
+      }
+      into.film(question.firstNode() + node, w, count, polarisation, rest);
+    }
+  }
+
+  @Override
+  public void close() {
+    for (Question question : questions) {
+      question.evaluator().close();
+      question.prepared().close();
+    }
+  }
+}

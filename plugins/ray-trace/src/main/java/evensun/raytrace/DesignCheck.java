@@ -1,0 +1,119 @@
+package evensun.raytrace;
+
+import evensun.raytrace.trace.Face;
+import evensun.spi.Design;
+import evensun.spi.EvaluationFailed;
+import evensun.spi.Feature;
+import evensun.spi.Problem;
+import evensun.spi.Side;
+import evensun.spi.Texture;
+import java.util.Locale;
+
+/** Refuses designs that cannot be evaluated. */
+final class DesignCheck {
+
+  private final Problem problem;
+  private final long[] checked;
+
+  DesignCheck(Problem problem) {
+    this.problem = problem;
+    checked = new long[problem.materialCount()];
+  }
+
+  /**
+   * Checks the numbers.
+   *
+   * @throws EvaluationFailed naming the layer or material, the rule and the value
+   */
+  void check(Design design) {
+    for (int l = 0; l < problem.layerCount(); l++) {
+      double nm = design.thicknessNm[l];
+      if (!(nm >= 0 && nm < Double.POSITIVE_INFINITY)) {
+        throw failed(
+            "layer \"%s\": thicknessNm must be finite and at least 0 nm but was %s",
+            problem.layers().get(l).name(), nm);
+      }
+      for (Feature feature : problem.layers().get(l).features()) {
+        checkAngle(design, l, feature);
+      }
+    }
+    for (int m = 0; m < checked.length; m++) {
+      if (checked[m] != design.revision[m] || checked[m] == 0) {
+        checkMaterial(design, m);
+        checked[m] = design.revision[m];
+      }
+    }
+    checkLightFromBehind(design);
+  }
+
+  private void checkAngle(Design design, int l, Feature feature) {
+    if (feature instanceof Texture texture && texture.heightMap().isEmpty()) {
+      double angle = texture.facetAngleDeg().in(design);
+      if (!(angle > 0 && angle < 90)) {
+        throw failed(
+            "layer \"%s\": facetAngleDeg must be in (0, 90) degrees but was %s",
+            problem.layers().get(l).name(), angle);
+      }
+    }
+  }
+
+  private void checkMaterial(Design design, int m) {
+    for (int w = 0; w < problem.wavelengthCount(); w++) {
+      double n = design.n[m][w];
+      double k = design.k[m][w];
+      if (!(n > 0 && n <= 1e6 && k >= 0 && k <= 1e6)) {
+        throw failed(
+            "material number %d at %s nm: n must be in (0, 1e6] and k in [0, 1e6] but n was %s, k %s",
+            m, problem.wavelengthNm().at(w), n, k);
+      }
+    }
+  }
+
+  private void checkLightFromBehind(Design design) {
+    boolean behind = problem.incidences().stream().anyMatch(i -> i.side() == Side.REAR);
+    if (!behind) {
+      return;
+    }
+    for (double k : design.k[problem.exitMaterial()]) {
+      if (k > 1e-6) {
+        throw failed(
+            "light cannot come from behind through an exit medium that absorbs; its k must be below 1e-6 but was %s",
+            k);
+      }
+    }
+  }
+
+  /** Checks that films and layers fit to the shapes of a device. */
+  void checkFit(Design design, Traces.Traced traced) {
+    Device device = traced.device();
+    for (int b = 0; b < device.boundaries().size(); b++) {
+      Face face = traced.faces().get(b);
+      if (face.relief().isPresent()) {
+        checkFilms(design, device.boundaries().get(b), face.relief().get().featureUm());
+      }
+    }
+    for (int m = 1; m < device.mediaCount() - 1; m++) {
+      double reach = traced.faces().get(m - 1).belowMeanUm() + traced.faces().get(m).aboveMeanUm();
+      double thickness = device.thicknessUm(design, m);
+      if (thickness < reach) {
+        throw failed(
+            "%s is %.4g µm thick between mean planes, but the textures of its faces reach %.4g µm into it; make it thicker or the textures smaller",
+            device.name(m), thickness, reach);
+      }
+    }
+  }
+
+  private void checkFilms(Design design, Device.Boundary boundary, double featureUm) {
+    for (int film : boundary.films()) {
+      if (design.thicknessNm[film] > 1000 * featureUm) {
+        throw failed(
+            "layer \"%s\" is %.6g nm thick and follows a texture whose shapes are %.6g nm wide; a film must be thinner than the shapes it follows: make it thinner, or the texture coarser, or write coherence: incoherent if it fills the texture",
+            problem.layers().get(film).name(), design.thicknessNm[film], 1000 * featureUm);
+      }
+    }
+  }
+
+  private static EvaluationFailed failed(String message, Object... values) {
+    return new EvaluationFailed(String.format(Locale.ROOT, message, values));
+  }
+}

@@ -1,0 +1,43 @@
+package evensun.raytrace;
+
+import evensun.spi.Channel;
+import evensun.spi.Design;
+import evensun.spi.EvaluationFailed;
+import evensun.spi.Evaluator;
+import evensun.spi.PreparedSolver;
+import evensun.spi.Problem;
+import evensun.spi.Services;
+import evensun.spi.UnsupportedProblem;
+import java.util.List;
+import java.util.stream.IntStream;
+
+/** The solver made ready for a stack that needs rays. */
+final class PreparedRayTrace implements PreparedSolver {
+
+  private final Problem problem;
+  private final Services services;
+  private final Traces traces;
+  private final List<Channel> channels;
+
+  PreparedRayTrace(Problem problem, Design start, Options options, Services services) {
+    this.problem = problem;
+    this.services = services;
+    channels = IntStream.range(0, problem.layerCount()).mapToObj(Channel::of).toList();
+    try {
+      RayCount count = RayCount.choose(problem, start, options, services);
+      traces = new Traces(problem, count.perReplicate());
+    } catch (EvaluationFailed e) {
+      throw new UnsupportedProblem(e.getMessage());
+    }
+  }
+
+  @Override
+  public List<Channel> channels() {
+    return channels;
+  }
+
+  @Override
+  public Evaluator newEvaluator() {
+    return new RayEvaluator(problem, services, traces);
+  }
+}

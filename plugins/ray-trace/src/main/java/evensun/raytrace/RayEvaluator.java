@@ -1,0 +1,162 @@
+package evensun.raytrace;
+
+import evensun.raytrace.trace.Beam;
+import evensun.spi.Design;
+import evensun.spi.Evaluator;
+import evensun.spi.Incidence;
+import evensun.spi.Problem;
+import evensun.spi.ReflectanceParts;
+import evensun.spi.Response;
+import evensun.spi.Services;
+import evensun.spi.Side;
+import java.util.Iterator;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+
+/** Answers designs by re-weighting what rays do. */
+final class RayEvaluator implements Evaluator, ReflectanceParts {
+
+  private static final int MOST_KEPT = 8;
+
+  private final Problem problem;
+  private final Services services;
+  private final Traces traces;
+  private final DesignCheck check;
+  private final Map<Traces.Traced, LitDevice> devices = new LinkedHashMap<>(16, 0.75f, true);
+  private final Estimate estimate;
+
+  RayEvaluator(Problem problem, Services services, Traces traces) {
+    this.problem = problem;
+    this.services = services;
+    this.traces = traces;
+    check = new DesignCheck(problem);
+    int rows = LitDevice.LAYERS + problem.layerCount();
+    estimate = new Estimate(rows, problem.wavelengthCount(), Options.REPLICATES);
+  }
+
+  @Override
+  public void evaluate(Design design, Response into) {
+    check.check(design);
+    Beam last = null;
+    LitDevice lit = null;
+    for (int i = 0; i < problem.incidences().size(); i++) {
+      Incidence incidence = problem.incidences().get(i);
+      Beam beam = Beam.of(incidence);
+      if (!beam.equals(last)) {
+        lit = ready(design, beam);
+        last = beam;
+      }
+      solve(lit, incidence);
+      Rows.write(i, estimate.mean, estimate.error, into);
+      if (i == 0 && into.sum != null) {
+        sum(into);
+      }
+    }
+  }
+
+  /** The device of a design and a beam with its coatings. */
+  LitDevice ready(Design design, Beam beam) {
+    Traces.Traced traced = traces.of(design, beam);
+    check.checkFit(design, traced);
+    LitDevice lit = devices.get(traced);
+    if (lit == null) {
+      lit = new LitDevice(problem, traced, services);
+      devices.put(traced, lit);
+      forgetOldest();
+    }
+    lit.prepare(design);
+    return lit;
+  }
+
+  private void forgetOldest() {
+    Iterator<LitDevice> oldest = devices.values().iterator();
+    while (devices.size() > MOST_KEPT && oldest.hasNext()) {
+      oldest.next().close();
+      oldest.remove();
+    }
+  }
+
+  private void solve(LitDevice lit, Incidence incidence) {
+    lit.solve(incidence.polarisation());
+    estimate.take(lit.shares);
+    if (incidence.side() == Side.REAR) {
+      swapOuterRows();
+    }
+  }
+
+  private void swapOuterRows() {
+    swap(estimate.mean);
+    swap(estimate.error);
+    for (double[][] rows : estimate.replicate) {
+      swap(rows);
+    }
+  }
+
+  private static void swap(double[][] rows) {
+    double[] first = rows[LitDevice.REFLECTED];
+    rows[LitDevice.REFLECTED] = rows[LitDevice.TRANSMITTED];
+    rows[LitDevice.TRANSMITTED] = first;
+  }
+
+  private void sum(Response into) {
+    for (int s = 0; s < into.sum.length; s++) {
+      into.sum[s] = Rows.sum(s, estimate.mean, into);
+      if (into.sumStandardError != null) {
+        into.sumStandardError[s] = error(s, into);
+      }
+    }
+  }
+
+  private double error(int sum, Response into) {
+    double squares = 0;
+    for (double[][] rows : estimate.replicate) {
+      double off = Rows.sum(sum, rows, into) - into.sum[sum];
+      squares += off * off;
+    }
+    int count = estimate.replicate.length;
+    return Math.sqrt(squares / (count * (count - 1.0)));
+  }
+
+  /** Solves one incidence; the estimate is valid until the next call. */
+  Estimate estimate(Design design, int incidence) {
+    check.check(design);
+    Incidence light = problem.incidences().get(incidence);
+    solve(ready(design, Beam.of(light)), light);
+    return estimate;
+  }
+
+  @Override
+  public void evaluate(Design design, int incidence, double[] neverEntered, double[] cameBack) {
+    Incidence light = problem.incidences().get(incidence);
+    Estimate found = estimate(design, incidence);
+    LitDevice lit = ready(design, Beam.of(light));
+    int absorber = Absorber.first(problem, lit.traced().device(), design);
+    for (int w = 0; w < neverEntered.length; w++) {
+      double never = 0;
+      double all = 0;
+      for (double[] top : lit.top[w]) {
+        for (int m = 0; m < top.length; m++) {
+          never += m < absorber ? top[m] : 0;
+          all += top[m];
+        }
+      }
+      double reflected = found.mean[LitDevice.REFLECTED][w];
+      neverEntered[w] = all == 0 ? 0 : reflected * never / all;
+      cameBack[w] = reflected - neverEntered[w];
+    }
+  }
+
+  @Override
+  public <A> Optional<A> ability(Class<A> type) {
+    return List.of(ReflectanceParts.class).contains(type)
+        ? Optional.of(type.cast(this))
+        : Optional.empty();
+  }
+
+  @Override
+  public void close() {
+    devices.values().forEach(LitDevice::close);
+  }
+}

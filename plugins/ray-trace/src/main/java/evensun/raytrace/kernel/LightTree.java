@@ -1,0 +1,66 @@
+package evensun.raytrace.kernel;
+
+/**
+ * What the light of one wavelength did, without how much of it there was: meetings with facets,
+ * each after the one it came from. Immutable.
+ *
+ * <p>From a meeting two legs start, 0 reflected and 1 transmitted. Light of a leg is absorbed on
+ * its way, and what is left comes to the next meeting or leaves.
+ */
+public final class LightTree {
+
+  /** Number of meetings. */
+  public final int count;
+
+  /** [event] 2 · event + leg that the light came by, −1 for light that comes from outside. */
+  public final int[] parent;
+
+  /**
+   * [event] share of the power that stays in its polarisation when the plane of incidence turns.
+   */
+  public final double[] kept;
+
+  /** [event] 1 over the chance at which this piece was followed, where that was decided by lot. */
+  public final double[] factor;
+
+  /** [event] index of the table, 2 · boundary, 1 more for light from below. */
+  public final byte[] table;
+
+  /** [event] cosine of the angle of incidence. */
+  public final double[] cosine;
+
+  /** [2 · event + leg] where light of the leg is booked; 0 where it is not. */
+  public final byte[] slot;
+
+  /** [2 · event + leg] length in µm whatever the thickness; infinite where all light is booked. */
+  public final double[] fixedUm;
+
+  /** [2 · event + leg] further length per thickness of the layer that is crossed. */
+  public final double[] perThickness;
+
+  /** [replicate] first event; one more entry closes the last. */
+  public final int[] start;
+
+  /** Takes the arrays over. */
+  public LightTree(
+      int[] parent,
+      double[] kept,
+      double[] factor,
+      byte[] table,
+      double[] cosine,
+      byte[] slot,
+      double[] fixedUm,
+      double[] perThickness,
+      int[] start) {
+    count = parent.length;
+    this.parent = parent;
+    this.kept = kept;
+    this.factor = factor;
+    this.table = table;
+    this.cosine = cosine;
+    this.slot = slot;
+    this.fixedUm = fixedUm;
+    this.perThickness = perThickness;
+    this.start = start;
+  }
+}
