@@ -21,6 +21,9 @@ final class PageFile {
    */
   static Path write(Path file, String html, boolean replace) {
     Place place = Place.option("--out");
+    if (file.toString().isBlank()) {
+      throw new InputException(place, "names no file; write one, such as --out page.html");
+    }
     if (Files.isDirectory(file)) {
       throw new InputException(place, "\"" + file + "\" is a folder, a file is needed");
     }

@@ -132,10 +132,10 @@ public final class EachJob {
   private Answer answer(
       int number, RowTable.Row row, Bench bench, Optional<List<Parameter>> parameters) {
     try {
-      // binding checks every value with the rules of the scenario, whichever way it is evaluated
-      Scenario scenario = draft.bind(all(row));
       Outcome outcome =
-          parameters.isPresent() ? move(bench, parameters.get(), row) : prepare(scenario);
+          parameters.isPresent()
+              ? move(bench, parameters.get(), row)
+              : prepare(draft.bind(all(row)));
       return new Answer(number, row.values(), outcome, List.of());
     } catch (InputException e) {
       return new Answer(number, row.values(), null, e.faults());
@@ -158,6 +158,8 @@ public final class EachJob {
   }
 
   private Outcome move(Bench bench, List<Parameter> parameters, RowTable.Row row) {
+    // the rules of the scenario hold for every row, whichever way it is evaluated
+    draft.checkStack(all(row));
     for (int c = 0; c < parameters.size(); c++) {
       Parameter parameter = parameters.get(c);
       double value = Double.parseDouble(row.values().get(c));

@@ -56,6 +56,9 @@ public final class RunFolder {
    */
   public static RunFolder create(Path folder, boolean force) {
     Place place = Place.option("--out");
+    if (folder.toString().isBlank()) {
+      throw new InputException(place, "names no folder; write one, such as --out my-run");
+    }
     if (Files.exists(folder) && !Files.isDirectory(folder)) {
       throw new InputException(place, "\"" + folder + "\" is a file, a folder is needed");
     }

@@ -1,8 +1,12 @@
 package evensun.run;
 
+import evensun.pluginhost.LoadedPlugin;
 import evensun.pluginhost.PluginHost;
+import evensun.scenario.InputException;
 import evensun.scenario.Scenario;
 import evensun.scenario.SolverSpec;
+import evensun.scenario.tree.Nearest;
+import evensun.scenario.tree.Shown;
 import evensun.spi.Grading;
 import evensun.spi.Mixture;
 import evensun.spi.OpticalSolver;
@@ -53,11 +57,13 @@ record SolverChoice(
   /**
    * Chooses.
    *
+   * @throws InputException when the scenario names a solver that nobody offers
    * @throws evensun.pluginhost.PluginException when the solver is not loaded
    * @throws UnsupportedProblem when the scenario asks for one that cannot take the stack
    */
   static SolverChoice of(ResolvedStack stack, PluginHost host) {
     Optional<SolverSpec> spec = stack.scenario().solver();
+    spec.ifPresent(wanted -> known(wanted, host));
     Map<String, String> options = new HashMap<>(spec.map(SolverSpec::options).orElse(Map.of()));
     String needed = needsRays(stack, host) ? RAYS : FLAT;
     String id = spec.map(SolverSpec::id).orElse(needed);
@@ -73,6 +79,20 @@ record SolverChoice(
     options.put(NEXT, below);
     List<String> chain = films.isEmpty() ? List.of(below) : List.of(below, FLAT);
     return new SolverChoice(host.require(EFFECTIVE), options, chain, statistical);
+  }
+
+  /** A name that no plugin has is wrong input, unless a plugin did not load and may be the one. */
+  private static void known(SolverSpec wanted, PluginHost host) {
+    if (host.solver(wanted.id()).isEmpty() && host.rejected().isEmpty()) {
+      List<String> ids = host.loaded().stream().map(LoadedPlugin::solverId).sorted().toList();
+      throw new InputException(
+          wanted.place(),
+          "no solver "
+              + Shown.quoted(wanted.id())
+              + " is loaded"
+              + Nearest.hint(wanted.id(), ids)
+              + " (evensun plugins lists them)");
+    }
   }
 
   private static boolean needsRays(ResolvedStack stack, PluginHost host) {

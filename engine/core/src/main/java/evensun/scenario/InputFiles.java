@@ -76,7 +76,11 @@ public final class InputFiles {
       Path file = folder.resolve(path);
       if (!Files.exists(file)) {
         throw new InputException(
-            place, "file \"" + path + "\" does not exist (paths are relative to the scenario)");
+            place,
+            "file \""
+                + path
+                + "\" does not exist"
+                + (place.line() > 0 ? " (paths are relative to the scenario)" : ""));
       }
       if (Files.isDirectory(file)) {
         throw new InputException(place, "\"" + path + "\" is a folder, a file is needed");

@@ -48,7 +48,7 @@ class WrongInputIT {
     Files.writeString(folder.resolve("tandem.yaml"), row.scenario());
     row.makeFile(folder);
     List<String> before = files();
-    Program.Run run = new Program(folder).run(row.arguments().split(" "));
+    Program.Run run = new Program(folder).run(row.argumentList());
     assertThat(run.err()).startsWith(row.message()).endsWith("\n");
     assertThat(run.err().lines()).hasSize(1);
     assertThat(run.err()).doesNotContain("Exception", "\tat ", "internal error");
@@ -73,6 +73,13 @@ class WrongInputIT {
           cells[2].strip(),
           cells[3].strip(),
           cells[4].strip());
+    }
+
+    /** The arguments; {@code ""} stands for an empty one, as in a shell. */
+    String[] argumentList() {
+      return Stream.of(arguments.split(" "))
+          .map(word -> word.equals("\"\"") ? "" : word)
+          .toArray(String[]::new);
     }
 
     String scenario() throws IOException {

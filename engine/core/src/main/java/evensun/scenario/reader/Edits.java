@@ -25,6 +25,9 @@ final class Edits {
   /** Sections whose keys may themselves hold dots. */
   private static final Set<String> DOTTED = Set.of("vary", "options");
 
+  private static final String STACK = "stack";
+  private static final String SUBCELLS = "subcells";
+
   private Edits() {}
 
   /**
@@ -38,8 +41,22 @@ final class Edits {
     int dot = setting.key().indexOf('.');
     String head = dot < 0 ? setting.key() : setting.key().substring(0, dot);
     String rest = dot < 0 ? "" : setting.key().substring(dot + 1);
-    if (!rest.isEmpty() && isLayer(root, head) && !isKeyOfSection(root, head, rest)) {
-      return inStack(root, head, rest, value.get());
+    if (head.equals(SUBCELLS) && rest.indexOf('.') > 0) {
+      int second = rest.indexOf('.');
+      return inSubcells(
+          root,
+          rest.substring(0, second),
+          rest.substring(second + 1),
+          setting,
+          value.get(),
+          faults);
+    }
+    boolean inList = !rest.isEmpty() && !isKeyOfSection(root, head, rest);
+    if (inList && isLayer(root, head)) {
+      return inList(root, STACK, head, rest, value.get());
+    }
+    if (inList && isSubcell(root, head)) {
+      return inList(root, SUBCELLS, head, rest, value.get());
     }
     int slash = head.indexOf('/');
     if (slash > 0 && !rest.isEmpty() && isLayer(root, head.substring(0, slash))) {
@@ -86,7 +103,21 @@ final class Edits {
   }
 
   private static boolean isLayer(Mapping root, String name) {
-    return layerNames(root).contains(name);
+    return names(root, STACK).contains(name);
+  }
+
+  private static boolean isSubcell(Mapping root, String name) {
+    return names(root, SUBCELLS).contains(name);
+  }
+
+  private static Mapping inSubcells(
+      Mapping root, String name, String rest, Setting setting, Node value, Faults faults) {
+    if (isSubcell(root, name)) {
+      return inList(root, SUBCELLS, name, rest, value);
+    }
+    String hint = Nearest.hint(name, names(root, SUBCELLS));
+    faults.add(setting.place(), "there is no subcell " + Shown.quoted(name) + hint);
+    return root;
   }
 
   /** A layer may be called "grid"; then the key behind the dot decides. */
@@ -95,14 +126,15 @@ final class Edits {
         && section.entries().stream().anyMatch(e -> e.key().equals(segments(rest).get(0)));
   }
 
-  private static Mapping inStack(Mapping root, String layer, String rest, Node value) {
-    Sequence stack = (Sequence) value(root, "stack");
+  /** The entry of that name in a list of named entries. */
+  private static Mapping inList(Mapping root, String list, String name, String rest, Node value) {
+    Sequence sequence = (Sequence) value(root, list);
     List<Node> items = new ArrayList<>();
-    for (Node item : stack.items()) {
-      boolean meant = item instanceof Mapping entry && layer.equals(text(value(entry, "name")));
+    for (Node item : sequence.items()) {
+      boolean meant = item instanceof Mapping entry && name.equals(text(value(entry, "name")));
       items.add(meant ? put((Mapping) item, segments(rest), value) : item);
     }
-    return replace(root, "stack", new Sequence(items, stack.place()), stack.place());
+    return replace(root, list, new Sequence(items, sequence.place()), sequence.place());
   }
 
   /** A component of a mixed layer, or an end of a graded one. */
@@ -111,12 +143,12 @@ final class Edits {
     String layer = head.substring(0, slash);
     String component = head.substring(slash + 1);
     boolean graded =
-        ((Sequence) value(root, "stack"))
+        ((Sequence) value(root, STACK))
             .items().stream()
                 .filter(i -> i instanceof Mapping m && layer.equals(text(value(m, "name"))))
                 .anyMatch(i -> !(value((Mapping) i, "grading") instanceof Broken));
     String section = graded ? "grading." : "mixture.components.";
-    return inStack(root, layer, section + component + "." + rest, value);
+    return inList(root, STACK, layer, section + component + "." + rest, value);
   }
 
   private static Mapping put(Mapping into, List<String> path, Node value) {
@@ -159,21 +191,23 @@ final class Edits {
   }
 
   private static String hint(Mapping root, String key) {
-    Set<String> known = new LinkedHashSet<>(layerNames(root));
+    Set<String> known = new LinkedHashSet<>(names(root, STACK));
+    known.addAll(names(root, SUBCELLS));
     known.addAll(RootBinder.KEYS);
     int dot = key.indexOf('.');
     String head = dot < 0 ? key : key.substring(0, dot);
     String rest = dot < 0 || dot == key.length() - 1 ? "" : key.substring(dot);
     return Nearest.of(head, known)
         .map(n -> "; did you mean " + n + rest + "?")
-        .orElse("; write LAYER.KEY or SECTION.KEY, such as perovskite.thicknessNm or grid.stepNm");
+        .orElse(
+            "; write LAYER.KEY, SUBCELL.KEY or SECTION.KEY, such as perovskite.thicknessNm or grid.stepNm");
   }
 
-  private static List<String> layerNames(Mapping root) {
-    if (!(value(root, "stack") instanceof Sequence stack)) {
+  private static List<String> names(Mapping root, String list) {
+    if (!(value(root, list) instanceof Sequence sequence)) {
       return List.of();
     }
-    return stack.items().stream()
+    return sequence.items().stream()
         .filter(Mapping.class::isInstance)
         .map(i -> text(value((Mapping) i, "name")))
         .filter(n -> !n.isEmpty())
