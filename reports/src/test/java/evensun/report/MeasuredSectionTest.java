@@ -67,6 +67,7 @@ class MeasuredSectionTest {
         run.whatIf(),
         run.secondOpinion(),
         measured,
+        null,
         run.findings(),
         run.cautions(),
         run.provenance());

@@ -6,7 +6,6 @@ import evensun.spi.Design;
 import evensun.spi.Evaluator;
 import evensun.spi.Gradient;
 import evensun.spi.Response;
-import evensun.stack.ResolvedStack;
 import evensun.stack.ResolvedSubcell;
 import java.util.List;
 import java.util.Optional;
@@ -40,23 +39,27 @@ public final class Bench implements AutoCloseable {
   }
 
   private static Response currentSums(Model model) {
-    ResolvedStack stack = model.stack();
-    List<Channel> channels = model.channels();
-    int count = stack.subcells().size();
+    int count = model.stack().subcells().size();
     double[] bins = model.problem().incidentMaPerCm2().toArray();
-    Response response = Response.sums(count, channels.size());
+    Response response = Response.sums(count, model.channels().size());
     for (int s = 0; s < count; s++) {
-      ResolvedSubcell subcell = stack.subcells().get(s);
-      for (int c = 0; c < channels.size(); c++) {
-        if (model.belongsTo(channels.get(c), subcell)) {
-          response.weight[s * channels.size() + c] = bins;
-        }
-      }
-      if (model.exitBelongsTo(subcell)) {
-        response.transmittanceWeight[s] = bins;
-      }
+      weigh(response, s, model, bins);
     }
     return response;
+  }
+
+  /** Makes sum s of a response the photocurrent of subcell s. */
+  static void weigh(Response response, int s, Model model, double[] bins) {
+    ResolvedSubcell subcell = model.stack().subcells().get(s);
+    List<Channel> channels = model.channels();
+    for (int c = 0; c < channels.size(); c++) {
+      if (model.belongsTo(channels.get(c), subcell)) {
+        response.weight[s * channels.size() + c] = bins;
+      }
+    }
+    if (model.exitBelongsTo(subcell)) {
+      response.transmittanceWeight[s] = bins;
+    }
   }
 
   /** The model this bench belongs to. */
@@ -156,6 +159,12 @@ public final class Bench implements AutoCloseable {
   public void currents(double[] into) {
     evaluator.evaluate(design, sums);
     System.arraycopy(sums.sum, 0, into, 0, into.length);
+  }
+
+  /** Standard error of each share of the light, for solvers that have one. */
+  double[] standardErrors(Response shares) {
+    evaluator.evaluate(design, shares);
+    return shares.sumStandardError;
   }
 
   /** Whether {@link #currentsAndGradient} is there. */

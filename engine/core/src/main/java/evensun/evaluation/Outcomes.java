@@ -9,7 +9,10 @@ import evensun.result.Outcome.StackEntry;
 import evensun.result.Outcome.SubcellOutcome;
 import evensun.scenario.Connection;
 import evensun.spi.Channel;
+import evensun.spi.ReflectanceParts;
 import evensun.spi.Response;
+import evensun.spi.Texture;
+import evensun.stack.Boundary;
 import evensun.stack.ResolvedLayer;
 import evensun.stack.ResolvedStack;
 import evensun.stack.ResolvedSubcell;
@@ -18,6 +21,7 @@ import java.util.Arrays;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import org.jspecify.annotations.Nullable;
 
 /** Turns the present design of a bench into the record that results and reports are made of. */
@@ -28,6 +32,8 @@ public final class Outcomes {
   private final ResolvedStack stack;
   private final Response response;
   private final double[] bins;
+  private final @Nullable StandardErrors errors;
+  private final double @Nullable [] neverEntered;
 
   private Outcomes(Bench bench) {
     this.bench = bench;
@@ -36,6 +42,8 @@ public final class Outcomes {
     this.response = bench.spectra();
     this.bins = model.problem().incidentMaPerCm2().toArray();
     Ledger.check(response, 0, model.channels().size(), stack.grid().wavelengthNm());
+    this.errors = StandardErrors.of(bench, response, bins).orElse(null);
+    this.neverEntered = neverEntered(bench);
   }
 
   /**
@@ -47,6 +55,13 @@ public final class Outcomes {
    */
   public static Outcome of(Bench bench, List<Parameter> varied) {
     return new Outcomes(bench).outcome(varied);
+  }
+
+  private static double @Nullable [] neverEntered(Bench bench) {
+    double[] never = new double[bench.model().problem().wavelengthCount()];
+    Optional<ReflectanceParts> parts = bench.ability(ReflectanceParts.class);
+    parts.ifPresent(p -> p.evaluate(bench.design(), 0, never, new double[never.length]));
+    return parts.isPresent() ? never : null;
   }
 
   private Outcome outcome(List<Parameter> varied) {
@@ -78,17 +93,17 @@ public final class Outcomes {
 
   private List<SubcellOutcome> subcells(boolean spectraOnly) {
     List<SubcellOutcome> outcomes = new ArrayList<>();
-    for (ResolvedSubcell subcell : stack.subcells()) {
+    for (int s = 0; s < stack.subcells().size(); s++) {
+      ResolvedSubcell subcell = stack.subcells().get(s);
       double gap =
           subcell.absorbers().isEmpty() ? 0 : bench.bandgapEv(subcell.absorbers().get(0).slot());
-      double[] current = current(subcell);
       outcomes.add(
           new SubcellOutcome(
               subcell.name(),
               subcell.absorbers().stream().map(this::absorberName).toList(),
               gap > 0 ? gap : null,
-              spectraOnly ? null : current[0],
-              current[1] > 0 && !spectraOnly ? current[1] : null,
+              spectraOnly ? null : current(subcell),
+              errors == null || spectraOnly ? null : errors.subcell(s),
               null));
     }
     return outcomes;
@@ -98,20 +113,15 @@ public final class Outcomes {
     return model.channelName(new Channel(absorber.layer(), absorber.component()));
   }
 
-  /** Photocurrent and standard error of a subcell, mA cm⁻². */
-  private double[] current(ResolvedSubcell subcell) {
+  /** Photocurrent of a subcell, mA cm⁻². */
+  private double current(ResolvedSubcell subcell) {
     double sum = 0;
-    double error = 0;
     for (int c = 0; c < model.channels().size(); c++) {
       if (model.belongsTo(model.channels().get(c), subcell)) {
         sum += weighted(response.absorptance[c]);
-        error += weighted(response.absorptanceStandardError[c]);
       }
     }
-    if (model.exitBelongsTo(subcell)) {
-      sum += weighted(response.transmittance[0]);
-    }
-    return new double[] {sum, error};
+    return model.exitBelongsTo(subcell) ? sum + weighted(response.transmittance[0]) : sum;
   }
 
   private double weighted(double[] share) {
@@ -144,14 +154,21 @@ public final class Outcomes {
     for (int c = 0; c < model.channels().size(); c++) {
       Channel channel = model.channels().get(c);
       if (stack.subcells().stream().noneMatch(s -> model.belongsTo(channel, s))) {
-        parasitic.add(new Parasitic(model.channelName(channel), weighted(response.absorptance[c])));
+        parasitic.add(
+            new Parasitic(
+                model.channelName(channel),
+                weighted(response.absorptance[c]),
+                errors == null ? null : errors.channel(c)));
       }
     }
     boolean collected = stack.subcells().stream().anyMatch(model::exitBelongsTo);
     return new Losses(
         weighted(response.reflectance[0]),
         collected ? 0 : weighted(response.transmittance[0]),
-        parasitic);
+        parasitic,
+        errors == null ? null : errors.reflected(),
+        errors == null || collected ? null : errors.transmitted(),
+        neverEntered == null ? null : weighted(neverEntered));
   }
 
   private List<StackEntry> entries() {
@@ -193,20 +210,43 @@ public final class Outcomes {
         material.tunable() ? bench.bandgapEv(slot) : null,
         coherent,
         subcell,
-        drawn == null ? List.of() : LayerWords.features(stack, drawn, bench.design()));
+        drawn == null ? List.of() : LayerWords.features(stack, drawn, bench.design()),
+        alongNormal(layer));
+  }
+
+  /** A film on facets is thicker along the normal of the substrate than along theirs. */
+  private @Nullable Double alongNormal(int layer) {
+    for (Boundary boundary : Boundary.of(stack.layers())) {
+      Optional<Texture> texture = boundary.texture().filter(Outcomes::hasOneAngle);
+      if (boundary.hasFilm(layer) && texture.isPresent()) {
+        double angle = Math.toRadians(texture.get().facetAngleDeg().in(bench.design()));
+        return bench.design().thicknessNm[layer] / Math.cos(angle);
+      }
+    }
+    return null;
+  }
+
+  private static boolean hasOneAngle(Texture texture) {
+    return texture.shape() == Texture.Shape.PYRAMID || texture.shape() == Texture.Shape.GROOVE;
   }
 
   private Spectral spectral() {
-    Map<String, List<Double>> absorptance = new LinkedHashMap<>();
-    for (int c = 0; c < model.channels().size(); c++) {
-      absorptance.put(model.channelName(model.channels().get(c)), boxed(response.absorptance[c]));
-    }
     return new Spectral(
         boxed(stack.grid().wavelengthNm()),
         boxed(bins),
         boxed(response.reflectance[0]),
         boxed(response.transmittance[0]),
-        absorptance);
+        byChannel(response.absorptance),
+        errors == null ? null : byChannel(response.absorptanceStandardError),
+        neverEntered == null ? null : boxed(neverEntered));
+  }
+
+  private Map<String, List<Double>> byChannel(double[][] rows) {
+    Map<String, List<Double>> named = new LinkedHashMap<>();
+    for (int c = 0; c < model.channels().size(); c++) {
+      named.put(model.channelName(model.channels().get(c)), boxed(rows[c]));
+    }
+    return named;
   }
 
   private static List<Double> boxed(double[] values) {

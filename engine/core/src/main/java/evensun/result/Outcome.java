@@ -2,6 +2,7 @@ package evensun.result;
 
 import java.util.List;
 import java.util.Map;
+import java.util.Objects;
 import org.jspecify.annotations.Nullable;
 
 /**
@@ -36,6 +37,17 @@ public record Outcome(
 
   /** Subcells whose currents differ by less than this are called balanced, in mA cm⁻². */
   public static final double BALANCED_MA_PER_CM2 = 0.05;
+
+  /** Statistical error of the matched current: that of the weakest subcell, null where none. */
+  public @Nullable Double matchedStandardErrorMaPerCm2() {
+    return subcells.stream()
+        .filter(s -> matchedCurrentMaPerCm2 != null)
+        .filter(s -> matchedCurrentMaPerCm2.equals(s.photocurrentMaPerCm2()))
+        .map(SubcellOutcome::standardErrorMaPerCm2)
+        .filter(Objects::nonNull)
+        .findFirst()
+        .orElse(null);
+  }
 
   /** This outcome with its electrical side and the currents after collection. */
   public Outcome withElectrical(List<SubcellOutcome> collected, Electrical device) {
@@ -84,22 +96,45 @@ public record Outcome(
   }
 
   /**
-   * Light that no subcell absorbs. Reflected + transmitted + parasitic + subcells = incident.
+   * Light that no subcell absorbs. Reflected + transmitted + parasitic + subcells = incident. The
+   * standard errors are null where there are none.
    *
    * @param reflectedMaPerCm2 reflected
    * @param transmittedMaPerCm2 net flux into an exit medium that belongs to no subcell, else 0
    * @param parasitic layers, and components, that belong to no subcell, in the light's order
+   * @param reflectedStandardErrorMaPerCm2 statistical error of the reflected light
+   * @param transmittedStandardErrorMaPerCm2 statistical error of the transmitted light
+   * @param neverEnteredMaPerCm2 part of the reflected light that never reached a thick absorbing
+   *     layer; null where the solver does not tell. The rest had been inside and came back out.
    */
   public record Losses(
-      double reflectedMaPerCm2, double transmittedMaPerCm2, List<Parasitic> parasitic) {}
+      double reflectedMaPerCm2,
+      double transmittedMaPerCm2,
+      List<Parasitic> parasitic,
+      @Nullable Double reflectedStandardErrorMaPerCm2,
+      @Nullable Double transmittedStandardErrorMaPerCm2,
+      @Nullable Double neverEnteredMaPerCm2) {
+
+    /** Losses of a solver without statistical errors. */
+    public Losses(double reflectedMaPerCm2, double transmittedMaPerCm2, List<Parasitic> parasitic) {
+      this(reflectedMaPerCm2, transmittedMaPerCm2, parasitic, null, null, null);
+    }
+  }
 
   /**
    * Light absorbed where nothing is collected.
    *
    * @param layer layer name, or {@code layer/component}
    * @param maPerCm2 absorbed, mA cm⁻²
+   * @param standardErrorMaPerCm2 statistical error, null where there is none
    */
-  public record Parasitic(String layer, double maPerCm2) {}
+  public record Parasitic(String layer, double maPerCm2, @Nullable Double standardErrorMaPerCm2) {
+
+    /** Absorbed light without a statistical error. */
+    public Parasitic(String layer, double maPerCm2) {
+      this(layer, maPerCm2, null);
+    }
+  }
 
   /**
    * A layer of the stack.
@@ -112,6 +147,8 @@ public record Outcome(
    * @param coherent whether waves interfere inside
    * @param subcell subcell it belongs to, if any
    * @param features further properties in words
+   * @param alongSubstrateNormalNm thickness of a film on facets along the normal of the substrate
+   *     in nm; null for films on flat boundaries and on facets of several angles
    */
   public record StackEntry(
       String name,
@@ -121,7 +158,22 @@ public record Outcome(
       @Nullable Double bandgapEv,
       boolean coherent,
       @Nullable String subcell,
-      List<String> features) {}
+      List<String> features,
+      @Nullable Double alongSubstrateNormalNm) {
+
+    /** A layer that lies flat. */
+    public StackEntry(
+        String name,
+        String material,
+        String role,
+        @Nullable Double thicknessNm,
+        @Nullable Double bandgapEv,
+        boolean coherent,
+        @Nullable String subcell,
+        List<String> features) {
+      this(name, material, role, thicknessNm, bandgapEv, coherent, subcell, features, null);
+    }
+  }
 
   /**
    * Spectra, one value per wavelength.
@@ -131,13 +183,29 @@ public record Outcome(
    * @param reflectance reflectance
    * @param transmittance net transmittance into the exit medium
    * @param absorptance by layer, or {@code layer/component}, in the light's order
+   * @param absorptanceStandardError statistical error of each, null where there is none
+   * @param neverEntered part of the reflectance that never reached a thick absorbing layer; null
+   *     where the solver does not tell
    */
   public record Spectral(
       List<Double> wavelengthNm,
       List<Double> incidentMaPerCm2,
       List<Double> reflectance,
       List<Double> transmittance,
-      Map<String, List<Double>> absorptance) {}
+      Map<String, List<Double>> absorptance,
+      @Nullable Map<String, List<Double>> absorptanceStandardError,
+      @Nullable List<Double> neverEntered) {
+
+    /** Spectra without statistical errors. */
+    public Spectral(
+        List<Double> wavelengthNm,
+        List<Double> incidentMaPerCm2,
+        List<Double> reflectance,
+        List<Double> transmittance,
+        Map<String, List<Double>> absorptance) {
+      this(wavelengthNm, incidentMaPerCm2, reflectance, transmittance, absorptance, null, null);
+    }
+  }
 
   /**
    * A further number.

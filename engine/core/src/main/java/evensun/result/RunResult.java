@@ -21,6 +21,7 @@ import org.jspecify.annotations.Nullable;
  * @param whatIf the aim against each varied quantity
  * @param secondOpinion the found design evaluated in other ways
  * @param measured measured curves beside the model of the stack as drawn, if there are any
+ * @param textured the design beside its flat twin, where boundaries are shaped or scatter
  * @param findings what a reader should know, most severe first
  * @param cautions hazards and limits that apply to this stack
  * @param provenance how the result came about and how to repeat it
@@ -40,6 +41,7 @@ public record RunResult(
     @Nullable List<WhatIf> whatIf,
     @Nullable List<Opinion> secondOpinion,
     @Nullable List<Measured> measured,
+    @Nullable Textured textured,
     List<FindingRecord> findings,
     List<Caution> cautions,
     Provenance provenance) {
@@ -47,7 +49,7 @@ public record RunResult(
   /** The version of the format that this program writes. */
   public static final int FORMAT = 1;
 
-  /** A result without measured curves. */
+  /** A result without measured curves and textures. */
   public RunResult(
       int formatVersion,
       String kind,
@@ -79,6 +81,7 @@ public record RunResult(
         sensitivities,
         whatIf,
         secondOpinion,
+        null,
         null,
         findings,
         cautions,

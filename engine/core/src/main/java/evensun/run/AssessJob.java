@@ -69,6 +69,7 @@ public final class AssessJob {
           null,
           null,
           measured,
+          FlatTwin.beside(preparation, bench),
           findings.records(),
           Cautions.of(preparation.stack()),
           provenance.build(

@@ -208,6 +208,7 @@ public final class DesignJob {
           around.curves(),
           new SecondOpinions(preparation, varied, aim, best).opinions(),
           measured,
+          FlatTwin.beside(preparation, bench),
           findings.records(),
           Cautions.of(preparation.stack()),
           provenance.build(spec.seed(), repeat(repeatCommand, outcome), settingsOf(settings)));

@@ -81,6 +81,11 @@ public final class Preparation implements AutoCloseable {
     return Model.of(stack, choice.solver(), choice.options(), seed(), services, incidences);
   }
 
+  /** The stack with every boundary flat, ready for the chain it needs; the caller closes it. */
+  Model flat(SolverChoice flatChoice) {
+    return Model.of(stack.flattened(), flatChoice.solver(), flatChoice.options(), seed(), services);
+  }
+
   Measurements measurements() {
     return measurements;
   }

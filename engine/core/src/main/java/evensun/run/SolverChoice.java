@@ -20,6 +20,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
+import java.util.stream.Stream;
 
 /**
  * The solver of a run: the one the scenario asks for, else the simplest that takes the stack. Rays
@@ -64,6 +65,19 @@ record SolverChoice(
   static SolverChoice of(ResolvedStack stack, PluginHost host) {
     Optional<SolverSpec> spec = stack.scenario().solver();
     spec.ifPresent(wanted -> known(wanted, host));
+    return of(stack, spec, host);
+  }
+
+  /**
+   * Chooses as if the scenario asked for no solver.
+   *
+   * @throws evensun.pluginhost.PluginException when the solver is not loaded
+   */
+  static SolverChoice unasked(ResolvedStack stack, PluginHost host) {
+    return of(stack, Optional.empty(), host);
+  }
+
+  private static SolverChoice of(ResolvedStack stack, Optional<SolverSpec> spec, PluginHost host) {
     Map<String, String> options = new HashMap<>(spec.map(SolverSpec::options).orElse(Map.of()));
     String needed = needsRays(stack, host) ? RAYS : FLAT;
     String id = spec.map(SolverSpec::id).orElse(needed);
@@ -95,10 +109,15 @@ record SolverChoice(
     }
   }
 
+  /** Ids of the chain, the first solver first. */
+  List<String> ids() {
+    return Stream.concat(Stream.of(solver.id()), chain.stream()).toList();
+  }
+
   private static boolean needsRays(ResolvedStack stack, PluginHost host) {
-    boolean shaped =
-        Boundary.of(stack.layers()).stream().anyMatch(boundary -> !boundary.features().isEmpty());
-    return shaped || stack.scenario().light().diffuse() || scattersBesideThick(stack, host);
+    return stack.isShaped()
+        || stack.scenario().light().diffuse()
+        || scattersBesideThick(stack, host);
   }
 
   /** Without a thick layer light that a rough face scatters has no path to make longer. */

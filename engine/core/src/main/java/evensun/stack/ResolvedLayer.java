@@ -47,6 +47,13 @@ public record ResolvedLayer(
     return new ResolvedLayer(spec, slot, coherent, more, components);
   }
 
+  /** This layer without what shapes its boundary, or scatters there. */
+  ResolvedLayer flattened() {
+    List<Feature> kept =
+        features.stream().filter(feature -> !Boundary.KINDS.contains(feature.kind())).toList();
+    return new ResolvedLayer(spec, slot, coherent, kept, components);
+  }
+
   /**
    * A component of a mixed layer.
    *

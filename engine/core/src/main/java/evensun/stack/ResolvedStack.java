@@ -68,4 +68,24 @@ public record ResolvedStack(
     }
     return layerOf;
   }
+
+  /** Whether any boundary is shaped or scatters. */
+  public boolean isShaped() {
+    return Boundary.of(layers).stream().anyMatch(boundary -> !boundary.features().isEmpty());
+  }
+
+  /** This stack with every boundary flat and films of the same thickness. */
+  public ResolvedStack flattened() {
+    return new ResolvedStack(
+        scenario,
+        grid,
+        spectrum,
+        slots,
+        incidentSlot,
+        layers.stream().map(ResolvedLayer::flattened).toList(),
+        exitSlot,
+        subcells,
+        knobs,
+        findings);
+  }
 }

@@ -23,6 +23,9 @@ final class BeerLambertSolver implements OpticalSolver {
   /** Light that the solver loses on purpose, to break its ledger. */
   double lost;
 
+  /** Standard error that it states of every absorptance, independent of all others. */
+  double error;
+
   /** Thickness of the first layer above which it refuses a design. */
   double refuseAboveNm = Double.POSITIVE_INFINITY;
 
@@ -60,6 +63,12 @@ final class BeerLambertSolver implements OpticalSolver {
     int channels = problem.layerCount();
     if (into.sum != null) {
       java.util.Arrays.fill(into.sum, 0);
+      stateErrors(into, channels);
+    }
+    if (into.absorptanceStandardError != null) {
+      for (double[] row : into.absorptanceStandardError) {
+        java.util.Arrays.fill(row, error);
+      }
     }
     for (int w = 0; w < problem.wavelengthCount(); w++) {
       double left = 1;
@@ -88,6 +97,19 @@ final class BeerLambertSolver implements OpticalSolver {
     for (int s = 0; into.sum != null && s < into.sum.length; s++) {
       double[] weight = into.weight[s * channels + layer];
       into.sum[s] += weight == null ? 0 : share * weight[w];
+    }
+  }
+
+  private void stateErrors(Response into, int channels) {
+    for (int s = 0; s < into.sum.length; s++) {
+      double variance = 0;
+      for (int c = 0; c < channels; c++) {
+        double[] weight = into.weight[s * channels + c];
+        for (int w = 0; weight != null && w < weight.length; w++) {
+          variance += error * error * weight[w] * weight[w];
+        }
+      }
+      into.sumStandardError[s] = Math.sqrt(variance);
     }
   }
 }

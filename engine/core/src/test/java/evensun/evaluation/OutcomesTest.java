@@ -141,4 +141,39 @@ class OutcomesTest {
         .hasMessageContaining("400.0 nm")
         .hasMessageContaining("0.999999");
   }
+
+  @Test
+  void anErrorIsThatOfTheSumAndNotTheSumOfErrors() {
+    BeerLambertSolver solver = new BeerLambertSolver();
+    solver.error = 1e-3;
+    Outcome outcome = outcome(Cells.twoCells(300, 900), solver);
+    // Closed form: independent errors of e per bin make e·√(Σ Φ²) for one layer, √3 for all three
+    // that a reflected ray may have missed.
+    double one = 1e-3 * Math.sqrt(sumOfSquares());
+    assertThat(outcome.subcells().get(0).standardErrorMaPerCm2()).isCloseTo(one, within(1e-12));
+    assertThat(outcome.matchedStandardErrorMaPerCm2()).isCloseTo(one, within(1e-12));
+    assertThat(outcome.losses().parasitic().get(0).standardErrorMaPerCm2())
+        .isCloseTo(one, within(1e-12));
+    assertThat(outcome.losses().reflectedStandardErrorMaPerCm2())
+        .isCloseTo(Math.sqrt(3) * one, within(1e-12));
+    assertThat(outcome.spectral().absorptanceStandardError().get("upper")).containsOnly(1e-3);
+  }
+
+  private static double sumOfSquares() {
+    double sum = 0;
+    for (int nm = 400; nm <= 800; nm += 10) {
+      double bin = bin(Math.max(400, nm - 5), Math.min(800, nm + 5));
+      sum += bin * bin;
+    }
+    return sum;
+  }
+
+  @Test
+  void exactSolversStateNoError() {
+    Outcome outcome = outcome(Cells.twoCells(300, 900), new BeerLambertSolver());
+    assertThat(outcome.subcells().get(0).standardErrorMaPerCm2()).isNull();
+    assertThat(outcome.losses().reflectedStandardErrorMaPerCm2()).isNull();
+    assertThat(outcome.losses().neverEnteredMaPerCm2()).isNull();
+    assertThat(outcome.spectral().absorptanceStandardError()).isNull();
+  }
 }

@@ -35,6 +35,8 @@ final class SampleResult {
         List.of(
             new Opinion("numerics", "half the wavelength step", 19.498, -0.002, ""),
             new Opinion("material", "another table", null, null, "covers 400 to 900 nm only")),
+        null,
+        textured(),
         List.of(new FindingRecord("warning", "bound-reached", "absorber", "Stands on its bound.")),
         List.of(new Caution("absorber", "Contains lead.")),
         provenance());
@@ -74,6 +76,18 @@ final class SampleResult {
         provenance());
   }
 
+  private static Textured textured() {
+    return new Textured(
+        outcome(18.0, 18.5),
+        List.of("transfer-matrix"),
+        new Textured.Section(
+            1000,
+            List.of(
+                new Textured.Outline(
+                    "air", "wafer", List.of(0.0, 2.5, 5.0), List.of(1.0, -2.0, 1.0))),
+            List.of(new Textured.RayPath(0, 1, -4, 1, -1, 1, 0.9))));
+  }
+
   private static Outcome outcome(double top, double bottom) {
     return new Outcome(
         46.456,
@@ -83,18 +97,34 @@ final class SampleResult {
         Math.min(top, bottom),
         Math.abs(top - bottom),
         "top",
-        new Outcome.Losses(4.156, 0.8, List.of(new Outcome.Parasitic("front-contact", 0.1 + 0.2))),
+        new Outcome.Losses(
+            4.156,
+            0.8,
+            List.of(new Outcome.Parasitic("front-contact", 0.1 + 0.2, 0.003)),
+            0.01,
+            0.002,
+            3.5),
         map("absorber.thicknessNm", 431.2),
         List.of(
             new Outcome.StackEntry("air", "air", "incident", null, null, false, null, List.of()),
             new Outcome.StackEntry(
-                "absorber", "perovskite", "layer", 431.2, 1.68, true, "top", List.of("graded"))),
+                "absorber",
+                "perovskite",
+                "layer",
+                431.2,
+                1.68,
+                true,
+                "top",
+                List.of("graded"),
+                746.0)),
         new Outcome.Spectral(
             List.of(300.0, 305.0),
             List.of(0.01, 0.0123456789012345),
             List.of(0.31, 1e-17),
             List.of(0.0, 5e-324),
-            map("absorber", List.of(0.2, 1.0 / 3.0))),
+            map("absorber", List.of(0.2, 1.0 / 3.0)),
+            map("absorber", List.of(0.001, 0.002)),
+            List.of(0.3, 0.0)),
         List.of(new Outcome.QuantityRecord("haze", "Haze", 0.25, "")),
         electrical());
   }
