@@ -3,6 +3,8 @@ package evensun.material;
 import evensun.data.DataFile;
 import evensun.material.table.Bandgap;
 import evensun.material.table.OpticalTable;
+import evensun.spi.Finding;
+import evensun.spi.Severity;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
@@ -63,7 +65,20 @@ final class LibraryFile {
         Double.parseDouble(file.required("temperature-k")),
         file.value("from-memory").isPresent(),
         file.values("hazard"),
-        notes);
+        notes,
+        examined(file));
+  }
+
+  /** Findings as the header holds them: code, severity, sentence. */
+  private static List<Finding> examined(DataFile file) {
+    List<Finding> findings = new ArrayList<>();
+    for (String value : file.values("examined")) {
+      String[] parts = value.split(",", 3);
+      String examinedCode = parts[0];
+      findings.add(
+          new Finding(examinedCode, Severity.valueOf(parts[1]), file.required("name"), parts[2]));
+    }
+    return findings;
   }
 
   private static Material table(DataFile file, MaterialRecord record) {

@@ -1,5 +1,6 @@
 package evensun.material;
 
+import evensun.spi.Finding;
 import java.util.List;
 
 /**
@@ -17,6 +18,7 @@ import java.util.List;
  * @param fromMemory whether the numbers were remembered and not looked up
  * @param hazards cautions for those who handle it or deposit it, one sentence each
  * @param notes what was done to the source's numbers: cleaning, extension, interpolation error
+ * @param examined what an examination of the numbers found, whatever the grid
  */
 public record MaterialRecord(
     String name,
@@ -30,10 +32,12 @@ public record MaterialRecord(
     double temperatureK,
     boolean fromMemory,
     List<String> hazards,
-    List<String> notes) {
+    List<String> notes,
+    List<Finding> examined) {
 
   public MaterialRecord {
     hazards = List.copyOf(hazards);
     notes = List.copyOf(notes);
+    examined = List.copyOf(examined);
   }
 }

@@ -99,6 +99,7 @@ public record OwnTable(String name, String path, RawTable raw, boolean hold, boo
         Constants.CELL_TEMPERATURE_K,
         false,
         List.of(HAZARDS),
-        raw.understood());
+        raw.understood(),
+        List.of());
   }
 }

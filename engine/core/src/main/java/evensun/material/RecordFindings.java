@@ -15,7 +15,7 @@ final class RecordFindings {
   private RecordFindings() {}
 
   static List<Finding> of(MaterialRecord record, double[] wavelengthNm) {
-    List<Finding> findings = new ArrayList<>();
+    List<Finding> findings = new ArrayList<>(record.examined());
     if (record.fromMemory()) {
       findings.add(
           new Finding(

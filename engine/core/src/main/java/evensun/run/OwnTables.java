@@ -74,6 +74,7 @@ final class OwnTables {
         Constants.CELL_TEMPERATURE_K,
         false,
         HAZARDS,
+        List.of(),
         List.of());
   }
 }

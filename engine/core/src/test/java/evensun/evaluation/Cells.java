@@ -52,7 +52,19 @@ final class Cells {
       @Override
       public MaterialRecord record() {
         return new MaterialRecord(
-            name, name, "test", "", "invented", 0, 200, 2000, 298.15, false, List.of(), List.of());
+            name,
+            name,
+            "test",
+            "",
+            "invented",
+            0,
+            200,
+            2000,
+            298.15,
+            false,
+            List.of(),
+            List.of(),
+            List.of());
       }
 
       @Override

@@ -79,7 +79,11 @@ class ExplanationsTest {
         for (Path file : files.filter(ExplanationsTest::isMainSource).toList()) {
           Matcher matcher = FINDING.matcher(Files.readString(file));
           while (matcher.find()) {
-            found.add(matcher.group(1).strip());
+            // What examinations found is read back from the headers of tables; LibraryExamination
+            // holds those codes against what the sources say today.
+            if (!matcher.group(1).strip().equals("examinedCode")) {
+              found.add(matcher.group(1).strip());
+            }
           }
         }
       }

@@ -16,6 +16,15 @@ public final class Examination {
   /** Thickness of the film by which light lost to a false absorption is judged, in nm. */
   private static final double FILM_NM = 500;
 
+  /** An extinction coefficient that does not fall below this is a floor. */
+  private static final double FLOOR_K = 1e-3;
+
+  /** Below the gap by this much the edge itself no longer counts, in eV. */
+  private static final double FLOOR_BELOW_EV = 0.10;
+
+  /** Beyond, lattices absorb, in nm. */
+  private static final double FLOOR_TO_NM = 2500;
+
   private static final double KK_WARNING = 0.05;
   private static final double COARSE_N = 0.03;
   private static final double COARSE_K = 0.03;
@@ -56,7 +65,7 @@ public final class Examination {
       String name, OpticalTable table, Spectrum spectrum, double gridFromNm, double gridToNm) {
     Examination examination = new Examination(name, spectrum);
     examination.range(table, gridFromNm, gridToNm);
-    examination.floor(table);
+    examination.floor(table, gridToNm);
     examination.consistency(table);
     examination.sampling(table);
     examination.jumps(table);
@@ -121,35 +130,40 @@ public final class Examination {
     }
   }
 
-  /** Absorption well below the gap that is no tail of the edge. */
-  private void floor(OpticalTable table) {
+  /** Absorption below the gap that does not vanish towards the end of the table, as tails do. */
+  private void floor(OpticalTable table, double gridToNm) {
     OptionalDouble gap = Bandgap.of(table);
-    if (gap.isEmpty()) {
+    double toNm = Math.min(table.toNm(), FLOOR_TO_NM);
+    double fromNm =
+        gap.isPresent() ? Constants.HC_EV_NM / (gap.getAsDouble() - FLOOR_BELOW_EV) : toNm;
+    double lastNm = Math.min(toNm, gridToNm);
+    double least = least(table, toNm - (toNm - fromNm) / 3, toNm);
+    if (fromNm >= lastNm || !(least > FLOOR_K)) {
       return;
     }
-    double fromNm = Constants.HC_EV_NM / (gap.getAsDouble() - 0.10);
-    double toNm = Math.min(table.toNm(), Constants.HC_EV_NM / (gap.getAsDouble() - 0.45));
     double current = 0;
-    double sum = 0;
-    int count = 0;
-    for (double nm = fromNm; nm + 1 <= toNm; nm++) {
+    for (double nm = fromNm; nm + 1 <= lastNm; nm++) {
       double absorbed = 1 - Math.exp(-table.alphaPerCmAt(nm + 0.5) * FILM_NM * 1e-7);
       current += absorbed * spectrum.photonCurrentMaPerCm2(nm, nm + 1);
-      sum += table.kAt(nm + 0.5);
-      count++;
     }
-    if (count > 0 && sum / count > 1e-3) {
-      findings.add(
-          new Finding(
-              "table-floor-below-gap",
-              Severity.WARNING,
-              name,
-              text(
-                  "k is %.2g on average from %s to %s, below the gap of %.3f eV; in one pass of %s it books"
-                      + " %.2f mA cm⁻² as absorbed: an instrument's floor, unless you know better; write"
-                      + " clean: urbach",
-                  sum / count, nm(fromNm), nm(toNm), gap.getAsDouble(), nm(FILM_NM), current)));
+    findings.add(
+        new Finding(
+            "table-floor-below-gap",
+            Severity.WARNING,
+            name,
+            text(
+                "below the gap of %.3f eV k does not vanish but stays at %.2g and more up to %s; from"
+                    + " %s to %s one pass of %s books %.2f mA cm⁻² as absorbed: an instrument's floor,"
+                    + " unless you know better; write clean: urbach",
+                gap.getAsDouble(), least, nm(toNm), nm(fromNm), nm(lastNm), nm(FILM_NM), current)));
+  }
+
+  private static double least(OpticalTable table, double fromNm, double toNm) {
+    double least = Double.POSITIVE_INFINITY;
+    for (double nm = fromNm; nm <= toNm; nm++) {
+      least = Math.min(least, table.kAt(nm));
     }
+    return least;
   }
 
   private void consistency(OpticalTable table) {

@@ -51,7 +51,7 @@ class ExaminationTest {
   }
 
   // By hand: k = 0.02 in 500 nm absorbs 1 − exp(−4π·0.02·500/λ), near 0.15 at 800 nm; the light
-  // between 790 and 1010 nm (0.10 to 0.45 eV below the gap) carries about 13 mA cm⁻².
+  // from 0.10 eV below the gap (785 nm) to the end of the grid carries about 20 mA cm⁻².
   @Test
   void findsAFloorBelowTheGapAndWhatItIsWorth() {
     OpticalTable table = absorber(nm -> 0.02, nm -> 0);
@@ -60,10 +60,22 @@ class ExaminationTest {
             .filter(finding -> finding.code().equals("table-floor-below-gap"))
             .findFirst()
             .orElseThrow();
-    String worth = floor.message().replaceAll(".* it books ([0-9.]+) mA.*", "$1");
-    double light = LIGHT.photonCurrentMaPerCm2(785, 1008);
-    double expected = light * (1 - Math.exp(-4 * Math.PI * 0.02 * 500 / 890));
-    assertThat(Double.parseDouble(worth)).isCloseTo(expected, within(0.1 * expected));
+    String worth = floor.message().replaceAll(".* books ([0-9.]+) mA.*", "$1");
+    double expected = 0;
+    for (int nm = 785; nm < 1200; nm++) {
+      expected +=
+          LIGHT.photonCurrentMaPerCm2(nm, nm + 1)
+              * (1 - Math.exp(-4 * Math.PI * 0.02 * 500 / (nm + 0.5)));
+    }
+    assertThat(Double.parseDouble(worth)).isCloseTo(expected, within(0.02 * expected));
+    assertThat(floor.message()).contains("stays at 0.020 and more up to 1200 nm");
+  }
+
+  // An edge that fades out, however slowly, is no floor: k falls tenfold every 60 nm.
+  @Test
+  void findsNoFloorInATailThatVanishes() {
+    assertThat(codes(absorber(nm -> nm > 700 ? 0.1 * Math.pow(10, (700 - nm) / 60) : 0, nm -> 0)))
+        .doesNotContain("table-floor-below-gap");
   }
 
   @Test
