@@ -119,13 +119,14 @@ final class TableCheck {
 
   private static void paste(Path file, TableForm form, List<Finding> findings, PrintStream out) {
     out.println();
-    out.println("To use it, paste into the scenario (paths are relative to the scenario):");
+    out.println("To use it, paste into a scenario in this folder (elsewhere write the path as it");
+    out.println("is seen from the scenario):");
     out.println();
     out.println("materials:");
     out.println("  " + name(file) + ":");
-    out.println("    table: " + file.toString().replace('\\', '/'));
+    out.println("    table: " + yaml(file));
     if (form.extinctionTable != null) {
-      out.println("    extinctionTable: " + form.extinctionTable.toString().replace('\\', '/'));
+      out.println("    extinctionTable: " + yaml(form.extinctionTable));
     }
     if (form.wavelengthUnit != null) {
       out.println("    wavelengthUnit: " + form.wavelengthUnit);
@@ -142,13 +143,20 @@ final class TableCheck {
     }
   }
 
+  /** A path as a scenario holds it, in quotes where YAML would read something else. */
+  private static String yaml(Path path) {
+    String text = path.toString().replace('\\', '/');
+    return text.matches("[A-Za-z0-9_./-]+") ? text : "'" + text.replace("'", "''") + "'";
+  }
+
   private static boolean has(List<Finding> findings, String code) {
     return findings.stream().anyMatch(finding -> finding.code().equals(code));
   }
 
   private static String name(Path file) {
     String base = file.getFileName().toString().replaceAll("\\.[A-Za-z]+$", "");
-    String name = base.toLowerCase(Locale.ROOT).replaceAll("[^a-z0-9.-]+", "-");
+    String name =
+        base.toLowerCase(Locale.ROOT).replaceAll("[^a-z0-9.-]+", "-").replaceAll("^[.-]+", "");
     return name.isEmpty() ? "my-material" : name;
   }
 }
