@@ -11,10 +11,15 @@ import evensun.light.Spectrum;
 import evensun.light.SpectrumReader;
 import evensun.report.gaps.GapPage;
 import evensun.result.BandgapMap;
+import evensun.run.ScenarioLight;
 import evensun.scenario.Connection;
 import evensun.scenario.InputException;
+import evensun.scenario.InputFiles;
+import evensun.scenario.LightSpec;
 import evensun.scenario.Place;
 import evensun.scenario.Saturation;
+import evensun.scenario.reader.LightReader;
+import evensun.scenario.reader.Setting;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
@@ -24,6 +29,7 @@ import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.stream.Stream;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Option;
 
@@ -58,8 +64,17 @@ final class GapsCommand extends BaseCommand {
   @Option(
       names = "--spectrum",
       paramLabel = "NAME|FILE",
-      description = "AM1.5G, AM1.5D, AM0 or a table of your own (default: AM1.5G).")
+      description =
+          "AM1.5G, AM1.5D, AM0, clear-sky, blackbody or a table of your own (default: AM1.5G).")
   String spectrum = "AM1.5G";
+
+  @Option(
+      names = "--light",
+      paramLabel = "KEY=VALUE",
+      description =
+          "A key of a scenario's light, such as airMass=2 of clear-sky or temperatureK=5800 of"
+              + " blackbody; may be given again.")
+  List<String> lightKeys = new ArrayList<>();
 
   @Option(names = "--temperature-k", paramLabel = "K", description = "Cell (default: 298.15).")
   double temperatureK = Constants.CELL_TEMPERATURE_K;
@@ -108,6 +123,15 @@ final class GapsCommand extends BaseCommand {
 
   @Option(names = "--csv", paramLabel = "FILE", description = "Writes every point of the map.")
   Path csv;
+
+  private static final List<String> MODELS = List.of(LightSpec.CLEAR_SKY, LightSpec.BLACKBODY);
+
+  private static final List<String> KNOWN =
+      Stream.concat(Spectra.names().stream(), MODELS.stream()).toList();
+
+  /** Keys of a light that a detailed balance does not know. */
+  private static final List<String> NOT_HERE =
+      List.of("angleDeg", "polarisation", "diffuse", "concentrationSuns");
 
   @Override
   public Integer call() {
@@ -205,16 +229,34 @@ final class GapsCommand extends BaseCommand {
   }
 
   private Spectrum light() {
-    Optional<Spectrum> named = Spectra.find(spectrum);
-    if (named.isPresent()) {
-      return named.get();
+    boolean named = Spectra.find(spectrum).isPresent();
+    if (named || MODELS.contains(spectrum)) {
+      return described();
     }
+    if (!lightKeys.isEmpty()) {
+      throw wrong("--light", "goes with a spectrum by name, not with a table");
+    }
+    return table();
+  }
+
+  private Spectrum described() {
+    List<Setting> keys = lightKeys.stream().map(k -> Setting.parse("--light", k)).toList();
+    for (Setting key : keys) {
+      if (NOT_HERE.contains(key.key())) {
+        throw wrong("--light", "\"" + key.key() + "\" says nothing about a map of gaps");
+      }
+    }
+    LightSpec light = LightReader.read("--light", spectrum, keys);
+    return ScenarioLight.spectrum(light, new InputFiles(Path.of("")));
+  }
+
+  private Spectrum table() {
     Path file = Path.of(spectrum);
     if (!Files.isRegularFile(file)) {
       throw wrong(
           "--spectrum",
           "must be one of %s or a file but was \"%s\""
-              .formatted(String.join(", ", Spectra.names()), spectrum));
+              .formatted(String.join(", ", KNOWN), spectrum));
     }
     try {
       return SpectrumReader.read(spectrum, Files.readString(file), Optional.empty());

@@ -15,16 +15,26 @@ import evensun.scenario.Place;
 import evensun.scenario.Scenario;
 
 /** The light of a scenario: built in, modelled, or a table of its own, scaled when it says so. */
-final class ScenarioLight {
+public final class ScenarioLight {
 
   private ScenarioLight() {}
 
   static Spectrum spectrum(Scenario scenario, InputFiles files) {
     LightSpec light = scenario.light();
-    Spectrum spectrum = unscaled(light, files);
+    Spectrum spectrum = spectrum(light, files);
     if (light.sky().isPresent() || light.table().isPresent()) {
       requireGrid(spectrum, scenario.grid(), light.place());
     }
+    return spectrum;
+  }
+
+  /**
+   * A light as described.
+   *
+   * @throws InputException when there is no such light
+   */
+  public static Spectrum spectrum(LightSpec light, InputFiles files) {
+    Spectrum spectrum = unscaled(light, files);
     if (light.irradianceWPerM2().isPresent()) {
       double wanted = light.irradianceWPerM2().getAsDouble();
       return spectrum.times(
