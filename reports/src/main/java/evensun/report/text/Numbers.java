@@ -15,6 +15,13 @@ public final class Numbers {
   private static final double MICROMETRE_FROM_NM = 10_000;
   private static final double MILLIMETRE_FROM_NM = 1_000_000;
 
+  private static final long[] POWERS = {1, 10, 100, 1000, 10_000};
+
+  /** Below it a scaled number is known to better than {@link #TIE}. */
+  private static final double FAST_BELOW = 1e5;
+
+  private static final double TIE = 1e-6;
+
   private Numbers() {}
 
   /** With so many decimals, rounded half up; never a negative zero. */
@@ -22,6 +29,33 @@ public final class Numbers {
     if (!Double.isFinite(value)) {
       return "–";
     }
+    return decimals < POWERS.length && Math.abs(value) < FAST_BELOW
+        ? fast(value, decimals)
+        : exact(value, decimals);
+  }
+
+  /** A page holds thousands of numbers; only those close to a tie need exact arithmetic. */
+  private static String fast(double value, int decimals) {
+    double scaled = Math.abs(value) * POWERS[decimals];
+    long down = (long) scaled;
+    double rest = scaled - down;
+    if (Math.abs(rest - 0.5) < TIE) {
+      return exact(value, decimals);
+    }
+    long digits = rest > 0.5 ? down + 1 : down;
+    StringBuilder text = new StringBuilder();
+    if (value < 0 && digits != 0) {
+      text.append(MINUS);
+    }
+    text.append(digits / POWERS[decimals]);
+    if (decimals > 0) {
+      String part = Long.toString(digits % POWERS[decimals]);
+      text.append('.').append("0".repeat(decimals - part.length())).append(part);
+    }
+    return text.toString();
+  }
+
+  private static String exact(double value, int decimals) {
     BigDecimal rounded = BigDecimal.valueOf(value).setScale(decimals, RoundingMode.HALF_UP);
     return rounded.signum() < 0
         ? MINUS + rounded.negate().toPlainString()
@@ -53,6 +87,9 @@ public final class Numbers {
     double size = Math.abs(value);
     if (size != 0 && (size < 1e-3 || size >= 1e6) && Double.isFinite(value)) {
       return powerOfTen(value, digits);
+    }
+    if (value == Math.rint(value) && size < POWERS[Math.min(digits, POWERS.length - 1)]) {
+      return fixed(value, 0);
     }
     BigDecimal rounded = BigDecimal.valueOf(value).round(new MathContext(digits));
     return trimmed(rounded.doubleValue(), Math.max(0, rounded.scale()));

@@ -2,6 +2,8 @@ package evensun.report.text;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import java.math.BigDecimal;
+import java.math.RoundingMode;
 import java.util.Locale;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -14,6 +16,22 @@ class NumbersTest {
   @CsvSource({"19.305, 2, 19.31", "-0.004, 2, 0.00", "-1.5, 1, −1.5", "2.5, 0, 3", "NaN, 2, –"})
   void fixedRoundsHalfUpAndKnowsNoNegativeZero(double value, int decimals, String text) {
     assertThat(Numbers.fixed(value, decimals)).isEqualTo(text);
+  }
+
+  /** Outside witness: exact decimal arithmetic of the JDK. */
+  @Test
+  void fixedIsExactDecimalRoundingEverywhere() {
+    java.util.Random random = new java.util.Random(5);
+    for (int i = 0; i < 20_000; i++) {
+      int decimals = random.nextInt(6);
+      double size = Math.pow(10, random.nextInt(9) - 4);
+      // every other one ends in a 5, where rounding is decided
+      double value = (random.nextDouble() - 0.5) * size;
+      value = i % 2 == 0 ? value : Math.rint(value * 1000) / 1000 + 0.0005;
+      BigDecimal exact = BigDecimal.valueOf(value).setScale(decimals, RoundingMode.HALF_UP);
+      String text = exact.toPlainString().replace('-', '\u2212');
+      assertThat(Numbers.fixed(value, decimals)).isEqualTo(text);
+    }
   }
 
   @ParameterizedTest
