@@ -68,6 +68,7 @@ class MeasuredSectionTest {
         run.secondOpinion(),
         measured,
         null,
+        null,
         run.findings(),
         run.cautions(),
         run.provenance());

@@ -1,7 +1,7 @@
 package evensun.cli;
 
 import evensun.pluginhost.PluginHost;
-import evensun.verify.PublishedValue;
+import evensun.result.Published;
 import evensun.verify.PublishedValues;
 import java.util.List;
 import java.util.Locale;
@@ -17,25 +17,23 @@ final class VerifyCommand extends BaseCommand {
 
   @Override
   public Integer call() {
-    List<PublishedValue.Verdict> verdicts;
+    List<Published> verdicts;
     try (PluginHost host = Plugins.open(evensun())) {
       verdicts =
-          PublishedValues.all(host.require("transfer-matrix"), host.services(() -> false)).stream()
-              .map(PublishedValue::verdict)
-              .toList();
+          PublishedValues.compared(host.require("transfer-matrix"), host.services(() -> false));
     }
     if (global().json()) {
       console().out().println(JsonMapper.builder().build().writeValueAsString(verdicts));
     } else {
       verdicts.forEach(verdict -> console().out().println(line(verdict)));
-      long agreed = verdicts.stream().filter(PublishedValue.Verdict::agrees).count();
+      long agreed = verdicts.stream().filter(Published::agrees).count();
       console().out().printf("%n%d of %d values agree.%n", agreed, verdicts.size());
     }
-    boolean all = verdicts.stream().allMatch(PublishedValue.Verdict::agrees);
+    boolean all = verdicts.stream().allMatch(Published::agrees);
     return all ? ExitStatus.DONE : ExitStatus.INTERNAL_ERROR;
   }
 
-  private static String line(PublishedValue.Verdict verdict) {
+  private static String line(Published verdict) {
     return String.format(
         Locale.ROOT,
         "%-8s  %s: published %s, computed %s %s (within %s)%n          %s",

@@ -22,6 +22,7 @@ import org.jspecify.annotations.Nullable;
  * @param secondOpinion the found design evaluated in other ways
  * @param measured measured curves beside the model of the stack as drawn, if there are any
  * @param textured the design beside its flat twin, where boundaries are shaped or scatter
+ * @param published published values beside those this program computed in the same run
  * @param findings what a reader should know, most severe first
  * @param cautions hazards and limits that apply to this stack
  * @param provenance how the result came about and how to repeat it
@@ -42,6 +43,7 @@ public record RunResult(
     @Nullable List<Opinion> secondOpinion,
     @Nullable List<Measured> measured,
     @Nullable Textured textured,
+    @Nullable List<Published> published,
     List<FindingRecord> findings,
     List<Caution> cautions,
     Provenance provenance) {
@@ -81,6 +83,7 @@ public record RunResult(
         sensitivities,
         whatIf,
         secondOpinion,
+        null,
         null,
         null,
         findings,

@@ -5,11 +5,14 @@ import evensun.evaluation.Bench;
 import evensun.evaluation.DepthProfiles;
 import evensun.evaluation.Model;
 import evensun.evaluation.Outcomes;
+import evensun.pluginhost.PluginHost;
 import evensun.result.Angular;
 import evensun.result.DepthLayer;
 import evensun.result.Measured;
 import evensun.result.Outcome;
+import evensun.result.Published;
 import evensun.result.RunResult;
+import evensun.verify.PublishedValues;
 import java.util.List;
 import java.util.Map;
 import org.jspecify.annotations.Nullable;
@@ -21,19 +24,19 @@ public final class AssessJob {
   public static final double USUAL_ANGLE_STEP_DEG = 5;
 
   private final Preparation preparation;
-  private final boolean depth;
+  private final boolean full;
   private final double angleStepDeg;
 
   /**
    * An assessment.
    *
    * @param preparation the scenario made ready
-   * @param depth whether to add generation against depth
+   * @param full whether to add generation against depth and the comparison with published values
    * @param angleStepDeg step of the angles to add in degrees, 0 for none
    */
-  public AssessJob(Preparation preparation, boolean depth, double angleStepDeg) {
+  public AssessJob(Preparation preparation, boolean full, double angleStepDeg) {
     this.preparation = preparation;
-    this.depth = depth;
+    this.full = full;
     this.angleStepDeg = angleStepDeg;
   }
 
@@ -63,13 +66,14 @@ public final class AssessJob {
           null,
           Usage.materials(bench),
           Usage.spectrum(preparation.stack()),
-          depth ? depth(bench) : null,
+          full ? depth(bench) : null,
           angleStepDeg > 0 ? angular(preparation, bench, angleStepDeg) : null,
           null,
           null,
           null,
           measured,
           FlatTwin.beside(preparation, bench),
+          full ? published(preparation) : null,
           findings.records(),
           Cautions.of(preparation.stack()),
           provenance.build(
@@ -77,6 +81,14 @@ public final class AssessJob {
               repeatCommand,
               Map.of()));
     }
+  }
+
+  /** Published values beside computed ones; null where the solver of flat stacks is not loaded. */
+  static @Nullable List<Published> published(Preparation preparation) {
+    PluginHost host = preparation.host();
+    return host.solver(SolverChoice.FLAT)
+        .map(solver -> PublishedValues.compared(solver, host.services(() -> false)))
+        .orElse(null);
   }
 
   static @Nullable List<DepthLayer> depth(Bench bench) {

@@ -209,6 +209,7 @@ public final class DesignJob {
           new SecondOpinions(preparation, varied, aim, best).opinions(),
           measured,
           FlatTwin.beside(preparation, bench),
+          AssessJob.published(preparation),
           findings.records(),
           Cautions.of(preparation.stack()),
           provenance.build(spec.seed(), repeat(repeatCommand, outcome), settingsOf(settings)));

@@ -4,6 +4,7 @@ import evensun.evaluation.Aim;
 import evensun.evaluation.Bench;
 import evensun.evaluation.Parameter;
 import evensun.material.MaterialLibrary;
+import evensun.pluginhost.LoadedPlugin;
 import evensun.result.Opinion;
 import evensun.scenario.GridSpec;
 import evensun.scenario.InputException;
@@ -15,15 +16,18 @@ import evensun.spi.UnsupportedProblem;
 import evensun.stack.MaterialSlot;
 import java.util.ArrayList;
 import java.util.HashMap;
+import java.util.HashSet;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.Set;
 
 /**
- * The found design evaluated in other ways: with a finer grid, with the solver's plain twin, and
- * with every other library table of its materials. The differences are an error budget of what was
- * tried, not of everything that may be wrong.
+ * The found design evaluated in other ways: with a finer grid, with the solver's plain twin, with
+ * every other loaded solver that takes the stack, and with every other library table of its
+ * materials. The differences are an error budget of what was tried, not of everything that may be
+ * wrong.
  */
 final class SecondOpinions {
 
@@ -50,6 +54,7 @@ final class SecondOpinions {
             "half the wavelength step (" + Findings.number(finer.stepNm()) + " nm)",
             scenario.withGrid(finer)));
     referenceKernel(scenario, opinions);
+    otherSolvers(scenario, opinions);
     Set<String> names = new LinkedHashSet<>();
     preparation.stack().slots().stream().map(MaterialSlot::name).forEach(names::add);
     for (String name : names) {
@@ -71,6 +76,34 @@ final class SecondOpinions {
     SolverSpec reference = new SolverSpec(choice.solver().id(), options, scenario.grid().place());
     opinions.add(
         opinion("numerics", "the solver's reference kernel", scenario.withSolver(reference)));
+  }
+
+  /** Every other loaded solver that takes the stack, with its usual options. */
+  private void otherSolvers(Scenario scenario, List<Opinion> opinions) {
+    Set<String> used = new HashSet<>(preparation.choice().chain());
+    used.add(preparation.choice().solver().id());
+    used.add(SolverChoice.EFFECTIVE); // hands the films on and has no optics of its own
+    for (LoadedPlugin plugin : preparation.host().loaded()) {
+      if (!used.contains(plugin.solverId())) {
+        SolverSpec other = new SolverSpec(plugin.solverId(), Map.of(), scenario.grid().place());
+        otherSolver(other, scenario.withSolver(other)).ifPresent(opinions::add);
+      }
+    }
+  }
+
+  /** A solver that refuses the stack has no opinion on it; one that breaks down says why. */
+  private Optional<Opinion> otherSolver(SolverSpec solver, Scenario other) {
+    String what = "solver " + solver.id();
+    try (Preparation prepared = Preparation.of(other, preparation.host(), () -> false);
+        Bench bench = prepared.model().newBench()) {
+      double value = aimOf(prepared, bench);
+      String note = prepared.choice().statistical() ? "carries a statistical error of its own" : "";
+      return Optional.of(new Opinion("numerics", what, value, value - found.aim(), note));
+    } catch (UnsupportedProblem e) {
+      return Optional.empty();
+    } catch (EvaluationFailed e) {
+      return Optional.of(new Opinion("numerics", what, null, null, String.valueOf(e.getMessage())));
+    }
   }
 
   private void otherTables(String name, Scenario scenario, List<Opinion> opinions) {

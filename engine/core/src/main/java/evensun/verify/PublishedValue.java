@@ -1,5 +1,6 @@
 package evensun.verify;
 
+import evensun.result.Published;
 import java.util.function.DoubleSupplier;
 
 /**
@@ -21,29 +22,9 @@ public record PublishedValue(
     DoubleSupplier computation) {
 
   /** Computes the value and compares. */
-  public Verdict verdict() {
+  public Published verdict() {
     double computed = computation.getAsDouble();
     boolean agrees = Math.abs(computed - published) <= tolerance;
-    return new Verdict(what, unit, published, computed, tolerance, source, agrees);
+    return new Published(what, unit, published, computed, tolerance, source, agrees);
   }
-
-  /**
-   * A published value beside the computed one.
-   *
-   * @param what what it is
-   * @param unit its unit
-   * @param published the published value
-   * @param computed the computed value
-   * @param tolerance how far they may differ
-   * @param source where it is published
-   * @param agrees whether they do agree
-   */
-  public record Verdict(
-      String what,
-      String unit,
-      double published,
-      double computed,
-      double tolerance,
-      String source,
-      boolean agrees) {}
 }

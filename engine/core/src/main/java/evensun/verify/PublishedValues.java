@@ -10,6 +10,7 @@ import evensun.light.Spectrum;
 import evensun.light.WavelengthGrid;
 import evensun.material.Material;
 import evensun.material.MaterialLibrary;
+import evensun.result.Published;
 import evensun.scenario.Connection;
 import evensun.spi.OpticalSolver;
 import evensun.spi.Polarisation;
@@ -39,6 +40,11 @@ public final class PublishedValues {
     values.addAll(limits());
     values.addAll(films(new ThinFilmProbe(thinFilms, services)));
     return values;
+  }
+
+  /** All of them, computed and compared; the parameters are those of {@link #all}. */
+  public static List<Published> compared(OpticalSolver thinFilms, Services services) {
+    return all(thinFilms, services).stream().map(PublishedValue::verdict).toList();
   }
 
   private static List<PublishedValue> light() {

@@ -37,6 +37,7 @@ final class SampleResult {
             new Opinion("material", "another table", null, null, "covers 400 to 900 nm only")),
         null,
         textured(),
+        List.of(new Published("a limit", "%", 33.7, 33.75, 0.1, "a paper", true)),
         List.of(new FindingRecord("warning", "bound-reached", "absorber", "Stands on its bound.")),
         List.of(new Caution("absorber", "Contains lead.")),
         provenance());
