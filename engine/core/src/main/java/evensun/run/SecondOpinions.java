@@ -2,10 +2,12 @@ package evensun.run;
 
 import evensun.evaluation.Aim;
 import evensun.evaluation.Bench;
+import evensun.evaluation.Outcomes;
 import evensun.evaluation.Parameter;
 import evensun.material.MaterialLibrary;
 import evensun.pluginhost.LoadedPlugin;
 import evensun.result.Opinion;
+import evensun.result.Outcome.SubcellOutcome;
 import evensun.scenario.GridSpec;
 import evensun.scenario.InputException;
 import evensun.scenario.Scenario;
@@ -20,6 +22,7 @@ import java.util.HashSet;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
+import java.util.Objects;
 import java.util.Optional;
 import java.util.Set;
 
@@ -97,13 +100,22 @@ final class SecondOpinions {
     try (Preparation prepared = Preparation.of(other, preparation.host(), () -> false);
         Bench bench = prepared.model().newBench()) {
       double value = aimOf(prepared, bench);
-      String note = prepared.choice().statistical() ? "carries a statistical error of its own" : "";
-      return Optional.of(new Opinion("numerics", what, value, value - found.aim(), note));
+      return Optional.of(
+          new Opinion("numerics", what, value, value - found.aim(), statistics(bench)));
     } catch (UnsupportedProblem e) {
       return Optional.empty();
     } catch (EvaluationFailed e) {
       return Optional.of(new Opinion("numerics", what, null, null, String.valueOf(e.getMessage())));
     }
+  }
+
+  private static String statistics(Bench bench) {
+    return Outcomes.of(bench, List.of()).subcells().stream()
+        .map(SubcellOutcome::standardErrorMaPerCm2)
+        .filter(Objects::nonNull)
+        .max(Double::compare)
+        .map(error -> "its currents carry ±%.3f mA cm⁻²".formatted(error))
+        .orElse("");
   }
 
   private void otherTables(String name, Scenario scenario, List<Opinion> opinions) {
