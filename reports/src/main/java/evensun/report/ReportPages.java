@@ -23,6 +23,7 @@ import evensun.report.section.ProvenanceSection;
 import evensun.report.section.SearchSection;
 import evensun.report.section.SensitivitySection;
 import evensun.report.section.StackSection;
+import evensun.report.section.TextureSection;
 import evensun.report.text.Glossary;
 import evensun.report.text.Numbers;
 import evensun.result.Electrical;
@@ -47,6 +48,7 @@ final class ReportPages {
       List.of(
           StackSection::of,
           LightSection::of,
+          TextureSection::of,
           ElectricalSection::of,
           SearchSection::of,
           SensitivitySection::of,

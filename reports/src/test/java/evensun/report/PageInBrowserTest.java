@@ -47,6 +47,7 @@ class PageInBrowserTest {
     return List.of(
         Map.entry("full", SampleRuns.full()),
         Map.entry("assessment", SampleRuns.assessment()),
+        Map.entry("textured", TexturedRuns.assessment()),
         Map.entry("hostile", AwkwardRuns.hostile()),
         Map.entry("sixty", AwkwardRuns.sixtyLayers()),
         Map.entry("single", AwkwardRuns.oneWavelength()),

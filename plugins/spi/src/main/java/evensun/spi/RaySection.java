@@ -19,6 +19,9 @@ public interface RaySection {
    * What to draw. Lengths in µm; x along the section, z downwards from the mean plane of the first
    * boundary.
    *
+   * <p>All outlines have the same range of x, a whole number of periods where the boundaries are
+   * periodic. Paths may leave it: drawings continue them on the other side.
+   *
    * @param outlines the boundaries of thick media, in the order light meets them
    * @param paths pieces of rays, in the order of travel
    */

@@ -43,13 +43,21 @@ public record Budget(double incidentMaPerCm2, List<Share> shares) {
     int count = 0;
     for (Parasitic parasitic : losses.parasitic()) {
       String role = Share.parasiticRole(count++);
-      byChannel.put(parasitic.layer(), new Share(parasitic.layer(), role, parasitic.maPerCm2()));
+      byChannel.put(
+          parasitic.layer(),
+          new Share(
+              parasitic.layer(), role, parasitic.maPerCm2(), parasitic.standardErrorMaPerCm2()));
     }
     for (int i = 0; i < outcome.subcells().size(); i++) {
       place(outcome.subcells().get(i), Share.subcellRole(i), byChannel);
     }
     List<Share> shares = new ArrayList<>();
-    shares.add(new Share("reflected", "reflected", losses.reflectedMaPerCm2()));
+    shares.add(
+        new Share(
+            "reflected",
+            "reflected",
+            losses.reflectedMaPerCm2(),
+            losses.reflectedStandardErrorMaPerCm2()));
     byChannel.values().stream().filter(share -> share != NONE).forEach(shares::add);
     exitShare(outcome, losses).ifPresent(shares::add);
     return shares;
@@ -68,7 +76,7 @@ public record Budget(double incidentMaPerCm2, List<Share> shares) {
             .filter(subcell.absorbers()::contains)
             .findFirst()
             .orElse("subcell " + subcell.name());
-    byChannel.put(first, new Share(subcell.name(), role, current));
+    byChannel.put(first, new Share(subcell.name(), role, current, subcell.standardErrorMaPerCm2()));
   }
 
   private static Optional<Share> exitShare(Outcome outcome, Losses losses) {
@@ -82,7 +90,8 @@ public record Budget(double incidentMaPerCm2, List<Share> shares) {
         new Share(
             exit.map(Budget::exitLabel).orElse("transmitted"),
             "exit",
-            losses.transmittedMaPerCm2()));
+            losses.transmittedMaPerCm2(),
+            losses.transmittedStandardErrorMaPerCm2()));
   }
 
   /** What people are shown for light that enters the exit medium. */
@@ -100,6 +109,11 @@ public record Budget(double incidentMaPerCm2, List<Share> shares) {
   /** What the subcells collect together, mA cm⁻². */
   public double collectedMaPerCm2() {
     return shares.stream().filter(Share::collected).mapToDouble(Share::maPerCm2).sum();
+  }
+
+  /** Whether the shares carry statistical errors. */
+  public boolean isStatistical() {
+    return shares.stream().anyMatch(share -> share.standardErrorMaPerCm2() != null);
   }
 
   /** The losses, in the light's order. */

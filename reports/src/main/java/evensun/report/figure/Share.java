@@ -1,5 +1,7 @@
 package evensun.report.figure;
 
+import org.jspecify.annotations.Nullable;
+
 /**
  * A part of the available light.
  *
@@ -7,8 +9,15 @@ package evensun.report.figure;
  * @param role class of the style sheet: {@code sub1}, …, {@code reflected}, {@code parasitic},
  *     {@code exit}
  * @param maPerCm2 mA cm⁻²
+ * @param standardErrorMaPerCm2 statistical error, null where there is none
  */
-public record Share(String label, String role, double maPerCm2) {
+public record Share(
+    String label, String role, double maPerCm2, @Nullable Double standardErrorMaPerCm2) {
+
+  /** A part without a statistical error. */
+  public Share(String label, String role, double maPerCm2) {
+    this(label, role, maPerCm2, null);
+  }
 
   private static final int SUBCELL_ROLES = 6;
 

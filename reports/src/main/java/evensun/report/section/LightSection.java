@@ -78,40 +78,36 @@ public final class LightSection {
       table.numbers("as drawn", Numbers.MA);
     }
     table.numbers("found", Numbers.MA);
+    if (found.isStatistical()) {
+      table.numbers("±", Numbers.MA);
+    }
     if (drawn != null) {
       table.numbers("change", Numbers.MA);
     }
     table.numbers("of available", "%");
     for (Share share : found.shares()) {
-      table.row(
-          row(
-              share.label(),
-              share.collected() ? "subcell" : "loss",
-              drawn == null ? null : drawn.of(share.label()),
-              share.maPerCm2(),
-              found.incidentMaPerCm2()));
+      String kind = share.collected() ? "subcell" : "loss";
+      table.row(row(share, kind, drawn == null ? null : drawn.of(share.label()), found));
     }
-    table.row(
-        row(
-            "total",
-            "available " + Numbers.fixed(found.incidentMaPerCm2(), 3),
-            drawn == null ? null : drawn.totalMaPerCm2(),
-            found.totalMaPerCm2(),
-            found.incidentMaPerCm2()));
+    Share total = new Share("total", "", found.totalMaPerCm2());
+    String available = "available " + Numbers.fixed(found.incidentMaPerCm2(), 3);
+    table.row(row(total, available, drawn == null ? null : drawn.totalMaPerCm2(), found));
     return table.build(1);
   }
 
-  private static List<String> row(
-      String label, String kind, @Nullable Double drawn, double found, double incident) {
-    List<String> cells = new ArrayList<>(List.of(label, kind));
+  private static List<String> row(Share share, String kind, @Nullable Double drawn, Budget budget) {
+    List<String> cells = new ArrayList<>(List.of(share.label(), kind));
     if (drawn != null) {
       cells.add(Numbers.fixed(drawn, 3));
     }
-    cells.add(Numbers.fixed(found, 3));
-    if (drawn != null) {
-      cells.add(Numbers.signed(found - drawn, 3));
+    cells.add(Numbers.fixed(share.maPerCm2(), 3));
+    if (budget.isStatistical()) {
+      cells.add(Numbers.standardError(share.standardErrorMaPerCm2()));
     }
-    cells.add(Numbers.fixed(found / incident * 100, 2));
+    if (drawn != null) {
+      cells.add(Numbers.signed(share.maPerCm2() - drawn, 3));
+    }
+    cells.add(Numbers.fixed(share.maPerCm2() / budget.incidentMaPerCm2() * 100, 2));
     return cells;
   }
 

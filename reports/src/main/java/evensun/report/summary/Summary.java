@@ -66,60 +66,33 @@ public record Summary(
   private static Listing currents(RunResult result) {
     Outcome found = result.found();
     Outcome drawn = result.asDrawn();
-    List<List<String>> rows = new ArrayList<>();
+    boolean errors = found.subcells().stream().anyMatch(s -> s.standardErrorMaPerCm2() != null);
+    Rows rows = new Rows("currents, " + Numbers.MA, drawn != null, errors);
     for (SubcellOutcome subcell : found.subcells()) {
-      add(
-          rows,
-          drawn != null,
+      rows.add(
           Clip.to(subcell.name(), 40),
           subcell.photocurrentMaPerCm2(),
+          subcell.standardErrorMaPerCm2(),
           current(drawn, subcell.name()));
     }
-    add(
-        rows,
-        drawn != null,
+    rows.add(
         "matched current",
         found.matchedCurrentMaPerCm2(),
+        found.matchedStandardErrorMaPerCm2(),
         drawn == null ? null : drawn.matchedCurrentMaPerCm2());
-    add(
-        rows,
-        drawn != null,
+    rows.add(
         "mismatch",
         found.mismatchMaPerCm2(),
+        null,
         drawn == null ? null : drawn.mismatchMaPerCm2());
     Electrical power = found.electrical();
     Electrical before = drawn == null ? null : drawn.electrical();
     if (power != null) {
-      add(
-          rows,
-          drawn != null,
+      rows.add(
           "efficiency, %",
-          power.efficiencyPercent(),
-          before == null ? null : before.efficiencyPercent());
+          power.efficiencyPercent(), null, before == null ? null : before.efficiencyPercent());
     }
-    List<String> header =
-        drawn == null
-            ? List.of("currents, " + Numbers.MA, "as drawn")
-            : List.of("currents, " + Numbers.MA, "as drawn", "found", "change");
-    return new Listing(header, rows);
-  }
-
-  private static void add(
-      List<List<String>> rows,
-      boolean compared,
-      String label,
-      @Nullable Double value,
-      @Nullable Double drawn) {
-    if (value == null) {
-      return;
-    }
-    String now = Numbers.fixed(value, 2);
-    if (!compared) {
-      rows.add(List.of(label, now));
-      return;
-    }
-    String before = drawn == null ? "" : Numbers.fixed(drawn, 2);
-    rows.add(List.of(label, before, now, drawn == null ? "" : Numbers.signed(value - drawn, 2)));
+    return rows.listing();
   }
 
   private static @Nullable Double current(@Nullable Outcome outcome, String subcell) {
@@ -159,28 +132,17 @@ public record Summary(
   private static Listing ledger(RunResult result, Budget found) {
     Outcome asDrawn = result.asDrawn();
     Optional<Budget> drawn = asDrawn == null ? Optional.empty() : Budget.of(asDrawn);
-    List<List<String>> rows = new ArrayList<>();
+    String head = "of " + Numbers.fixed(found.incidentMaPerCm2(), 2) + " " + Numbers.MA;
+    Rows rows = new Rows(head, drawn.isPresent(), found.isStatistical());
     for (Share share : found.shares()) {
-      String label = Clip.to(share.label(), 40);
-      add(
-          rows,
-          drawn.isPresent(),
-          label,
+      rows.add(
+          Clip.to(share.label(), 40),
           share.maPerCm2(),
+          share.standardErrorMaPerCm2(),
           drawn.map(d -> d.of(share.label())).orElse(null));
     }
-    add(
-        rows,
-        drawn.isPresent(),
-        "total",
-        found.totalMaPerCm2(),
-        drawn.map(Budget::totalMaPerCm2).orElse(null));
-    String head = "of " + Numbers.fixed(found.incidentMaPerCm2(), 2) + " " + Numbers.MA;
-    return new Listing(
-        drawn.isPresent()
-            ? List.of(head, "as drawn", "found", "change")
-            : List.of(head, "as drawn"),
-        rows);
+    rows.add("total", found.totalMaPerCm2(), null, drawn.map(Budget::totalMaPerCm2).orElse(null));
+    return rows.listing();
   }
 
   private static List<String> closing(RunResult result) {

@@ -3,6 +3,7 @@ package evensun.report.text;
 import java.math.BigDecimal;
 import java.math.MathContext;
 import java.math.RoundingMode;
+import org.jspecify.annotations.Nullable;
 
 /** Numbers for people: a full stop, a true minus sign, a space before the unit, no locale. */
 public final class Numbers {
@@ -118,6 +119,14 @@ public final class Numbers {
   /** A change of a current density with its unit. */
   public static String maChange(double maPerCm2) {
     return withUnit(signed(maPerCm2, 2), MA);
+  }
+
+  /** A standard error to three decimals; empty where there is none. */
+  public static String standardError(@Nullable Double maPerCm2) {
+    if (maPerCm2 == null) {
+      return "";
+    }
+    return maPerCm2 < 5e-4 ? "<0.001" : fixed(maPerCm2, 3);
   }
 
   /** A thickness with its unit, in µm from 10 µm, in mm from 1 mm. */
