@@ -1,5 +1,7 @@
 package evensun.bench;
 
+import evensun.bench.search.SearchTables;
+import java.util.Arrays;
 import java.util.Collection;
 import java.util.Locale;
 import org.openjdk.jmh.profile.GCProfiler;
@@ -15,12 +17,20 @@ import org.openjdk.jmh.runner.options.VerboseMode;
 public final class Main {
 
   private static final String USAGE =
-      "usage: java -jar benchmarks.jar [REGEX] [--forks N] [--seconds S]";
+      "usage: java -jar benchmarks.jar [REGEX] [--forks N] [--seconds S], or search [--seeds N] [--cold N] [PROBLEM...]";
 
   private Main() {}
 
   /** Entry point; see the package for the command. */
-  public static void main(String[] args) throws RunnerException {
+  public static void main(String[] args) throws Exception {
+    if (args.length > 0 && args[0].equals("search")) {
+      SearchTables.main(Arrays.copyOfRange(args, 1, args.length));
+    } else {
+      measure(args);
+    }
+  }
+
+  private static void measure(String[] args) throws RunnerException {
     String include = "evensun.bench";
     int forks = 3;
     double seconds = 0.5;

@@ -1,5 +1,6 @@
 /**
- * Benchmarks of the thin-film solver, with JMH.
+ * Benchmarks of the thin-film solver, with JMH; those of the search are in {@code
+ * evensun.bench.search}.
  *
  * <p>From the top of the project:
  *

@@ -77,6 +77,11 @@ public final class DesignJob {
     return aim.unit();
   }
 
+  /** What is searched. */
+  public StackObjective objective() {
+    return objective;
+  }
+
   /** Settings of the search as the scenario asks, on so many threads. */
   public SearchSettings settings(int threads) {
     SearchSettings settings =

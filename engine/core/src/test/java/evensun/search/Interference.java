@@ -12,14 +12,14 @@ import java.util.List;
  * is shared between an absorbing film and what lies below it. It has the many hills and the kink
  * between two currents of the real task, with derivatives in closed form.
  */
-final class Interference implements Objective {
+public final class Interference implements Objective {
 
   private static final int WAVELENGTHS = 40;
   private static final double[] INDEX = {1.38, 2.0, 1.7, 1.9, 2.4, 1.6, 2.1, 1.5, 2.2, 1.8};
   private final int films;
   private final boolean derivatives;
 
-  Interference(int films, boolean derivatives) {
+  public Interference(int films, boolean derivatives) {
     this.films = films;
     this.derivatives = derivatives;
   }

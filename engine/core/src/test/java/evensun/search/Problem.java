@@ -9,7 +9,7 @@ import java.util.concurrent.atomic.AtomicInteger;
 import java.util.function.Function;
 
 /** Objectives for tests, made of plain functions; counts its evaluations. */
-record Problem(
+public record Problem(
     List<Variable> variables,
     List<String> aims,
     List<String> limits,
@@ -19,36 +19,36 @@ record Problem(
     implements Objective {
 
   /** A number made of numbers. */
-  interface Value {
+  public interface Value {
     double at(double[] x);
   }
 
-  static Problem of(Value value, Variable... variables) {
+  public static Problem of(Value value, Variable... variables) {
     return judged(x -> Verdict.of(value.at(x), 0), variables);
   }
 
-  static Problem judged(Function<double[], Verdict> judge, Variable... variables) {
+  public static Problem judged(Function<double[], Verdict> judge, Variable... variables) {
     return new Problem(
         List.of(variables), List.of("aim"), List.of(), 0, judge, new AtomicInteger());
   }
 
-  Problem withTieResolution(double resolution) {
+  public Problem withTieResolution(double resolution) {
     return new Problem(variables, aims, limits, resolution, judge, calls);
   }
 
-  Problem withLimits(String... names) {
+  public Problem withLimits(String... names) {
     return new Problem(variables, aims, List.of(names), tieResolution, judge, calls);
   }
 
-  Problem withAims(String... names) {
+  public Problem withAims(String... names) {
     return new Problem(variables, List.of(names), limits, tieResolution, judge, calls);
   }
 
-  static Variable variable(String key, double low, double high) {
+  public static Variable variable(String key, double low, double high) {
     return new Variable(key, "", low, high, 0, low);
   }
 
-  static Variable[] box(int count, double low, double high) {
+  public static Variable[] box(int count, double low, double high) {
     List<Variable> variables = new ArrayList<>();
     for (int i = 0; i < count; i++) {
       variables.add(variable("x" + i, low, high));

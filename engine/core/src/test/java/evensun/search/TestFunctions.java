@@ -5,12 +5,12 @@ package evensun.search;
  * Rastrigin, Ackley, Schwefel and Rosenbrock as in the survey of Jamil and Yang, Int. J. Math.
  * Model. Numer. Optim. 4, 150 (2013).
  */
-final class TestFunctions {
+public final class TestFunctions {
 
   private TestFunctions() {}
 
   /** On [-5.12, 5.12]; 0 at the origin. */
-  static double rastrigin(double[] x) {
+  public static double rastrigin(double[] x) {
     double sum = 10 * x.length;
     for (double v : x) {
       sum += v * v - 10 * Math.cos(2 * Math.PI * v);
@@ -19,7 +19,7 @@ final class TestFunctions {
   }
 
   /** On [-32.768, 32.768]; 0 at the origin. */
-  static double ackley(double[] x) {
+  public static double ackley(double[] x) {
     double squares = 0;
     double cosines = 0;
     for (double v : x) {
@@ -31,7 +31,7 @@ final class TestFunctions {
   }
 
   /** On [-500, 500]; 0 at 420.968746 in every variable. */
-  static double schwefel(double[] x) {
+  public static double schwefel(double[] x) {
     double sum = 418.9828872724339 * x.length;
     for (double v : x) {
       sum -= v * Math.sin(Math.sqrt(Math.abs(v)));
@@ -40,7 +40,7 @@ final class TestFunctions {
   }
 
   /** On [-5, 10]; 0 at one in every variable. */
-  static double rosenbrock(double[] x) {
+  public static double rosenbrock(double[] x) {
     double sum = 0;
     for (int i = 0; i + 1 < x.length; i++) {
       double valley = x[i + 1] - x[i] * x[i];
@@ -53,7 +53,7 @@ final class TestFunctions {
    * The smaller of two Rastrigin functions, shifted by half a period to either side, on [-5.12,
    * 5.12]: its optimum lies on the kink between them.
    */
-  static double kinked(double[] x) {
+  public static double kinked(double[] x) {
     double[] left = x.clone();
     double[] right = x.clone();
     for (int i = 0; i < x.length; i++) {
