@@ -1,6 +1,7 @@
 package evensun.cli;
 
 import evensun.pluginhost.PluginException;
+import evensun.pluginhost.PluginFault;
 import evensun.scenario.Fault;
 import evensun.scenario.InputException;
 import evensun.spi.EvaluationFailed;
@@ -11,6 +12,7 @@ import java.io.StringWriter;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
+import java.util.Optional;
 import java.util.concurrent.CancellationException;
 import picocli.CommandLine;
 import picocli.CommandLine.ParameterException;
@@ -33,11 +35,14 @@ final class ErrorReport {
   int wrongCommandLine(ParameterException e, String[] args) {
     String message = message(e);
     String command = e.getCommandLine().getCommandSpec().qualifiedName();
-    boolean json = List.of(args).contains("json") || List.of(args).contains("--format=json");
     return tell(
-        json,
+        wantsJson(args),
         ExitStatus.WRONG_INPUT,
         List.of(new Line("", 0, "", message + " (see " + command + " --help)")));
+  }
+
+  private static boolean wantsJson(String[] args) {
+    return List.of(args).contains("json") || List.of(args).contains("--format=json");
   }
 
   private static String message(ParameterException e) {
@@ -67,7 +72,33 @@ final class ErrorReport {
     if (e instanceof CancellationException) {
       return tell(json, ExitStatus.INTERRUPTED, List.of(new Line("", 0, "", e.getMessage())));
     }
-    return tell(json, ExitStatus.INTERNAL_ERROR, List.of(new Line("", 0, "", internal(e))));
+    return defect(e, json);
+  }
+
+  /** The machine or a class gave up in the middle of a command. */
+  int broken(Error e, String[] args) {
+    if (e instanceof OutOfMemoryError) {
+      long megabytes = Runtime.getRuntime().maxMemory() >> 20;
+      String message =
+          "out of memory (%d MB); take a coarser grid, or allow more with EVENSUN_JAVA_OPTS=-Xmx4g"
+              .formatted(megabytes);
+      return tell(
+          wantsJson(args), ExitStatus.INTERNAL_ERROR, List.of(new Line("", 0, "", message)));
+    }
+    return defect(e, wantsJson(args));
+  }
+
+  private int defect(Throwable e, boolean json) {
+    Optional<String> plugin = PluginFault.place(e);
+    String message =
+        plugin.isPresent()
+            ? what("a solver plugin failed in " + plugin.get(), e)
+                + kept(e, "the plugin", "its author")
+            : what("internal error", e) + kept(e, "Evensun", "the maintainers");
+    return tell(
+        json,
+        plugin.isPresent() ? ExitStatus.WRONG_PLUGIN : ExitStatus.INTERNAL_ERROR,
+        List.of(new Line("", 0, "", message)));
   }
 
   private int tell(boolean json, int status, List<Line> lines) {
@@ -91,20 +122,23 @@ final class ErrorReport {
     return status;
   }
 
+  private static String what(String where, Throwable e) {
+    String said =
+        e.getMessage() == null ? "" : ": " + e.getMessage().replaceAll("\\s*\\R\\s*", " ");
+    return where + " (" + e.getClass().getSimpleName() + ")" + said;
+  }
+
   /** Where to send a defect; the details go to a file, since a stack trace helps no user. */
-  private static String internal(Exception e) {
-    String what = "internal error (" + e.getClass().getSimpleName() + "): " + e.getMessage();
+  private static String kept(Throwable e, String whose, String receiver) {
+    String defect = "; this is a defect of " + whose + ": please ";
     try {
       StringWriter trace = new StringWriter();
       e.printStackTrace(new PrintWriter(trace));
       Path file = Files.createTempFile("evensun-error-", ".txt");
       Files.writeString(file, trace.toString());
-      return what.replaceAll("\\s*\\R\\s*", " ")
-          + "; this is a defect of Evensun: please send "
-          + file
-          + " and your input to the maintainers";
+      return defect + "send " + file + " and your input to " + receiver;
     } catch (IOException io) {
-      return what + "; this is a defect of Evensun: please report it to the maintainers";
+      return defect + "report it to " + receiver;
     }
   }
 

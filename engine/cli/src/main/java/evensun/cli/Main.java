@@ -21,7 +21,12 @@ public final class Main {
    * Runs one command. Returns 0 done, 1 internal error, 2 wrong input, 3 wrong plugin, 130 stopped.
    */
   public static int run(Console console, String... args) {
-    int status = Evensun.commandLine(console).execute(args);
+    int status;
+    try {
+      status = Evensun.commandLine(console).execute(args);
+    } catch (Error e) { // a plugin without its library, no memory left
+      status = new ErrorReport(console).broken(e, args);
+    }
     console.out().flush();
     console.err().flush();
     return status;
