@@ -59,6 +59,7 @@ final class TexturedRuns {
         null,
         null,
         new Textured(flat, List.of("transfer-matrix"), section()),
+        null,
         List.of(),
         run.cautions(),
         run.provenance());
