@@ -35,7 +35,8 @@ final class NewCommand extends BaseCommand {
       names = "--like",
       paramLabel = "NAME",
       description =
-          "What it is like: planar (default), all-thin-film, three-junction or four-terminal.")
+          "What it is like: planar (default), textured-two-junction, all-thin-film, three-junction or"
+              + " four-terminal.")
   String like = Templates.USUAL;
 
   @Override

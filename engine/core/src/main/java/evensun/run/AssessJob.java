@@ -56,6 +56,7 @@ public final class AssessJob {
       findings.addAll(powered.findings());
       findings.about(preparation.stack(), model, bench.design());
       findings.about(outcome);
+      findings.aboutErrors(outcome, false);
       List<Measured> measured = preparation.measurements().against(outcome, findings);
       return new RunResult(
           RunResult.FORMAT,

@@ -192,6 +192,7 @@ public final class DesignJob {
       findings.about(preparation.stack(), model, bench.design());
       findings.addAll(powered.findings());
       findings.about(found);
+      findings.aboutErrors(found, true);
       findings.about(record);
       gapNotDecided(findings);
       limitsBroken(best, findings);

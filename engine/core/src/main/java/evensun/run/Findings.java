@@ -13,6 +13,7 @@ import java.util.Comparator;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Locale;
+import java.util.Objects;
 import java.util.Set;
 import java.util.stream.Collectors;
 import org.jspecify.annotations.Nullable;
@@ -99,6 +100,30 @@ final class Findings {
                 "this subcell absorbs %.3f mA cm⁻²: check the order of the stack and its bandgap"
                     .formatted(current)));
       }
+    }
+  }
+
+  /** What an outcome's statistical errors mean, when a search found it or not. */
+  void aboutErrors(Outcome outcome, boolean searched) {
+    double largest =
+        outcome.subcells().stream()
+            .map(Outcome.SubcellOutcome::standardErrorMaPerCm2)
+            .filter(Objects::nonNull)
+            .mapToDouble(Double::doubleValue)
+            .max()
+            .orElse(0);
+    if (largest > 0) {
+      add(
+          new Finding(
+              "statistical-error",
+              Severity.NOTE,
+              searched ? "the optimum" : "all subcells",
+              "photocurrents carry a standard error of up to %s mA cm⁻² from the number of rays%s; geometrical optics on features of some micrometres errs by more"
+                  .formatted(
+                      number(Math.max(1e-4, Math.rint(largest * 1e4) / 1e4)),
+                      searched
+                          ? "; all designs were compared on the same rays, so that their differences are surer than their values"
+                          : "")));
     }
   }
 

@@ -23,6 +23,7 @@ public final class Templates {
   public static Map<String, String> names() {
     Map<String, String> names = new LinkedHashMap<>();
     names.put(USUAL, "planar perovskite on silicon, two terminals");
+    names.put("textured-two-junction", "perovskite on pyramids of silicon, two terminals");
     names.put("all-thin-film", "two thin-film junctions behind glass");
     names.put("three-junction", "III-V three-junction cell on germanium");
     names.put("four-terminal", "perovskite laminated onto silicon, terminals of their own");
