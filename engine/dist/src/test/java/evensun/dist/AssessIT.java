@@ -27,7 +27,9 @@ class AssessIT {
         "perovskite-on-silicon.yaml",
         "perovskite-on-silicon-gap.yaml",
         "all-thin-film.yaml",
-        "badly-matched.yaml"
+        "badly-matched.yaml",
+        "perovskite-on-pyramids.yaml",
+        "textured-rear.yaml"
       })
   void everyDemoIsAssessedAsOneJsonDocument(String name) {
     Program.Run run =
