@@ -1,6 +1,7 @@
 package evensun.raytrace;
 
 import evensun.raytrace.kernel.Weighing;
+import evensun.raytrace.trace.Angles;
 import evensun.spi.Design;
 import evensun.spi.Evaluator;
 import evensun.spi.Incidence;
@@ -58,18 +59,11 @@ final class CoatingTable implements AutoCloseable {
     void film(int node, int w, int film, int polarisation, double value);
   }
 
-  CoatingTable(
-      Problem problem,
-      Device device,
-      int boundary,
-      Side side,
-      double[] cosines,
-      int[] wavelengths,
-      Services services) {
+  CoatingTable(Problem problem, Device device, Angles.Table table, Services services) {
     this.problem = problem;
     this.device = device;
-    this.boundary = boundary;
-    this.wavelengths = wavelengths;
+    boundary = table.boundary();
+    wavelengths = table.lit();
     films = device.boundaries().get(boundary).films();
     seen = new long[films.size() + 2];
     thickness = new double[films.size()];
@@ -79,6 +73,8 @@ final class CoatingTable implements AutoCloseable {
     for (int f = 0; f < films.size(); f++) {
       films1.material[f] = f + 2;
     }
+    double[] cosines = table.cosines();
+    Side side = table.fromBelow() ? Side.REAR : Side.FRONT;
     for (int at = 0; at < cosines.length; at += NODES_PER_QUESTION) {
       int end = Math.min(cosines.length, at + NODES_PER_QUESTION);
       List<Incidence> incidences = incidences(Arrays.copyOfRange(cosines, at, end), side);

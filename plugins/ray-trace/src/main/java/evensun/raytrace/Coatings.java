@@ -6,7 +6,6 @@ import evensun.raytrace.trace.IdealShare;
 import evensun.spi.Design;
 import evensun.spi.Problem;
 import evensun.spi.Services;
-import evensun.spi.Side;
 import java.util.ArrayList;
 import java.util.List;
 
@@ -16,8 +15,11 @@ final class Coatings implements AutoCloseable {
   /** [w][4 · node + quantity] R and T of all tables, with a node to spare at the end. */
   final double[][] coating;
 
-  /** [table][film][w][2 · node + polarisation] absorptance; after the films what a medium gets. */
-  final double[][][][] absorbed;
+  /**
+   * [table][w][(2 · node + polarisation) · (films + 1) + film] absorptance; after the films what
+   * the medium gets that the light comes from.
+   */
+  final double[][][] absorbed;
 
   private final Device device;
   private final Angles angles;
@@ -28,57 +30,55 @@ final class Coatings implements AutoCloseable {
     this.angles = angles;
     int wavelengths = problem.wavelengthCount();
     coating = new double[wavelengths][Weighing.PER_NODE * (angles.count() + 1)];
-    absorbed = new double[2 * device.boundaries().size()][][][];
+    absorbed = new double[angles.tables().size()][][];
     for (int t = 0; t < absorbed.length; t++) {
-      Device.Boundary boundary = device.boundaries().get(t / 2);
-      double[] cosines = angles.cosines().get(t);
-      absorbed[t] = new double[boundary.films().size() + 1][wavelengths][2 * cosines.length];
-      boolean asked = !boundary.isIdeal() && angles.lit().get(t).length > 0;
-      tables.add(
-          asked
-              ? new CoatingTable(
-                  problem, device, t / 2, side(t), cosines, angles.lit().get(t), services)
-              : null);
+      Angles.Table table = angles.tables().get(t);
+      Device.Boundary boundary = boundary(t);
+      absorbed[t] =
+          new double[wavelengths][2 * table.cosines().length * (boundary.films().size() + 1)];
+      tables.add(boundary.isIdeal() ? null : new CoatingTable(problem, device, table, services));
     }
   }
 
-  private static Side side(int table) {
-    return table % 2 == 0 ? Side.FRONT : Side.REAR;
+  private Device.Boundary boundary(int table) {
+    return device.boundaries().get(angles.tables().get(table).boundary());
   }
 
   /** Fills the tables for a design. */
   void refresh(Design design) {
     for (int t = 0; t < absorbed.length; t++) {
-      if (device.boundaries().get(t / 2).isIdeal()) {
-        fillIdeal(design, t);
-      } else if (tables.get(t) != null) {
+      if (boundary(t).isIdeal()) {
+        fillIdeal(design, angles.tables().get(t));
+      } else {
         tables.get(t).refresh(design, target(t));
       }
     }
   }
 
   private CoatingTable.Target target(int table) {
+    int rows = boundary(table).films().size() + 1;
+    int first = angles.tables().get(table).first();
     return new CoatingTable.Target() {
       @Override
       public void coating(int node, int w, int quantity, double value) {
-        coating[w][Weighing.PER_NODE * (angles.first()[table] + node) + quantity] = value;
+        coating[w][Weighing.PER_NODE * (first + node) + quantity] = value;
       }
 
       @Override
       public void film(int node, int w, int film, int polarisation, double value) {
-        absorbed[table][film][w][2 * node + polarisation] = value;
+        absorbed[table][w][(2 * node + polarisation) * rows + film] = value;
       }
     };
   }
 
-  private void fillIdeal(Design design, int table) {
+  private void fillIdeal(Design design, Angles.Table table) {
     int outside = device.material(design, 0);
     int inside = device.material(design, 1);
-    boolean back = table / 2 > 0;
+    boolean back = table.boundary() > 0;
     for (int w = 0; w < coating.length; w++) {
       double leaving = IdealShare.leaving(design.n[outside][w], design.n[inside][w]);
-      double reflected = back ? 1 : table % 2 == 0 ? 0 : 1 - leaving;
-      int at = Weighing.PER_NODE * angles.first()[table];
+      double reflected = back ? 1 : table.fromBelow() ? 1 - leaving : 0;
+      int at = Weighing.PER_NODE * table.first();
       for (int polarisation = 0; polarisation < 2; polarisation++) {
         coating[w][at + polarisation] = reflected;
         coating[w][at + 2 + polarisation] = 1 - reflected;

@@ -7,7 +7,6 @@ import evensun.spi.Feature;
 import evensun.spi.Problem;
 import evensun.spi.Side;
 import evensun.spi.Texture;
-import java.util.Locale;
 
 /** Refuses designs that cannot be evaluated. */
 final class DesignCheck {
@@ -97,7 +96,7 @@ final class DesignCheck {
       double thickness = device.thicknessUm(design, m);
       if (thickness < reach) {
         throw failed(
-            "%s is %.4g µm thick between mean planes, but the textures of its faces reach %.4g µm into it; make it thicker or the textures smaller",
+            "%s is %s µm thick between mean planes, but the textures of its faces reach %s µm into it; make it thicker or the textures smaller",
             device.name(m), thickness, reach);
       }
     }
@@ -107,13 +106,13 @@ final class DesignCheck {
     for (int film : boundary.films()) {
       if (design.thicknessNm[film] > 1000 * featureUm) {
         throw failed(
-            "layer \"%s\" is %.6g nm thick and follows a texture whose shapes are %.6g nm wide; a film must be thinner than the shapes it follows: make it thinner, or the texture coarser, or write coherence: incoherent if it fills the texture",
+            "layer \"%s\" is %s nm thick and follows a texture whose shapes are %s nm wide; a film must be thinner than the shapes it follows: make it thinner, or the texture coarser, or write coherence: incoherent if it fills the texture",
             problem.layers().get(film).name(), design.thicknessNm[film], 1000 * featureUm);
       }
     }
   }
 
   private static EvaluationFailed failed(String message, Object... values) {
-    return new EvaluationFailed(String.format(Locale.ROOT, message, values));
+    return new EvaluationFailed(Words.of(message, values));
   }
 }

@@ -134,6 +134,12 @@ final class Device {
     return thick.get(medium - 1);
   }
 
+  /** Medium of a thick layer, −1 where it is absent. */
+  int medium(int layer) {
+    int at = thick.indexOf(layer);
+    return at < 0 ? -1 : at + 1;
+  }
+
   boolean isInner(int medium) {
     return medium > 0 && medium <= thick.size();
   }
@@ -146,6 +152,14 @@ final class Device {
     return isInner(medium)
         ? "layer \"" + problem.layers().get(layer(medium)).name() + "\""
         : "the exit medium";
+  }
+
+  /** Name of a medium, without saying what it is. */
+  String plainName(int medium) {
+    if (medium == 0) {
+      return "incident medium";
+    }
+    return isInner(medium) ? problem.layers().get(layer(medium)).name() : "exit medium";
   }
 
   /** Row of n and k of a medium. */

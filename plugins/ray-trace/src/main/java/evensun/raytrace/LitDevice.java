@@ -1,5 +1,6 @@
 package evensun.raytrace;
 
+import evensun.raytrace.kernel.FilmSums;
 import evensun.raytrace.kernel.LightTree;
 import evensun.raytrace.kernel.Weighing;
 import evensun.raytrace.trace.Angles;
@@ -10,6 +11,7 @@ import evensun.spi.Polarisation;
 import evensun.spi.Problem;
 import evensun.spi.Services;
 import java.util.Arrays;
+import java.util.List;
 
 /** One traced beam with coatings: where the light of a design goes. Owned by one thread. */
 final class LitDevice implements AutoCloseable {
@@ -34,10 +36,11 @@ final class LitDevice implements AutoCloseable {
   private final Slots slots;
   private final Coatings coatings;
   private final Weighing weighing = new Weighing();
-  private final double[][] passed; // [w][leg]
-  private final double[] passedFor; // [m] thickness in µm
+  private final float[][] absorbed; // [w][leg]
+  private final double[] absorbedFor; // [m] thickness in µm
   private final double[] booked;
   private final double[] met;
+  private final double[] staying; // [film] of one table
 
   LitDevice(Problem problem, Traces.Traced traced, Services services) {
     this.problem = problem;
@@ -51,14 +54,15 @@ final class LitDevice implements AutoCloseable {
     int replicates = forest.replicates();
     shares = new double[wavelengths][replicates][LAYERS + problem.layerCount()];
     top = new double[wavelengths][replicates][device.mediaCount()];
-    passed = new double[wavelengths][];
+    absorbed = new float[wavelengths][];
     for (int w = 0; w < wavelengths; w++) {
-      passed[w] = new double[2 * forest.trees().get(w).count];
+      absorbed[w] = new float[2 * forest.trees().get(w).count];
     }
-    passedFor = new double[device.mediaCount()];
-    Arrays.fill(passedFor, Double.NaN);
+    absorbedFor = new double[device.mediaCount()];
+    Arrays.fill(absorbedFor, Double.NaN);
     booked = new double[slots.count()];
     met = new double[2 * (angles.count() + 1)];
+    staying = new double[problem.layerCount() + 1];
   }
 
   Traces.Traced traced() {
@@ -73,13 +77,13 @@ final class LitDevice implements AutoCloseable {
   void prepare(Design design) {
     coatings.refresh(design);
     boolean same = true;
-    for (int m = 0; m < passedFor.length; m++) {
+    for (int m = 0; m < absorbedFor.length; m++) {
       double thickness = device.thicknessUm(design, m);
-      same &= passedFor[m] == thickness;
-      passedFor[m] = thickness;
+      same &= absorbedFor[m] == thickness;
+      absorbedFor[m] = thickness;
     }
     if (!same) {
-      for (int w = 0; w < passed.length; w++) {
+      for (int w = 0; w < absorbed.length; w++) {
         pass(design, w);
       }
     }
@@ -88,15 +92,18 @@ final class LitDevice implements AutoCloseable {
   private void pass(Design design, int w) {
     LightTree tree = forest.trees().get(w);
     double[] alpha = alphaPerUm(design, w);
-    for (int leg = 0; leg < passed[w].length; leg++) {
-      int medium = tree.slot[leg] - 1;
-      double length = tree.fixedUm[leg];
-      boolean ends = length == Double.POSITIVE_INFINITY;
-      passed[w][leg] =
-          ends
-              ? 0
-              : Math.exp(-alpha[medium] * (length + tree.perThickness[leg] * passedFor[medium]));
+    for (int leg = 0; leg < absorbed[w].length; leg++) {
+      absorbed[w][leg] = (float) absorbed(tree, leg, alpha);
     }
+  }
+
+  private double absorbed(LightTree tree, int leg, double[] alpha) {
+    double length = tree.fixedUm[leg];
+    if (length == Double.POSITIVE_INFINITY) {
+      return 1;
+    }
+    int medium = tree.slot[leg] - 1;
+    return -Math.expm1(-alpha[medium] * (length + tree.perThickness[leg] * absorbedFor[medium]));
   }
 
   /** [m] absorption coefficient per µm; 0 in the incident medium. */
@@ -129,7 +136,7 @@ final class LitDevice implements AutoCloseable {
         angles.nodes().get(w),
         r,
         coatings.coating[w],
-        passed[w],
+        absorbed[w],
         s,
         p,
         booked,
@@ -141,8 +148,9 @@ final class LitDevice implements AutoCloseable {
     return weighing;
   }
 
-  double[][] passed() {
-    return passed;
+  /** [w][leg] share that stays on the way. */
+  float[][] absorbed() {
+    return absorbed;
   }
 
   private void collect(int w, double[] share, double[] topShare) {
@@ -155,32 +163,29 @@ final class LitDevice implements AutoCloseable {
       }
     }
     share[TRANSMITTED] = booked[slots.in(device.mediaCount() - 1)];
-    for (int t = 0; t < coatings.absorbed.length; t++) {
-      if (angles.lit().get(t).length > 0) {
-        collectFilms(w, t, share);
-      }
+    for (int table : angles.at().get(w)) {
+      collectFilms(w, table, share);
     }
   }
 
-  private void collectFilms(int w, int table, double[] share) {
-    Device.Boundary boundary = device.boundaries().get(table / 2);
-    double[][][] absorbed = coatings.absorbed[table];
-    int films = boundary.films().size();
-    for (int f = 0; f < films; f++) {
-      share[LAYERS + boundary.films().get(f)] += dot(absorbed[f][w], angles.first()[table]);
+  private void collectFilms(int w, int index, double[] share) {
+    Angles.Table table = angles.tables().get(index);
+    List<Integer> films = device.boundaries().get(table.boundary()).films();
+    Arrays.fill(staying, 0);
+    FilmSums.add(
+        met,
+        2 * table.first(),
+        2 * table.cosines().length,
+        coatings.absorbed[index][w],
+        films.size() + 1,
+        staying);
+    for (int f = 0; f < films.size(); f++) {
+      share[LAYERS + films.get(f)] += staying[f];
     }
-    int medium = table / 2 + table % 2;
+    int medium = table.boundary() + (table.fromBelow() ? 1 : 0);
     if (device.isInner(medium)) {
-      share[LAYERS + device.layer(medium)] += dot(absorbed[films][w], angles.first()[table]);
+      share[LAYERS + device.layer(medium)] += staying[films.size()];
     }
-  }
-
-  private double dot(double[] row, int firstNode) {
-    double sum = 0;
-    for (int i = 0; i < row.length; i++) {
-      sum += row[i] * met[2 * firstNode + i];
-    }
-    return sum;
   }
 
   @Override

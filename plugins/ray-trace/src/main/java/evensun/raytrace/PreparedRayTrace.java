@@ -4,8 +4,10 @@ import evensun.spi.Channel;
 import evensun.spi.Design;
 import evensun.spi.EvaluationFailed;
 import evensun.spi.Evaluator;
+import evensun.spi.Finding;
 import evensun.spi.PreparedSolver;
 import evensun.spi.Problem;
+import evensun.spi.Quantity;
 import evensun.spi.Services;
 import evensun.spi.UnsupportedProblem;
 import java.util.List;
@@ -39,5 +41,19 @@ final class PreparedRayTrace implements PreparedSolver {
   @Override
   public Evaluator newEvaluator() {
     return new RayEvaluator(problem, services, traces);
+  }
+
+  @Override
+  public List<Finding> examine(Design design) {
+    try (RayEvaluator evaluator = new RayEvaluator(problem, services, traces)) {
+      return new Validity(problem, design, evaluator).all();
+    }
+  }
+
+  @Override
+  public List<Quantity> describe(Design design) {
+    try (RayEvaluator evaluator = new RayEvaluator(problem, services, traces)) {
+      return new Facts(problem, design, evaluator).all();
+    }
   }
 }

@@ -1,22 +1,25 @@
 package evensun.raytrace;
 
 import evensun.raytrace.trace.Beam;
+import evensun.spi.Channel;
+import evensun.spi.DepthProfile;
 import evensun.spi.Design;
+import evensun.spi.EvaluationFailed;
 import evensun.spi.Evaluator;
 import evensun.spi.Incidence;
 import evensun.spi.Problem;
+import evensun.spi.RaySection;
 import evensun.spi.ReflectanceParts;
 import evensun.spi.Response;
 import evensun.spi.Services;
 import evensun.spi.Side;
 import java.util.Iterator;
 import java.util.LinkedHashMap;
-import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 
 /** Answers designs by re-weighting what rays do. */
-final class RayEvaluator implements Evaluator, ReflectanceParts {
+final class RayEvaluator implements Evaluator, ReflectanceParts, DepthProfile, RaySection {
 
   private static final int MOST_KEPT = 8;
 
@@ -144,15 +147,52 @@ final class RayEvaluator implements Evaluator, ReflectanceParts {
       }
       double reflected = found.mean[LitDevice.REFLECTED][w];
       neverEntered[w] = all == 0 ? 0 : reflected * never / all;
-      cameBack[w] = reflected - neverEntered[w];
+      cameBack[w] = Math.max(0, reflected - neverEntered[w]);
+    }
+  }
+
+  /**
+   * {@inheritDoc}
+   *
+   * @throws EvaluationFailed for a film, of which rays know the whole alone
+   */
+  @Override
+  public void evaluate(
+      Design design, int incidence, Channel channel, double[] depthNm, double[][] into) {
+    if (problem.layers().get(channel.layer()).coherent()) {
+      throw new EvaluationFailed(
+          "solver ray-trace knows how much light layer \"%s\" absorbs, but not where in it; ask for thick layers"
+              .formatted(problem.layers().get(channel.layer()).name()));
+    }
+    Incidence light = problem.incidences().get(incidence);
+    double[] whole = estimate(design, incidence).mean[LitDevice.LAYERS + channel.layer()];
+    LitDevice lit = ready(design, Beam.of(light));
+    int medium = lit.traced().device().medium(channel.layer());
+    Profile profile = medium < 0 ? null : new Profile(lit, design, medium, depthNm);
+    for (int w = 0; w < whole.length; w++) {
+      if (profile == null) {
+        for (double[] row : into) {
+          row[w] = 0;
+        }
+      } else {
+        profile.solve(design, light.polarisation(), w, whole[w], into);
+      }
     }
   }
 
   @Override
+  public View view(Design design, int incidence, int wavelength, int rayCount) {
+    check.check(design);
+    Beam beam = Beam.of(problem.incidences().get(incidence));
+    return Section.of(problem, ready(design, beam).traced(), design, services)
+        .view(beam, wavelength, rayCount);
+  }
+
+  @Override
   public <A> Optional<A> ability(Class<A> type) {
-    return List.of(ReflectanceParts.class).contains(type)
-        ? Optional.of(type.cast(this))
-        : Optional.empty();
+    boolean offered =
+        type == ReflectanceParts.class || type == DepthProfile.class || type == RaySection.class;
+    return offered ? Optional.of(type.cast(this)) : Optional.empty();
   }
 
   @Override

@@ -8,6 +8,7 @@ import evensun.spi.Layer;
 import evensun.spi.OpticalSolver;
 import evensun.spi.PreparedSolver;
 import evensun.spi.Problem;
+import evensun.spi.RaySection;
 import evensun.spi.ReflectanceParts;
 import evensun.spi.Roughness;
 import evensun.spi.Scatter;
@@ -41,7 +42,12 @@ public final class RayTraceSolver implements OpticalSolver {
   @Override
   public Traits traits() {
     return new Traits(
-        FEATURES, Set.of(DepthProfile.class, ReflectanceParts.class), true, true, true, true);
+        FEATURES,
+        Set.of(DepthProfile.class, ReflectanceParts.class, RaySection.class),
+        true,
+        true,
+        true,
+        true);
   }
 
   @Override

@@ -18,12 +18,15 @@ public final class LightTree {
   /**
    * [event] share of the power that stays in its polarisation when the plane of incidence turns.
    */
-  public final double[] kept;
+  public final float[] kept;
 
   /** [event] 1 over the chance at which this piece was followed, where that was decided by lot. */
-  public final double[] factor;
+  public final float[] factor;
 
-  /** [event] index of the table, 2 · boundary, 1 more for light from below. */
+  /**
+   * [event] index of the table: 2 · boundary, 1 more for light from below; after all of these one
+   * for light that has never been beyond its first boundary.
+   */
   public final byte[] table;
 
   /** [event] cosine of the angle of incidence. */
@@ -33,10 +36,13 @@ public final class LightTree {
   public final byte[] slot;
 
   /** [2 · event + leg] length in µm whatever the thickness; infinite where all light is booked. */
-  public final double[] fixedUm;
+  public final float[] fixedUm;
 
-  /** [2 · event + leg] further length per thickness of the layer that is crossed. */
-  public final double[] perThickness;
+  /**
+   * [2 · event + leg] further length per thickness of the layer that is crossed; 0 where the leg
+   * stays at its boundary.
+   */
+  public final float[] perThickness;
 
   /** [replicate] first event; one more entry closes the last. */
   public final int[] start;
@@ -44,13 +50,13 @@ public final class LightTree {
   /** Takes the arrays over. */
   public LightTree(
       int[] parent,
-      double[] kept,
-      double[] factor,
+      float[] kept,
+      float[] factor,
       byte[] table,
       double[] cosine,
       byte[] slot,
-      double[] fixedUm,
-      double[] perThickness,
+      float[] fixedUm,
+      float[] perThickness,
       int[] start) {
     count = parent.length;
     this.parent = parent;

@@ -7,10 +7,10 @@ public final class Nodes {
   public final int[] index;
 
   /** [event] weight of the upper one, in [0, 1]. */
-  public final double[] share;
+  public final float[] share;
 
   /** Takes the arrays over. */
-  public Nodes(int[] index, double[] share) {
+  public Nodes(int[] index, float[] share) {
     this.index = index;
     this.share = share;
   }

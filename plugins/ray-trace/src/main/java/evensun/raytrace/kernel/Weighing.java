@@ -3,16 +3,12 @@ package evensun.raytrace.kernel;
 /** Sends light along a tree, and books where it stays. Workspaces are owned by one thread. */
 public final class Weighing {
 
-  private static final int RS = 0;
-  private static final int RP = 1;
-  private static final int TS = 2;
-  private static final int TP = 3;
-
   /** Numbers per node of a coating: R and T, each for s and p. */
   public static final int PER_NODE = 4;
 
   private double[] legS = new double[0];
   private double[] legP = new double[0];
+  private double[] legPower = new double[0];
 
   /** For the loop. */
   public Weighing() {}
@@ -24,7 +20,7 @@ public final class Weighing {
    * @param nodes where its meetings look up
    * @param replicate index of the replicate
    * @param coating [4 · node + quantity] R of s and p, T of s and p
-   * @param passed [2 · event + leg] share that is left at the end of a leg
+   * @param absorbed [2 · event + leg] share that stays on the way
    * @param rootS power of every ray in s
    * @param rootP power of every ray in p
    * @param booked [slot] out: power that stayed
@@ -36,7 +32,7 @@ public final class Weighing {
       Nodes nodes,
       int replicate,
       double[] coating,
-      double[] passed,
+      float[] absorbed,
       double rootS,
       double rootP,
       double[] booked,
@@ -44,65 +40,82 @@ public final class Weighing {
     if (legS.length < 2 * tree.count) {
       legS = new double[2 * tree.count];
       legP = new double[2 * tree.count];
+      legPower = new double[2 * tree.count];
     }
-    for (int e = tree.start[replicate]; e < tree.start[replicate + 1]; e++) {
-      meet(tree, nodes, e, coating, passed, rootS, rootP, booked, met);
-    }
+    follow(
+        tree.start[replicate],
+        tree.start[replicate + 1],
+        tree.parent,
+        tree.kept,
+        tree.factor,
+        tree.slot,
+        nodes.index,
+        nodes.share,
+        coating,
+        absorbed,
+        rootS,
+        rootP,
+        booked,
+        met);
   }
 
-  private void meet(
-      LightTree tree,
-      Nodes nodes,
-      int e,
+  /** One loop over local arrays: what a field would cost at every meeting is paid once. */
+  private void follow(
+      int from,
+      int to,
+      int[] parent,
+      float[] kept,
+      float[] factor,
+      byte[] slot,
+      int[] index,
+      float[] share,
       double[] coating,
-      double[] passed,
+      float[] absorbed,
       double rootS,
       double rootP,
       double[] booked,
       double[] met) {
-    int from = tree.parent[e];
-    double s = from < 0 ? rootS : legS[from];
-    double p = from < 0 ? rootP : legP[from];
-    double turned = (1 - tree.kept[e]) * (p - s);
-    double inS = tree.factor[e] * (s + turned);
-    double inP = tree.factor[e] * (p - turned);
-    int node = nodes.index[e];
-    double share = nodes.share[e];
-    double highS = inS * share;
-    double highP = inP * share;
-    double lowS = inS - highS;
-    double lowP = inP - highP;
-    met[2 * node] += lowS;
-    met[2 * node + 1] += lowP;
-    met[2 * node + 2] += highS;
-    met[2 * node + 3] += highP;
-    int at = PER_NODE * node;
-    int next = at + PER_NODE;
-    int leg = 2 * e;
-    go(
-        tree.slot[leg],
-        leg,
-        lowS * coating[at + RS] + highS * coating[next + RS],
-        lowP * coating[at + RP] + highP * coating[next + RP],
-        passed[leg],
-        booked);
-    go(
-        tree.slot[leg + 1],
-        leg + 1,
-        lowS * coating[at + TS] + highS * coating[next + TS],
-        lowP * coating[at + TP] + highP * coating[next + TP],
-        passed[leg + 1],
-        booked);
+    double[] s = legS;
+    double[] p = legP;
+    double[] power = legPower;
+    for (int e = from; e < to; e++) {
+      int by = parent[e];
+      double s0 = by < 0 ? rootS : s[by];
+      double p0 = by < 0 ? rootP : p[by];
+      double turned = (1 - kept[e]) * (p0 - s0);
+      double inS = factor[e] * (s0 + turned);
+      double inP = factor[e] * (p0 - turned);
+      double highS = inS * share[e];
+      double highP = inP * share[e];
+      double lowS = inS - highS;
+      double lowP = inP - highP;
+      int node = index[e];
+      met[2 * node] += lowS;
+      met[2 * node + 1] += lowP;
+      met[2 * node + 2] += highS;
+      met[2 * node + 3] += highP;
+      int at = PER_NODE * node;
+      double reflectedS = lowS * coating[at] + highS * coating[at + 4];
+      double reflectedP = lowP * coating[at + 1] + highP * coating[at + 5];
+      double throughS = lowS * coating[at + 2] + highS * coating[at + 6];
+      double throughP = lowP * coating[at + 3] + highP * coating[at + 7];
+      int leg = 2 * e;
+      double lost = absorbed[leg];
+      s[leg] = reflectedS * (1 - lost);
+      p[leg] = reflectedP * (1 - lost);
+      power[leg] = reflectedS + reflectedP;
+      booked[slot[leg]] += power[leg] * lost;
+      leg++;
+      lost = absorbed[leg];
+      s[leg] = throughS * (1 - lost);
+      p[leg] = throughP * (1 - lost);
+      power[leg] = throughS + throughP;
+      booked[slot[leg]] += power[leg] * lost;
+    }
   }
 
-  private void go(int slot, int leg, double s, double p, double passed, double[] booked) {
-    legS[leg] = s * passed;
-    legP[leg] = p * passed;
-    booked[slot] += (s + p) * (1 - passed);
-  }
-
-  /** Power at the end of a leg of the replicate followed last, both polarisations. */
-  public double arriving(int leg) {
-    return legS[leg] + legP[leg];
+  /** Power at the start of a leg of the replicate followed last, both polarisations. */
+  public double power(int leg) {
+    return legPower[leg];
   }
 }

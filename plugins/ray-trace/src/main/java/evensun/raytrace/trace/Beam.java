@@ -18,7 +18,7 @@ public record Beam(double angleDeg, boolean diffuse, Side side) {
   }
 
   /** Starts a ray: s polarisation along y. */
-  void start(Leg leg, int faces, Draws draws) {
+  void start(Leg leg, int faces) {
     boolean front = side == Side.FRONT;
     leg.face = front ? 0 : faces - 1;
     leg.above = front;
@@ -27,8 +27,8 @@ public record Beam(double angleDeg, boolean diffuse, Side side) {
     leg.guessP = 0.5;
     leg.sy = 1;
     if (diffuse) {
-      double cosine = Math.sqrt(1 - draws.at(leg.dimension++, leg.key));
-      Directions.around(leg, cosine, 2 * Math.PI * draws.at(leg.dimension++, leg.key), !front);
+      double cosine = Math.sqrt(1 - leg.draw());
+      Directions.around(leg, cosine, 2 * Math.PI * leg.draw(), !front);
     } else {
       double angle = Math.toRadians(angleDeg);
       leg.point(Math.sin(angle), 0, front ? -Math.cos(angle) : Math.cos(angle));

@@ -7,6 +7,23 @@ final class Directions {
 
   private Directions() {}
 
+  /** Turns the frame of polarisation into the plane of incidence; the share that stays. */
+  static double turn(Leg leg) {
+    Ray ray = leg.ray;
+    double x = ray.dy * ray.normalZ - ray.dz * ray.normalY;
+    double y = ray.dz * ray.normalX - ray.dx * ray.normalZ;
+    double z = ray.dx * ray.normalY - ray.dy * ray.normalX;
+    double length = Math.sqrt(x * x + y * y + z * z);
+    if (length < 1e-9) {
+      return leg.mixed ? 0.5 : 1;
+    }
+    double same = (leg.sx * x + leg.sy * y + leg.sz * z) / length;
+    leg.sx = x / length;
+    leg.sy = y / length;
+    leg.sz = z / length;
+    return leg.mixed ? 0.5 : Math.min(1, same * same);
+  }
+
   /** Mirrors a leg at the facet its ray met. */
   static void reflect(Leg leg, Ray facet) {
     Ray ray = leg.ray;

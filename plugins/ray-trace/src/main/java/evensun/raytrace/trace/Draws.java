@@ -14,10 +14,12 @@ final class Draws {
   /** Dimensions from the sequence; later choices of a ray matter less. */
   static final int DIMENSIONS = 16;
 
+  /** Odd, so that keys of neighbouring dimensions differ in all bits once mixed. */
+  static final long STEP = 0xD1B54A32D192ED03L;
+
   private final long seed;
   private final SobolSequenceGenerator sequence = new SobolSequenceGenerator(DIMENSIONS);
   private final double[] shift = new double[DIMENSIONS];
-  private double[] point = new double[DIMENSIONS];
   private long ray;
 
   Draws(long seed) {
@@ -34,20 +36,15 @@ final class Draws {
     sequence.skipTo(firstPoint);
   }
 
-  /** Goes to the next ray; the key of its lots. */
-  long nextRay() {
-    point = sequence.nextVector();
-    ray++;
-    return mixed(ray);
-  }
-
-  /** The number of a dimension for this ray. */
-  double at(int dimension, long key) {
-    if (dimension >= DIMENSIONS) {
-      return unit(mixed(key + 0xD1B54A32D192ED03L * dimension));
+  /** Goes to the next ray: its point, with the shift of the replicate, and the key of its lots. */
+  void nextRay(Leg leg) {
+    double[] point = sequence.nextVector();
+    for (int d = 0; d < DIMENSIONS; d++) {
+      double shifted = point[d] + shift[d];
+      point[d] = shifted < 1 ? shifted : shifted - 1;
     }
-    double shifted = point[dimension] + shift[dimension];
-    return shifted < 1 ? shifted : shifted - 1;
+    leg.point = point;
+    leg.key = mixed(++ray);
   }
 
   /** A number hashed from a key. */

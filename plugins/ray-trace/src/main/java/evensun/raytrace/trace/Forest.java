@@ -35,7 +35,7 @@ public record Forest(List<LightTree> trees, Angles angles, int replicates, int r
                     new Tracer(faces, media.at(w), new Draws(seed), replicates)
                         .trace(beam, replicates, rays, w * rays))
             .toList();
-    return new Forest(trees, Angles.of(faces, media, trees), replicates, rays);
+    return new Forest(trees, Angles.of(faces, media, beam, trees), replicates, rays);
   }
 
   /** All meetings of all wavelengths. */

@@ -36,12 +36,16 @@ final class Leg {
   /** Whether it is between the lowest and the highest point of that boundary. */
   boolean inRelief;
 
+  /** Whether it has never been beyond the boundary it first came to. */
+  boolean fresh = true;
+
   /** Deepest medium it has been in. */
   int deepest;
 
-  /** Next dimension to draw from, and the key of its lots. */
-  int dimension;
+  /** What its ray draws from, how much of that is used, and the key of its lots. */
+  double[] point;
 
+  int dimension;
   long key;
 
   /** What the way adds up to, see {@link evensun.raytrace.kernel.LightTree}. */
@@ -49,6 +53,12 @@ final class Leg {
 
   double perThickness;
   int slot;
+
+  /** Draws a number in [0, 1). */
+  double draw() {
+    int d = dimension++;
+    return d < point.length ? point[d] : Draws.unit(Draws.mixed(key + Draws.STEP * d));
+  }
 
   /** Medium it is in. */
   int medium() {
@@ -73,7 +83,9 @@ final class Leg {
     leg.face = face;
     leg.above = above;
     leg.inRelief = inRelief;
+    leg.fresh = fresh && which == 0;
     leg.deepest = deepest;
+    leg.point = point;
     leg.dimension = dimension;
     leg.key = Draws.mixed(key + which);
     return leg;

@@ -5,8 +5,8 @@ import evensun.raytrace.geometry.Relief;
 import evensun.raytrace.kernel.LightTree;
 import evensun.spi.Scatter;
 import java.util.ArrayDeque;
-import java.util.Deque;
 import java.util.List;
+import java.util.Queue;
 
 /**
  * Follows rays of one wavelength through a device.
@@ -27,8 +27,8 @@ final class Tracer {
    */
   private static final double LEAST_SHARE = 0.05;
 
-  /** Optical depth after which no light is left. */
-  private static final double OPAQUE = 20;
+  /** Optical depth after which no light is left: 6e-6 of it. */
+  private static final double OPAQUE = 12;
 
   /** Cosine below which light runs along its layer and stays there. */
   private static final double LEVEL = 1e-6;
@@ -39,7 +39,9 @@ final class Tracer {
   private final Draws draws;
   private final TreeBuilder tree;
   private final BareFace bare = new BareFace();
-  private final Deque<Leg> open = new ArrayDeque<>();
+
+  /** First in, first out: neighbours in a tree are then independent, which its loop is fast for. */
+  private final Queue<Leg> open = new ArrayDeque<>();
 
   Tracer(List<Face> faces, MediaRow media, Draws draws, int replicates) {
     this.faces = faces;
@@ -56,14 +58,14 @@ final class Tracer {
       draws.begin(r, firstPoint);
       for (int i = 0; i < rays; i++) {
         Leg root = new Leg();
-        root.key = draws.nextRay();
-        beam.start(root, faces.size(), draws);
+        draws.nextRay(root);
+        beam.start(root, faces.size());
         if (arrives(root)) {
-          open.push(root);
+          open.add(root);
         }
-        while (!open.isEmpty()) {
-          meet(open.pop());
-        }
+      }
+      while (!open.isEmpty()) {
+        meet(open.remove());
       }
     }
     return tree.build();
@@ -84,8 +86,8 @@ final class Tracer {
       leg.ray.normalZ = 1;
       return;
     }
-    leg.ray.x = relief.periodXUm() * draws.at(leg.dimension++, leg.key);
-    leg.ray.y = relief.periodYUm() * draws.at(leg.dimension++, leg.key);
+    leg.ray.x = relief.periodXUm() * leg.draw();
+    leg.ray.y = relief.periodYUm() * leg.draw();
     leg.ray.z = leg.above ? relief.highUm() : relief.lowUm();
   }
 
@@ -131,7 +133,6 @@ final class Tracer {
   private boolean end(Leg leg, int slot) {
     leg.slot = slot;
     leg.fixedUm = Double.POSITIVE_INFINITY;
-    leg.perThickness = 0;
     return false;
   }
 
@@ -149,8 +150,8 @@ final class Tracer {
     Ray ray = leg.ray;
     double along = ray.dx * ray.normalX + ray.dy * ray.normalY + ray.dz * ray.normalZ;
     double cosine = Math.min(1, Math.max(1e-9, leg.above ? -along : along));
-    double kept = turn(leg);
-    int table = 2 * leg.face + (leg.above ? 0 : 1);
+    double kept = Directions.turn(leg);
+    int table = leg.fresh ? 2 * faces.size() : 2 * leg.face + (leg.above ? 0 : 1);
     int event = tree.add(leg.parent, kept, leg.factor, table, cosine);
     double turned = (1 - kept) * (leg.guessP - leg.guessS);
     leg.guessS += turned;
@@ -160,23 +161,6 @@ final class Tracer {
     } else {
       split(leg, event, cosine);
     }
-  }
-
-  /** Turns the frame of polarisation into the plane of incidence; the share that stays. */
-  private static double turn(Leg leg) {
-    Ray ray = leg.ray;
-    double x = ray.dy * ray.normalZ - ray.dz * ray.normalY;
-    double y = ray.dz * ray.normalX - ray.dx * ray.normalZ;
-    double z = ray.dx * ray.normalY - ray.dy * ray.normalX;
-    double length = Math.sqrt(x * x + y * y + z * z);
-    if (length < 1e-9) {
-      return leg.mixed ? 0.5 : 1;
-    }
-    double same = (leg.sx * x + leg.sy * y + leg.sz * z) / length;
-    leg.sx = x / length;
-    leg.sy = y / length;
-    leg.sz = z / length;
-    return leg.mixed ? 0.5 : Math.min(1, same * same);
   }
 
   private void split(Leg leg, int event, double cosine) {
@@ -214,7 +198,7 @@ final class Tracer {
   private void send(Leg leg, Leg from, double cosine, double phase, double n) {
     Face face = faces.get(from.face);
     Scatter scatter = face.scatter().orElse(null);
-    if (scatter != null && draws.at(leg.dimension++, leg.key) >= scatter.specularFraction()) {
+    if (scatter != null && leg.draw() >= scatter.specularFraction()) {
       randomise(leg, scatter.cosinePower());
     }
     if (face.rmsUm() > 0) {
@@ -224,17 +208,17 @@ final class Tracer {
   }
 
   private void randomise(Leg leg, double power) {
-    double cosine = Math.pow(1 - draws.at(leg.dimension++, leg.key), 1 / (power + 1));
-    double turn = 2 * Math.PI * draws.at(leg.dimension++, leg.key);
+    double cosine = Math.pow(1 - leg.draw(), 1 / (power + 1));
+    double turn = 2 * Math.PI * leg.draw();
     Directions.around(leg, cosine, turn, leg.above);
   }
 
   /** Haze of a rough face of normal heights, as for {@link evensun.spi.Roughness}. */
   private void roughen(Leg leg, Leg from, Face face, double phase, double n) {
     double size = 2 * Math.PI * face.rmsUm() * phase / media.wavelengthUm();
-    double lot = draws.at(leg.dimension++, leg.key);
-    double u = draws.at(leg.dimension++, leg.key);
-    double v = draws.at(leg.dimension++, leg.key);
+    double lot = leg.draw();
+    double u = leg.draw();
+    double v = leg.draw();
     if (lot < -Math.expm1(-size * size)) {
       double waveNumber = 2 * Math.PI * n / media.wavelengthUm();
       Directions.blur(leg, from.ray, Math.sqrt(2) / face.correlationUm(), waveNumber, u, v);
@@ -275,7 +259,7 @@ final class Tracer {
     }
     tree.leg(leg.parent, leg.slot, leg.fixedUm, leg.perThickness);
     if (met && survives(leg)) {
-      open.push(leg);
+      open.add(leg);
     }
   }
 

@@ -11,13 +11,13 @@ final class TreeBuilder {
   private final int[] start;
   private int count;
   private int[] parent = new int[FIRST_SIZE];
-  private double[] kept = new double[FIRST_SIZE];
-  private double[] factor = new double[FIRST_SIZE];
+  private float[] kept = new float[FIRST_SIZE];
+  private float[] factor = new float[FIRST_SIZE];
   private byte[] table = new byte[FIRST_SIZE];
   private double[] cosine = new double[FIRST_SIZE];
   private byte[] slot = new byte[2 * FIRST_SIZE];
-  private double[] fixedUm = new double[2 * FIRST_SIZE];
-  private double[] perThickness = new double[2 * FIRST_SIZE];
+  private float[] fixedUm = new float[2 * FIRST_SIZE];
+  private float[] perThickness = new float[2 * FIRST_SIZE];
 
   TreeBuilder(int replicates) {
     start = new int[replicates + 1];
@@ -33,8 +33,8 @@ final class TreeBuilder {
       grow();
     }
     parent[count] = from;
-    kept[count] = keptShare;
-    factor[count] = lotFactor;
+    kept[count] = (float) keptShare;
+    factor[count] = (float) lotFactor;
     table[count] = (byte) tableIndex;
     cosine[count] = cos;
     for (int leg = 2 * count; leg < 2 * count + 2; leg++) {
@@ -45,8 +45,8 @@ final class TreeBuilder {
 
   void leg(int leg, int where, double fixed, double crossings) {
     slot[leg] = (byte) where;
-    fixedUm[leg] = fixed;
-    perThickness[leg] = crossings;
+    fixedUm[leg] = (float) fixed;
+    perThickness[leg] = (float) crossings;
   }
 
   private void grow() {
