@@ -20,6 +20,7 @@ import evensun.report.section.LightSection;
 import evensun.report.section.MeasuredSection;
 import evensun.report.section.OpinionSection;
 import evensun.report.section.ProvenanceSection;
+import evensun.report.section.PublishedSection;
 import evensun.report.section.SearchSection;
 import evensun.report.section.SensitivitySection;
 import evensun.report.section.StackSection;
@@ -59,6 +60,7 @@ final class ReportPages {
           FindingsSection::of,
           AssumptionSection::of,
           ProvenanceSection::of,
+          PublishedSection::of,
           CautionSection::of);
 
   private ReportPages() {}
@@ -101,7 +103,12 @@ final class ReportPages {
       if (current == null) {
         return null;
       }
-      vessels.add(new Vessel(subcell.name(), current, drawnCurrent(drawn, subcell.name())));
+      vessels.add(
+          new Vessel(
+              subcell.name(),
+              current,
+              drawnCurrent(drawn, subcell.name()),
+              subcell.standardErrorMaPerCm2()));
     }
     if (vessels.isEmpty()) {
       return null;
@@ -138,6 +145,7 @@ final class ReportPages {
           "efficiency",
           "%",
           electrical.efficiencyPercent(),
+          null,
           drawn == null || drawn.electrical() == null
               ? null
               : drawn.electrical().efficiencyPercent());
@@ -148,6 +156,7 @@ final class ReportPages {
         "matched current",
         Numbers.MA,
         found.matchedCurrentMaPerCm2(),
+        found.matchedStandardErrorMaPerCm2(),
         drawn == null ? null : drawn.matchedCurrentMaPerCm2());
     add(
         headlines,
@@ -155,6 +164,7 @@ final class ReportPages {
         "mismatch",
         Numbers.MA,
         found.mismatchMaPerCm2(),
+        null,
         drawn == null ? null : drawn.mismatchMaPerCm2());
     add(
         headlines,
@@ -162,6 +172,7 @@ final class ReportPages {
         "lost in all",
         Numbers.MA,
         lost(found),
+        null,
         drawn == null ? null : lost(drawn));
     return headlines;
   }
@@ -172,10 +183,18 @@ final class ReportPages {
       String label,
       String unit,
       @Nullable Double value,
+      @Nullable Double standardError,
       @Nullable Double drawn) {
     if (value != null) {
       String note = drawn == null ? "" : "as drawn " + Numbers.fixed(drawn, 2);
-      headlines.add(new Headline(key, label, Numbers.fixed(value, 2), unit, note));
+      headlines.add(
+          new Headline(
+              key,
+              label,
+              Numbers.fixed(value, 2),
+              Numbers.plusMinus(standardError).strip(),
+              unit,
+              note));
     }
   }
 

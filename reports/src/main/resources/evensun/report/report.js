@@ -170,7 +170,7 @@
         made.markPoint = { symbol: 'circle', symbolSize: 0.1, silent: true, animation: false,
           data: [{ coord: spot, label: { show: true, color: labelColour(row.role), fontSize: 12, formatter: clip(row.label, 34) } }] };
       }
-    } else if (wide && chart.kind === 'LINES') {
+    } else if (wide && chart.kind === 'LINES' && shift !== null) {
       made.endLabel = { show: true, color: row.role.indexOf('sub') === 0 ? variable('ink-' + row.role) : colour, formatter: clip(row.label, 20), distance: 8, offset: [0, shift] };
     }
     return made;
@@ -234,7 +234,9 @@
       bottom = at[j] - room;
     }
     ends.forEach(function (end, k) { shifts[end.index] = at[k] - end.y; });
-    return shifts;
+    /* Where the ends bunch, names far from their lines would mislead; the legend has them. */
+    var bunched = shifts.some(function (shift) { return Math.abs(shift) > 24; });
+    return shifts.map(function (shift) { return bunched ? null : shift; });
   }
 
   function option(chart, width, height) {
@@ -245,7 +247,7 @@
     return {
       animation: false,
       textStyle: { fontFamily: getComputedStyle(document.body).fontFamily, color: variable('ink') },
-      grid: { left: 58, right: wide && chart.kind === 'LINES' ? 158 : 16, top: TOP, bottom: BOTTOM },
+      grid: { left: 58, right: wide && chart.kind === 'LINES' && shifts[0] !== null ? 158 : 16, top: TOP, bottom: BOTTOM },
       legend: { show: false },
       tooltip: tooltip(chart),
       xAxis: chart.kind === 'STACK' ? categories(chart, width) : axis(chart.x, 0, width),
@@ -386,7 +388,7 @@
       return [head].concat(rows);
     }
     return all('tr', table).map(function (tr) {
-      return all('th,td', tr).map(function (cell) { return cell.textContent.trim().split(MINUS).join('-'); });
+      return all('th,td', tr).map(function (cell) { return cell.textContent.trim().split(MINUS).join('-').split('\u00a0').join(' '); });
     });
   }
 
@@ -464,6 +466,65 @@
     action(place, 'Copy', source.getAttribute('aria-label'), function (button) { copy(source.textContent, button); });
   }
 
+  /* The numbers of several charts over one x, side by side. */
+  function together(place) {
+    var ids = place.getAttribute('data-together').split(' ');
+    var file = place.getAttribute('data-file');
+    action(place, place.getAttribute('data-label'), file, function () {
+      var parts = ids.map(data);
+      var head = [named(parts[0].x.label, parts[0].x.unit)];
+      parts.forEach(function (chart) {
+        chart.series.forEach(function (row) { head.push(chart.title + ' ' + row.label); });
+      });
+      var rows = parts[0].xs.map(function (x, i) {
+        return parts.reduce(function (line, chart) {
+          return line.concat(chart.series.map(function (row) { return row.values[i]; }));
+        }, [x]);
+      });
+      save(file, 'text/csv', [head].concat(rows).map(function (row) { return row.map(quoted).join(','); }).join('\n') + '\n');
+    });
+  }
+
+  /* ---- the glossary at the pointer and at the focus ---- */
+
+  function glossary() {
+    var box = element('div', undefined, 'gloss');
+    var leaving = 0;
+    box.id = 'gloss';
+    box.setAttribute('role', 'tooltip');
+    box.hidden = true;
+    document.body.appendChild(box);
+    function hide() {
+      box.hidden = true;
+      all('.term[aria-describedby]').forEach(function (link) { link.removeAttribute('aria-describedby'); });
+    }
+    function later() { leaving = setTimeout(hide, 200); }
+    function stay() { clearTimeout(leaving); }
+    function show(link) {
+      stay();
+      hide();
+      var entry = document.getElementById(link.getAttribute('href').slice(1));
+      box.textContent = entry.querySelector('dd').textContent;
+      box.hidden = false;
+      var at = link.getBoundingClientRect();
+      var room = document.documentElement.clientWidth - box.offsetWidth - 8;
+      box.style.left = Math.max(8, Math.min(at.left, room)) + window.scrollX + 'px';
+      var below = at.bottom + box.offsetHeight + 8 < window.innerHeight;
+      box.style.top = (below ? at.bottom + 6 : at.top - box.offsetHeight - 6) + window.scrollY + 'px';
+      link.setAttribute('aria-describedby', 'gloss');
+    }
+    all('.term').forEach(function (link) {
+      link.removeAttribute('title');
+      link.addEventListener('mouseenter', function () { show(link); });
+      link.addEventListener('focus', function () { show(link); });
+      link.addEventListener('mouseleave', later);
+      link.addEventListener('blur', hide);
+    });
+    box.addEventListener('mouseenter', stay);
+    box.addEventListener('mouseleave', later);
+    document.addEventListener('keydown', function (event) { if (event.key === 'Escape') { hide(); } });
+  }
+
   /* ---- the page ---- */
 
   function follow() {
@@ -523,6 +584,8 @@
   all('[data-save]').forEach(pictureTools);
   all('[data-table]').forEach(tableTools);
   all('[data-copy]').forEach(copyTools);
+  all('[data-together]').forEach(together);
+  glossary();
   follow();
   printing();
   drawAll();

@@ -54,6 +54,8 @@ final class PageOutline {
       strip.curves().forEach(curve -> chart(curve.chart()));
     } else if (block instanceof Block.Grid grid) {
       table(grid.table());
+    } else if (block instanceof Block.Together together) {
+      line("together", together.file(), together.label(), String.join(" ", together.charts()));
     } else if (block instanceof Block.Points points) {
       points.points().forEach(p -> line("point", p.severity(), p.subject(), p.text(), p.code()));
     } else if (block instanceof Block.Verbatim verbatim) {

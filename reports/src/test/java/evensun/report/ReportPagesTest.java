@@ -2,6 +2,8 @@ package evensun.report;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
+import evensun.report.compare.ComparisonPages;
+import evensun.report.compare.NamedRun;
 import evensun.report.page.ReportPage;
 import evensun.report.page.Section;
 import evensun.report.page.Verdict.Level;
@@ -22,20 +24,26 @@ class ReportPagesTest {
 
   private static final Path GOLDEN = Path.of("src/test/resources/evensun/report/golden");
 
-  private static RunResult run(String name) {
+  private static ReportPage page(String name) {
     return switch (name) {
-      case "full" -> SampleRuns.full();
-      case "assessment" -> SampleRuns.assessment();
-      case "one-wavelength" -> AwkwardRuns.oneWavelength();
-      case "failed-search" -> AwkwardRuns.failedSearch();
+      case "full" -> ReportPages.of(SampleRuns.full());
+      case "assessment" -> ReportPages.of(SampleRuns.assessment());
+      case "one-wavelength" -> ReportPages.of(AwkwardRuns.oneWavelength());
+      case "failed-search" -> ReportPages.of(AwkwardRuns.failedSearch());
+      case "comparison" -> ComparisonPages.page(drawnAndSearched(), "12345678");
       default -> throw new IllegalArgumentException(name);
     };
   }
 
+  private static List<NamedRun> drawnAndSearched() {
+    return List.of(
+        new NamedRun("drawn", SampleRuns.assessment()), new NamedRun("found", SampleRuns.full()));
+  }
+
   @ParameterizedTest
-  @ValueSource(strings = {"full", "assessment", "one-wavelength", "failed-search"})
+  @ValueSource(strings = {"full", "assessment", "one-wavelength", "failed-search", "comparison"})
   void aPageSaysWhatItsGoldenFileSays(String name) throws IOException {
-    String outline = PageOutline.of(ReportPages.of(run(name)));
+    String outline = PageOutline.of(page(name));
     Path golden = GOLDEN.resolve(name + ".txt");
     if (Boolean.getBoolean("golden.update")) {
       Files.createDirectories(GOLDEN);

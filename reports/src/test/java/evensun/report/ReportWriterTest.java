@@ -73,8 +73,9 @@ class ReportWriterTest {
     assertThat(CompareWriter.write(runs)).contains("not fully comparable", "table-stack");
     assertThat(CompareWriter.text(runs, ""))
         .contains("B passes")
-        .contains("some are as drawn, others searched")
-        .containsPattern("front-contact +indium-tin-oxide 80 nm +indium-tin-oxide 40 nm");
+        .contains("more than A; not fully comparable: some are as drawn, others searched")
+        .containsPattern("front-contact: thickness, nm +80.0 +40.0 +−40.0")
+        .doesNotContain("wafer: thickness", "front-contact: material");
   }
 
   private static int count(String text, String part) {

@@ -78,7 +78,7 @@ class StoredRunsCommandsTest {
   void compareSaysWhatDiffersAndWarnsWhereTheLightDiffers() {
     assertThat(run("compare", at("old"), at("new"))).isZero();
     assertThat(text())
-        .contains("B passes 21.50 mA cm⁻²", "Not fully comparable: the spectrum differs")
+        .contains("B passes 21.50 mA cm⁻²", "; not fully comparable: the spectrum differs")
         .containsPattern("spectrum +AM1.5G +AM0");
     assertThat(err.size()).isZero();
   }

@@ -25,6 +25,7 @@ record ChartDrawing(Chart chart) implements Figure.Sketch {
   private static final double LEFT = 58;
   private static final double LABEL_ROOM_PX = 16;
   private static final double HALF_LETTER_PX = 3.6;
+  private static final double BUNCHED_PX = 24;
   private static final int MOST_POINTS = 240;
 
   /** The inner frame in px. */
@@ -58,13 +59,14 @@ record ChartDrawing(Chart chart) implements Figure.Sketch {
   private Drawing drawAll(double widthPx) {
     boolean wide = widthPx > 600;
     double high = wide ? 330 : 250;
-    double right = chart.kind() == Kind.LINES && wide ? 150 : 14;
+    boolean named = chart.kind() == Kind.LINES && wide && !bunched(high - TOP - BOTTOM);
+    double right = named ? 150 : 14;
     Canvas canvas = new Canvas(widthPx);
     Frame frame = new Frame(chart, LEFT, TOP, widthPx - LEFT - right, high - TOP - BOTTOM);
     axes(canvas, frame, wide);
     switch (chart.kind()) {
       case STACK -> stack(canvas, frame, wide);
-      case LINES -> lines(canvas, frame, wide);
+      case LINES -> lines(canvas, frame, named);
       case POINTS -> points(canvas, frame);
     }
     marks(canvas, frame);
@@ -192,7 +194,7 @@ record ChartDrawing(Chart chart) implements Figure.Sketch {
 
   private record End(Series row, double y) {}
 
-  private void lines(Canvas canvas, Frame frame, boolean wide) {
+  private void lines(Canvas canvas, Frame frame, boolean named) {
     List<End> ends = new ArrayList<>();
     for (Series row : chart.series()) {
       Path path = new Path();
@@ -214,9 +216,29 @@ record ChartDrawing(Chart chart) implements Figure.Sketch {
         ends.add(new End(row, lastY));
       }
     }
-    if (wide) {
+    if (named) {
       endLabels(canvas, frame, ends);
     }
+  }
+
+  /** Whether names at the ends of lines would stand far from them; the legend has them anyway. */
+  private boolean bunched(double height) {
+    double edge = Double.NEGATIVE_INFINITY;
+    double farthest = 0;
+    for (double y :
+        chart.series().stream().mapToDouble(row -> endY(row, height)).sorted().toArray()) {
+      edge = Math.max(y, edge + LABEL_ROOM_PX);
+      farthest = Math.max(farthest, edge - y);
+    }
+    return farthest > BUNCHED_PX;
+  }
+
+  private double endY(Series row, double height) {
+    double last = 0;
+    for (Double value : row.values()) {
+      last = value == null ? last : value;
+    }
+    return (1 - chart.y().fraction(last)) * height;
   }
 
   private static void endLabels(Canvas canvas, Frame frame, List<End> ends) {

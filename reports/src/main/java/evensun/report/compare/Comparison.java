@@ -1,6 +1,5 @@
 package evensun.report.compare;
 
-import evensun.report.compare.Matrix.Row;
 import evensun.report.figure.Budget;
 import evensun.report.figure.Share;
 import evensun.report.text.Clip;
@@ -14,6 +13,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Objects;
 import java.util.function.Function;
+import java.util.stream.Collectors;
 import org.jspecify.annotations.Nullable;
 
 /** What differs between results, and whether they may be compared at all. */
@@ -39,8 +39,15 @@ final class Comparison {
     return runs;
   }
 
-  /** Which passes most, and by how much. */
+  /** Which passes most, by how much, and why that may not be held against each other. */
   String sentence() {
+    List<String> warnings = warnings();
+    return warnings.isEmpty()
+        ? lead() + "."
+        : lead() + "; not fully comparable: " + String.join(", ", warnings) + ".";
+  }
+
+  private String lead() {
     int best = -1;
     int second = -1;
     for (int i = 0; i < runs.size(); i++) {
@@ -56,14 +63,14 @@ final class Comparison {
       }
     }
     if (second < 0) {
-      return "These results share no matched current to compare.";
+      return "These results share no matched current to compare";
     }
     double lead = Objects.requireNonNull(headline(best)) - Objects.requireNonNull(headline(second));
     String first =
         Matrix.letter(best) + " passes " + Numbers.ma(Objects.requireNonNull(headline(best)));
     return lead < 0.005
-        ? first + ", as much as " + Matrix.letter(second) + "."
-        : first + ", " + Numbers.ma(lead) + " more than " + Matrix.letter(second) + ".";
+        ? first + ", as much as " + Matrix.letter(second)
+        : first + ", " + Numbers.ma(lead) + " more than " + Matrix.letter(second);
   }
 
   private @Nullable Double headline(int run) {
@@ -136,21 +143,41 @@ final class Comparison {
         .orElse(null);
   }
 
+  /** One row per property of each layer, so that a change stands alone. */
   Matrix stack() {
-    return new Matrix(runs)
-        .each(
-            r -> r.found().stack().stream().map(StackEntry::name).toList(),
-            (matrix, name) -> matrix.words(Clip.to(name, 60), r -> layer(r, name)));
+    Matrix matrix = new Matrix(runs);
+    matrix.words("layers", r -> Clip.to(order(r), 400));
+    return matrix.each(
+        r -> r.found().stack().stream().map(StackEntry::name).toList(),
+        (rows, name) -> layer(rows, name));
   }
 
-  private static @Nullable String layer(RunResult result, String name) {
+  private static String order(RunResult result) {
+    return result.found().stack().stream().map(StackEntry::name).collect(Collectors.joining(", "));
+  }
+
+  private static void layer(Matrix rows, String name) {
+    String label = Clip.to(name, 60);
+    rows.words(label + ": material", r -> of(r, name, StackEntry::material));
+    rows.numbers(label + ": thickness, nm", 1, r -> of(r, name, StackEntry::thicknessNm));
+    rows.numbers(label + ": bandgap, eV", 3, r -> of(r, name, StackEntry::bandgapEv));
+    rows.words(
+        label + ": waves", r -> of(r, name, e -> e.role().equals("layer") ? waves(e) : null));
+    rows.words(label + ": part of", r -> of(r, name, StackEntry::subcell));
+    rows.words(
+        label + ": further",
+        r -> of(r, name, e -> e.features().isEmpty() ? null : String.join("; ", e.features())));
+  }
+
+  private static String waves(StackEntry entry) {
+    return entry.coherent() ? "interfere" : "incoherent";
+  }
+
+  private static <T> @Nullable T of(
+      RunResult result, String name, Function<StackEntry, @Nullable T> property) {
     for (StackEntry entry : result.found().stack()) {
       if (entry.name().equals(name)) {
-        String thickness =
-            entry.thicknessNm() == null ? "" : " " + Numbers.thickness(entry.thicknessNm());
-        String gap =
-            entry.bandgapEv() == null ? "" : ", " + Numbers.quantity(entry.bandgapEv(), "eV");
-        return entry.material() + thickness + gap;
+        return property.apply(entry);
       }
     }
     return null;
@@ -179,10 +206,5 @@ final class Comparison {
         .findFirst()
         .map(use -> use.form().isEmpty() ? use.source() : use.source() + "; " + use.form())
         .orElse(null);
-  }
-
-  /** The rows that differ, of results, losses and stack, for a summary in words. */
-  List<Row> differing(Matrix matrix) {
-    return matrix.ordered().stream().filter(Row::differs).toList();
   }
 }

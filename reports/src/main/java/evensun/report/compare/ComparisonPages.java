@@ -35,7 +35,7 @@ public final class ComparisonPages {
     sections.add(which(comparison));
     sections.add(section("results", "Results", "result", comparison.results(), true, "mA cm⁻²"));
     losses(comparison).ifPresent(sections::add);
-    sections.add(section("stack", "Stack", "layer", comparison.stack(), false, ""));
+    sections.add(section("stack", "Stack", "layer value", comparison.stack(), false, ""));
     sections.add(
         section("assumptions", "Assumptions", "assumption", comparison.assumptions(), false, ""));
     RunResult first = runs.get(0).result();
@@ -90,10 +90,20 @@ public final class ComparisonPages {
       String id, String nav, String noun, Matrix matrix, boolean numeric, String unit) {
     String caption = unit.isEmpty() ? nav : nav + ", " + unit + " where not said otherwise";
     return new Section(
-        id,
-        nav,
-        heading(noun, matrix),
-        List.of(new Block.Grid(matrix.table("table-" + id, caption, numeric), false)));
+        id, nav, heading(noun, matrix), grids(matrix, "table-" + id, caption, numeric));
+  }
+
+  /** What differs, open; what is the same, folded. */
+  private static List<Block> grids(Matrix matrix, String id, String caption, boolean numeric) {
+    List<Block> blocks = new ArrayList<>();
+    if (matrix.differences() > 0) {
+      blocks.add(new Block.Grid(matrix.table(id, caption, numeric, true), false));
+    }
+    if (matrix.agreesSomewhere()) {
+      Table same = matrix.table(id + "-same", caption + ": the same in all", numeric, false);
+      blocks.add(new Block.Grid(same, true));
+    }
+    return blocks;
   }
 
   private static String heading(String noun, Matrix matrix) {
@@ -119,7 +129,7 @@ public final class ComparisonPages {
       return Optional.empty();
     }
     Matrix matrix = comparison.losses();
-    blocks.add(new Block.Grid(matrix.table("table-losses", "Losses, mA cm⁻²", true), false));
+    blocks.addAll(grids(matrix, "table-losses", "Losses, mA cm⁻²", true));
     String heading =
         matrix.differences() == 0
             ? "Every loss is the same"
@@ -140,13 +150,10 @@ public final class ComparisonPages {
     tables.add(listing("losses, " + Numbers.MA, comparison.losses(), runs.size()));
     tables.add(listing("stack", comparison.stack(), runs.size()));
     tables.add(listing("assumptions", comparison.assumptions(), runs.size()));
-    List<String> warnings = comparison.warnings();
     return new Summary(
         String.join(", ", names),
         comparison.sentence(),
-        warnings.isEmpty()
-            ? "Only what differs is listed"
-            : "Not fully comparable: " + String.join(", ", warnings),
+        "Only what differs is listed",
         tables,
         List.of());
   }
@@ -157,12 +164,17 @@ public final class ComparisonPages {
       header.add(Matrix.letter(i));
     }
     List<List<String>> rows = new ArrayList<>();
-    for (Matrix.Row row : matrix.ordered()) {
-      if (row.differs()) {
-        List<String> cells = new ArrayList<>(List.of(row.label()));
-        row.cells().forEach(cell -> cells.add(Clip.to(cell, 48)));
-        rows.add(cells);
+    boolean changes = matrix.differing().stream().anyMatch(row -> !row.change().isEmpty());
+    if (changes) {
+      header.add(Matrix.letter(1) + " − " + Matrix.letter(0));
+    }
+    for (Matrix.Row row : matrix.differing()) {
+      List<String> cells = new ArrayList<>(List.of(row.label()));
+      row.cells().forEach(cell -> cells.add(Clip.to(cell, 48)));
+      if (changes) {
+        cells.add(row.change());
       }
+      rows.add(cells);
     }
     return new Listing(header, rows);
   }

@@ -6,11 +6,12 @@ import evensun.result.RunResult;
 import java.util.ArrayList;
 import java.util.LinkedHashSet;
 import java.util.List;
+import java.util.Objects;
 import java.util.Set;
 import java.util.function.Function;
 import org.jspecify.annotations.Nullable;
 
-/** Rows of what may differ, one column per run; rows that differ come first. */
+/** Rows of what may differ, one column per run. */
 final class Matrix {
 
   /**
@@ -18,8 +19,9 @@ final class Matrix {
    *
    * @param label what it is
    * @param cells one per run
+   * @param change of two numbers, the second less the first; empty otherwise
    */
-  record Row(String label, List<String> cells) {
+  record Row(String label, List<String> cells, String change) {
 
     boolean differs() {
       return cells.stream().distinct().count() > 1;
@@ -40,25 +42,31 @@ final class Matrix {
 
   /** Adds a row of texts; one that no run has is left out. */
   Matrix words(String label, Function<RunResult, @Nullable String> of) {
-    List<String> cells = new ArrayList<>();
-    for (NamedRun run : runs) {
-      String text = of.apply(run.result());
-      cells.add(text == null ? "–" : text);
-    }
-    if (cells.stream().anyMatch(cell -> !cell.equals("–"))) {
-      rows.add(new Row(label, cells));
-    }
-    return this;
+    return add(label, runs.stream().map(run -> of.apply(run.result())).toList(), "");
   }
 
   /** Adds a row of numbers. */
   Matrix numbers(String label, int decimals, Function<RunResult, @Nullable Double> of) {
-    return words(
-        label,
-        result -> {
-          Double value = of.apply(result);
-          return value == null ? null : Numbers.fixed(value, decimals);
-        });
+    List<@Nullable Double> values = new ArrayList<>();
+    runs.forEach(run -> values.add(of.apply(run.result())));
+    List<@Nullable String> texts = new ArrayList<>();
+    values.forEach(value -> texts.add(value == null ? null : Numbers.fixed(value, decimals)));
+    return add(label, texts, change(values, decimals));
+  }
+
+  private static String change(List<@Nullable Double> values, int decimals) {
+    Double first = values.get(0);
+    Double second = values.get(1);
+    return values.size() != 2 || first == null || second == null
+        ? ""
+        : Numbers.signed(second - first, decimals);
+  }
+
+  private Matrix add(String label, List<@Nullable String> texts, String change) {
+    if (texts.stream().anyMatch(Objects::nonNull)) {
+      rows.add(new Row(label, texts.stream().map(t -> t == null ? "–" : t).toList(), change));
+    }
+    return this;
   }
 
   /** Adds a row per name that occurs in any run, in the order of first sight. */
@@ -70,18 +78,20 @@ final class Matrix {
     return this;
   }
 
-  List<Row> ordered() {
-    List<Row> ordered = new ArrayList<>(rows.stream().filter(Row::differs).toList());
-    rows.stream().filter(row -> !row.differs()).forEach(ordered::add);
-    return ordered;
+  List<Row> differing() {
+    return rows.stream().filter(Row::differs).toList();
   }
 
   long differences() {
     return rows.stream().filter(Row::differs).count();
   }
 
-  /** The rows as a table; the last column says which are the same. */
-  Table table(String id, String caption, boolean numeric) {
+  /**
+   * Some of the rows as a table, of two runs with the change.
+   *
+   * @param differing whether those that differ or those that are the same
+   */
+  Table table(String id, String caption, boolean numeric, boolean differing) {
     Table.Builder table = new Table.Builder(id, caption).words("what");
     for (int i = 0; i < runs.size(); i++) {
       if (numeric) {
@@ -90,13 +100,24 @@ final class Matrix {
         table.words(letter(i));
       }
     }
-    table.words("");
-    for (Row row : ordered()) {
+    List<Row> shown = rows.stream().filter(row -> row.differs() == differing).toList();
+    boolean changes = differing && shown.stream().anyMatch(row -> !row.change().isEmpty());
+    if (changes) {
+      table.numbers(letter(1) + " − " + letter(0), "");
+    }
+    for (Row row : shown) {
       List<String> cells = new ArrayList<>(List.of(row.label()));
       cells.addAll(row.cells());
-      cells.add(row.differs() ? "differs" : "the same");
+      if (changes) {
+        cells.add(row.change());
+      }
       table.row(cells);
     }
     return table.build();
+  }
+
+  /** Whether any row is the same everywhere. */
+  boolean agreesSomewhere() {
+    return rows.stream().anyMatch(row -> !row.differs());
   }
 }

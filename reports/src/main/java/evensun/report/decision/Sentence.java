@@ -38,7 +38,7 @@ public final class Sentence {
   }
 
   /** Whether a search could evaluate no design at all. */
-  static boolean failed(SearchRecord search) {
+  public static boolean failed(SearchRecord search) {
     return search.evaluations() > 0 && search.failures() >= search.evaluations();
   }
 
@@ -68,7 +68,11 @@ public final class Sentence {
     if (before == null && search.aim().equals(MATCHED_CURRENT)) {
       before = search.aimAsDrawn();
     }
-    return "matched at " + Numbers.ma(matched) + gain(matched, before) + "; " + balance(found);
+    return "matched at "
+        + Numbers.ma(matched, found.matchedStandardErrorMaPerCm2())
+        + gain(matched, before)
+        + "; "
+        + balance(found);
   }
 
   private static String gain(double matched, @Nullable Double before) {
@@ -121,7 +125,11 @@ public final class Sentence {
   private static String assessed(Outcome found) {
     Double matched = found.matchedCurrentMaPerCm2();
     if (matched != null) {
-      return "As drawn, the device passes " + Numbers.ma(matched) + "; " + balance(found) + ".";
+      return "As drawn, the device passes "
+          + Numbers.ma(matched, found.matchedStandardErrorMaPerCm2())
+          + "; "
+          + balance(found)
+          + ".";
     }
     if (found.incidentMaPerCm2() == null) {
       return "Spectra only: a single wavelength carries no current, so there is nothing to decide.";

@@ -23,8 +23,13 @@ public record LevelPicture(List<Vessel> vessels, @Nullable Double levelMaPerCm2)
    * @param name its name
    * @param maPerCm2 its current
    * @param drawnMaPerCm2 its current as drawn, where that differs
+   * @param standardErrorMaPerCm2 its statistical error, null where there is none
    */
-  public record Vessel(String name, double maPerCm2, @Nullable Double drawnMaPerCm2) {}
+  public record Vessel(
+      String name,
+      double maPerCm2,
+      @Nullable Double drawnMaPerCm2,
+      @Nullable Double standardErrorMaPerCm2) {}
 
   private static final double TOP = 34;
   private static final double DEPTH = 216;
@@ -110,6 +115,10 @@ public record LevelPicture(List<Vessel> vessels, @Nullable Double levelMaPerCm2)
     String inside = Numbers.fixed(vessel.maPerCm2(), 2);
     canvas.label(
         centre, Math.min(line + 24, bottom - 6), inside, Anchor.MIDDLE, "value on-" + role);
+    String error = Numbers.plusMinus(vessel.standardErrorMaPerCm2()).strip();
+    if (!error.isEmpty() && bottom - line > 60) {
+      canvas.label(centre, line + 40, error, Anchor.MIDDLE, "tick on-" + role);
+    }
     String name = Clip.to(vessel.name(), (int) Math.max(4, slot / 8.5));
     canvas.label(centre, bottom + 19, name, Anchor.MIDDLE, "name");
     Double drawn = vessel.drawnMaPerCm2();

@@ -7,6 +7,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.OptionalDouble;
+import org.jspecify.annotations.Nullable;
 
 /**
  * The stack as drawn beside the stack found, thin layers on one scale, thick ones cut short with a
@@ -24,8 +25,27 @@ public record StackPicture(List<Slab> drawn, List<Slab> found) implements Figure
    * @param role class of the style sheet: a subcell's, {@code parasitic} or {@code medium}
    * @param thicknessNm thickness in nm, NaN for the incident and exit medium
    * @param note further property, such as a bandgap
+   * @param window thicknesses that are as good; null where it was not to vary
    */
-  public record Slab(String name, String role, double thicknessNm, String note) {}
+  public record Slab(
+      String name, String role, double thicknessNm, String note, @Nullable Window window) {}
+
+  /**
+   * Thicknesses that are as good as the one found.
+   *
+   * @param lowNm thinnest
+   * @param highNm thickest
+   * @param bound {@code lower} or {@code upper} where the value stands on the end of what was
+   *     allowed, else empty
+   */
+  public record Window(double lowNm, double highNm, String bound) {
+
+    String text() {
+      String range = lowNm < highNm ? Numbers.range(lowNm, highNm, "nm") + " nm" : "";
+      String end = bound.isEmpty() ? "" : bound + " bound";
+      return range.isEmpty() || end.isEmpty() ? range + end : range + " · " + end;
+    }
+  }
 
   private static final double SCALED_PX = 300;
   private static final double BROKEN_PX = 56;
@@ -69,6 +89,10 @@ public record StackPicture(List<Slab> drawn, List<Slab> found) implements Figure
     column(canvas, found, right, column, pxPerNm);
     canvas.label(left + column / 2, 13, "as drawn", Anchor.MIDDLE, "name");
     canvas.label(right + column / 2, 13, "found", Anchor.MIDDLE, "name");
+    if (widthPx > 600 && found.stream().anyMatch(slab -> slab.window() != null)) {
+      canvas.label(right + column + 100, 13, "equally good", Anchor.START, "tick");
+    }
+    brackets(canvas, right - 6, pxPerNm);
     namesLeft(canvas, drawn, left, height, pxPerNm, true, widthPx);
     valuesRight(canvas, found, drawn, right + column, height, pxPerNm, widthPx);
   }
@@ -136,6 +160,25 @@ public record StackPicture(List<Slab> drawn, List<Slab> found) implements Figure
     }
   }
 
+  /** To scale: from the upper face of a layer, where its lower face may lie. */
+  private void brackets(Canvas canvas, double x, double pxPerNm) {
+    double y = TOP;
+    for (Slab slab : found) {
+      Window window = slab.window();
+      if (window != null
+          && window.lowNm() < window.highNm()
+          && slab.thicknessNm() < BREAK_FROM_NM) {
+        double from = y + window.lowNm() * pxPerNm;
+        double to = y + window.highNm() * pxPerNm;
+        canvas.outline(
+            new Path().move(x + 4, from).line(x, from).line(x, to).line(x + 4, to),
+            "bracket",
+            slab.name() + " " + window.text());
+      }
+      y += px(slab, pxPerNm);
+    }
+  }
+
   private static double[] centres(List<Slab> slabs, double pxPerNm) {
     double[] centres = new double[slabs.size()];
     double y = TOP;
@@ -197,9 +240,14 @@ public record StackPicture(List<Slab> drawn, List<Slab> found) implements Figure
       boolean moved = old.isPresent() && Math.abs(old.getAsDouble() - slab.thicknessNm()) >= 0.05;
       leader(canvas, x, wanted[i], 14, at[i]);
       String look = moved ? "part-value" : "tick";
-      canvas.label(x + 18, at[i] + 4, value(slab), Anchor.START, look);
+      Window window = slab.window();
+      boolean onBound = window != null && !window.bound().isEmpty();
+      String value = value(slab) + (onBound && !wide ? ", bound" : "");
+      canvas.label(x + 18, at[i] + 4, value, Anchor.START, look);
       List<String> more = new ArrayList<>();
-      if (moved) {
+      if (window != null && !window.text().isEmpty()) {
+        more.add(window.text());
+      } else if (moved) {
         more.add(Numbers.change(slab.thicknessNm() - old.getAsDouble(), "nm"));
       }
       if (!slab.note().isEmpty()) {

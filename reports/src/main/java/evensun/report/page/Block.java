@@ -46,6 +46,15 @@ public sealed interface Block {
    */
   record Verbatim(String id, String label, String text, boolean folded) implements Block {}
 
+  /**
+   * The numbers of several charts over the same x, to be saved as one table.
+   *
+   * @param file name of the file
+   * @param label what it is
+   * @param charts ids of the charts
+   */
+  record Together(String file, String label, List<String> charts) implements Block {}
+
   /** Points with a mark of their severity. */
   record Points(List<Point> points) implements Block {}
 

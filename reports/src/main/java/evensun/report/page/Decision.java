@@ -32,8 +32,10 @@ public record Decision(
    * @param key field of result.json it comes from
    * @param label what it is
    * @param value as shown
+   * @param error its statistical error, such as {@code ± 0.02}; empty for none
    * @param unit its unit
    * @param note a remark, empty for none
    */
-  public record Headline(String key, String label, String value, String unit, String note) {}
+  public record Headline(
+      String key, String label, String value, String error, String unit, String note) {}
 }

@@ -34,6 +34,8 @@ public final class AssumptionSection {
     List<Block.Plot> plots = plots(result);
     if (!plots.isEmpty()) {
       blocks.add(new Block.Subheading("Refractive index n and extinction coefficient k as used"));
+      List<String> charts = plots.stream().map(plot -> plot.chart().id()).toList();
+      blocks.add(new Block.Together("optical-constants.csv", "All n and k as one CSV", charts));
       blocks.add(new Block.Plots(plots));
     }
     return Optional.of(new Section("assumptions", "Assumptions", heading(result), blocks));
@@ -115,7 +117,7 @@ public final class AssumptionSection {
     String kelvin = Numbers.withUnit(Numbers.trimmed(use.temperatureK(), 2), "K");
     return use.toNm() > use.fromNm()
         ? Numbers.trimmed(use.fromNm(), 1)
-            + " to "
+            + "\u00a0to\u00a0"
             + Numbers.withUnit(Numbers.trimmed(use.toNm(), 1), "nm")
             + ", "
             + kelvin

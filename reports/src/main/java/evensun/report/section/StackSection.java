@@ -1,9 +1,11 @@
 package evensun.report.section;
 
+import evensun.report.decision.Sentence;
 import evensun.report.figure.Figure;
 import evensun.report.figure.Share;
 import evensun.report.figure.StackPicture;
 import evensun.report.figure.StackPicture.Slab;
+import evensun.report.figure.StackPicture.Window;
 import evensun.report.page.Block;
 import evensun.report.page.Section;
 import evensun.report.page.Table;
@@ -19,6 +21,7 @@ import evensun.result.SearchRecord.VariableRecord;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import org.jspecify.annotations.Nullable;
 
 /** The stack as drawn beside the stack found. */
 public final class StackSection {
@@ -34,7 +37,7 @@ public final class StackSection {
     blocks.add(picture(result));
     SearchRecord search = result.search();
     if (search != null && !search.variables().isEmpty()) {
-      blocks.add(new Block.Grid(variables(search), false));
+      blocks.add(new Block.Grid(variables(search, Sentence.failed(search)), false));
     }
     blocks.add(new Block.Grid(layers(result), true));
     return Optional.of(new Section("stack", "Stack", heading(result), blocks));
@@ -46,6 +49,10 @@ public final class StackSection {
         result.found().stack().stream().filter(entry -> entry.role().equals("layer")).count();
     if (search == null || search.variables().isEmpty()) {
       return "The stack as drawn: " + Numbers.count((int) layers, "layer");
+    }
+    if (Sentence.failed(search)) {
+      return "No design could be evaluated; the stack as drawn: "
+          + Numbers.count((int) layers, "layer");
     }
     VariableRecord most = search.variables().get(0);
     for (VariableRecord variable : search.variables()) {
@@ -69,16 +76,23 @@ public final class StackSection {
 
   private static Block picture(RunResult result) {
     Outcome drawn = result.asDrawn();
+    SearchRecord search = result.search();
+    List<VariableRecord> varied =
+        search == null || Sentence.failed(search) ? List.of() : search.variables();
     StackPicture picture =
-        new StackPicture(drawn == null ? List.of() : slabs(drawn), slabs(result.found()));
+        new StackPicture(
+            drawn == null ? List.of() : slabs(drawn, List.of()), slabs(result.found(), varied));
     String what =
         (drawn == null ? "The stack" : "The stack as drawn (left) and as found (right)")
             + ", light from above. Layers are to scale with each other; those of 3 µm and more are cut"
-            + " short with a break, and very thin ones are drawn at least as a line.";
+            + " short with a break, and very thin ones are drawn at least as a line."
+            + (varied.stream().anyMatch(v -> v.equallyGoodLow() != null)
+                ? " Brackets: where the lower face of a layer may lie at no loss to speak of."
+                : "");
     return new Block.Picture("fig-stack", Figure.of(picture, what), what);
   }
 
-  private static List<Slab> slabs(Outcome outcome) {
+  private static List<Slab> slabs(Outcome outcome, List<VariableRecord> varied) {
     List<String> names = outcome.subcells().stream().map(SubcellOutcome::name).toList();
     List<Slab> slabs = new ArrayList<>();
     int parasitic = 0;
@@ -86,29 +100,47 @@ public final class StackSection {
       int index = entry.subcell() == null ? -1 : names.indexOf(entry.subcell());
       boolean layer = entry.role().equals("layer");
       String other = layer ? Share.parasiticRole(parasitic) : "medium";
-      slabs.add(slab(entry, index >= 0 ? Share.subcellRole(index) : other));
+      slabs.add(slab(entry, index >= 0 ? Share.subcellRole(index) : other, varied));
       parasitic += layer && index < 0 ? 1 : 0;
     }
     return slabs;
   }
 
-  private static Slab slab(StackEntry entry, String role) {
+  private static Slab slab(StackEntry entry, String role, List<VariableRecord> varied) {
     double nm = entry.thicknessNm() == null ? Double.NaN : entry.thicknessNm();
-    String gap = entry.bandgapEv() == null ? "" : Numbers.quantity(entry.bandgapEv(), "eV");
     String name = entry.role().equals("exit") ? entry.name() + " (exit)" : entry.name();
-    return new Slab(name, role, nm, gap);
+    VariableRecord thickness = of(varied, entry.name() + ".thicknessNm");
+    VariableRecord gap = of(varied, entry.name() + ".bandgapEv");
+    String note = entry.bandgapEv() == null ? "" : Numbers.quantity(entry.bandgapEv(), "eV");
+    if (gap != null && gap.equallyGoodLow() != null) {
+      note += " (" + range(gap.equallyGoodLow(), gap.equallyGoodHigh(), "eV") + ")";
+    }
+    return new Slab(name, role, nm, note, thickness == null ? null : window(thickness));
   }
 
-  private static Table variables(SearchRecord search) {
-    boolean ranges = search.variables().stream().anyMatch(v -> v.equallyGoodLow() != null);
-    boolean bounds = search.variables().stream().anyMatch(v -> v.bound() != null);
+  private static @Nullable VariableRecord of(List<VariableRecord> varied, String key) {
+    return varied.stream().filter(v -> v.key().equals(key)).findFirst().orElse(null);
+  }
+
+  private static Window window(VariableRecord v) {
+    double low = v.equallyGoodLow() == null ? v.found() : v.equallyGoodLow();
+    double high = v.equallyGoodHigh() == null ? v.found() : v.equallyGoodHigh();
+    String bound = v.bound() == null ? "" : v.bound().equals("low") ? "lower" : "upper";
+    return new Window(low, high, bound);
+  }
+
+  private static Table variables(SearchRecord search, boolean failed) {
+    boolean ranges =
+        !failed && search.variables().stream().anyMatch(v -> v.equallyGoodLow() != null);
+    boolean bounds = !failed && search.variables().stream().anyMatch(v -> v.bound() != null);
     Table.Builder table =
         new Table.Builder("table-variables", "What may vary")
             .words("quantity")
             .words("unit")
-            .numbers("drawn", "")
-            .numbers("found", "")
-            .numbers("change", "");
+            .numbers("drawn", "");
+    if (!failed) {
+      table.numbers("found", "").numbers("change", "");
+    }
     if (ranges) {
       table.words("equally good");
     }
@@ -116,19 +148,17 @@ public final class StackSection {
     if (bounds) {
       table.words("bound");
     }
-    search.variables().forEach(v -> table.row(row(v, ranges, bounds)));
+    search.variables().forEach(v -> table.row(row(v, failed, ranges, bounds)));
     return table.build();
   }
 
-  private static List<String> row(VariableRecord v, boolean ranges, boolean bounds) {
+  private static List<String> row(
+      VariableRecord v, boolean failed, boolean ranges, boolean bounds) {
     List<String> cells =
-        new ArrayList<>(
-            List.of(
-                Keys.words(v.key()),
-                v.unit(),
-                Numbers.bare(v.drawn(), v.unit()),
-                Numbers.bare(v.found(), v.unit()),
-                signed(v)));
+        new ArrayList<>(List.of(Keys.words(v.key()), v.unit(), Numbers.bare(v.drawn(), v.unit())));
+    if (!failed) {
+      cells.addAll(List.of(Numbers.bare(v.found(), v.unit()), signed(v)));
+    }
     if (ranges) {
       cells.add(range(v.equallyGoodLow(), v.equallyGoodHigh(), v.unit()));
     }
@@ -149,13 +179,8 @@ public final class StackSection {
     return v.step() > 0 ? ", step " + Numbers.bare(v.step(), v.unit()) : "";
   }
 
-  private static String range(
-      @org.jspecify.annotations.Nullable Double low,
-      @org.jspecify.annotations.Nullable Double high,
-      String unit) {
-    return low == null || high == null
-        ? ""
-        : Numbers.bare(low, unit) + " to " + Numbers.bare(high, unit);
+  private static String range(@Nullable Double low, @Nullable Double high, String unit) {
+    return low == null || high == null ? "" : Numbers.range(low, high, unit);
   }
 
   private static Table layers(RunResult result) {
@@ -211,7 +236,7 @@ public final class StackSection {
             .orElse("");
   }
 
-  private static String nm(@org.jspecify.annotations.Nullable Double nm) {
+  private static String nm(@Nullable Double nm) {
     return nm == null ? "" : Numbers.trimmed(nm, 2);
   }
 }

@@ -116,6 +116,19 @@ public final class Numbers {
     return withUnit(fixed(maPerCm2, 2), MA);
   }
 
+  /** A current density with one standard error, where it has one, and its unit. */
+  public static String ma(double maPerCm2, @Nullable Double standardError) {
+    return withUnit(fixed(maPerCm2, 2) + plusMinus(standardError), MA);
+  }
+
+  /** Such as {@code " ± 0.02"}; empty without an error. Small errors get a third decimal. */
+  public static String plusMinus(@Nullable Double standardError) {
+    if (standardError == null || !(standardError > 0)) {
+      return "";
+    }
+    return NBSP + "±" + NBSP + fixed(standardError, standardError < 0.02 ? 3 : 2);
+  }
+
   /** A change of a current density with its unit. */
   public static String maChange(double maPerCm2) {
     return withUnit(signed(maPerCm2, 2), MA);
@@ -159,6 +172,11 @@ public final class Numbers {
       case "%", MA -> fixed(value, 2);
       default -> significant(value, 4);
     };
+  }
+
+  /** A range of bare numbers, kept on one line. */
+  public static String range(double low, double high, String unit) {
+    return bare(low, unit) + NBSP + "to" + NBSP + bare(high, unit);
   }
 
   /** A change of a value in its unit. */

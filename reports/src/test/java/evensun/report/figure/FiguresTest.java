@@ -17,10 +17,10 @@ class FiguresTest {
       new Budget(
           40,
           List.of(
-              new Share("reflected", "reflected", 4),
-              new Share("contact", "parasitic", 1),
-              new Share("top", "sub1", 18),
-              new Share("bottom", "sub2", 17)));
+              new Share("reflected", "reflected", 4, null),
+              new Share("contact", "parasitic", 1, null),
+              new Share("top", "sub1", 18, null),
+              new Share("bottom", "sub2", 17, null)));
 
   @Test
   void thePartsOfTheBarFillItInProportion() {
@@ -43,7 +43,7 @@ class FiguresTest {
   void aVesselIsFilledToItsCurrentAndHatchedAboveTheLevel() {
     LevelPicture picture =
         new LevelPicture(
-            List.of(new Vessel("top", 20, null), new Vessel("bottom", 15, null)), 15.0);
+            List.of(new Vessel("top", 20, null, null), new Vessel("bottom", 15, null, null)), 15.0);
     Drawing drawing = picture.draw(580);
     List<Box> filled = boxes(drawing, "fill-sub");
     List<Box> surplus = boxes(drawing, "pale-sub");
