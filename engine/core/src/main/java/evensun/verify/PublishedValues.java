@@ -39,6 +39,7 @@ public final class PublishedValues {
     values.addAll(silicon());
     values.addAll(limits());
     values.addAll(films(new ThinFilmProbe(thinFilms, services)));
+    services.solver("ray-trace").ifPresent(r -> values.addAll(rays(new RayProbe(r, services))));
     return values;
   }
 
@@ -227,6 +228,44 @@ public final class PublishedValues {
   /** (n_L/n_H)^2N of the mirror above. */
   private static double ratio() {
     return Math.pow(1.38 / 2.3, 10);
+  }
+
+  private static List<PublishedValue> rays(RayProbe probe) {
+    String trapping =
+        "exact integral over directions, computed from the table of Green, Sol. Energy Mater. Sol."
+            + " Cells 92, 1305 (2008)";
+    double[][] silicon = constants("crystalline-silicon", 600);
+    double n = silicon[0][0];
+    double k = silicon[1][0];
+    return List.of(
+        value(
+            "silicon, 180 µm, ideal faces, by rays",
+            "mA cm⁻²",
+            44.079,
+            0.03,
+            trapping,
+            () -> ideal(probe, 180)),
+        value(
+            "silicon, 10 µm, ideal faces, by rays",
+            "mA cm⁻²",
+            40.117,
+            0.03,
+            trapping,
+            () -> ideal(probe, 10)),
+        value(
+            "pyramids of bare silicon, reflectance at 600 nm, by rays",
+            "%",
+            100 * Facets.pyramids(n, k),
+            0.1,
+            "Fresnel equations at 54.74°, 15.79° and, for one ray in nine, 86.32° (geometry)",
+            () -> 100 * probe.pyramids(n, k)));
+  }
+
+  private static double ideal(RayProbe probe, double widthUm) {
+    WavelengthGrid grid = WavelengthGrid.of(300, 1200, 1);
+    double[][] rows = constants("crystalline-silicon", grid.wavelengthNm());
+    double[] bins = Spectra.named("AM1.5G").binsMaPerCm2(grid);
+    return probe.idealCurrent(grid.wavelengthNm(), bins, rows[0], rows[1], widthUm);
   }
 
   private static PublishedValue value(
