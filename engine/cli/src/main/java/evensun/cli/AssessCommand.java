@@ -23,6 +23,7 @@ import picocli.CommandLine.Parameters;
 
 /** {@code evensun assess}: the stack as drawn, no search. */
 @Command(
+    addMethodSubcommands = false,
     name = "assess",
     description = "Evaluates the stack of a scenario as drawn, without a search.",
     footer = {
@@ -65,11 +66,11 @@ final class AssessCommand extends BaseCommand {
   private int once() {
     GlobalOptions global = global();
     checkAngles();
-    Scenario scenario = ScenarioInput.read(scenarioFile, settings, console().in());
     RunFolder folder = null;
     RunResult result;
-    try (PluginHost host = Plugins.open(evensun());
-        Preparation preparation = Preparation.of(scenario, host, () -> false)) {
+    try (OpeningPlugins plugins = new OpeningPlugins(evensun());
+        Preparation preparation = prepare(plugins)) {
+      Scenario scenario = preparation.stack().scenario();
       if (output.out != null) {
         folder = RunFolder.create(output.out, output.force);
         RunFiles.inputs(folder, scenario, preparation);
@@ -85,6 +86,11 @@ final class AssessCommand extends BaseCommand {
     }
     output.tell(console(), global, result, report);
     return ExitStatus.DONE;
+  }
+
+  private Preparation prepare(OpeningPlugins plugins) {
+    Scenario scenario = ScenarioInput.read(scenarioFile, settings, console().in());
+    return Preparation.of(scenario, plugins.host(), () -> false);
   }
 
   private void checkAngles() {

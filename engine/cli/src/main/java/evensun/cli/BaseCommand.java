@@ -11,7 +11,7 @@ import picocli.CommandLine.Spec;
  * What every command shares. A command throws {@link InputException} for wrong input and returns an
  * {@link ExitStatus}; whatever else it throws is reported as a defect.
  */
-@Command(mixinStandardHelpOptions = true)
+@Command(mixinStandardHelpOptions = true, addMethodSubcommands = false)
 abstract class BaseCommand implements Callable<Integer> {
 
   @Spec CommandSpec spec;

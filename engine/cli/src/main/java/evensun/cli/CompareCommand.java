@@ -17,6 +17,7 @@ import picocli.CommandLine.Parameters;
 
 /** {@code evensun compare}: results side by side. */
 @Command(
+    addMethodSubcommands = false,
     name = "compare",
     description = {
       "Compares two to six runs, differences first.",

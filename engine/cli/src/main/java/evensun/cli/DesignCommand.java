@@ -26,6 +26,7 @@ import picocli.CommandLine.Parameters;
 
 /** {@code evensun design}: the main job. */
 @Command(
+    addMethodSubcommands = false,
     name = "design",
     description = "Searches the best design of a scenario and writes its report.",
     footer = {"", "Example:", "  evensun design scenarios/perovskite-on-silicon.yaml --out my-run"})

@@ -1,30 +1,22 @@
 package evensun.cli;
 
+import java.util.Collection;
+import java.util.LinkedHashMap;
+import java.util.List;
+import java.util.Map;
 import java.util.concurrent.Callable;
+import java.util.function.Supplier;
 import picocli.CommandLine;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 
 /** The program itself: global options and the list of commands. */
 @Command(
+    addMethodSubcommands = false,
     name = "evensun",
     mixinStandardHelpOptions = true,
     versionProvider = Version.class,
-    description = "Balances the currents of the subcells of a multi-junction solar cell.",
-    subcommands = {
-      NewCommand.class,
-      AssessCommand.class,
-      DesignCommand.class,
-      MaterialsCommand.class,
-      PluginsCommand.class,
-      CompareCommand.class,
-      ReportCommand.class,
-      RunsCommand.class,
-      GapsCommand.class,
-      SchemaCommand.class,
-      VerifyCommand.class,
-      ExplainCommand.class,
-    })
+    description = "Balances the currents of the subcells of a multi-junction solar cell.")
 final class Evensun implements Callable<Integer> {
 
   private final Console console;
@@ -35,9 +27,44 @@ final class Evensun implements Callable<Integer> {
     this.console = console;
   }
 
-  /** The command line, ready to execute. */
+  /** Every command by its name. */
+  private static Map<String, Supplier<Object>> commands() {
+    Map<String, Supplier<Object>> commands = new LinkedHashMap<>();
+    commands.put("new", NewCommand::new);
+    commands.put("assess", AssessCommand::new);
+    commands.put("design", DesignCommand::new);
+    commands.put("materials", MaterialsCommand::new);
+    commands.put("plugins", PluginsCommand::new);
+    commands.put("compare", CompareCommand::new);
+    commands.put("report", ReportCommand::new);
+    commands.put("runs", RunsCommand::new);
+    commands.put("gaps", GapsCommand::new);
+    commands.put("schema", SchemaCommand::new);
+    commands.put("verify", VerifyCommand::new);
+    commands.put("explain", ExplainCommand::new);
+    return commands;
+  }
+
+  /** The command line with every command, ready to execute. */
   static CommandLine commandLine(Console console) {
+    return commandLine(console, commands().values());
+  }
+
+  /**
+   * The command line for some arguments: where they start with the name of a command it holds that
+   * one alone, since building all of them takes longer than many of them run.
+   */
+  static CommandLine commandLine(Console console, String[] arguments) {
+    Map<String, Supplier<Object>> commands = commands();
+    Supplier<Object> called = arguments.length == 0 ? null : commands.get(arguments[0]);
+    return commandLine(console, called == null ? commands.values() : List.of(called));
+  }
+
+  private static CommandLine commandLine(Console console, Collection<Supplier<Object>> commands) {
     CommandLine line = new CommandLine(new Evensun(console));
+    for (Supplier<Object> command : commands) {
+      line.addSubcommand(command.get());
+    }
     line.setUsageHelpWidth(100);
     line.setCaseInsensitiveEnumValuesAllowed(true);
     line.setOut(new java.io.PrintWriter(console.out(), true));

@@ -16,6 +16,7 @@ import tools.jackson.databind.node.ObjectNode;
 
 /** {@code evensun explain}: what a finding means. */
 @Command(
+    addMethodSubcommands = false,
     name = "explain",
     description =
         "Says what a finding means, what it does to the result, and what to do. Without a code it"

@@ -35,6 +35,7 @@ import picocli.CommandLine.Option;
 
 /** {@code evensun gaps}: which bandgaps to aim at, before any optics. */
 @Command(
+    addMethodSubcommands = false,
     name = "gaps",
     description = {
       "Shows which bandgaps to aim at: detailed-balance efficiency of two or three junctions.",

@@ -23,7 +23,7 @@ public final class Main {
   public static int run(Console console, String... args) {
     int status;
     try {
-      status = Evensun.commandLine(console).execute(args);
+      status = Evensun.commandLine(console, args).execute(args);
     } catch (Error e) { // a plugin without its library, no memory left
       status = new ErrorReport(console).broken(e, args);
     }

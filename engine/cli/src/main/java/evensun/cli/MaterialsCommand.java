@@ -19,6 +19,7 @@ import picocli.CommandLine.Parameters;
 
 /** {@code evensun materials}: the library, one material in full, and the check of a table. */
 @Command(
+    addMethodSubcommands = false,
     name = "materials",
     description = {
       "Lists the library: source, range, bandgap, hazards; or shows materials in full.",

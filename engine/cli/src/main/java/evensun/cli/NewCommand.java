@@ -21,6 +21,7 @@ import tools.jackson.databind.json.JsonMapper;
 
 /** {@code evensun new}: a commented scenario to start from. */
 @Command(
+    addMethodSubcommands = false,
     name = "new",
     description =
         "Writes a commented scenario to start from, and beside it the schema with which editors"

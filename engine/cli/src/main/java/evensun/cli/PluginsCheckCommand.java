@@ -28,6 +28,7 @@ import tools.jackson.databind.node.ObjectNode;
 
 /** {@code evensun plugins check}: tries the contract's laws on a plugin. */
 @Command(
+    addMethodSubcommands = false,
     name = "check",
     description = {
       "Tries the laws of the solver contract on a plugin.",

@@ -16,6 +16,7 @@ import tools.jackson.databind.node.ObjectNode;
 
 /** {@code evensun plugins}: what is loaded, from where, and what did not load and why. */
 @Command(
+    addMethodSubcommands = false,
     name = "plugins",
     subcommands = PluginsCheckCommand.class,
     description = {

@@ -12,6 +12,7 @@ import tools.jackson.databind.json.JsonMapper;
 
 /** {@code evensun report}: rebuilds the page of a run from its result.json. */
 @Command(
+    addMethodSubcommands = false,
     name = "report",
     description = {
       "Rebuilds the page of a run from its result.json alone.",

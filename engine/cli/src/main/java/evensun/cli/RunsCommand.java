@@ -15,6 +15,7 @@ import tools.jackson.databind.node.ArrayNode;
 
 /** {@code evensun runs}: the runs of a folder with their headlines. */
 @Command(
+    addMethodSubcommands = false,
     name = "runs",
     description = {
       "Lists the finished runs of a folder with their headlines, latest first.",

@@ -5,6 +5,7 @@ import picocli.CommandLine.Command;
 
 /** {@code evensun schema}: the JSON Schema of a scenario. */
 @Command(
+    addMethodSubcommands = false,
     name = "schema",
     description = "Prints the JSON Schema of a scenario, with which editors complete and check it.",
     footer = {"", "Example:", "  evensun schema > scenario.schema.json"})

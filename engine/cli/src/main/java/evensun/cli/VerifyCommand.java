@@ -10,6 +10,7 @@ import tools.jackson.databind.json.JsonMapper;
 
 /** {@code evensun verify}: published values against values computed on this machine. */
 @Command(
+    addMethodSubcommands = false,
     name = "verify",
     description = "Compares published values with values computed on this machine.",
     footer = {"", "Example:", "  evensun verify"})

@@ -1,39 +1,40 @@
 package evensun.pluginhost;
 
 import java.io.IOException;
-import java.io.InputStream;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.security.MessageDigest;
 import java.security.NoSuchAlgorithmException;
 import java.util.HexFormat;
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Map;
+import java.util.concurrent.FutureTask;
 import java.util.stream.Stream;
 
 /** SHA-256 of what a plugin consists of. */
 final class Fingerprint {
 
-  private static final int BLOCK = 1 << 16;
-
   private Fingerprint() {}
 
   /**
-   * Of a file: hash of its content, as {@code sha256sum} prints it. Of a folder: hash of the lines
-   * {@code <hash> <relative path>} of all its files, sorted by path.
+   * The hash of a plugin as it is now, worked out when the task runs. Of a file: hash of its
+   * content, as {@code sha256sum} prints it. Of a folder: hash of the lines {@code <hash> <relative
+   * path>} of all its files, sorted by path.
+   *
+   * @throws IOException when it cannot be read
    */
-  static String of(Path path) throws IOException {
+  static FutureTask<String> of(Path path) throws IOException {
     if (!Files.isDirectory(path)) {
-      return ofFile(path);
+      byte[] content = Files.readAllBytes(path);
+      return new FutureTask<>(() -> hash(content));
     }
-    StringBuilder lines = new StringBuilder();
+    Map<String, byte[]> contents = new LinkedHashMap<>();
     for (Path file : files(path)) {
-      String name = path.relativize(file).toString().replace('\\', '/');
-      lines.append(ofFile(file)).append("  ").append(name).append('\n');
+      contents.put(path.relativize(file).toString().replace('\\', '/'), Files.readAllBytes(file));
     }
-    MessageDigest digest = sha256();
-    return HexFormat.of()
-        .formatHex(digest.digest(lines.toString().getBytes(StandardCharsets.UTF_8)));
+    return new FutureTask<>(() -> hash(contents));
   }
 
   private static List<Path> files(Path folder) throws IOException {
@@ -42,20 +43,15 @@ final class Fingerprint {
     }
   }
 
-  private static String ofFile(Path file) throws IOException {
-    MessageDigest digest = sha256();
-    byte[] block = new byte[BLOCK];
-    try (InputStream in = Files.newInputStream(file)) {
-      for (int n = in.read(block); n >= 0; n = in.read(block)) {
-        digest.update(block, 0, n);
-      }
-    }
-    return HexFormat.of().formatHex(digest.digest());
+  private static String hash(Map<String, byte[]> contents) {
+    StringBuilder lines = new StringBuilder();
+    contents.forEach((name, c) -> lines.append(hash(c)).append("  ").append(name).append('\n'));
+    return hash(lines.toString().getBytes(StandardCharsets.UTF_8));
   }
 
-  private static MessageDigest sha256() {
+  private static String hash(byte[] content) {
     try {
-      return MessageDigest.getInstance("SHA-256");
+      return HexFormat.of().formatHex(MessageDigest.getInstance("SHA-256").digest(content));
     } catch (NoSuchAlgorithmException e) {
       throw new IllegalStateException("every Java has SHA-256", e);
     }

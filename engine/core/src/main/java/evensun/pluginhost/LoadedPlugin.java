@@ -4,6 +4,8 @@ import evensun.spi.Traits;
 import java.io.IOException;
 import java.io.UncheckedIOException;
 import java.nio.file.Path;
+import java.util.concurrent.ExecutionException;
+import java.util.concurrent.FutureTask;
 import org.jspecify.annotations.Nullable;
 
 /** A plugin that is ready for use; safe for threads. */
@@ -12,7 +14,7 @@ public final class LoadedPlugin {
   private final PluginFile file;
   private final String solverId;
   private final Traits traits;
-  private @Nullable String sha256;
+  private @Nullable FutureTask<String> fingerprint;
 
   LoadedPlugin(PluginFile file, String solverId, Traits traits) {
     this.file = file;
@@ -46,18 +48,33 @@ public final class LoadedPlugin {
   }
 
   /**
-   * Hash of that jar as {@code sha256sum} prints it, or of all files of that folder. Taken when its
-   * solver is first asked for, since hashing plugins that a run does not use would slow its start.
+   * Hash of that jar as {@code sha256sum} prints it, or of all files of that folder, as they were
+   * when its solver was first asked for.
    */
-  public synchronized String sha256() {
-    if (sha256 == null) {
+  public String sha256() {
+    try {
+      return fingerprint().get();
+    } catch (InterruptedException | ExecutionException e) {
+      throw new IllegalStateException("the hash of " + file.path() + " cannot be worked out", e);
+    }
+  }
+
+  /**
+   * Reads the plugin and begins to hash it aside, since a run waits for its solver and not for the
+   * hash; plugins that a run does not use are not hashed at all.
+   */
+  synchronized FutureTask<String> fingerprint() {
+    if (fingerprint == null) {
       try {
-        sha256 = Fingerprint.of(file.path());
+        fingerprint = Fingerprint.of(file.path());
       } catch (IOException e) {
         throw new UncheckedIOException(e);
       }
+      Thread aside = new Thread(fingerprint, "fingerprint of " + id());
+      aside.setDaemon(true);
+      aside.start();
     }
-    return sha256;
+    return fingerprint;
   }
 
   /** Name of its solver in scenarios, unique among the loaded ones. */

@@ -43,7 +43,7 @@ public final class PluginHost implements AutoCloseable {
   /** The solver of that id, or empty when none is loaded. */
   public Optional<OpticalSolver> solver(String solverId) {
     // The file may be replaced while a search runs; what counts is what was loaded.
-    pluginOf(solverId).ifPresent(LoadedPlugin::sha256);
+    pluginOf(solverId).ifPresent(LoadedPlugin::fingerprint);
     return Optional.ofNullable(solvers.get(solverId));
   }
 
@@ -186,7 +186,7 @@ public final class PluginHost implements AutoCloseable {
   private String start(PluginFile file) throws Rejection {
     String id;
     try {
-      id = manager.loadPlugin(file.path());
+      id = manager.load(file);
     } catch (RuntimeException e) {
       throw new Rejection("not-loaded", OneLine.of(e), "correct the plugin");
     }

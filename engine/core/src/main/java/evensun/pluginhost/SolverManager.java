@@ -1,7 +1,11 @@
 package evensun.pluginhost;
 
 import java.nio.file.Path;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
+import java.util.Objects;
+import java.util.Properties;
 import org.pf4j.AbstractPluginManager;
 import org.pf4j.BasePluginRepository;
 import org.pf4j.DefaultExtensionFactory;
@@ -21,9 +25,17 @@ import org.pf4j.VersionManager;
 /** PF4J, set up for solvers: no roots of its own, no status files, nothing of the host visible. */
 final class SolverManager extends AbstractPluginManager {
 
+  private final Map<Path, PluginFile> files = new HashMap<>();
+
   SolverManager() {
     super(Path.of(""));
     setSystemVersion(ContractVersion.current());
+  }
+
+  /** Loads a plugin and returns its id. */
+  String load(PluginFile file) {
+    files.put(file.path(), file);
+    return loadPlugin(file.path());
   }
 
   /** The finder forgets what it read whenever a plugin comes or goes. */
@@ -50,16 +62,16 @@ final class SolverManager extends AbstractPluginManager {
 
   @Override
   protected PluginDescriptorFinder createPluginDescriptorFinder() {
-    PropertiesPluginDescriptorFinder finder = new PropertiesPluginDescriptorFinder();
-    return new PluginDescriptorFinder() {
+    return new PropertiesPluginDescriptorFinder() {
       @Override
       public boolean isApplicable(Path path) {
         return true;
       }
 
+      /** Read already; PF4J would mount the jar as a file system for it. */
       @Override
-      public PluginDescriptor find(Path path) {
-        return finder.find(read(path).main());
+      protected Properties readProperties(Path path) {
+        return file(path).properties();
       }
     };
   }
@@ -95,7 +107,7 @@ final class SolverManager extends AbstractPluginManager {
 
       @Override
       public ClassLoader loadPlugin(Path path, PluginDescriptor descriptor) {
-        return new SolverClassLoader(SolverManager.this, descriptor, read(path));
+        return new SolverClassLoader(SolverManager.this, descriptor, file(path));
       }
     };
   }
@@ -105,11 +117,7 @@ final class SolverManager extends AbstractPluginManager {
     return new DefaultVersionManager();
   }
 
-  private static PluginFile read(Path path) {
-    try {
-      return PluginFile.of(path);
-    } catch (Rejection e) {
-      throw new IllegalStateException(e);
-    }
+  private PluginFile file(Path path) {
+    return Objects.requireNonNull(files.get(path), "only files are loaded that were read");
   }
 }

@@ -10,11 +10,11 @@ import evensun.spi.Severity;
 import evensun.stack.ResolvedStack;
 import java.util.ArrayList;
 import java.util.Comparator;
-import java.util.LinkedHashSet;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
+import java.util.Map;
 import java.util.Objects;
-import java.util.Set;
 import java.util.stream.Collectors;
 import org.jspecify.annotations.Nullable;
 
@@ -24,14 +24,16 @@ final class Findings {
   /** Light outside the grid that could still be used is worth a finding above this, mA cm⁻². */
   private static final double OUTSIDE_MA_PER_CM2 = 0.05;
 
-  private final Set<Finding> findings = new LinkedHashSet<>();
+  /** By what they say: hashing records costs a short command more than all the rest here. */
+  private final Map<String, Finding> findings = new LinkedHashMap<>();
 
   void add(Finding finding) {
-    findings.add(finding);
+    findings.putIfAbsent(
+        finding.code() + '\n' + finding.where() + '\n' + finding.message(), finding);
   }
 
   void addAll(List<Finding> more) {
-    findings.addAll(more);
+    more.forEach(this::add);
   }
 
   /** What the stack and the solver say. */
@@ -196,7 +198,7 @@ final class Findings {
   }
 
   List<FindingRecord> records() {
-    List<Finding> sorted = new ArrayList<>(findings);
+    List<Finding> sorted = new ArrayList<>(findings.values());
     sorted.sort(Comparator.comparing(Finding::severity).reversed());
     return sorted.stream()
         .map(

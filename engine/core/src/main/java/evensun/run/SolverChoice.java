@@ -122,12 +122,10 @@ record SolverChoice(
 
   /** Without a thick layer light that a rough face scatters has no path to make longer. */
   private static boolean scattersBesideThick(ResolvedStack stack, PluginHost host) {
-    boolean followed =
-        host.solver(RAYS).stream()
+    return stack.layers().stream().anyMatch(layer -> !layer.coherent())
+        && stack.layers().stream().anyMatch(layer -> isCoarse(layer, stack.grid().toNm()))
+        && host.solver(RAYS).stream()
             .anyMatch(rays -> rays.traits().features().contains(Roughness.KIND));
-    return followed
-        && stack.layers().stream().anyMatch(layer -> !layer.coherent())
-        && stack.layers().stream().anyMatch(layer -> isCoarse(layer, stack.grid().toNm()));
   }
 
   /**
