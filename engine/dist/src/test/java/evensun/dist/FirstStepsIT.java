@@ -30,7 +30,13 @@ class FirstStepsIT {
   }
 
   @ParameterizedTest
-  @CsvSource({"planar, 2", "textured-two-junction, 2", "all-thin-film, 2", "three-junction, 3", "four-terminal, 2"})
+  @CsvSource({
+    "planar, 2",
+    "textured-two-junction, 2",
+    "all-thin-film, 2",
+    "three-junction, 3",
+    "four-terminal, 2"
+  })
   void aNewScenarioIsAssessedUnchanged(String like, int subcells) {
     Program.Run made = run("new", "my cell.yaml", "--like", like);
     assertThat(made.status()).isZero();
