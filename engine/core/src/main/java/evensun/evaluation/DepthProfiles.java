@@ -4,6 +4,7 @@ import evensun.light.Constants;
 import evensun.result.DepthLayer;
 import evensun.spi.Channel;
 import evensun.spi.DepthProfile;
+import evensun.spi.EvaluationFailed;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -34,18 +35,23 @@ public final class DepthProfiles {
           model.stack().subcells().stream().anyMatch(s -> model.belongsTo(channel, s));
       double thicknessNm = bench.design().thicknessNm[channel.layer()];
       if (absorber && thicknessNm > 0) {
-        layers.add(layer(bench, profile, channel, thicknessNm));
+        layer(bench, profile, channel, thicknessNm).ifPresent(layers::add);
       }
     }
     return layers;
   }
 
-  private static DepthLayer layer(
+  /** The profile of a channel; empty where the solver knows only how much it absorbs in all. */
+  private static Optional<DepthLayer> layer(
       Bench bench, DepthProfile profile, Channel channel, double thicknessNm) {
     boolean thick = !bench.model().stack().layers().get(channel.layer()).coherent();
     double[] depthNm = depths(thicknessNm, thick);
     double[][] share = new double[depthNm.length][bench.model().problem().wavelengthCount()];
-    profile.evaluate(bench.design(), 0, channel, depthNm, share);
+    try {
+      profile.evaluate(bench.design(), 0, channel, depthNm, share);
+    } catch (EvaluationFailed e) {
+      return Optional.empty();
+    }
     var bins = bench.model().problem().incidentMaPerCm2();
     List<Double> depth = new ArrayList<>();
     List<Double> generation = new ArrayList<>();
@@ -57,7 +63,7 @@ public final class DepthProfiles {
       depth.add(depthNm[z]);
       generation.add(sum * TO_GENERATION);
     }
-    return new DepthLayer(bench.model().channelName(channel), depth, generation);
+    return Optional.of(new DepthLayer(bench.model().channelName(channel), depth, generation));
   }
 
   /** Evenly spaced in a thin layer; denser towards the light in a thick one. */

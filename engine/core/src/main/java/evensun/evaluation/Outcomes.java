@@ -9,10 +9,9 @@ import evensun.result.Outcome.StackEntry;
 import evensun.result.Outcome.SubcellOutcome;
 import evensun.scenario.Connection;
 import evensun.spi.Channel;
+import evensun.spi.Quantity;
 import evensun.spi.ReflectanceParts;
 import evensun.spi.Response;
-import evensun.spi.Texture;
-import evensun.stack.Boundary;
 import evensun.stack.ResolvedLayer;
 import evensun.stack.ResolvedStack;
 import evensun.stack.ResolvedSubcell;
@@ -27,6 +26,9 @@ import org.jspecify.annotations.Nullable;
 /** Turns the present design of a bench into the record that results and reports are made of. */
 public final class Outcomes {
 
+  /** End of the key under which a solver tells a film's thickness as the substrate sees it. */
+  private static final String ALONG_NORMAL = ".thicknessAlongSubstrateNormalNm";
+
   private final Model model;
   private final Bench bench;
   private final ResolvedStack stack;
@@ -34,6 +36,7 @@ public final class Outcomes {
   private final double[] bins;
   private final @Nullable StandardErrors errors;
   private final double @Nullable [] neverEntered;
+  private final List<Quantity> quantities;
 
   private Outcomes(Bench bench) {
     this.bench = bench;
@@ -44,6 +47,7 @@ public final class Outcomes {
     Ledger.check(response, 0, model.channels().size(), stack.grid().wavelengthNm());
     this.errors = StandardErrors.of(bench, response, bins).orElse(null);
     this.neverEntered = neverEntered(bench);
+    this.quantities = model.prepared().describe(bench.design());
   }
 
   /**
@@ -85,7 +89,8 @@ public final class Outcomes {
         design,
         entries(),
         spectral(),
-        model.prepared().describe(bench.design()).stream()
+        quantities.stream()
+            .filter(q -> !q.key().endsWith(ALONG_NORMAL))
             .map(q -> new QuantityRecord(q.key(), q.label(), q.value(), q.unit()))
             .toList(),
         null);
@@ -211,23 +216,16 @@ public final class Outcomes {
         coherent,
         subcell,
         drawn == null ? List.of() : LayerWords.features(stack, drawn, bench.design()),
-        alongNormal(layer));
+        alongNormal(name));
   }
 
-  /** A film on facets is thicker along the normal of the substrate than along theirs. */
-  private @Nullable Double alongNormal(int layer) {
-    for (Boundary boundary : Boundary.of(stack.layers())) {
-      Optional<Texture> texture = boundary.texture().filter(Outcomes::hasOneAngle);
-      if (boundary.hasFilm(layer) && texture.isPresent()) {
-        double angle = Math.toRadians(texture.get().facetAngleDeg().in(bench.design()));
-        return bench.design().thicknessNm[layer] / Math.cos(angle);
-      }
-    }
-    return null;
-  }
-
-  private static boolean hasOneAngle(Texture texture) {
-    return texture.shape() == Texture.Shape.PYRAMID || texture.shape() == Texture.Shape.GROOVE;
+  /** What the solver says of a film on facets. */
+  private @Nullable Double alongNormal(String layer) {
+    return quantities.stream()
+        .filter(q -> q.key().equals(layer + ALONG_NORMAL))
+        .map(Quantity::value)
+        .findFirst()
+        .orElse(null);
   }
 
   private Spectral spectral() {

@@ -148,7 +148,7 @@ public record Outcome(
    * @param subcell subcell it belongs to, if any
    * @param features further properties in words
    * @param alongSubstrateNormalNm thickness of a film on facets along the normal of the substrate
-   *     in nm; null for films on flat boundaries and on facets of several angles
+   *     in nm, the mean over its facets; null for films on flat boundaries
    */
   public record StackEntry(
       String name,

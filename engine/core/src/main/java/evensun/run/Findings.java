@@ -120,11 +120,11 @@ final class Findings {
               "statistical-error",
               Severity.NOTE,
               searched ? "the optimum" : "all subcells",
-              "photocurrents carry a standard error of up to %s mA cm⁻² from the number of rays%s; geometrical optics on features of some micrometres errs by more"
+              "photocurrents carry a standard error of up to %s mA cm⁻² from the number of rays%s"
                   .formatted(
                       number(Math.max(1e-4, Math.rint(largest * 1e4) / 1e4)),
                       searched
-                          ? "; all designs were compared on the same rays, so that their differences are surer than their values"
+                          ? "; designs were compared on the same rays, so that their differences are surer than their values"
                           : "")));
     }
   }

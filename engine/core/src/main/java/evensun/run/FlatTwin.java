@@ -7,8 +7,10 @@ import evensun.result.Textured;
 import evensun.result.Textured.Outline;
 import evensun.result.Textured.RayPath;
 import evensun.result.Textured.Section;
+import evensun.scenario.Scenario;
 import evensun.spi.RaySection;
 import evensun.spi.Samples;
+import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 import org.jspecify.annotations.Nullable;
@@ -46,10 +48,20 @@ final class FlatTwin {
     RaySection.View view = rays.view(bench.design(), 0, w, RAYS);
     return new Section(
         wavelengthNm[w],
-        view.outlines().stream()
-            .map(o -> new Outline(o.above(), o.below(), boxed(o.xUm()), boxed(o.zUm())))
-            .toList(),
+        outlines(view.outlines(), bench.model().stack().scenario()),
         view.paths().stream().map(FlatTwin::path).toList());
+  }
+
+  /** Boundaries with the outer media by their names in the scenario. */
+  private static List<Outline> outlines(List<RaySection.Outline> drawn, Scenario scenario) {
+    List<Outline> outlines = new ArrayList<>();
+    for (int i = 0; i < drawn.size(); i++) {
+      RaySection.Outline o = drawn.get(i);
+      String above = i == 0 ? scenario.incidentMedium().name() : o.above();
+      String below = i == drawn.size() - 1 ? scenario.exit().name() : o.below();
+      outlines.add(new Outline(above, below, boxed(o.xUm()), boxed(o.zUm())));
+    }
+    return outlines;
   }
 
   private static RayPath path(RaySection.Path path) {

@@ -12,6 +12,7 @@ public interface DepthProfile {
    * @param channel which layer or component
    * @param depthNm [z] depths below the layer's upper face in nm, in [0, thickness]
    * @param into [z][w] absorbed fraction per nm
+   * @throws EvaluationFailed where the solver knows how much a channel absorbs, but not where
    */
   void evaluate(Design design, int incidence, Channel channel, double[] depthNm, double[][] into);
 }
