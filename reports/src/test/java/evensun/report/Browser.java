@@ -4,14 +4,17 @@ import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.time.Duration;
+import java.util.Base64;
 import java.util.List;
 import java.util.Map;
 import org.junit.jupiter.api.Assumptions;
+import org.openqa.selenium.By;
 import org.openqa.selenium.Dimension;
 import org.openqa.selenium.JavascriptExecutor;
 import org.openqa.selenium.chrome.ChromeDriver;
 import org.openqa.selenium.chrome.ChromeDriverService;
 import org.openqa.selenium.chrome.ChromeOptions;
+import org.openqa.selenium.interactions.Actions;
 import org.openqa.selenium.logging.LogEntry;
 import org.openqa.selenium.logging.LogType;
 import org.openqa.selenium.logging.LoggingPreferences;
@@ -83,6 +86,26 @@ final class Browser implements AutoCloseable {
     Map<String, Object> metrics =
         Map.of("width", px, "height", 900, "deviceScaleFactor", 1, "mobile", false);
     driver.executeCdpCommand("Emulation.setDeviceMetricsOverride", metrics);
+  }
+
+  /** The page printed on paper of that size in inches. */
+  byte[] print(double widthInch, double heightInch) {
+    Map<String, Object> paper =
+        Map.of("paperWidth", widthInch, "paperHeight", heightInch, "printBackground", true);
+    Object pdf = driver.executeCdpCommand("Page.printToPDF", paper).get("data");
+    return Base64.getDecoder().decode(pdf.toString());
+  }
+
+  /** Presses a key where the focus is. */
+  void press(CharSequence key) {
+    driver.switchTo().activeElement().sendKeys(key);
+  }
+
+  /** Moves the pointer to the middle of an element, or of a part of it. */
+  void point(String selector, int dx, int dy) {
+    new Actions(driver)
+        .moveToElement(driver.findElement(By.cssSelector(selector)), dx, dy)
+        .perform();
   }
 
   /** Processor time that the page's thread has used so far, in s. */

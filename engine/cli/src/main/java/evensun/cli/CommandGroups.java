@@ -15,7 +15,7 @@ final class CommandGroups {
     GROUPS.put("Prepare", List.of("new", "materials", "gaps", "schema"));
     GROUPS.put("Decide", List.of("assess", "design", "compare", "report", "runs"));
     GROUPS.put("Check", List.of("verify", "explain"));
-    GROUPS.put("Extend", List.of("plugins"));
+    GROUPS.put("Extend", List.of("plugins", "completion"));
   }
 
   private CommandGroups() {}

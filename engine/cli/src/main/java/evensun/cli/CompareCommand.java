@@ -54,7 +54,10 @@ final class CompareCommand extends BaseCommand {
           Place.option("RUN"), "two to six runs can be compared, but there were " + names.size());
     }
     List<NamedRun> runs =
-        names.stream().map(name -> new NamedRun(name, StoredRuns.read(name).result())).toList();
+        names.stream()
+            .map(StoredRuns::read)
+            .map(run -> new NamedRun(run.name(), run.result()))
+            .toList();
     Path page = out == null ? null : PageFile.write(out, CompareWriter.write(runs), force);
     String path = page == null ? "" : page.toString();
     if (global().json()) {

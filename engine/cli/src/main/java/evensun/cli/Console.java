@@ -5,6 +5,7 @@ import java.io.FileOutputStream;
 import java.io.InputStream;
 import java.io.PrintStream;
 import java.nio.charset.StandardCharsets;
+import java.util.Map;
 
 /**
  * Where a command reads and writes, always UTF-8: results on {@code out}, everything else on {@code
@@ -31,6 +32,16 @@ public record Console(
         stream(FileDescriptor.err),
         Boolean.getBoolean("evensun.terminal.out"),
         Boolean.getBoolean("evensun.terminal.err"));
+  }
+
+  /** Whether letters on {@code out} may be bold: on a terminal, and never against NO_COLOR. */
+  boolean styled() {
+    return styled(System.getenv());
+  }
+
+  boolean styled(Map<String, String> environment) {
+    boolean refused = !environment.getOrDefault("NO_COLOR", "").isEmpty();
+    return outIsTerminal && !refused && !"dumb".equals(environment.get("TERM"));
   }
 
   private static PrintStream stream(FileDescriptor descriptor) {

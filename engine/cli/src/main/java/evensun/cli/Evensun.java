@@ -8,6 +8,9 @@ import java.util.concurrent.Callable;
 import java.util.function.Supplier;
 import picocli.CommandLine;
 import picocli.CommandLine.Command;
+import picocli.CommandLine.Help.Ansi;
+import picocli.CommandLine.Help.Ansi.Style;
+import picocli.CommandLine.Help.ColorScheme;
 import picocli.CommandLine.Mixin;
 
 /** The program itself: global options and the list of commands. */
@@ -42,6 +45,7 @@ final class Evensun implements Callable<Integer> {
     commands.put("schema", SchemaCommand::new);
     commands.put("verify", VerifyCommand::new);
     commands.put("explain", ExplainCommand::new);
+    commands.put("completion", CompletionCommand::new);
     return commands;
   }
 
@@ -66,6 +70,7 @@ final class Evensun implements Callable<Integer> {
       line.addSubcommand(command.get());
     }
     line.setUsageHelpWidth(100);
+    line.setColorScheme(letters(console.styled()));
     line.setCaseInsensitiveEnumValuesAllowed(true);
     line.setOut(new java.io.PrintWriter(console.out(), true));
     line.setErr(new java.io.PrintWriter(console.err(), true));
@@ -82,6 +87,16 @@ final class Evensun implements Callable<Integer> {
     line.setParameterExceptionHandler(errors::wrongCommandLine);
     line.setExecutionExceptionHandler(errors::failed);
     return line;
+  }
+
+  /** Bold and italic letters, no colours: readable on every background. */
+  private static ColorScheme letters(boolean styled) {
+    return new ColorScheme.Builder(styled ? Ansi.ON : Ansi.OFF)
+        .commands(Style.bold)
+        .options(Style.bold)
+        .parameters(Style.italic)
+        .optionParams(Style.italic)
+        .build();
   }
 
   Console console() {

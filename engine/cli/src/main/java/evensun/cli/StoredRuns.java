@@ -29,7 +29,13 @@ final class StoredRuns {
    * @param folder its folder
    * @param result its result
    */
-  record StoredRun(Path folder, RunResult result) {}
+  record StoredRun(Path folder, RunResult result) {
+
+    /** The folder's own name; a page names no path of this machine. */
+    String name() {
+      return folder.toAbsolutePath().normalize().getFileName().toString();
+    }
+  }
 
   /**
    * Reads the run a person names.
