@@ -1,11 +1,14 @@
 package evensun.bench;
 
 import evensun.bench.search.SearchTables;
+import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.Collection;
+import java.util.List;
 import java.util.Locale;
 import org.openjdk.jmh.profile.GCProfiler;
 import org.openjdk.jmh.results.RunResult;
+import org.openjdk.jmh.runner.NoBenchmarksException;
 import org.openjdk.jmh.runner.Runner;
 import org.openjdk.jmh.runner.RunnerException;
 import org.openjdk.jmh.runner.options.Options;
@@ -18,6 +21,9 @@ public final class Main {
 
   private static final String USAGE =
       "usage: java -jar benchmarks.jar [REGEX] [--forks N] [--seconds S], or search [--seeds N] [--cold N] [PROBLEM...]";
+
+  /** The class of benchmarks that want a fresh virtual machine each time. */
+  private static final String COLD = "StartBenchmark";
 
   private Main() {}
 
@@ -46,7 +52,21 @@ public final class Main {
       System.err.println(USAGE);
       System.exit(2);
     }
-    print(new Runner(options(include, forks, seconds)).run());
+    List<RunResult> results = new ArrayList<>(run(warm(include, forks, seconds)));
+    results.addAll(run(cold(include, forks)));
+    if (results.isEmpty()) {
+      System.err.println("no benchmark is called \"" + include + "\"; " + USAGE);
+      System.exit(2);
+    }
+    print(results);
+  }
+
+  private static Collection<RunResult> run(Options options) throws RunnerException {
+    try {
+      return new Runner(options).run();
+    } catch (NoBenchmarksException e) {
+      return List.of();
+    }
   }
 
   private static String regex(String arg) {
@@ -56,10 +76,23 @@ public final class Main {
     return arg;
   }
 
-  private static Options options(String include, int forks, double seconds) {
+  /** Once in a fresh virtual machine each time, four for every fork of the others. */
+  private static Options cold(String include, int forks) {
+    return new OptionsBuilder()
+        .include("^(?=.*" + COLD + ")(?=.*(?:" + include + "))")
+        .forks(4 * forks)
+        .warmupIterations(0)
+        .measurementIterations(1)
+        .jvmArgs("-Xmx512m", "-XX:+UseSerialGC", "-XX:TieredStopAtLevel=1")
+        .verbosity(VerboseMode.SILENT)
+        .build();
+  }
+
+  private static Options warm(String include, int forks, double seconds) {
     TimeValue time = TimeValue.milliseconds(Math.round(1000 * seconds));
     return new OptionsBuilder()
         .include(include)
+        .exclude(COLD)
         .forks(forks)
         .warmupIterations(6)
         .warmupTime(time)
@@ -74,7 +107,7 @@ public final class Main {
   private static void print(Collection<RunResult> results) {
     System.out.printf(
         Locale.ROOT,
-        "Java %s, %s%n%-46s %10s %10s %14s %12s%n",
+        "Java %s, %s%n%-56s %10s %10s %14s %12s%n",
         System.getProperty("java.version"),
         System.getProperty("os.arch"),
         "benchmark",
@@ -88,19 +121,26 @@ public final class Main {
   }
 
   private static void print(RunResult result) {
-    String name = result.getParams().getBenchmark();
+    String name = result.getParams().getBenchmark().substring("evensun.bench.".length());
     String size = result.getParams().getParam("size");
-    String[] parts = (size == null ? "12x181" : size).split("x", -1);
-    double elements = Double.parseDouble(parts[0]) * Double.parseDouble(parts[1]);
+    String material = result.getParams().getParam("material");
     double median = result.getPrimaryResult().getStatistics().getPercentile(50);
     System.out.printf(
         Locale.ROOT,
-        "%-46s %10.2f %10.2f %14.3f %12.3f%n",
-        name.substring("evensun.bench.".length()) + (size == null ? "" : " " + size),
+        "%-56s %10.2f %10.2f %14s %12s%n",
+        name + (size == null ? "" : " " + size) + (material == null ? "" : " " + material),
         median,
         result.getPrimaryResult().getStatistics().getMin(),
-        1000 * median / elements,
-        allocatedBytes(result));
+        name.matches("(ThinFilm|Growth).*") ? perElement(median, size) : "",
+        Double.isNaN(allocatedBytes(result))
+            ? ""
+            : String.format(Locale.ROOT, "%.3f", allocatedBytes(result)));
+  }
+
+  private static String perElement(double median, String size) {
+    String[] parts = (size == null ? "12x181" : size).split("x", -1);
+    double elements = Double.parseDouble(parts[0]) * Double.parseDouble(parts[1]);
+    return String.format(Locale.ROOT, "%.3f", 1000 * median / elements);
   }
 
   private static double allocatedBytes(RunResult result) {

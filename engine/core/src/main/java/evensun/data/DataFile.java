@@ -1,13 +1,10 @@
 package evensun.data;
 
-import java.io.BufferedReader;
 import java.io.IOException;
 import java.io.InputStream;
-import java.io.InputStreamReader;
 import java.io.UncheckedIOException;
 import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
-import java.util.Arrays;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -50,49 +47,57 @@ public final class DataFile {
     if (stream == null) {
       throw new IllegalStateException("data file " + resource + " is missing from the program");
     }
-    try (BufferedReader in =
-        new BufferedReader(new InputStreamReader(stream, StandardCharsets.UTF_8), 1 << 15)) {
-      return parse(resource, in, rows);
+    try (stream) {
+      return parse(resource, stream.readAllBytes(), rows);
     } catch (IOException e) {
       throw new UncheckedIOException(e);
     }
   }
 
-  private static DataFile parse(String name, BufferedReader in, boolean rows) throws IOException {
+  private static DataFile parse(String name, byte[] bytes, boolean rows) {
     Map<String, List<String>> header = new LinkedHashMap<>();
-    String line = in.readLine();
-    while (line != null && line.startsWith("#")) {
+    int at = 0;
+    while (at < bytes.length && bytes[at] == '#') {
+      int end = lineEnd(bytes, at);
+      String line = new String(bytes, at, end - at, StandardCharsets.UTF_8);
       int colon = line.indexOf(": ");
       header
           .computeIfAbsent(line.substring(2, colon), key -> new ArrayList<>())
           .add(line.substring(colon + 2).strip());
-      line = in.readLine();
+      at = end + 1;
     }
-    if (line == null || !rows) {
-      return new DataFile(name, header, new double[0][]);
-    }
-    return new DataFile(name, header, columns(in, line.split(",").length));
+    return new DataFile(
+        name, header, rows && at < bytes.length ? columns(bytes, at) : new double[0][]);
   }
 
-  private static double[][] columns(BufferedReader in, int count) throws IOException {
-    double[][] columns = new double[count][256];
+  private static int lineEnd(byte[] bytes, int from) {
+    int end = from;
+    while (end < bytes.length && bytes[end] != '\n') {
+      end++;
+    }
+    return end;
+  }
+
+  /** The numbers after a line of column names. */
+  private static double[][] columns(byte[] bytes, int from) {
+    int at = lineEnd(bytes, from);
+    int count = 1;
+    for (int i = from; i < at; i++) {
+      count += bytes[i] == ',' ? 1 : 0;
+    }
     int size = 0;
-    for (String line = in.readLine(); line != null; line = in.readLine()) {
-      if (size == columns[0].length) {
-        for (int c = 0; c < count; c++) {
-          columns[c] = Arrays.copyOf(columns[c], 2 * size);
-        }
-      }
-      int from = 0;
-      for (int c = 0; c < count; c++) {
-        int to = c + 1 < count ? line.indexOf(',', from) : line.length();
-        columns[c][size] = Decimals.parse(line, from, to);
-        from = to + 1;
-      }
+    for (int i = at + 1; i < bytes.length; i++) {
+      size += bytes[i] == '\n' ? 1 : 0;
+    }
+    if (bytes[bytes.length - 1] != '\n') {
       size++;
     }
-    for (int c = 0; c < count; c++) {
-      columns[c] = Arrays.copyOf(columns[c], size);
+    double[][] columns = new double[count][size];
+    Decimals numbers = new Decimals(bytes, at + 1);
+    for (int row = 0; row < size; row++) {
+      for (double[] column : columns) {
+        column[row] = numbers.next();
+      }
     }
     return columns;
   }

@@ -8,17 +8,17 @@ package evensun.effectivemedium.kernel;
  * is not negative (Cauchy–Schwarz): g is a sum of the εᵢ and ε with positive weights. So g maps the
  * cone that the εᵢ span into itself, and inside it has one fixed point only, to which its iteration
  * converges (Denjoy–Wolff): the root that goes over into each εᵢ as its fraction becomes one. This
- * kernel takes Newton's steps from the roots at the wavelengths before, keeps those that stay in
+ * kernel takes Halley's steps from the roots at the wavelengths before, keeps those that stay in
  * the cone, and takes a step of g instead of those that leave it. A root found in the cone is the
  * physical one.
  */
 public final class SetBruggeman {
 
-  private static final int NEWTON_STEPS = 60;
+  private static final int HALLEY_STEPS = 60;
   private static final int ALL_STEPS = 20_000;
 
-  /** Square of the relative step below which the next Newton step is below rounding. */
-  private static final double CLOSE = 1e-17;
+  /** Square of the relative step, whose cube the next would be, below which that is lost. */
+  private static final double CLOSE = 1e-11;
 
   /** Square of the relative step below which the iteration of g has converged. */
   private static final double DONE = 1e-30;
@@ -106,46 +106,65 @@ public final class SetBruggeman {
 
   private void solve(double[] fraction, double d) {
     for (int i = 0; i < ALL_STEPS; i++) {
-      boolean newton = newtonStep(fraction, d) && i < NEWTON_STEPS;
-      if (!newton || !inside(rootRe + stepRe, rootIm + stepIm)) {
-        newton = false;
+      boolean halley = halleyStep(fraction, d) && i < HALLEY_STEPS;
+      if (!halley || !inside(rootRe + stepRe, rootIm + stepIm)) {
+        halley = false;
         contractingStep(fraction, d);
       }
       rootRe += stepRe;
       rootIm += stepIm;
       double size = rootRe * rootRe + rootIm * rootIm;
       double move = stepRe * stepRe + stepIm * stepIm;
-      if (move <= size * (newton ? CLOSE : DONE)) {
+      if (move <= size * (halley ? CLOSE : DONE)) {
         return;
       }
     }
   }
 
-  /** Newton's step for 1 − (1 + D) ε F(ε) = 0; false where the slope vanishes. */
-  private boolean newtonStep(double[] fraction, double d) {
+  /**
+   * Halley's step 2fs/(2s² − f f″) for f = 1/(1 + D) − ε F(ε) = 0, s = −f′; false where it has no
+   * end. With r = 1/(εᵢ + Dε), F = Σ fᵢ r, G = Σ fᵢ r², H = Σ fᵢ r³: s = F − DεG, f″ = 2D(G − DεH).
+   */
+  private boolean halleyStep(double[] fraction, double d) {
     double fRe = 0;
     double fIm = 0;
     double gRe = 0;
     double gIm = 0;
+    double hRe = 0;
+    double hIm = 0;
+    double eRe = d * rootRe;
+    double eIm = d * rootIm;
     for (int c = 0; c < fraction.length; c++) {
-      double xRe = epsRe[c] + d * rootRe;
-      double xIm = epsIm[c] + d * rootIm;
+      double xRe = epsRe[c] + eRe;
+      double xIm = epsIm[c] + eIm;
       double inverse = 1 / (xRe * xRe + xIm * xIm);
       double rRe = xRe * inverse;
       double rIm = -xIm * inverse;
-      fRe += fraction[c] * rRe;
-      fIm += fraction[c] * rIm;
-      gRe += fraction[c] * (rRe * rRe - rIm * rIm);
-      gIm += fraction[c] * 2 * rRe * rIm;
+      double oneRe = fraction[c] * rRe;
+      double oneIm = fraction[c] * rIm;
+      double twoRe = oneRe * rRe - oneIm * rIm;
+      double twoIm = oneRe * rIm + oneIm * rRe;
+      fRe += oneRe;
+      fIm += oneIm;
+      gRe += twoRe;
+      gIm += twoIm;
+      hRe += twoRe * rRe - twoIm * rIm;
+      hIm += twoRe * rIm + twoIm * rRe;
     }
     double valueRe = 1 / (1 + d) - (rootRe * fRe - rootIm * fIm);
     double valueIm = -(rootRe * fIm + rootIm * fRe);
-    double slopeRe = fRe - d * (rootRe * gRe - rootIm * gIm);
-    double slopeIm = fIm - d * (rootRe * gIm + rootIm * gRe);
-    double square = slopeRe * slopeRe + slopeIm * slopeIm;
+    double slopeRe = fRe - (eRe * gRe - eIm * gIm);
+    double slopeIm = fIm - (eRe * gIm + eIm * gRe);
+    double bendRe = d * (gRe - (eRe * hRe - eIm * hIm));
+    double bendIm = d * (gIm - (eRe * hIm + eIm * hRe));
+    double underRe = slopeRe * slopeRe - slopeIm * slopeIm - (valueRe * bendRe - valueIm * bendIm);
+    double underIm = 2 * slopeRe * slopeIm - (valueRe * bendIm + valueIm * bendRe);
+    double overRe = valueRe * slopeRe - valueIm * slopeIm;
+    double overIm = valueRe * slopeIm + valueIm * slopeRe;
+    double square = underRe * underRe + underIm * underIm;
     double inverse = 1 / square;
-    stepRe = (valueRe * slopeRe + valueIm * slopeIm) * inverse;
-    stepIm = (valueIm * slopeRe - valueRe * slopeIm) * inverse;
+    stepRe = (overRe * underRe + overIm * underIm) * inverse;
+    stepIm = (overIm * underRe - overRe * underIm) * inverse;
     return square > 0;
   }
 
