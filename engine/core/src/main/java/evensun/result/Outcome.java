@@ -38,15 +38,25 @@ public record Outcome(
   /** Subcells whose currents differ by less than this are called balanced, in mA cm⁻². */
   public static final double BALANCED_MA_PER_CM2 = 0.05;
 
-  /** Statistical error of the matched current: that of the weakest subcell, null where none. */
+  /**
+   * Statistical error of the matched current, null where there is none: the largest of the subcells
+   * that may be the weakest, those within {@link #BALANCED_MA_PER_CM2} of it.
+   */
   public @Nullable Double matchedStandardErrorMaPerCm2() {
-    return subcells.stream()
-        .filter(s -> matchedCurrentMaPerCm2 != null)
-        .filter(s -> matchedCurrentMaPerCm2.equals(s.photocurrentMaPerCm2()))
-        .map(SubcellOutcome::standardErrorMaPerCm2)
-        .filter(Objects::nonNull)
-        .findFirst()
-        .orElse(null);
+    Double matched = matchedCurrentMaPerCm2;
+    return matched == null
+        ? null
+        : subcells.stream()
+            .filter(s -> mayBeWeakest(s, matched))
+            .map(SubcellOutcome::standardErrorMaPerCm2)
+            .filter(Objects::nonNull)
+            .max(Double::compare)
+            .orElse(null);
+  }
+
+  private static boolean mayBeWeakest(SubcellOutcome subcell, double matched) {
+    Double current = subcell.photocurrentMaPerCm2();
+    return current != null && current - matched < BALANCED_MA_PER_CM2;
   }
 
   /** This outcome with its electrical side and the currents after collection. */

@@ -27,10 +27,10 @@ import java.util.Optional;
 import java.util.Set;
 
 /**
- * The found design evaluated in other ways: with a finer grid, with the solver's plain twin, with
- * every other loaded solver that takes the stack, and with every other library table of its
- * materials. The differences are an error budget of what was tried, not of everything that may be
- * wrong.
+ * The found design evaluated in other ways: with a finer grid, with the solver's plain twin or with
+ * other rays, with every other loaded solver that takes the stack, and with every other library
+ * table of its materials. The differences are an error budget of what was tried, not of everything
+ * that may be wrong.
  */
 final class SecondOpinions {
 
@@ -56,7 +56,11 @@ final class SecondOpinions {
             "numerics",
             "half the wavelength step (" + Findings.number(finer.stepNm()) + " nm)",
             scenario.withGrid(finer)));
-    referenceKernel(scenario, opinions);
+    if (preparation.choice().statistical()) {
+      opinions.add(otherRays(scenario));
+    } else {
+      referenceKernel(scenario, opinions);
+    }
     otherSolvers(scenario, opinions);
     Set<String> names = new LinkedHashSet<>();
     preparation.stack().slots().stream().map(MaterialSlot::name).forEach(names::add);
@@ -66,6 +70,11 @@ final class SecondOpinions {
       }
     }
     return opinions;
+  }
+
+  private Opinion otherRays(Scenario scenario) {
+    long seed = preparation.seed() + 1;
+    return opinion("numerics", "other rays (seed " + seed + ")", scenario.withSeed(seed));
   }
 
   private void referenceKernel(Scenario scenario, List<Opinion> opinions) {

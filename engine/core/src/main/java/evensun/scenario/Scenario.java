@@ -85,6 +85,25 @@ public record Scenario(
         measured);
   }
 
+  /** This scenario with another seed of its search, if it has one, and of rays. */
+  public Scenario withSeed(long seed) {
+    return new Scenario(
+        source,
+        title,
+        light,
+        grid,
+        materials,
+        incidentMedium,
+        stack,
+        exit,
+        subcells,
+        connection,
+        device,
+        solver,
+        search.map(spec -> spec.withSeed(seed)),
+        measured);
+  }
+
   /** This scenario with one material replaced by another wherever it stands. */
   public Scenario withMaterial(String name, String other) {
     return new Scenario(

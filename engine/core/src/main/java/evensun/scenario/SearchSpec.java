@@ -29,6 +29,11 @@ public record SearchSpec(
     limits = List.copyOf(limits);
   }
 
+  /** This search with another seed. */
+  SearchSpec withSeed(long other) {
+    return new SearchSpec(vary, limits, aim, other, evaluations, timeSeconds, place);
+  }
+
   /** Every quantity with its own range; that of a tied one follows from what it follows. */
   public List<VarySpec> ranges() {
     return vary.stream().map(this::withRange).toList();

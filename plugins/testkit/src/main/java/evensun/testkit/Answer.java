@@ -45,7 +45,11 @@ public final class Answer {
         response.reflectance[0].clone(),
         response.transmittance[0].clone(),
         absorptance,
-        EXACT + SIGMAS * largest(response.absorptanceStandardError));
+        EXACT
+            + SIGMAS
+                * Math.max(
+                    largest(response.absorptanceStandardError),
+                    largest(response.sumStandardError)));
   }
 
   /** R + T + Σ A at one wavelength; 1 when no light is lost or made. */
@@ -57,12 +61,12 @@ public final class Answer {
     return total;
   }
 
-  private static double largest(double[][] rows) {
+  private static double largest(double[]... rows) {
     double largest = 0;
     if (rows != null) {
       for (double[] row : rows) {
-        for (double value : row) {
-          largest = Math.max(largest, value);
+        for (int i = 0; row != null && i < row.length; i++) {
+          largest = Math.max(largest, row[i]);
         }
       }
     }

@@ -13,6 +13,7 @@ public final class Laws {
     return Stream.of(
             SpectrumLaws.all().stream(),
             StackLaws.all().stream(),
+            FeatureLaws.all().stream(),
             RepeatLaws.all().stream(),
             CallLaws.all().stream(),
             AbilityLaws.all().stream(),

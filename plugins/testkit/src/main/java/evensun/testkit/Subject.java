@@ -6,6 +6,7 @@ import evensun.spi.PreparedSolver;
 import evensun.spi.Problem;
 import evensun.spi.Response;
 import evensun.spi.Services;
+import java.util.Arrays;
 import java.util.HashMap;
 import java.util.Map;
 import java.util.Optional;
@@ -65,7 +66,12 @@ public record Subject(OpticalSolver solver, Services services, Map<String, Strin
 
   /** Prepares, evaluates once and releases everything. */
   Answer answer(StackCase stack) {
-    try (PreparedSolver prepared = prepare(stack);
+    return answer(stack.problem(), stack);
+  }
+
+  /** As above, for a problem about the stack of a case. */
+  Answer answer(Problem problem, StackCase stack) {
+    try (PreparedSolver prepared = prepare(problem, stack);
         Evaluator evaluator = prepared.newEvaluator()) {
       Response response = spectra(prepared, stack);
       evaluator.evaluate(stack.design(), response);
@@ -80,8 +86,29 @@ public record Subject(OpticalSolver solver, Services services, Map<String, Strin
     Response response = Response.spectra(1, channels, wavelengths);
     if (solver.traits().statistical()) {
       response.absorptanceStandardError = new double[channels][wavelengths];
+      askForErrors(response, channels, wavelengths);
     }
     return response;
+  }
+
+  /**
+   * Only sums tell the error of what is transmitted, and of what is reflected, the rest: one sum of
+   * each per wavelength.
+   */
+  private static void askForErrors(Response response, int channels, int wavelengths) {
+    int sums = 2 * wavelengths;
+    response.weight = new double[sums * channels][];
+    response.transmittanceWeight = new double[sums][];
+    response.sum = new double[sums];
+    response.sumStandardError = new double[sums];
+    for (int w = 0; w < wavelengths; w++) {
+      double[] here = new double[wavelengths];
+      here[w] = 1;
+      response.transmittanceWeight[w] = here;
+      response.transmittanceWeight[wavelengths + w] = here;
+      int first = (wavelengths + w) * channels;
+      Arrays.fill(response.weight, first, first + channels, here);
+    }
   }
 
   /** What stands in a response, by layer. */

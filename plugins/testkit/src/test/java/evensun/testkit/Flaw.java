@@ -1,5 +1,10 @@
 package evensun.testkit;
 
+import evensun.spi.Feature;
+import evensun.spi.Mixture;
+import evensun.spi.Scatter;
+import evensun.spi.Texture;
+
 /** A mistake that a solver may make, and the law that is meant to catch it. */
 enum Flaw {
   NONE(""),
@@ -13,6 +18,9 @@ enum Flaw {
   CLIPS_THICKNESS("splitting"),
   PREFERS_A_DIRECTION("order-reversal"),
   SMOOTHS_OVER_WAVELENGTHS("wavelength-by-wavelength"),
+  MISTAKES_MIXTURES("mixture-of-one"),
+  MISTAKES_SCATTER("scatter-nothing"),
+  MISTAKES_TEXTURES("even-surface"),
   REMEMBERS("same-input-same-output"),
   SHARES_A_WORKSPACE("threads"),
   SHUFFLES_A_BATCH("batch"),
@@ -32,5 +40,15 @@ enum Flaw {
 
   Flaw(String law) {
     this.law = law;
+  }
+
+  /** Whether a solver with this flaw takes a feature for something else. */
+  boolean mistakes(Feature feature) {
+    return switch (this) {
+      case MISTAKES_MIXTURES -> feature instanceof Mixture;
+      case MISTAKES_SCATTER -> feature instanceof Scatter;
+      case MISTAKES_TEXTURES -> feature instanceof Texture;
+      default -> false;
+    };
   }
 }

@@ -24,7 +24,7 @@ class LawsTest {
     List<LawReport> reports =
         ContractCheck.run(Subject.alone(new TwoBeam(Flaw.NONE)), LIMIT, report -> {});
     assertThat(reports).noneMatch(report -> report.status() == Status.FAILED);
-    assertThat(reports).filteredOn(report -> report.status() == Status.PASSED).hasSize(19);
+    assertThat(reports).filteredOn(report -> report.status() == Status.PASSED).hasSize(22);
     assertThat(reports)
         .filteredOn(report -> report.status() == Status.PASSED)
         .allMatch(report -> report.tried() > 0);

@@ -6,10 +6,13 @@ import evensun.spi.Design;
 import evensun.spi.Evaluator;
 import evensun.spi.Gradient;
 import evensun.spi.Layer;
+import evensun.spi.Mixture;
 import evensun.spi.OpticalSolver;
 import evensun.spi.PreparedSolver;
 import evensun.spi.Problem;
+import evensun.spi.Scatter;
 import evensun.spi.Services;
+import evensun.spi.Texture;
 import evensun.spi.Traits;
 import evensun.spi.UnsupportedProblem;
 import java.util.List;
@@ -21,6 +24,9 @@ import java.util.stream.IntStream;
  * every law. Built with a flaw it breaks one.
  */
 final class TwoBeam implements OpticalSolver {
+
+  /** Kinds of features that it takes, at their limits alone, where they make no difference. */
+  private static final Set<String> KINDS = Set.of(Mixture.KIND, Scatter.KIND, Texture.KIND);
 
   private final Flaw flaw;
 
@@ -35,7 +41,7 @@ final class TwoBeam implements OpticalSolver {
 
   @Override
   public Traits traits() {
-    return new Traits(Set.of(), Set.of(Gradient.class, DepthProfile.class), true, true, false);
+    return new Traits(KINDS, Set.of(Gradient.class, DepthProfile.class), true, true, false);
   }
 
   @Override
@@ -44,8 +50,9 @@ final class TwoBeam implements OpticalSolver {
       throw new UnsupportedProblem("two-beam takes no options; leave them out");
     }
     for (Layer layer : problem.layers()) {
-      if (!layer.features().isEmpty() && flaw != Flaw.IGNORES_UNKNOWN_FEATURES) {
-        throw new UnsupportedProblem("two-beam takes no features; choose another solver");
+      if (!layer.features().stream().allMatch(f -> KINDS.contains(f.kind()))
+          && flaw != Flaw.IGNORES_UNKNOWN_FEATURES) {
+        throw new UnsupportedProblem("two-beam takes no such features; choose another solver");
       }
     }
     TwoBeamEvaluator shared = new TwoBeamEvaluator(problem, flaw);

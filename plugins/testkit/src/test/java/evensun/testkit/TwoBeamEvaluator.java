@@ -120,6 +120,9 @@ final class TwoBeamEvaluator implements Evaluator {
     if (flaw == Flaw.CLIPS_THICKNESS) {
       thicknessNm = Math.min(thicknessNm, 50);
     }
+    if (problem.layers().get(layer).features().stream().anyMatch(flaw::mistakes)) {
+      thicknessNm *= 1.5;
+    }
     if (flaw == Flaw.TAKES_NAN_FOR_ZERO && Double.isNaN(thicknessNm)) {
       thicknessNm = 0;
     }
