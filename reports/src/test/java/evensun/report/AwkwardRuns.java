@@ -233,7 +233,8 @@ final class AwkwardRuns {
             null,
             List.of(),
             null,
-            null);
+            null,
+            "largest");
     return with(
         r,
         "Failed search",

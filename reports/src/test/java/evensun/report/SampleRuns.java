@@ -233,7 +233,8 @@ final class SampleRuns {
         null,
         List.of("Two distinct optima were found; the second is 0.21 mA cm⁻² worse."),
         null,
-        null);
+        null,
+        "largest");
   }
 
   private static List<MaterialUse> materials(Outcome found) {

@@ -18,6 +18,7 @@ import java.nio.file.Path;
 import java.time.Instant;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.OptionalInt;
 import org.jspecify.annotations.Nullable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
@@ -49,7 +50,10 @@ final class DesignCommand extends BaseCommand {
   @Option(
       names = "--resume",
       paramLabel = "RUN",
-      description = "Goes on with a run that was stopped; it ends where it would have ended.")
+      description = {
+        "Goes on with a run that was stopped; it ends where it would have ended. With --out the run",
+        "stays as it is."
+      })
   Path resume;
 
   @Option(
@@ -71,6 +75,15 @@ final class DesignCommand extends BaseCommand {
         "search had missed something; done unasked where it takes less than two seconds."
       })
   boolean exhaustive;
+
+  @Option(
+      names = "--point",
+      paramLabel = "N",
+      description = {
+        "Reports on this design of a front instead of its best compromise; with --resume of a",
+        "finished run no search is repeated."
+      })
+  Integer point;
 
   @Override
   public Integer call() {
@@ -108,8 +121,9 @@ final class DesignCommand extends BaseCommand {
     return ScenarioInput.read(scenarioFile, settings, console().in());
   }
 
+  /** Goes on in the folder of the run, unless another is named. */
   private RunFolder folder(Scenario scenario) {
-    if (resume != null) {
+    if (resume != null && output.out == null) {
       return RunFolder.open(resume);
     }
     Path folder =
@@ -133,7 +147,7 @@ final class DesignCommand extends BaseCommand {
     ProgressLine progress = new ProgressLine(terminal, folder, job.aimUnit());
     try {
       return job.run(
-          searchSettings, progress, savedState(), interruption, exhaustive, repeatCommand());
+          searchSettings, progress, savedState(), interruption, order(), repeatCommand());
     } finally {
       progress.end();
       progress.save();
@@ -161,8 +175,14 @@ final class DesignCommand extends BaseCommand {
     }
   }
 
+  private DesignJob.Order order() {
+    return new DesignJob.Order(
+        exhaustive, point == null ? OptionalInt.empty() : OptionalInt.of(point));
+  }
+
   private String repeatCommand() {
     String command = CommandText.of("design", RunFiles.SCENARIO, settings);
-    return exhaustive ? command + " --exhaustive" : command;
+    command += exhaustive ? " --exhaustive" : "";
+    return point == null ? command : command + " --point " + point;
   }
 }

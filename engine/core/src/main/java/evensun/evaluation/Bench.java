@@ -21,29 +21,40 @@ public final class Bench implements AutoCloseable {
   private final Design design;
   private final double[] bandgapEv;
   private final Evaluator evaluator;
+  private final List<LightSum> lightSums;
   private final Response sums;
   private final Optional<Gradient> gradient;
   private final Tie[] ties;
 
-  Bench(Model model, Model.Filling filling) {
+  Bench(Model model, Model.Filling filling, List<LightSum> lightSums) {
     this.model = model;
     this.filling = filling;
     this.design = filling.drawn(Design.of(model.problem()));
     this.bandgapEv = model.stack().slots().stream().mapToDouble(s -> s.fillValue()).toArray();
     this.evaluator = model.prepared().newEvaluator();
-    this.sums = currentSums(model);
+    this.lightSums = List.copyOf(lightSums);
+    this.sums = sums(model, lightSums);
     // A row that changes with a thickness is unknown to the solver, and so to its derivatives.
     this.gradient =
         filling.followsThickness() ? Optional.empty() : evaluator.ability(Gradient.class);
     this.ties = Tie.of(model.stack()).toArray(Tie[]::new);
   }
 
-  private static Response currentSums(Model model) {
+  /** The currents of the subcells first, then the further sums. */
+  private static Response sums(Model model, List<LightSum> lightSums) {
     int count = model.stack().subcells().size();
+    int channels = model.channels().size();
     double[] bins = model.problem().incidentMaPerCm2().toArray();
-    Response response = Response.sums(count, model.channels().size());
+    Response response = Response.sums(count + lightSums.size(), channels);
     for (int s = 0; s < count; s++) {
       weigh(response, s, model, bins);
+    }
+    for (int i = 0; i < lightSums.size(); i++) {
+      int row = count + i;
+      LightSum sum = lightSums.get(i);
+      double[] weight = sum.weight().toArray();
+      sum.channels().forEach(c -> response.weight[row * channels + c] = weight);
+      response.transmittanceWeight[row] = sum.transmitted() ? weight : null;
     }
     return response;
   }
@@ -167,6 +178,25 @@ public final class Bench implements AutoCloseable {
     return shares.sumStandardError;
   }
 
+  /**
+   * One of the sums the bench was made with, of the design whose currents were asked for last.
+   *
+   * @throws java.util.NoSuchElementException for a sum that it was not made with
+   */
+  public double sum(LightSum wanted) {
+    for (int i = 0; i < lightSums.size(); i++) {
+      if (lightSums.get(i) == wanted) {
+        return sums.sum[sums.sum.length - lightSums.size() + i];
+      }
+    }
+    throw new java.util.NoSuchElementException("the bench takes no such sum");
+  }
+
+  /** Number of sums that {@link #currentsAndGradient} differentiates. */
+  int sumCount() {
+    return sums.sum.length;
+  }
+
   /** Whether {@link #currentsAndGradient} is there. */
   public boolean hasGradient() {
     return gradient.isPresent();
@@ -176,7 +206,7 @@ public final class Bench implements AutoCloseable {
    * Photocurrents and their derivatives by thickness.
    *
    * @param into [subcell] mA cm⁻²
-   * @param byThickness [subcell*L + l] mA cm⁻² per nm
+   * @param byThickness [s*L + l] mA cm⁻² per nm, of the subcells first, then of the further sums
    */
   public void currentsAndGradient(double[] into, double[] byThickness) {
     gradient.orElseThrow().evaluate(design, sums, byThickness);

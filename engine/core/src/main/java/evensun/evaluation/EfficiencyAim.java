@@ -26,8 +26,8 @@ public final class EfficiencyAim implements Aim {
   }
 
   @Override
-  public double value(double[] photocurrentMaPerCm2, double[] bandgapEv) {
-    return power.efficiencyPercent(photocurrentMaPerCm2, bandgapEv);
+  public double value(Reading reading) {
+    return power.efficiencyPercent(reading.photocurrentMaPerCm2(), reading.bandgapEv());
   }
 
   @Override

@@ -1,112 +1,70 @@
 package evensun.evaluation;
 
-import evensun.stack.ResolvedStack;
-import evensun.stack.ResolvedSubcell;
+import evensun.scenario.SearchSpec.LimitSpec;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
-import java.util.stream.IntStream;
+import org.jspecify.annotations.Nullable;
 
 /**
  * A limit on a quantity of a design.
  *
  * @param text as people read it
- * @param quantity what is limited
- * @param of indices of subcells, or of layers for a thickness
+ * @param gauge reads the quantity
  * @param bound the limit, in the unit of the quantity
- * @param upper whether it is an upper limit
  */
-public record Limit(String text, Quantity quantity, List<Integer> of, double bound, boolean upper) {
-
-  /** What can be limited. */
-  public enum Quantity {
-    /** Largest minus smallest current of all subcells, in mA cm⁻². */
-    MISMATCH("mismatchMaPerCm2", "mA cm⁻²"),
-    /** The current that is nearest to breaking the limit, in mA cm⁻². */
-    PHOTOCURRENT("photocurrentMaPerCm2", "mA cm⁻²"),
-    /** Sum of thicknesses, in nm. */
-    THICKNESS("thicknessNm", "nm"),
-    /** The gap that is nearest to breaking the limit, in eV. */
-    BANDGAP("bandgapEv", "eV");
-
-    private final String key;
-    private final String unit;
-
-    Quantity(String key, String unit) {
-      this.key = key;
-      this.unit = unit;
-    }
-
-    static Quantity of(String key) {
-      for (Quantity quantity : values()) {
-        if (quantity.key.equals(key)) {
-          return quantity;
-        }
-      }
-      throw new IllegalArgumentException("no such quantity: " + key);
-    }
-  }
-
-  public Limit {
-    of = List.copyOf(of);
-  }
+public record Limit(String text, Gauge gauge, double bound) {
 
   /**
-   * A limit on a quantity of a stack.
+   * The limits of a specification: one for each end that is set.
    *
-   * @param key name of the quantity in scenarios
-   * @param names subcells, or layers of a thickness; empty for all
+   * @param efficiency tells the efficiency; needed for that quantity alone
    */
-  public static Limit of(
-      String key, List<String> names, double bound, boolean upper, ResolvedStack stack) {
-    Quantity quantity = Quantity.of(key);
-    List<String> known =
-        quantity == Quantity.THICKNESS
-            ? stack.layers().stream().map(layer -> layer.name()).toList()
-            : stack.subcells().stream().map(ResolvedSubcell::name).toList();
-    List<Integer> indices = new ArrayList<>();
-    (names.isEmpty() ? known : names).forEach(name -> indices.add(known.indexOf(name)));
-    return new Limit(text(quantity, names, bound, upper), quantity, indices, bound, upper);
+  public static List<Limit> of(LimitSpec spec, Model model, @Nullable Aim efficiency) {
+    List<Limit> limits = new ArrayList<>();
+    spec.atLeast().ifPresent(bound -> limits.add(of(spec, bound, false, model, efficiency)));
+    spec.atMost().ifPresent(bound -> limits.add(of(spec, bound, true, model, efficiency)));
+    return limits;
+  }
+
+  private static Limit of(
+      LimitSpec spec, double bound, boolean upper, Model model, @Nullable Aim efficiency) {
+    Quantity quantity = Quantity.of(spec.quantity());
+    Gauge gauge = Gauge.of(quantity, spec.of(), List.of(), upper, model, efficiency);
+    return new Limit(text(quantity, spec.of(), bound, upper), gauge, bound);
   }
 
   private static String text(Quantity quantity, List<String> names, double bound, boolean upper) {
     String of = names.isEmpty() ? "" : " of " + String.join(", ", names);
     String number = bound == Math.rint(bound) ? String.valueOf((long) bound) : "" + bound;
     return String.format(
-        Locale.ROOT, "%s%s %s %s %s", quantity.key, of, upper ? "≤" : "≥", number, quantity.unit);
+        Locale.ROOT,
+        "%s%s %s %s %s",
+        quantity.key(),
+        of,
+        upper ? "≤" : "≥",
+        number,
+        quantity.unit());
   }
 
-  /**
-   * Value of the quantity.
-   *
-   * @param thicknessNm [layer]
-   * @param photocurrentMaPerCm2 [subcell]
-   * @param bandgapEv [subcell]
-   */
-  public double value(double[] thicknessNm, double[] photocurrentMaPerCm2, double[] bandgapEv) {
-    return switch (quantity) {
-      case MISMATCH -> largest(photocurrentMaPerCm2) - smallest(photocurrentMaPerCm2);
-      case PHOTOCURRENT -> upper ? largest(photocurrentMaPerCm2) : smallest(photocurrentMaPerCm2);
-      case BANDGAP -> upper ? largest(bandgapEv) : smallest(bandgapEv);
-      case THICKNESS -> of.stream().mapToDouble(i -> thicknessNm[i]).sum();
-    };
+  /** What a bench has to take along. */
+  public List<LightSum> lightSums() {
+    return gauge.lightSums();
   }
 
-  private double largest(double[] row) {
-    return indices().mapToDouble(i -> row[i]).max().orElseThrow();
+  /** The same for another thread. */
+  Limit forAnotherThread() {
+    return new Limit(text, gauge.forAnotherThread(), bound);
   }
 
-  private double smallest(double[] row) {
-    return indices().mapToDouble(i -> row[i]).min().orElseThrow();
-  }
-
-  private IntStream indices() {
-    return of.stream().mapToInt(i -> i);
+  /** Value of the quantity in its unit. */
+  public double value(Reading reading) {
+    return gauge.value(reading);
   }
 
   /** How far a value is from the limit, as a fraction of the limit; negative when it is broken. */
   public double slack(double value) {
     double scale = Math.max(1e-6, Math.abs(bound));
-    return (upper ? bound - value : value - bound) / scale;
+    return (gauge.large() ? bound - value : value - bound) / scale;
   }
 }

@@ -133,7 +133,12 @@ public final class Model implements AutoCloseable {
 
   /** A fresh bench for one thread, set as drawn. */
   public Bench newBench() {
-    return new Bench(this, new Filling(stack));
+    return newBench(List.of());
+  }
+
+  /** The same, which takes further sums along with the currents. */
+  public Bench newBench(List<LightSum> lightSums) {
+    return new Bench(this, new Filling(stack), lightSums);
   }
 
   @Override

@@ -21,6 +21,7 @@ public final class Neighbourhood implements AutoCloseable {
   private static final double THICKNESS_TOLERANCE = 0.05;
 
   private final Bench bench;
+  private final Reading reading;
   private final List<Parameter> parameters;
   private final List<Variable> variables;
   private final double[] centre;
@@ -45,13 +46,22 @@ public final class Neighbourhood implements AutoCloseable {
       double[] centre,
       Aim aim,
       @Nullable Aim efficiency) {
-    this.bench = model.newBench();
+    this.bench = model.newBench(lightSums(aim, efficiency));
+    this.reading = new Reading(bench);
     this.parameters = List.copyOf(parameters);
     this.variables = List.copyOf(variables);
     this.centre = centre.clone();
     this.aim = aim;
     this.efficiency = efficiency;
     this.subcells = model.stack().subcells();
+  }
+
+  private static List<LightSum> lightSums(Aim aim, @Nullable Aim efficiency) {
+    List<LightSum> sums = new ArrayList<>(aim.lightSums());
+    if (efficiency != null) {
+      sums.addAll(efficiency.lightSums());
+    }
+    return sums;
   }
 
   /** What a small change of each quantity does, the largest effect first. */
@@ -61,7 +71,7 @@ public final class Neighbourhood implements AutoCloseable {
     for (int v = 0; v < parameters.size(); v++) {
       all.add(sensitivity(v, here));
     }
-    all.sort(Comparator.comparingDouble(Sensitivity::toleranceAimChange));
+    all.sort(Comparator.comparingDouble(s -> aim.shown(s.toleranceAimChange())));
     return all;
   }
 
@@ -91,12 +101,12 @@ public final class Neighbourhood implements AutoCloseable {
         parameter.key(),
         parameter.unit(),
         step,
-        up.aim() - here.aim(),
-        down.aim() - here.aim(),
+        aim.shown(up.aim() - here.aim()),
+        aim.shown(down.aim() - here.aim()),
         currents,
         efficiency == null ? null : up.efficiency() - here.efficiency(),
         tolerance,
-        worse - here.aim());
+        aim.shown(worse - here.aim()));
   }
 
   private static double step(Parameter parameter) {
@@ -123,7 +133,7 @@ public final class Neighbourhood implements AutoCloseable {
       double value = variable.low() + (variable.high() - variable.low()) * i / (CURVE_POINTS - 1);
       Point point = at(v, value);
       values.add(value);
-      aims.add(point.aim());
+      aims.add(aim.shown(point.aim()));
       for (int s = 0; s < subcells.size(); s++) {
         currents.get(subcells.get(s).name()).add(point.currents()[s]);
       }
@@ -135,12 +145,9 @@ public final class Neighbourhood implements AutoCloseable {
     for (int v = 0; v < centre.length; v++) {
       bench.set(parameters.get(v), v == moved ? clamp(v, value) : centre[v]);
     }
-    double[] currents = new double[subcells.size()];
-    double[] gaps = new double[subcells.size()];
-    bench.currents(currents);
-    bench.subcellGaps(gaps);
-    double percent = efficiency == null ? 0 : efficiency.value(currents, gaps);
-    return new Point(aim.value(currents, gaps), percent, currents);
+    reading.take();
+    double percent = efficiency == null ? 0 : efficiency.value(reading);
+    return new Point(aim.value(reading), percent, reading.photocurrentMaPerCm2().clone());
   }
 
   /** A bandgap cannot leave the range of its material, a knob not its own. */

@@ -5,8 +5,9 @@ import evensun.search.problem.Variable;
 import evensun.search.problem.Verdict;
 import evensun.spi.EvaluationFailed;
 import java.util.List;
+import java.util.stream.Stream;
 
-/** A stack as the search sees it: numbers in, the aim out. */
+/** A stack as the search sees it: numbers in, the aims out. */
 public final class StackObjective implements Objective {
 
   /** Matched currents closer than this do not decide a bandgap, in mA cm⁻². */
@@ -18,14 +19,14 @@ public final class StackObjective implements Objective {
   private final Model model;
   private final List<Parameter> parameters;
   private final List<Variable> variables;
-  private final Aim aim;
+  private final List<Aim> aims;
   private final List<Limit> limits;
   private final List<Tie> ties;
 
   /** An objective without limits. */
   public StackObjective(
       Model model, List<Parameter> parameters, List<Variable> variables, Aim aim) {
-    this(model, parameters, variables, aim, List.of());
+    this(model, parameters, variables, List.of(aim), List.of());
   }
 
   /**
@@ -34,21 +35,21 @@ public final class StackObjective implements Objective {
    * @param model the stack
    * @param parameters what may vary
    * @param variables their bounds, in the same order
-   * @param aim what is wanted
+   * @param aims what is wanted, the first of them first
    * @param limits what every design must keep
    */
   public StackObjective(
       Model model,
       List<Parameter> parameters,
       List<Variable> variables,
-      Aim aim,
+      List<Aim> aims,
       List<Limit> limits) {
     this.limits = List.copyOf(limits);
     this.ties = Tie.of(model.stack());
     this.model = model;
     this.parameters = List.copyOf(parameters);
     this.variables = List.copyOf(variables);
-    this.aim = aim;
+    this.aims = List.copyOf(aims);
   }
 
   /** Whether a bandgap varies. */
@@ -63,7 +64,7 @@ public final class StackObjective implements Objective {
 
   @Override
   public List<String> aims() {
-    return List.of(aim.name());
+    return aims.stream().map(Aim::name).toList();
   }
 
   @Override
@@ -73,7 +74,11 @@ public final class StackObjective implements Objective {
 
   @Override
   public double tieResolution() {
-    return aim.isSmallestCurrent() && variesGap() ? GAP_TIE_MA_PER_CM2 : 0;
+    return isSmallestCurrent() && aims.size() == 1 && variesGap() ? GAP_TIE_MA_PER_CM2 : 0;
+  }
+
+  private boolean isSmallestCurrent() {
+    return aims.get(0).isSmallestCurrent();
   }
 
   @Override
@@ -81,25 +86,34 @@ public final class StackObjective implements Objective {
     return new StackWorker();
   }
 
+  private Bench newBench() {
+    return model.newBench(
+        Stream.concat(
+                aims.stream().flatMap(a -> a.lightSums().stream()),
+                limits.stream().flatMap(l -> l.lightSums().stream()))
+            .toList());
+  }
+
   private final class StackWorker implements Worker {
 
-    private final Bench bench = model.newBench();
-    private final Aim own = aim.forAnotherThread();
+    private final Bench bench = newBench();
+    private final Reading reading = new Reading(bench);
+    private final List<Aim> own = aims.stream().map(Aim::forAnotherThread).toList();
+    private final List<Limit> kept = limits.stream().map(Limit::forAnotherThread).toList();
     private final int subcells = model.stack().subcells().size();
     private final double[] currents = new double[subcells];
     private final double[] shifted = new double[subcells];
-    private final double[] gaps = new double[subcells];
-    private final double[] byThickness = new double[subcells * model.problem().layerCount()];
+    private final double[] byThickness =
+        new double[bench.sumCount() * model.problem().layerCount()];
 
     @Override
-    public Verdict judge(double[] values) {
+    public Verdict judge(double[] design) {
       try {
-        set(values);
-        bench.currents(currents);
-        bench.subcellGaps(gaps);
-        double value = own.value(currents, gaps);
-        return Double.isFinite(value)
-            ? Verdict.under(slacks(), List.of(value), tieBreak())
+        set(design);
+        reading.take();
+        List<Double> values = own.stream().map(a -> a.value(reading)).toList();
+        return values.stream().allMatch(Double::isFinite)
+            ? Verdict.under(slacks(), values, tieBreak())
             : Verdict.failed("the solver returned a current that is no number");
       } catch (EvaluationFailed e) {
         return Verdict.failed(String.valueOf(e.getMessage()));
@@ -107,11 +121,7 @@ public final class StackObjective implements Objective {
     }
 
     private List<Double> slacks() {
-      if (limits.isEmpty()) {
-        return List.of();
-      }
-      double[] thicknessNm = bench.design().thicknessNm;
-      return limits.stream().map(l -> l.slack(l.value(thicknessNm, currents, gaps))).toList();
+      return kept.stream().map(limit -> limit.slack(limit.value(reading))).toList();
     }
 
     private void set(double[] values) {
@@ -122,7 +132,7 @@ public final class StackObjective implements Objective {
 
     private double tieBreak() {
       double sum = 0;
-      for (double gap : gaps) {
+      for (double gap : reading.bandgapEv()) {
         sum += gap;
       }
       return sum;
@@ -130,7 +140,7 @@ public final class StackObjective implements Objective {
 
     @Override
     public int partCount() {
-      return aim.isSmallestCurrent() && bench.hasGradient() ? subcells : 0;
+      return isSmallestCurrent() && bench.hasGradient() ? subcells : 0;
     }
 
     @Override

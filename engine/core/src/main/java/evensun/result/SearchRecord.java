@@ -26,6 +26,7 @@ import org.jspecify.annotations.Nullable;
  * @param grid what an exhaustive grid found, where one was tried
  * @param stepCost what standing on the tool's steps costs, in the unit of the aim: against the best
  *     design nearby that disregards them; null where nothing stands on steps or it is not known
+ * @param wanted {@code largest} or {@code smallest}, what is wanted of the aim
  */
 public record SearchRecord(
     String aim,
@@ -44,7 +45,8 @@ public record SearchRecord(
     @Nullable Front front,
     List<String> notes,
     @Nullable Grid grid,
-    @Nullable Double stepCost) {
+    @Nullable Double stepCost,
+    String wanted) {
 
   /**
    * One generation.
@@ -104,10 +106,20 @@ public record SearchRecord(
    *
    * @param aims names of the aims
    * @param units their units
-   * @param points the designs
+   * @param wanted {@code largest} or {@code smallest} for each aim
+   * @param points the designs, the best in the first aim first
    * @param knee index of the point with the best compromise
+   * @param shown index of the point that the rest of the result is about
+   * @param asDrawn the aims of the stack as drawn; null where it could not be evaluated
    */
-  public record Front(List<String> aims, List<String> units, List<FrontPoint> points, int knee) {}
+  public record Front(
+      List<String> aims,
+      List<String> units,
+      List<String> wanted,
+      List<FrontPoint> points,
+      int knee,
+      int shown,
+      @Nullable List<Double> asDrawn) {}
 
   /**
    * A design on the front.

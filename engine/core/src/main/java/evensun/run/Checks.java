@@ -56,8 +56,7 @@ record Checks(
             ? StepCost.of(objective, best, threads, evaluations, cancelled)
             : OptionalDouble.empty();
     Double stepCost = cost.isPresent() ? cost.getAsDouble() : null;
-    boolean affordable =
-        objective.aims().size() == 1 && objective.variables().size() <= Exhaustive.MOST_VARIABLES;
+    boolean affordable = objective.variables().size() <= Exhaustive.MOST_VARIABLES;
     if (!affordable || !asked && seconds(objective, best) > UNASKED_SECONDS) {
       return new Checks(null, false, false, stepCost);
     }

@@ -1,20 +1,12 @@
 package evensun.run;
 
-import evensun.evaluation.Aim;
-import evensun.evaluation.Bench;
-import evensun.evaluation.EfficiencyAim;
-import evensun.evaluation.Limit;
-import evensun.evaluation.Model;
-import evensun.evaluation.Neighbourhood;
-import evensun.evaluation.Outcomes;
 import evensun.evaluation.StackObjective;
-import evensun.result.Measured;
-import evensun.result.Outcome;
 import evensun.result.RunResult;
-import evensun.result.SearchRecord;
 import evensun.scenario.InputException;
 import evensun.scenario.Place;
 import evensun.scenario.SearchSpec;
+import evensun.search.ParetoOutcome;
+import evensun.search.ParetoSearch;
 import evensun.search.Search;
 import evensun.search.SearchListener;
 import evensun.search.SearchOutcome;
@@ -22,16 +14,15 @@ import evensun.search.SearchSettings;
 import evensun.search.SearchState;
 import evensun.search.StopReason;
 import evensun.search.problem.Candidate;
+import evensun.search.problem.KeptAims;
+import evensun.search.problem.Objective;
 import evensun.search.proof.Exhaustive;
 import evensun.search.proof.Freedom;
 import evensun.search.proof.Proof;
 import evensun.spi.EvaluationFailed;
-import evensun.spi.Finding;
-import evensun.spi.Severity;
 import evensun.stack.ResolvedStack;
-import java.util.LinkedHashMap;
 import java.util.List;
-import java.util.Map;
+import java.util.OptionalInt;
 import java.util.concurrent.CancellationException;
 import java.util.function.BooleanSupplier;
 import org.jspecify.annotations.Nullable;
@@ -39,12 +30,21 @@ import org.jspecify.annotations.Nullable;
 /** The main job: search the best design of a scenario and record everything a review needs. */
 public final class DesignJob {
 
+  private static final String POINT = "--point";
+
   private final Preparation preparation;
   private final SearchSpec spec;
-  private final Aim aim;
+  private final Aims aims;
   private final Varied varied;
-  private final List<Limit> limits;
   private final StackObjective objective;
+
+  /**
+   * What may be asked for beside the search itself.
+   *
+   * @param exhaustive whether to check the result on a grid whatever time that takes
+   * @param point which design of a front the result is about, from 1; its knee when empty
+   */
+  public record Order(boolean exhaustive, OptionalInt point) {}
 
   /**
    * A design job.
@@ -64,17 +64,20 @@ public final class DesignJob {
                     new InputException(
                         Place.of(stack.scenario().source().name()),
                         "the scenario has no search: section; add one with vary:, or use evensun assess for the stack as drawn"));
-    this.aim = Aims.of(spec, preparation.model());
+    this.aims = Aims.of(spec, preparation.model());
     this.varied = Varied.of(spec, stack);
-    this.limits = Limits.of(spec, stack);
     this.objective =
         new StackObjective(
-            preparation.model(), varied.parameters(), varied.variables(), aim, limits);
+            preparation.model(),
+            varied.parameters(),
+            varied.variables(),
+            aims.all(),
+            aims.limits());
   }
 
-  /** Unit of the aim. */
+  /** Unit of the first aim. */
   public String aimUnit() {
-    return aim.unit();
+    return aims.first().unit();
   }
 
   /** What is searched. */
@@ -101,8 +104,9 @@ public final class DesignJob {
    * @param listener hears about progress and states
    * @param resumed where an earlier run stood, if it is to go on
    * @param cancelled whether the user asked to stop
-   * @param exhaustive whether to check the result on a grid whatever time that takes
+   * @param order what else is asked for
    * @param repeatCommand command that repeats the run
+   * @throws InputException when the order does not fit the search
    * @throws EvaluationFailed when not a single design could be evaluated
    * @throws CancellationException when it was stopped before the first one
    */
@@ -111,211 +115,113 @@ public final class DesignJob {
       SearchListener listener,
       @Nullable SearchState resumed,
       BooleanSupplier cancelled,
-      boolean exhaustive,
+      Order order,
       String repeatCommand) {
-    checkVariableCount(exhaustive);
+    check(order);
     ProvenanceBuilder provenance = new ProvenanceBuilder(preparation);
-    Search search = new Search(objective, settings, listener, cancelled);
-    SearchOutcome outcome = resumed == null ? search.run() : search.resume(resumed);
-    Candidate best = outcome.best();
+    Found found =
+        isFront()
+            ? front(new ParetoSearch(objective, settings, listener, cancelled), resumed, order)
+            : single(new Search(objective, settings, listener, cancelled), resumed);
+    Candidate best = found.best();
     if (best == null) {
-      if (cancelled.getAsBoolean()) {
-        throw new CancellationException("stopped before a design had been evaluated");
-      }
-      throw new EvaluationFailed(
-          outcome.failures().isEmpty()
-              ? "no design was evaluated"
-              : "no design could be evaluated: "
-                  + outcome.failures().get(0).first().verdict().failure());
+      throw nothing(found.outcome(), cancelled);
     }
-    Look look = look(outcome, best, settings.threads(), exhaustive, cancelled);
-    return result(outcome, best, look, settings, provenance, repeatCommand);
+    Look look = look(found, best, settings.threads(), order, cancelled);
+    return new DesignResult(preparation, aims, varied, settings)
+        .of(found, best, look, provenance, repeatCommand);
   }
 
-  private void checkVariableCount(boolean exhaustive) {
+  private boolean isFront() {
+    return aims.all().size() > 1;
+  }
+
+  private void check(Order order) {
     int count = varied.variables().size();
-    if (exhaustive && count > Exhaustive.MOST_VARIABLES) {
+    if (order.exhaustive() && count > Exhaustive.MOST_VARIABLES) {
       throw new InputException(
           Place.option("--exhaustive"),
           "a grid takes at most %d varied quantities, but %d vary; fix some of them in search.vary"
               .formatted(Exhaustive.MOST_VARIABLES, count));
     }
+    if (order.point().isPresent() && !isFront()) {
+      throw new InputException(
+          Place.option(POINT),
+          "chooses a design of a front, but the search has one aim; list two or three under search.aim");
+    }
   }
 
-  /** What a look around the result says. */
-  private record Look(List<Freedom> freedoms, Checks checks) {}
+  private static Found single(Search search, @Nullable SearchState resumed) {
+    SearchOutcome outcome = resumed == null ? search.run() : search.resume(resumed);
+    return new Found(outcome, outcome.best(), List.of(), -1, -1);
+  }
 
-  /** Not for an interrupted search: whoever stops it wants to leave. */
-  private Look look(
+  private static Found front(ParetoSearch search, @Nullable SearchState resumed, Order order) {
+    ParetoOutcome outcome = resumed == null ? search.run() : search.resume(resumed);
+    List<Candidate> front = outcome.front();
+    if (order.point().isEmpty()) {
+      return new Found(
+          outcome.search(), outcome.search().best(), front, outcome.knee(), outcome.knee());
+    }
+    int point = order.point().getAsInt();
+    if (point < 1 || point > front.size()) {
+      throw new InputException(
+          Place.option(POINT),
+          "must be in [1, %d], the designs of the front, but was %d"
+              .formatted(front.size(), point));
+    }
+    return new Found(outcome.search(), front.get(point - 1), front, outcome.knee(), point - 1);
+  }
+
+  private static RuntimeException nothing(SearchOutcome outcome, BooleanSupplier cancelled) {
+    if (cancelled.getAsBoolean()) {
+      return new CancellationException("stopped before a design had been evaluated");
+    }
+    return new EvaluationFailed(
+        outcome.failures().isEmpty()
+            ? "no design was evaluated"
+            : "no design could be evaluated: "
+                + outcome.failures().get(0).first().verdict().failure());
+  }
+
+  /**
+   * What a search found.
+   *
+   * @param outcome how the search went
+   * @param best the design that the result is about; null when none could be evaluated
+   * @param front for several aims the designs none of which is better in all, else empty
+   * @param knee index of the best compromise on the front, or -1
+   * @param shown index of the design on the front, or -1
+   */
+  record Found(
       SearchOutcome outcome,
-      Candidate best,
-      int threads,
-      boolean exhaustive,
-      BooleanSupplier cancelled) {
-    if (outcome.stop() == StopReason.INTERRUPTED) {
+      @Nullable Candidate best,
+      List<Candidate> front,
+      int knee,
+      int shown) {}
+
+  /** What a look around the found design says. */
+  record Look(List<Freedom> freedoms, Checks checks) {}
+
+  /**
+   * A look around, on a front with the other aims kept. Not for an interrupted search: whoever
+   * stops it wants to leave.
+   */
+  private Look look(
+      Found found, Candidate best, int threads, Order order, BooleanSupplier cancelled) {
+    if (found.outcome().stop() == StopReason.INTERRUPTED) {
       return new Look(List.of(), Checks.NONE);
     }
-    int evaluations = outcome.evaluations();
+    KeptAims kept = new KeptAims(objective, best.verdict());
+    Objective around = isFront() ? kept : objective;
+    Candidate centre = isFront() ? new Candidate(best.values(), kept.kept(best.verdict())) : best;
+    int evaluations = found.outcome().evaluations();
     List<Freedom> freedoms =
         best.isFeasible()
-            ? new Proof(objective, threads, evaluations, cancelled)
-                .freedoms(best, SearchRecords.EQUALLY_GOOD)
+            ? new Proof(around, threads, evaluations, cancelled)
+                .freedoms(centre, SearchRecords.EQUALLY_GOOD)
             : List.of();
     return new Look(
-        freedoms, Checks.of(objective, best, exhaustive, evaluations, threads, cancelled));
-  }
-
-  private RunResult result(
-      SearchOutcome outcome,
-      Candidate best,
-      Look look,
-      SearchSettings settings,
-      ProvenanceBuilder provenance,
-      String repeatCommand) {
-    Model model = preparation.model();
-    Findings findings = new Findings();
-    try (Bench bench = model.newBench();
-        Neighbourhood around = around(best)) {
-      Outcome asDrawn = asDrawn(bench, findings);
-      set(bench, best);
-      Electrics.Powered powered = Electrics.power(Outcomes.of(bench, varied.parameters()), bench);
-      Outcome found = powered.outcome();
-      SearchRecords records = new SearchRecords(varied, aim);
-      SearchRecord record =
-          records.record(
-              outcome,
-              best,
-              asDrawn == null ? null : aimOf(asDrawn),
-              look.freedoms(),
-              Limits.records(limits, bench.design().thicknessNm, found),
-              look.checks());
-      findings.about(preparation.stack(), model, bench.design());
-      findings.addAll(powered.findings());
-      findings.about(found);
-      findings.aboutErrors(found, true);
-      findings.about(record);
-      gapNotDecided(findings);
-      limitsBroken(best, findings);
-      pairingOfTheAim(found, findings);
-      List<Measured> measured =
-          asDrawn == null ? null : preparation.measurements().against(asDrawn, findings);
-      return new RunResult(
-          RunResult.FORMAT,
-          "design",
-          preparation.stack().scenario().title(),
-          found,
-          asDrawn,
-          record,
-          Usage.materials(bench),
-          Usage.spectrum(preparation.stack()),
-          AssessJob.depth(bench),
-          AssessJob.angular(preparation, bench, AssessJob.USUAL_ANGLE_STEP_DEG),
-          around.sensitivities(),
-          around.curves(),
-          new SecondOpinions(preparation, varied, aim, best).opinions(),
-          measured,
-          FlatTwin.beside(preparation, bench),
-          AssessJob.published(preparation),
-          findings.records(),
-          Cautions.of(preparation.stack()),
-          provenance.build(spec.seed(), repeat(repeatCommand, outcome), settingsOf(settings)));
-    }
-  }
-
-  /** A search that was ended by the clock is repeated by the number of its generations. */
-  private static String repeat(String command, SearchOutcome outcome) {
-    return outcome.stop() == StopReason.TIME
-        ? command + " --generations " + outcome.generations()
-        : command;
-  }
-
-  private Neighbourhood around(Candidate best) {
-    return new Neighbourhood(
-        preparation.model(),
-        varied.parameters(),
-        varied.variables(),
-        best.toArray(),
-        aim,
-        Aims.efficiency(preparation.model()).orElse(null));
-  }
-
-  private void set(Bench bench, Candidate best) {
-    for (int v = 0; v < varied.parameters().size(); v++) {
-      bench.set(varied.parameters().get(v), best.values().get(v));
-    }
-  }
-
-  /** The stack as drawn; when it cannot be evaluated the search's result still counts. */
-  private @Nullable Outcome asDrawn(Bench bench, Findings findings) {
-    try {
-      return Electrics.power(Outcomes.of(bench, varied.parameters()), bench).outcome();
-    } catch (EvaluationFailed e) {
-      findings.add(
-          new Finding(
-              "as-drawn-failed",
-              Severity.WARNING,
-              "stack as drawn",
-              "the stack as drawn could not be evaluated: " + e.getMessage()));
-      return null;
-    }
-  }
-
-  private double aimOf(Outcome outcome) {
-    double[] currents =
-        outcome.subcells().stream().mapToDouble(s -> s.photocurrentMaPerCm2()).toArray();
-    double[] gaps =
-        outcome.subcells().stream()
-            .mapToDouble(s -> s.bandgapEv() == null ? 0 : s.bandgapEv())
-            .toArray();
-    return aim.value(currents, gaps);
-  }
-
-  private void gapNotDecided(Findings findings) {
-    if (aim.isSmallestCurrent() && objective.variesGap()) {
-      findings.add(
-          new Finding(
-              "gap-not-decided",
-              Severity.WARNING,
-              "search.aim",
-              "matched current alone cannot decide a bandgap, since thickness trades for it; among designs within %s mA cm⁻² the one with the largest sum of gaps was taken"
-                  .formatted(StackObjective.GAP_TIE_MA_PER_CM2)));
-    }
-  }
-
-  /** The search always works with step edges; the report may have something better. */
-  private void pairingOfTheAim(Outcome found, Findings findings) {
-    if (aim instanceof EfficiencyAim
-        && found.electrical() != null
-        && !found.electrical().pairing().contains("step edge")) {
-      findings.add(
-          new Finding(
-              "aim-from-step-edges",
-              Severity.WARNING,
-              "search.aim",
-              "the search ranked designs with saturation currents from step edges, the reported efficiency uses %s; set device.saturation: step-edge to have both alike"
-                  .formatted(found.electrical().pairing())));
-    }
-  }
-
-  private static void limitsBroken(Candidate best, Findings findings) {
-    if (!best.isFeasible()) {
-      findings.add(
-          new Finding(
-              "limit-broken",
-              Severity.SERIOUS,
-              "search.limits",
-              "no design was found that keeps every limit; this one comes nearest: widen a range or a limit"));
-    }
-  }
-
-  private static Map<String, String> settingsOf(SearchSettings settings) {
-    Map<String, String> map = new LinkedHashMap<>();
-    map.put("search.populationSize", String.valueOf(settings.effort().populationSize()));
-    map.put("search.evaluations", String.valueOf(settings.budget().evaluations()));
-    map.put("search.rounds", String.valueOf(settings.effort().rounds()));
-    map.put("search.stallGenerations", String.valueOf(settings.effort().stallGenerations()));
-    map.put("search.stallFraction", String.valueOf(settings.effort().stallFraction()));
-    map.put("search.refined", String.valueOf(settings.effort().refined()));
-    return map;
+        freedoms, Checks.of(around, centre, order.exhaustive(), evaluations, threads, cancelled));
   }
 }

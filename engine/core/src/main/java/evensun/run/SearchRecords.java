@@ -2,6 +2,8 @@ package evensun.run;
 
 import evensun.evaluation.Aim;
 import evensun.result.SearchRecord;
+import evensun.run.DesignJob.Found;
+import evensun.run.DesignJob.Look;
 import evensun.search.SearchOutcome;
 import evensun.search.problem.Candidate;
 import evensun.search.problem.Variable;
@@ -11,6 +13,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
+import java.util.stream.IntStream;
 import org.jspecify.annotations.Nullable;
 
 /** Turns what a search found into the record of a result. */
@@ -23,51 +26,82 @@ final class SearchRecords {
   static final double EQUALLY_GOOD = 0.02;
 
   private final Varied varied;
+  private final List<Aim> aims;
   private final Aim aim;
 
-  SearchRecords(Varied varied, Aim aim) {
+  SearchRecords(Varied varied, Aims aims) {
     this.varied = varied;
-    this.aim = aim;
+    this.aims = aims.all();
+    this.aim = aims.first();
   }
 
   /**
    * The record.
    *
-   * @param asDrawn the aim of the stack as drawn, null where it could not be evaluated
-   * @param freedoms how far each value may move, empty when that is not known
+   * @param asDrawn the aims of the stack as drawn, empty where it could not be evaluated
+   * @param look what a look around the design found says
    * @param constraints the limits at the design found
-   * @param checks what further checks say
    */
   SearchRecord record(
-      SearchOutcome outcome,
+      Found found,
       Candidate best,
-      @Nullable Double asDrawn,
-      List<Freedom> freedoms,
-      List<SearchRecord.ConstraintRecord> constraints,
-      Checks checks) {
+      List<Double> asDrawn,
+      Look look,
+      List<SearchRecord.ConstraintRecord> constraints) {
+    SearchOutcome outcome = found.outcome();
+    List<Freedom> freedoms = look.freedoms();
     return new SearchRecord(
         aim.name(),
         aim.unit(),
-        asDrawn,
-        best.aim(),
+        asDrawn.isEmpty() ? null : asDrawn.get(0),
+        aim.shown(best.aim()),
         outcome.stop().name().toLowerCase(Locale.ROOT),
         outcome.generations(),
         outcome.evaluations(),
         outcome.failureCount(),
         outcome.refinementGain(),
-        outcome.history().stream()
-            .map(
-                g ->
-                    new SearchRecord.Generation(
-                        g.generation(), g.evaluations(), g.best(), g.mean()))
-            .toList(),
+        history(outcome),
         variables(best, freedoms),
         outcome.optima().stream().map(this::optimum).toList(),
         constraints,
-        null,
+        found.front().isEmpty() ? null : front(found, asDrawn),
         notes(outcome, freedoms),
-        checks.grid(this),
-        checks.stepCost());
+        look.checks().grid(this),
+        look.checks().stepCost(),
+        wanted(aim));
+  }
+
+  private static String wanted(Aim aim) {
+    return aim.isSmallest() ? "smallest" : "largest";
+  }
+
+  /** Without the generations before the first design that keeps every limit. */
+  private List<SearchRecord.Generation> history(SearchOutcome outcome) {
+    return outcome.history().stream()
+        .filter(g -> Double.isFinite(g.best()) && Double.isFinite(g.mean()))
+        .map(
+            g ->
+                new SearchRecord.Generation(
+                    g.generation(), g.evaluations(), aim.shown(g.best()), aim.shown(g.mean())))
+        .toList();
+  }
+
+  private SearchRecord.Front front(Found found, List<Double> asDrawn) {
+    return new SearchRecord.Front(
+        aims.stream().map(Aim::name).toList(),
+        aims.stream().map(Aim::unit).toList(),
+        aims.stream().map(SearchRecords::wanted).toList(),
+        found.front().stream().map(this::point).toList(),
+        found.knee(),
+        found.shown(),
+        asDrawn.isEmpty() ? null : asDrawn);
+  }
+
+  private SearchRecord.FrontPoint point(Candidate candidate) {
+    List<Double> values = candidate.verdict().aims();
+    return new SearchRecord.FrontPoint(
+        IntStream.range(0, aims.size()).mapToObj(i -> aims.get(i).shown(values.get(i))).toList(),
+        values(candidate));
   }
 
   private List<SearchRecord.VariableRecord> variables(Candidate best, List<Freedom> freedoms) {
@@ -154,10 +188,14 @@ final class SearchRecords {
   }
 
   SearchRecord.Optimum optimum(Candidate candidate) {
+    return new SearchRecord.Optimum(aim.shown(candidate.aim()), values(candidate));
+  }
+
+  private Map<String, Double> values(Candidate candidate) {
     Map<String, Double> values = new LinkedHashMap<>();
     for (int v = 0; v < varied.variables().size(); v++) {
       values.put(varied.variables().get(v).key(), candidate.values().get(v));
     }
-    return new SearchRecord.Optimum(candidate.aim(), values);
+    return values;
   }
 }

@@ -4,6 +4,7 @@ import evensun.evaluation.Aim;
 import evensun.evaluation.Bench;
 import evensun.evaluation.Outcomes;
 import evensun.evaluation.Parameter;
+import evensun.evaluation.Reading;
 import evensun.material.MaterialLibrary;
 import evensun.pluginhost.LoadedPlugin;
 import evensun.result.Opinion;
@@ -25,6 +26,7 @@ import java.util.Map;
 import java.util.Objects;
 import java.util.Optional;
 import java.util.Set;
+import java.util.function.Function;
 
 /**
  * The found design evaluated in other ways: with a finer grid, with the solver's plain twin or with
@@ -36,13 +38,11 @@ final class SecondOpinions {
 
   private final Preparation preparation;
   private final Varied varied;
-  private final Aim aim;
   private final Candidate found;
 
-  SecondOpinions(Preparation preparation, Varied varied, Aim aim, Candidate found) {
+  SecondOpinions(Preparation preparation, Varied varied, Candidate found) {
     this.preparation = preparation;
     this.varied = varied;
-    this.aim = aim;
     this.found = found;
   }
 
@@ -106,11 +106,8 @@ final class SecondOpinions {
   /** A solver that refuses the stack has no opinion on it; one that breaks down says why. */
   private Optional<Opinion> otherSolver(SolverSpec solver, Scenario other) {
     String what = "solver " + solver.id();
-    try (Preparation prepared = Preparation.of(other, preparation.host(), () -> false);
-        Bench bench = prepared.model().newBench()) {
-      double value = aimOf(prepared, bench);
-      return Optional.of(
-          new Opinion("numerics", what, value, value - found.aim(), statistics(bench)));
+    try (Preparation prepared = Preparation.of(other, preparation.host(), () -> false)) {
+      return Optional.of(opinion("numerics", what, prepared, SecondOpinions::statistics));
     } catch (UnsupportedProblem e) {
       return Optional.empty();
     } catch (EvaluationFailed e) {
@@ -135,10 +132,8 @@ final class SecondOpinions {
   }
 
   private Opinion opinion(String kind, String what, Scenario other) {
-    try (Preparation prepared = Preparation.of(other, preparation.host(), () -> false);
-        Bench bench = prepared.model().newBench()) {
-      double value = aimOf(prepared, bench);
-      return new Opinion(kind, what, value, value - found.aim(), "");
+    try (Preparation prepared = Preparation.of(other, preparation.host(), () -> false)) {
+      return opinion(kind, what, prepared, bench -> "");
     } catch (InputException e) {
       // Without the place: a report names no path of the author's machine.
       return new Opinion(kind, what, null, null, e.faults().get(0).message());
@@ -147,7 +142,18 @@ final class SecondOpinions {
     }
   }
 
-  private double aimOf(Preparation prepared, Bench bench) {
+  private Opinion opinion(
+      String kind, String what, Preparation prepared, Function<Bench, String> remark) {
+    Aim aim = Aims.of(prepared.stack().scenario().search().orElseThrow(), prepared.model()).first();
+    try (Bench bench = prepared.model().newBench(aim.lightSums())) {
+      set(prepared, bench);
+      double value = aim.value(new Reading(bench).take());
+      return new Opinion(
+          kind, what, aim.shown(value), aim.shown(value - found.aim()), remark.apply(bench));
+    }
+  }
+
+  private void set(Preparation prepared, Bench bench) {
     for (int v = 0; v < varied.parameters().size(); v++) {
       String key = varied.parameters().get(v).key();
       Parameter parameter =
@@ -155,11 +161,5 @@ final class SecondOpinions {
               .orElseThrow(() -> new EvaluationFailed(key + " cannot be set with that table"));
       bench.set(parameter, found.values().get(v));
     }
-    int subcells = prepared.stack().subcells().size();
-    double[] currents = new double[subcells];
-    double[] gaps = new double[subcells];
-    bench.currents(currents);
-    bench.subcellGaps(gaps);
-    return aim.value(currents, gaps);
   }
 }

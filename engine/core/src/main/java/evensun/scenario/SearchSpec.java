@@ -9,7 +9,7 @@ import java.util.OptionalInt;
  *
  * @param vary what may vary, in the order of the file
  * @param limits what a design must keep
- * @param aim name of the aim
+ * @param aims what is wanted: one, or several of which none is to be sacrificed to another
  * @param seed seed of the search
  * @param evaluations largest number of evaluations, if the scenario sets one
  * @param timeSeconds time the search may take, if the scenario sets one
@@ -18,7 +18,7 @@ import java.util.OptionalInt;
 public record SearchSpec(
     List<VarySpec> vary,
     List<LimitSpec> limits,
-    String aim,
+    List<AimSpec> aims,
     long seed,
     OptionalInt evaluations,
     OptionalDouble timeSeconds,
@@ -27,6 +27,7 @@ public record SearchSpec(
   public SearchSpec {
     vary = List.copyOf(vary);
     limits = List.copyOf(limits);
+    aims = List.copyOf(aims);
   }
 
   /** This search with another seed. */
@@ -77,11 +78,34 @@ public record SearchSpec(
   }
 
   /**
+   * Something wanted.
+   *
+   * @param name as the scenario writes it when it is one of the named aims, else empty
+   * @param quantity name of the quantity
+   * @param of subcells or layers; empty for all that have the quantity
+   * @param weights one for each of {@code of}; empty for ones
+   * @param smallest whether it is to be small
+   * @param place where it stands
+   */
+  public record AimSpec(
+      String name,
+      String quantity,
+      List<String> of,
+      List<Double> weights,
+      boolean smallest,
+      Place place) {
+
+    public AimSpec {
+      of = List.copyOf(of);
+      weights = List.copyOf(weights);
+    }
+  }
+
+  /**
    * A limit that a design must keep.
    *
-   * @param quantity {@code mismatchMaPerCm2}, {@code photocurrentMaPerCm2}, {@code thicknessNm} or
-   *     {@code bandgapEv}
-   * @param of subcells, or layers of a thickness; empty for all that have the quantity
+   * @param quantity name of the quantity, such as {@code mismatchMaPerCm2}
+   * @param of subcells or layers; empty for all that have the quantity
    * @param atLeast lower limit in the unit of the quantity, if set
    * @param atMost upper limit in the unit of the quantity, if set
    * @param place where it stands

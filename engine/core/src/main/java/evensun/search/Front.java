@@ -1,6 +1,9 @@
 package evensun.search;
 
 import evensun.search.problem.Candidate;
+import evensun.search.problem.Individual;
+import evensun.search.problem.Numbers;
+import evensun.search.problem.Verdict;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
@@ -11,27 +14,24 @@ final class Front {
   private Front() {}
 
   /** The designs that keep all limits and that none of the others beats, first aim falling. */
-  static List<Candidate> of(List<Candidate> candidates) {
-    List<Candidate> feasible = candidates.stream().filter(Candidate::isFeasible).toList();
-    List<Candidate> front = new ArrayList<>();
-    for (Candidate candidate : feasible) {
-      boolean beaten = feasible.stream().anyMatch(other -> beats(other, candidate));
-      if (!beaten && front.stream().noneMatch(f -> sameAims(f, candidate))) {
-        front.add(candidate);
+  static List<Individual> of(List<Individual> designs) {
+    List<Individual> feasible = designs.stream().filter(Individual::isFeasible).toList();
+    List<Individual> front = new ArrayList<>();
+    for (Individual design : feasible) {
+      boolean beaten = feasible.stream().anyMatch(o -> beats(o.verdict(), design.verdict()));
+      if (!beaten
+          && front.stream().noneMatch(f -> f.verdict().aims().equals(design.verdict().aims()))) {
+        front.add(design);
       }
     }
-    front.sort(Comparator.comparingDouble(Candidate::aim).reversed());
+    front.sort(Comparator.comparingDouble((Individual i) -> -i.verdict().aims().get(0)));
     return front;
   }
 
-  private static boolean sameAims(Candidate a, Candidate b) {
-    return a.verdict().aims().equals(b.verdict().aims());
-  }
-
-  private static boolean beats(Candidate a, Candidate b) {
+  private static boolean beats(Verdict a, Verdict b) {
     boolean better = false;
-    for (int i = 0; i < a.verdict().aims().size(); i++) {
-      double difference = a.verdict().aims().get(i) - b.verdict().aims().get(i);
+    for (int i = 0; i < a.aims().size(); i++) {
+      double difference = a.aims().get(i) - b.aims().get(i);
       if (difference < 0) {
         return false;
       }
@@ -41,14 +41,79 @@ final class Front {
   }
 
   /**
+   * Genes halfway between neighbours of a front of two aims, where neighbours are farthest apart.
+   *
+   * @param most how many at most
+   */
+  static List<double[]> between(List<Individual> front, int most) {
+    List<Individual> row = new ArrayList<>(front);
+    List<double[]> middles = new ArrayList<>();
+    double[] range = range(front);
+    while (middles.size() < most && row.size() > 1) {
+      int widest = widest(row, range);
+      double[] middle = middle(row.get(widest), row.get(widest + 1));
+      middles.add(middle);
+      row.add(widest + 1, guessed(row.get(widest), row.get(widest + 1), middle));
+    }
+    return middles;
+  }
+
+  private static double[] range(List<Individual> front) {
+    double[] range = {1, 1};
+    if (front.size() > 1) {
+      Individual first = front.get(0);
+      Individual last = front.get(front.size() - 1);
+      for (int aim = 0; aim < range.length; aim++) {
+        range[aim] = Math.abs(aim(first, aim) - aim(last, aim));
+      }
+    }
+    return range;
+  }
+
+  private static int widest(List<Individual> row, double[] range) {
+    int widest = 0;
+    double most = -1;
+    for (int i = 0; i + 1 < row.size(); i++) {
+      double gap = 0;
+      for (int aim = 0; aim < range.length; aim++) {
+        gap += Math.abs(aim(row.get(i), aim) - aim(row.get(i + 1), aim)) / range[aim];
+      }
+      if (gap > most) {
+        most = gap;
+        widest = i;
+      }
+    }
+    return widest;
+  }
+
+  private static double[] middle(Individual a, Individual b) {
+    double[] middle = a.geneArray();
+    for (int i = 0; i < middle.length; i++) {
+      middle[i] = (middle[i] + b.genes().get(i)) / 2;
+    }
+    return middle;
+  }
+
+  /** Stands for a design that is not judged yet, its aims halfway as well. */
+  private static Individual guessed(Individual a, Individual b, double[] genes) {
+    List<Double> aims = List.of((aim(a, 0) + aim(b, 0)) / 2, (aim(a, 1) + aim(b, 1)) / 2);
+    return new Individual(0, Numbers.list(genes), new Verdict(aims, 0, 0, ""));
+  }
+
+  private static double aim(Individual design, int aim) {
+    return design.verdict().aims().get(aim);
+  }
+
+  /**
    * The best compromise: with every aim scaled to [0, 1] over the front, the design farthest beyond
    * the plane through the best of each aim, that is with the largest sum.
    */
   static int knee(List<Candidate> front) {
+    double[][] scaled = scaled(front, front);
     int knee = -1;
     double largest = Double.NEGATIVE_INFINITY;
-    for (int i = 0; i < front.size(); i++) {
-      double sum = scaledSum(front, front.get(i));
+    for (int i = 0; i < scaled.length; i++) {
+      double sum = java.util.Arrays.stream(scaled[i]).sum();
       if (sum > largest) {
         largest = sum;
         knee = i;
@@ -57,14 +122,47 @@ final class Front {
     return knee;
   }
 
-  private static double scaledSum(List<Candidate> front, Candidate candidate) {
-    double sum = 0;
-    for (int i = 0; i < candidate.verdict().aims().size(); i++) {
-      int aim = i;
-      double low = front.stream().mapToDouble(c -> c.verdict().aims().get(aim)).min().orElse(0);
-      double high = front.stream().mapToDouble(c -> c.verdict().aims().get(aim)).max().orElse(0);
-      sum += high > low ? (candidate.verdict().aims().get(aim) - low) / (high - low) : 0;
+  /**
+   * By how much a front got ahead: how much its designs lead the nearest of the earlier front in
+   * the aim in which they lead most, on average, in parts of the range of the later front. The mean
+   * of what the additive ε-indicator takes the largest of (Zitzler et al., IEEE Trans. Evol.
+   * Comput. 7, 117 (2003)): the largest is at the mercy of single gaps in a front of few designs.
+   *
+   * @return 1 when there was no front before
+   */
+  static double gain(List<Candidate> before, List<Candidate> after) {
+    if (before.isEmpty() || after.isEmpty()) {
+      return 1;
     }
-    return sum;
+    double[][] earlier = scaled(before, after);
+    double sum = 0;
+    for (double[] design : scaled(after, after)) {
+      double nearest = Double.POSITIVE_INFINITY;
+      for (double[] other : earlier) {
+        double behind = Double.NEGATIVE_INFINITY;
+        for (int aim = 0; aim < design.length; aim++) {
+          behind = Math.max(behind, design[aim] - other[aim]);
+        }
+        nearest = Math.min(nearest, behind);
+      }
+      sum += Math.max(0, nearest);
+    }
+    return sum / after.size();
+  }
+
+  /** The aims of designs in parts of the range that a front spans, [design][aim]. */
+  private static double[][] scaled(List<Candidate> designs, List<Candidate> front) {
+    int aims = front.isEmpty() ? 0 : front.get(0).verdict().aims().size();
+    double[][] scaled = new double[designs.size()][aims];
+    for (int aim = 0; aim < aims; aim++) {
+      int a = aim;
+      double low = front.stream().mapToDouble(c -> c.verdict().aims().get(a)).min().orElse(0);
+      double high = front.stream().mapToDouble(c -> c.verdict().aims().get(a)).max().orElse(0);
+      for (int i = 0; i < scaled.length; i++) {
+        double value = designs.get(i).verdict().aims().get(a);
+        scaled[i][a] = high > low ? (value - low) / (high - low) : 0;
+      }
+    }
+    return scaled;
   }
 }

@@ -10,6 +10,14 @@ package evensun.search;
  *     first
  * @param roundBest the same within the round
  * @param mean mean first aim of the designs of the generation that could be evaluated, NaN for none
+ * @param frontGain by how much the front of a search for several aims got ahead, in parts of its
+ *     range; 0 for a single aim
  */
 public record GenerationRecord(
-    int generation, int round, int evaluations, double best, double roundBest, double mean) {}
+    int generation,
+    int round,
+    int evaluations,
+    double best,
+    double roundBest,
+    double mean,
+    double frontGain) {}

@@ -5,6 +5,19 @@ import java.util.List;
 /** The rules that end a round and a search, computed from the saved history alone. */
 record Rounds(SearchSettings settings) {
 
+  /**
+   * A front stands still when the mean gain of a generation, in parts of its range, is less than
+   * this over the number of its designs and falls no more: designs that merely move along a front
+   * give such gains for ever.
+   */
+  private static final double FRONT_GAIN = 0.25;
+
+  /** The gain falls no more when it is at least this part of the gain before. */
+  private static final double PLATEAU = 0.8;
+
+  /** Generations over which gains are averaged. */
+  private static final int FRONT_PATIENCE = 20;
+
   /** So many combining rounds in a row without a gain end the search. */
   private static final int IDLE = 5;
 
@@ -92,6 +105,22 @@ record Rounds(SearchSettings settings) {
 
   private static double best(List<Double> roundBests) {
     return roundBests.stream().mapToDouble(b -> b).max().orElseThrow();
+  }
+
+  /** Whether a front gets ahead no more. */
+  boolean frontStands(List<GenerationRecord> history) {
+    int last = history.size() - FRONT_PATIENCE;
+    if (last < FRONT_PATIENCE) {
+      return false;
+    }
+    double gain = meanGain(history.subList(last, history.size()));
+    double before = meanGain(history.subList(last - FRONT_PATIENCE, last));
+    return gain == 0
+        || gain < FRONT_GAIN / settings.effort().populationSize() && gain > PLATEAU * before;
+  }
+
+  private static double meanGain(List<GenerationRecord> generations) {
+    return generations.stream().mapToDouble(GenerationRecord::frontGain).average().orElseThrow();
   }
 
   boolean tooManyFailures(int evaluations, int failures) {

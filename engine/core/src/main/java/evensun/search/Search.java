@@ -60,13 +60,7 @@ public final class Search {
    * @throws IllegalArgumentException when the state belongs to another search
    */
   public SearchOutcome resume(SearchState saved) {
-    if (!saved.fingerprint().equals(fingerprint())) {
-      throw new IllegalArgumentException(
-          "the saved state belongs to another search: it was made with "
-              + saved.fingerprint()
-              + "; this one has "
-              + fingerprint());
-    }
+    saved.checkBelongsTo(fingerprint());
     try (Judges judges = new Judges(objective, settings.threads(), cancelled)) {
       return loop(saved, new Steps(objective, space, settings, judges));
     }
@@ -103,29 +97,13 @@ public final class Search {
             .map(this::candidate)
             .toList();
     Candidate best = optima.isEmpty() ? null : optima.get(0);
-    return new SearchOutcome(
-        best,
-        stop,
-        state.generation(),
-        state.evaluations(),
-        state.failureCount(),
-        state.failures(),
-        state.history(),
-        gain(state),
-        optima,
-        state.roundBests(),
-        state);
+    return SearchOutcome.of(state, stop, best, optima);
   }
 
   private double floor(List<Individual> all) {
     return objective.tieResolution() > 0
         ? SearchState.bestAim(all) - objective.tieResolution()
         : Double.NEGATIVE_INFINITY;
-  }
-
-  private static double gain(SearchState state) {
-    double gain = state.bestAim() - state.unrefinedBest();
-    return Double.isNaN(gain) ? 0 : Math.max(0, gain);
   }
 
   private Candidate candidate(Individual individual) {

@@ -34,6 +34,23 @@ public record SearchOutcome(
     List<Double> roundBests,
     SearchState state) {
 
+  static SearchOutcome of(
+      SearchState state, StopReason stop, @Nullable Candidate best, List<Candidate> optima) {
+    double gain = state.bestAim() - state.unrefinedBest();
+    return new SearchOutcome(
+        best,
+        stop,
+        state.generation(),
+        state.evaluations(),
+        state.failureCount(),
+        state.failures(),
+        state.history(),
+        Double.isNaN(gain) ? 0 : Math.max(0, gain),
+        optima,
+        state.roundBests(),
+        state);
+  }
+
   public SearchOutcome {
     failures = List.copyOf(failures);
     history = List.copyOf(history);

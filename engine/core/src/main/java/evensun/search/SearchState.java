@@ -87,6 +87,24 @@ public record SearchState(
         reason);
   }
 
+  /** The same in another round. */
+  SearchState inRound(int next) {
+    return new SearchState(
+        fingerprint,
+        phase,
+        next,
+        generation,
+        evaluations,
+        population,
+        optima,
+        roundBests,
+        unrefinedBest,
+        history,
+        failures,
+        tieBreaking,
+        stop);
+  }
+
   /** Best first aim of a design that keeps all limits, minus infinity for none. */
   public double bestAim() {
     return Math.max(bestAim(population), bestAim(optima));
@@ -101,6 +119,26 @@ public record SearchState(
       }
     }
     return best;
+  }
+
+  /** Mean first aim of the designs that could be evaluated, NaN for none. */
+  static double meanAim(List<Individual> individuals) {
+    return individuals.stream()
+        .filter(individual -> !individual.verdict().isFailure())
+        .mapToDouble(individual -> individual.verdict().aims().get(0))
+        .average()
+        .orElse(Double.NaN);
+  }
+
+  /** Refuses to go on with the state of another search. */
+  void checkBelongsTo(String search) {
+    if (!fingerprint.equals(search)) {
+      throw new IllegalArgumentException(
+          "the saved state belongs to another search: it was made with "
+              + fingerprint
+              + "; this one has "
+              + search);
+    }
   }
 
   /** Number of designs that could not be evaluated. */

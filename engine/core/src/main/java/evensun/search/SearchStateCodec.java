@@ -20,7 +20,7 @@ import tools.jackson.databind.node.ObjectNode;
  */
 public final class SearchStateCodec {
 
-  private static final int FORMAT = 1;
+  private static final int FORMAT = 2;
   private static final JsonMapper MAPPER = JsonMapper.builder().build();
 
   private SearchStateCodec() {}
@@ -64,7 +64,13 @@ public final class SearchStateCodec {
     node.put("round", generation.round());
     node.put("evaluations", generation.evaluations());
     node.put(
-        "figures", text(List.of(generation.best(), generation.roundBest(), generation.mean())));
+        "figures",
+        text(
+            List.of(
+                generation.best(),
+                generation.roundBest(),
+                generation.mean(),
+                generation.frontGain())));
   }
 
   private static void write(FailureRecord failure, ObjectNode node) {
@@ -133,7 +139,7 @@ public final class SearchStateCodec {
 
   private static GenerationRecord generation(JsonNode node) {
     List<Double> figures = numbers(node, "figures");
-    if (figures.size() != 3) {
+    if (figures.size() != 4) {
       throw new IllegalArgumentException("the saved search state has a broken history");
     }
     return new GenerationRecord(
@@ -142,7 +148,8 @@ public final class SearchStateCodec {
         member(node, "evaluations").asInt(),
         figures.get(0),
         figures.get(1),
-        figures.get(2));
+        figures.get(2),
+        figures.get(3));
   }
 
   private static FailureRecord failure(JsonNode node) {

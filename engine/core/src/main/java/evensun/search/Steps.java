@@ -109,15 +109,13 @@ final class Steps {
     }
     double best = Math.max(state.bestAim(), inPopulation);
     return new GenerationRecord(
-        generation, state.round(), tally.evaluations(), best, roundBest, mean(population));
-  }
-
-  private static double mean(List<Individual> population) {
-    return population.stream()
-        .filter(individual -> !individual.verdict().isFailure())
-        .mapToDouble(individual -> individual.verdict().aims().get(0))
-        .average()
-        .orElse(Double.NaN);
+        generation,
+        state.round(),
+        tally.evaluations(),
+        best,
+        roundBest,
+        SearchState.meanAim(population),
+        0);
   }
 
   /** The first round knows the design as drawn, the combining ones everything found so far. */

@@ -170,11 +170,15 @@ final class SampleResult {
         new SearchRecord.Front(
             List.of("a", "b"),
             List.of("mA cm⁻²", "nm"),
+            List.of("largest", "smallest"),
             List.of(new SearchRecord.FrontPoint(List.of(1.0, 2.0), map("x", 3.0))),
-            0),
+            0,
+            0,
+            List.of(0.5, 2.5)),
         List.of("One optimum."),
         null,
-        null);
+        null,
+        "largest");
   }
 
   private static MaterialUse material() {

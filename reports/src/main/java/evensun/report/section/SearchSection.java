@@ -39,7 +39,7 @@ public final class SearchSection {
     search.notes().forEach(note -> blocks.add(new Block.Prose(note)));
     stepCost(search).ifPresent(text -> blocks.add(new Block.Prose(text)));
     GridWords.of(search).ifPresent(text -> blocks.add(new Block.Prose(text + ".")));
-    if (search.history().size() > 1) {
+    if (search.history().size() > 1 && search.front() == null) {
       blocks.add(Tables.plot(convergence(search)));
     }
     if (search.optima().size() > 1) {
@@ -50,7 +50,7 @@ public final class SearchSection {
     }
     Front front = search.front();
     if (front != null && front.points().size() > 1 && front.aims().size() > 1) {
-      front(search, front, blocks);
+      blocks.addAll(FrontBlocks.of(search, front));
     }
     return Optional.of(new Section("search", "Search", heading(search), blocks));
   }
@@ -67,7 +67,9 @@ public final class SearchSection {
   }
 
   private static String story(SearchRecord search) {
-    StringBuilder text = new StringBuilder("Aim: " + Keys.aim(search.aim()));
+    StringBuilder text = new StringBuilder("Aim: ");
+    text.append("smallest".equals(search.wanted()) ? "smallest " : "")
+        .append(Keys.aim(search.aim()));
     Double drawn = search.aimAsDrawn();
     if (drawn != null) {
       text.append(", as drawn ").append(Numbers.quantity(drawn, search.aimUnit()));
@@ -119,9 +121,10 @@ public final class SearchSection {
   }
 
   private static String arrival(SearchRecord search) {
-    double goal = search.aimFound() - Math.abs(search.aimFound()) * 1e-3;
+    double close = Math.abs(search.aimFound()) * 1e-3;
     int first = 0;
-    while (first < search.history().size() && search.history().get(first).best() < goal) {
+    while (first < search.history().size()
+        && Math.abs(search.history().get(first).best() - search.aimFound()) > close) {
       first++;
     }
     int last = search.history().size();
@@ -161,55 +164,6 @@ public final class SearchSection {
           c.text(),
           Numbers.significant(c.value(), 5),
           c.active() ? "active: it holds the design" : "slack");
-    }
-    return table.build();
-  }
-
-  private static void front(SearchRecord search, Front front, List<Block> blocks) {
-    List<Double> xs = front.points().stream().map(p -> p.aims().get(0)).toList();
-    List<Double> ys = front.points().stream().map(p -> p.aims().get(1)).toList();
-    List<Double> knee = new ArrayList<>();
-    for (int i = 0; i < ys.size(); i++) {
-      knee.add(i == front.knee() ? ys.get(i) : null);
-    }
-    Chart chart =
-        new Chart(
-            "front",
-            Kind.POINTS,
-            "Designs none of which is better in every aim",
-            around(Keys.aim(front.aims().get(0)), front.units().get(0), xs),
-            around(Keys.aim(front.aims().get(1)), front.units().get(1), ys),
-            xs,
-            List.of(
-                Series.of("designs of the front", "muted", ys),
-                new Series("best compromise", "sub1", false, knee)),
-            List.of());
-    blocks.add(new Block.Plot(chart, frontTable(search, front)));
-  }
-
-  private static Axis around(String label, String unit, List<Double> values) {
-    double low = lowest(values);
-    double high = values.stream().mapToDouble(Double::doubleValue).max().orElse(1);
-    double margin = Math.max(1e-9, (high - low) * 0.06);
-    return Axis.covering(label, unit, low - margin, high + margin);
-  }
-
-  private static Table frontTable(SearchRecord search, Front front) {
-    Table.Builder table = new Table.Builder("table-front", "The Pareto front").words("design");
-    for (int i = 0; i < front.aims().size(); i++) {
-      table.numbers(Keys.aim(front.aims().get(i)), front.units().get(i));
-    }
-    search.variables().forEach(v -> table.numbers(Keys.words(v.key()), v.unit()));
-    for (int i = 0; i < front.points().size(); i++) {
-      var point = front.points().get(i);
-      List<String> cells = new ArrayList<>();
-      cells.add(i == front.knee() ? "best compromise" : Integer.toString(i + 1));
-      point.aims().forEach(aim -> cells.add(Numbers.significant(aim, 5)));
-      for (VariableRecord v : search.variables()) {
-        Double value = point.values().get(v.key());
-        cells.add(value == null ? "" : Numbers.bare(value, v.unit()));
-      }
-      table.row(cells);
     }
     return table.build();
   }

@@ -1,5 +1,6 @@
 package evensun.report.summary;
 
+import evensun.report.decision.FrontWords;
 import evensun.report.decision.GridWords;
 import evensun.report.decision.Sentence;
 import evensun.report.decision.VerdictRules;
@@ -149,6 +150,7 @@ public record Summary(
     List<String> lines = new ArrayList<>();
     SearchRecord search = result.search();
     if (search != null) {
+      FrontWords.of(search).ifPresent(lines::add);
       GridWords.of(search).ifPresent(text -> lines.add(text + "."));
     }
     lines.add(findings(result.findings()));

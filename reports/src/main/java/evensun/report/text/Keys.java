@@ -16,13 +16,13 @@ public final class Keys {
   /** What of the layer varies: {@code thickness}, {@code bandgap}, and so on. */
   public static String property(String key) {
     String name = key.substring(key.lastIndexOf('.') + 1);
-    String bare = name.replaceFirst("(Nm|Ev|Deg|K|Percent)$", "");
+    String bare = name.replaceFirst("(Nm|Ev|Deg|K|Percent|MaPerCm2)$", "");
     return spaced(bare.isEmpty() ? name : bare);
   }
 
   /** Layer and property: {@code perovskite thickness}. */
   public static String words(String key) {
-    return key.indexOf('.') < 0 ? spaced(key) : layer(key) + " " + property(key);
+    return key.indexOf('.') < 0 ? property(key) : layer(key) + " " + property(key);
   }
 
   /** Whether a key names a thickness. */
@@ -35,9 +35,10 @@ public final class Keys {
     return key.endsWith(".bandgapEv");
   }
 
-  /** The name of an aim in words. */
+  /** An aim in words: its name, or the quantity and what it is of. */
   public static String aim(String aim) {
-    return aim.replace('-', ' ');
+    boolean quantity = aim.indexOf('.') >= 0 || aim.indexOf('-') < 0;
+    return quantity ? words(aim) : aim.replace('-', ' ');
   }
 
   private static String spaced(String camelCase) {

@@ -5,16 +5,11 @@ import evensun.scenario.SearchSpec.VarySpec;
 import evensun.scenario.SubcellSpec;
 import evensun.scenario.tree.Fields;
 import evensun.scenario.tree.Interval;
-import java.util.LinkedHashMap;
 import java.util.List;
-import java.util.Map;
 import java.util.Optional;
 
 /** Binds {@code search}. */
 final class SearchBinder {
-
-  /** Aims by the name they are written with. */
-  static final List<String> AIMS = List.of("matched-current", "current-sum", "efficiency");
 
   private static final Interval TIME = Interval.above(0, 1e7, "s");
 
@@ -27,13 +22,13 @@ final class SearchBinder {
       return Optional.empty();
     }
     Fields fields = search.get();
-    List<String> subcellNames = subcells.stream().map(SubcellSpec::name).toList();
+    QuantityBinder quantities = new QuantityBinder(stack, subcells);
     List<VarySpec> vary = VaryBinder.bind(fields, stack);
     SearchSpec spec =
         new SearchSpec(
             vary,
-            LimitBinder.bind(fields, stack, subcellNames),
-            fields.choice("aim", aims()).orElse(usualAim(vary)),
+            LimitBinder.bind(fields, quantities),
+            new AimBinder(fields, quantities).bind(usualAim(vary)),
             fields.whole("seed", 0, Long.MAX_VALUE).orElse(1),
             fields.count("evaluations", 1),
             fields.number("timeSeconds", TIME),
@@ -47,12 +42,6 @@ final class SearchBinder {
     boolean gap =
         vary.stream()
             .anyMatch(v -> GapBinder.KEYS.stream().anyMatch(k -> v.key().endsWith("." + k)));
-    return gap ? "efficiency" : AIMS.get(0);
-  }
-
-  private static Map<String, String> aims() {
-    Map<String, String> aims = new LinkedHashMap<>();
-    AIMS.forEach(a -> aims.put(a, a));
-    return aims;
+    return gap ? "efficiency" : "matched-current";
   }
 }

@@ -85,6 +85,11 @@ public final class Refiner {
     }
   }
 
+  /** Improves one design to the end. */
+  void improve(LocalProblem problem) {
+    improve(problem, 0, Effort.FULL);
+  }
+
   private void improve(LocalProblem problem, int index, Effort effort) {
     if (problem.stepped().length > 0) {
       relax(problem, effort);

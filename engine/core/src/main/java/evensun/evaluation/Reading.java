@@ -1,0 +1,51 @@
+package evensun.evaluation;
+
+/**
+ * The numbers of a bench's design that aims and limits are made of. Belongs to one thread; reading
+ * allocates nothing.
+ */
+public final class Reading {
+
+  private final Bench bench;
+  private final double[] photocurrentMaPerCm2;
+  private final double[] bandgapEv;
+
+  /** What a bench says; nothing until it is taken. */
+  public Reading(Bench bench) {
+    this.bench = bench;
+    int subcells = bench.model().stack().subcells().size();
+    photocurrentMaPerCm2 = new double[subcells];
+    bandgapEv = new double[subcells];
+  }
+
+  /**
+   * Evaluates the present design of the bench.
+   *
+   * @throws evensun.spi.EvaluationFailed when it cannot be evaluated
+   */
+  public Reading take() {
+    bench.currents(photocurrentMaPerCm2);
+    bench.subcellGaps(bandgapEv);
+    return this;
+  }
+
+  /** Photocurrents, [subcell] mA cm⁻²; not to be written. */
+  public double[] photocurrentMaPerCm2() {
+    return photocurrentMaPerCm2;
+  }
+
+  /** Bandgaps, [subcell] eV, 0 where an absorber has none; not to be written. */
+  public double[] bandgapEv() {
+    return bandgapEv;
+  }
+
+  /** Thicknesses, [layer] nm; not to be written. */
+  public double[] thicknessNm() {
+    return bench.design().thicknessNm;
+  }
+
+  /** A sum that the bench was made with. */
+  public double sum(LightSum sum) {
+    return bench.sum(sum);
+  }
+}

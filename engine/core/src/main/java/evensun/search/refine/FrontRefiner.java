@@ -1,0 +1,70 @@
+package evensun.search.refine;
+
+import evensun.search.problem.Individual;
+import evensun.search.problem.Judges;
+import evensun.search.problem.KeptAims;
+import evensun.search.problem.Objective;
+import evensun.search.problem.Space;
+import evensun.search.problem.Tally;
+import java.util.ArrayList;
+import java.util.List;
+
+/**
+ * Raises the first aim of every design of a front while the other aims of that design are kept (the
+ * ε-constraint method: Haimes, Lasdon and Wismer, IEEE Trans. Syst. Man Cybern. 1, 296 (1971)).
+ */
+public final class FrontRefiner {
+
+  private final Objective objective;
+  private final Space space;
+  private final Judges judges;
+  private final Refiner refiner;
+
+  /**
+   * A refiner.
+   *
+   * @param objective with several aims
+   * @param judges workers of the objective
+   */
+  public FrontRefiner(Objective objective, Space space, Judges judges, long seed) {
+    this.objective = objective;
+    this.space = space;
+    this.judges = judges;
+    int limits = objective.limits().size() + objective.aims().size() - 1;
+    refiner = new Refiner(space, judges, limits, seed);
+  }
+
+  /**
+   * The improved designs, each at least as good in every aim as the one whose place it takes.
+   *
+   * @param starts where to start from for each of them
+   * @param front designs that keep all limits, whose further aims are kept
+   * @param evaluations budget for all of them
+   */
+  public List<Individual> refine(
+      List<Individual> starts, List<Individual> front, int evaluations, Tally tally) {
+    int each = evaluations / Math.max(1, front.size());
+    List<LocalProblem> problems =
+        judges.each(
+            front.size(), (worker, i) -> improved(starts.get(i), front.get(i), worker, each));
+    List<Individual> improved = new ArrayList<>();
+    for (int i = 0; i < problems.size(); i++) {
+      tally.add(problems.get(i).tally());
+      Individual best = problems.get(i).best();
+      KeptAims kept = new KeptAims(objective, front.get(i).verdict());
+      improved.add(new Individual(best.birth(), best.genes(), kept.released(best.verdict())));
+    }
+    return improved;
+  }
+
+  private LocalProblem improved(
+      Individual from, Individual place, Objective.Worker worker, int evaluations) {
+    KeptAims kept = new KeptAims(objective, place.verdict());
+    Individual start = new Individual(from.birth(), from.genes(), kept.kept(from.verdict()));
+    LocalProblem problem =
+        new LocalProblem(
+            space, judges, kept.on(worker), start, Double.NEGATIVE_INFINITY, evaluations);
+    refiner.improve(problem);
+    return problem;
+  }
+}
