@@ -5,8 +5,10 @@ import evensun.search.problem.Individual;
 import evensun.search.problem.Numbers;
 import evensun.search.problem.Verdict;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.Comparator;
 import java.util.List;
+import java.util.stream.IntStream;
 
 /** Fronts of designs with several aims. */
 final class Front {
@@ -26,6 +28,40 @@ final class Front {
     }
     front.sort(Comparator.comparingDouble((Individual i) -> -i.verdict().aims().get(0)));
     return front;
+  }
+
+  /**
+   * A front without the designs that lead another by next to nothing in some aim and are behind it
+   * in others: the best in each aim first, then by the sum of the aims, in parts of their range.
+   *
+   * @param nothing what is next to nothing, in parts of the range of an aim
+   */
+  static List<Individual> thinned(List<Individual> front, double nothing) {
+    double[][] scaled =
+        scaled(front.stream().map(i -> new Candidate(i.genes(), i.verdict())).toList());
+    List<Integer> order = new ArrayList<>();
+    IntStream.range(0, front.size()).forEach(order::add);
+    order.sort(Comparator.comparingDouble((Integer i) -> -rank(scaled[i])));
+    List<Integer> kept = new ArrayList<>();
+    for (int i : order) {
+      if (kept.stream().noneMatch(k -> covers(scaled[k], scaled[i], nothing))) {
+        kept.add(i);
+      }
+    }
+    return kept.stream().sorted().map(front::get).toList();
+  }
+
+  private static double rank(double[] scaled) {
+    boolean best = Arrays.stream(scaled).anyMatch(aim -> aim == 1);
+    return Arrays.stream(scaled).sum() + (best ? scaled.length : 0);
+  }
+
+  private static boolean covers(double[] a, double[] b, double nothing) {
+    return IntStream.range(0, a.length).allMatch(i -> a[i] >= b[i] - nothing);
+  }
+
+  private static double[][] scaled(List<Candidate> front) {
+    return scaled(front, front);
   }
 
   private static boolean beats(Verdict a, Verdict b) {
@@ -109,11 +145,11 @@ final class Front {
    * the plane through the best of each aim, that is with the largest sum.
    */
   static int knee(List<Candidate> front) {
-    double[][] scaled = scaled(front, front);
+    double[][] scaled = scaled(front);
     int knee = -1;
     double largest = Double.NEGATIVE_INFINITY;
     for (int i = 0; i < scaled.length; i++) {
-      double sum = java.util.Arrays.stream(scaled[i]).sum();
+      double sum = Arrays.stream(scaled[i]).sum();
       if (sum > largest) {
         largest = sum;
         knee = i;

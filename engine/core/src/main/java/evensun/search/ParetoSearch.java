@@ -40,6 +40,11 @@ public final class ParetoSearch {
   /** [refinement] part of the evaluations left that it may take. */
   private static final double[] REFINED_SHARE = {0.5, 0.5, 1};
 
+  /**
+   * Designs of a front that are nearer to another than this, in parts of its range, are left out.
+   */
+  private static final double NEXT_TO_NOTHING = 2e-3;
+
   private static final int LAST = REFINED_SHARE.length - 1;
 
   private final Objective objective;
@@ -180,7 +185,8 @@ public final class ParetoSearch {
     all.addAll(
         new FrontRefiner(objective, space, judges, settings.seed())
             .refine(starts, front, left, tally));
-    SearchState next = next(state, state.generation(), Front.of(all), 0, tally);
+    List<Individual> refined = Front.thinned(Front.of(all), NEXT_TO_NOTHING);
+    SearchState next = next(state, state.generation(), refined, 0, tally);
     return state.round() == LAST || state.stop() == StopReason.TIME
         ? next.with(Phase.DONE, state.stop())
         : next.inRound(state.round() + 1);
