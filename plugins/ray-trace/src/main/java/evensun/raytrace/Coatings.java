@@ -24,6 +24,7 @@ final class Coatings implements AutoCloseable {
   private final Device device;
   private final Angles angles;
   private final List<CoatingTable> tables = new ArrayList<>(); // null where a boundary is ideal
+  private final List<CoatingTable.Target> targets = new ArrayList<>();
 
   Coatings(Problem problem, Device device, Angles angles, Services services) {
     this.device = device;
@@ -36,6 +37,7 @@ final class Coatings implements AutoCloseable {
       Device.Boundary boundary = boundary(t);
       absorbed[t] =
           new double[wavelengths][2 * table.cosines().length * (boundary.films().size() + 1)];
+      targets.add(target(t));
       tables.add(boundary.isIdeal() ? null : new CoatingTable(problem, device, table, services));
     }
   }
@@ -50,7 +52,7 @@ final class Coatings implements AutoCloseable {
       if (boundary(t).isIdeal()) {
         fillIdeal(design, angles.tables().get(t));
       } else {
-        tables.get(t).refresh(design, target(t));
+        tables.get(t).refresh(design, targets.get(t));
       }
     }
   }

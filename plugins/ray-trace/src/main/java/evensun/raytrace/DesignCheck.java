@@ -7,6 +7,7 @@ import evensun.spi.Feature;
 import evensun.spi.Problem;
 import evensun.spi.Side;
 import evensun.spi.Texture;
+import java.util.List;
 
 /** Refuses designs that cannot be evaluated. */
 final class DesignCheck {
@@ -83,16 +84,15 @@ final class DesignCheck {
   }
 
   /** Checks that films and layers fit to the shapes of a device. */
-  void checkFit(Design design, Traces.Traced traced) {
-    Device device = traced.device();
+  void checkFit(Design design, Device device, List<Face> faces) {
     for (int b = 0; b < device.boundaries().size(); b++) {
-      Face face = traced.faces().get(b);
+      Face face = faces.get(b);
       if (face.relief().isPresent()) {
         checkFilms(design, device.boundaries().get(b), face.relief().get().featureUm());
       }
     }
     for (int m = 1; m < device.mediaCount() - 1; m++) {
-      double reach = traced.faces().get(m - 1).belowMeanUm() + traced.faces().get(m).aboveMeanUm();
+      double reach = faces.get(m - 1).belowMeanUm() + faces.get(m).aboveMeanUm();
       double thickness = device.thicknessUm(design, m);
       if (thickness < reach) {
         throw failed(

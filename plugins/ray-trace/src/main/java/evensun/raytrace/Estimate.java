@@ -5,7 +5,8 @@ package evensun.raytrace;
  *
  * <p>All light is reflected, transmitted or absorbed, so that the true total is known to be 1:
  * means are divided by the total that was found, and each replicate's part of that correction goes
- * along (the usual estimator of a ratio, linearised). Owned by one thread.
+ * along (the usual estimator of a ratio, linearised). The correction counts as an error of a
+ * spectrum, since light let go by every lot shows in nothing else. Owned by one thread.
  */
 final class Estimate {
 
@@ -78,6 +79,8 @@ final class Estimate {
       double off = rows[row][w] - mean[row][w];
       squares += off * off;
     }
-    return Math.sqrt(squares / (replicate.length * (replicate.length - 1.0)));
+    double variance = squares / (replicate.length * (replicate.length - 1.0));
+    double corrected = mean[row][w] * (total[w] - 1);
+    return Math.sqrt(variance + corrected * corrected);
   }
 }

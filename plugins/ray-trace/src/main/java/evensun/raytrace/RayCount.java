@@ -11,7 +11,7 @@ import evensun.spi.Services;
  */
 record RayCount(int perReplicate) {
 
-  private static final int PILOT = 8;
+  private static final int PILOT = 16;
   private static final int MOST = 1024;
 
   /**

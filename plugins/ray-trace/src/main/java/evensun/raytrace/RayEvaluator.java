@@ -29,12 +29,17 @@ final class RayEvaluator implements Evaluator, ReflectanceParts, DepthProfile, R
   private final DesignCheck check;
   private final Map<Traces.Traced, LitDevice> devices = new LinkedHashMap<>(16, 0.75f, true);
   private final Estimate estimate;
+  private final Beam[] beams; // [i]
+  private final Stamp stamp;
+  private LitDevice last; // the device that the stamp is of
 
   RayEvaluator(Problem problem, Services services, Traces traces) {
     this.problem = problem;
     this.services = services;
     this.traces = traces;
     check = new DesignCheck(problem);
+    stamp = new Stamp(problem);
+    beams = problem.incidences().stream().map(Beam::of).toArray(Beam[]::new);
     int rows = LitDevice.LAYERS + problem.layerCount();
     estimate = new Estimate(rows, problem.wavelengthCount(), Options.REPLICATES);
   }
@@ -42,16 +47,8 @@ final class RayEvaluator implements Evaluator, ReflectanceParts, DepthProfile, R
   @Override
   public void evaluate(Design design, Response into) {
     check.check(design);
-    Beam last = null;
-    LitDevice lit = null;
-    for (int i = 0; i < problem.incidences().size(); i++) {
-      Incidence incidence = problem.incidences().get(i);
-      Beam beam = Beam.of(incidence);
-      if (!beam.equals(last)) {
-        lit = ready(design, beam);
-        last = beam;
-      }
-      solve(lit, incidence);
+    for (int i = 0; i < beams.length; i++) {
+      solve(ready(design, beams[i]), problem.incidences().get(i));
       Rows.write(i, estimate.mean, estimate.error, into);
       if (i == 0 && into.sum != null) {
         sum(into);
@@ -61,15 +58,22 @@ final class RayEvaluator implements Evaluator, ReflectanceParts, DepthProfile, R
 
   /** The device of a design and a beam with its coatings. */
   LitDevice ready(Design design, Beam beam) {
-    Traces.Traced traced = traces.of(design, beam);
-    check.checkFit(design, traced);
+    if (last == null || !stamp.matches(design, beam)) {
+      last = device(traces.of(design, beam));
+      stamp.take(design, beam);
+    }
+    check.checkFit(design, last.traced().device(), last.traced().faces());
+    last.prepare(design);
+    return last;
+  }
+
+  private LitDevice device(Traces.Traced traced) {
     LitDevice lit = devices.get(traced);
     if (lit == null) {
       lit = new LitDevice(problem, traced, services);
       devices.put(traced, lit);
       forgetOldest();
     }
-    lit.prepare(design);
     return lit;
   }
 
@@ -126,7 +130,7 @@ final class RayEvaluator implements Evaluator, ReflectanceParts, DepthProfile, R
   Estimate estimate(Design design, int incidence) {
     check.check(design);
     Incidence light = problem.incidences().get(incidence);
-    solve(ready(design, Beam.of(light)), light);
+    solve(ready(design, beams[incidence]), light);
     return estimate;
   }
 
@@ -134,7 +138,7 @@ final class RayEvaluator implements Evaluator, ReflectanceParts, DepthProfile, R
   public void evaluate(Design design, int incidence, double[] neverEntered, double[] cameBack) {
     Incidence light = problem.incidences().get(incidence);
     Estimate found = estimate(design, incidence);
-    LitDevice lit = ready(design, Beam.of(light));
+    LitDevice lit = ready(design, beams[incidence]);
     int absorber = Absorber.first(problem, lit.traced().device(), design);
     for (int w = 0; w < neverEntered.length; w++) {
       double never = 0;
@@ -166,7 +170,7 @@ final class RayEvaluator implements Evaluator, ReflectanceParts, DepthProfile, R
     }
     Incidence light = problem.incidences().get(incidence);
     double[] whole = estimate(design, incidence).mean[LitDevice.LAYERS + channel.layer()];
-    LitDevice lit = ready(design, Beam.of(light));
+    LitDevice lit = ready(design, beams[incidence]);
     int medium = lit.traced().device().medium(channel.layer());
     Profile profile = medium < 0 ? null : new Profile(lit, design, medium, depthNm);
     for (int w = 0; w < whole.length; w++) {
@@ -183,9 +187,8 @@ final class RayEvaluator implements Evaluator, ReflectanceParts, DepthProfile, R
   @Override
   public View view(Design design, int incidence, int wavelength, int rayCount) {
     check.check(design);
-    Beam beam = Beam.of(problem.incidences().get(incidence));
-    return Section.of(problem, ready(design, beam).traced(), design, services)
-        .view(beam, wavelength, rayCount);
+    return Section.of(problem, ready(design, beams[incidence]).traced(), design, services)
+        .view(beams[incidence], wavelength, rayCount);
   }
 
   @Override

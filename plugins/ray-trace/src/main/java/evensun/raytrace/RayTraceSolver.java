@@ -54,6 +54,7 @@ public final class RayTraceSolver implements OpticalSolver {
   public PreparedSolver prepare(Problem problem, Design start, Services services) {
     Options options = Options.of(problem.options());
     problem.layers().forEach(RayTraceSolver::refuseFeatures);
+    Roughnesses.requireCoarse(problem, start);
     Device device = new Device(problem, new boolean[problem.layerCount()]);
     return device.isFlat()
         ? new FlatStack(problem, start, services)

@@ -109,6 +109,7 @@ final class Traces {
 
   private Traced trace(Design design, Device device, Beam beam) {
     List<Face> faces = device.faces(design);
+    new DesignCheck(problem).checkFit(design, device, faces);
     Forest forest =
         Forest.trace(faces, media(design, device), beam, Options.REPLICATES, rays, problem.seed());
     return new Traced(device, faces, forest);

@@ -41,7 +41,7 @@ class FlatLimitTest {
   /** A scatterer that scatters nothing: the same stack, but followed by rays. */
   @Test
   void raysBetweenFlatFacesGiveTheIncoherentTransferMatrix() {
-    Response rays = stack(new Scatter(1, 1, Side.FRONT)).rays(256).solve();
+    Response rays = stack(new Scatter(1, 1, Side.FRONT)).rays(4096).solve();
     Response waves = stack().solve(new TransferMatrixSolver());
     for (int i = 0; i < waves.absorptance.length; i++) {
       for (int w = 0; w < waves.absorptance[i].length; w++) {

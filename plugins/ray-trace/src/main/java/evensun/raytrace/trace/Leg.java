@@ -27,6 +27,9 @@ final class Leg {
   /** 1 over the chance at which it was followed. */
   double factor = 1;
 
+  /** Meetings before it. */
+  int meetings;
+
   /** Boundary it is at or comes to. */
   int face;
 
@@ -80,6 +83,7 @@ final class Leg {
     leg.guessS = s;
     leg.guessP = p;
     leg.parent = 2 * event + which;
+    leg.meetings = meetings + 1;
     leg.face = face;
     leg.above = above;
     leg.inRelief = inRelief;

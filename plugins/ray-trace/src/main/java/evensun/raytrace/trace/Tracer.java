@@ -20,18 +20,21 @@ import java.util.Queue;
 final class Tracer {
 
   /** Guessed power below which light goes on by lot. */
-  private static final double WEAK = 0.05;
+  private static final double WEAK = 0.2;
 
   /**
    * Least share guessed for a leg that is possible: a film may send more light there than guessed.
    */
   private static final double LEAST_SHARE = 0.05;
 
-  /** Optical depth after which no light is left: 6e-6 of it. */
-  private static final double OPAQUE = 12;
+  /** Optical depth after which no light is left: 3e-7 of it. */
+  private static final double OPAQUE = 15;
 
   /** Cosine below which light runs along its layer and stays there. */
   private static final double LEVEL = 1e-6;
+
+  /** Meetings of one ray after another; light still on its way then goes in circles and is lost. */
+  private static final int MOST_MEETINGS = 5000;
 
   private final List<Face> faces;
   private final Slots slots;
@@ -268,6 +271,9 @@ final class Tracer {
     leg.guessS *= left;
     leg.guessP *= left;
     double power = leg.guessS + leg.guessP;
+    if (leg.meetings > MOST_MEETINGS) {
+      return false;
+    }
     if (power >= WEAK) {
       return true;
     }
