@@ -32,7 +32,7 @@ public record SearchSpec(
 
   /** This search with another seed. */
   SearchSpec withSeed(long other) {
-    return new SearchSpec(vary, limits, aim, other, evaluations, timeSeconds, place);
+    return new SearchSpec(vary, limits, aims, other, evaluations, timeSeconds, place);
   }
 
   /** Every quantity with its own range; that of a tied one follows from what it follows. */
