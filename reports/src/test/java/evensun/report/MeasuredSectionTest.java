@@ -51,6 +51,21 @@ class MeasuredSectionTest {
     assertThat(section.blocks()).hasSize(2);
   }
 
+  /** A run with a measured reflectance and a measured quantum efficiency. */
+  static RunResult measured() {
+    RunResult run = SampleRuns.assessment();
+    List<Double> nm = run.found().spectral().wavelengthNm();
+    List<Double> ten = run.found().spectral().reflectance().stream().map(r -> 0.9 * r).toList();
+    List<Double> top =
+        run.found().spectral().absorptance().get("perovskite").stream().map(a -> 0.95 * a).toList();
+    String as = "fraction against wavelength in nm";
+    return withMeasured(
+        run,
+        List.of(
+            new Measured(null, "r.csv", as, nm, ten, 300, 1200, 0.02, 3.1, 3.5),
+            new Measured("top", "<i>eqe.csv", as, nm, top, 300, 1200, 0.03, 19.4, 20.4)));
+  }
+
   private static RunResult withMeasured(RunResult run, List<Measured> measured) {
     return new RunResult(
         run.formatVersion(),

@@ -48,6 +48,7 @@ class PageInBrowserTest {
         Map.entry("full", SampleRuns.full()),
         Map.entry("assessment", SampleRuns.assessment()),
         Map.entry("textured", TexturedRuns.assessment()),
+        Map.entry("measured", MeasuredSectionTest.measured()),
         Map.entry("hostile", AwkwardRuns.hostile()),
         Map.entry("sixty", AwkwardRuns.sixtyLayers()),
         Map.entry("single", AwkwardRuns.oneWavelength()),

@@ -28,6 +28,11 @@ final class Plugins {
   static List<Path> places(GlobalOptions options) {
     List<Path> places = new ArrayList<>();
     for (Path place : options.plugins) {
+      // An unset variable of a script must not make the working folder a folder of plugins.
+      if (place.toString().isBlank()) {
+        throw new InputException(
+            Place.option("--plugins"), "names no folder; name a folder or a plugin");
+      }
       if (!Files.exists(place)) {
         throw new InputException(
             Place.option("--plugins"), "there is no " + place + "; name a folder or a plugin");

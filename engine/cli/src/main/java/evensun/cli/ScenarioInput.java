@@ -28,6 +28,10 @@ final class ScenarioInput {
     if (argument.equals("-")) {
       return Sources.open(STANDARD_INPUT, Path.of("").toAbsolutePath(), in);
     }
+    if (argument.isBlank()) {
+      throw new InputException(
+          Place.of("SCENARIO"), "names no file; write a scenario's file, or - for standard input");
+    }
     try {
       return ScenarioReader.source(Path.of(argument));
     } catch (InvalidPathException e) {

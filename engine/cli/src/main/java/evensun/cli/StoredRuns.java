@@ -43,6 +43,9 @@ final class StoredRuns {
    * @param name a folder, its result.json, {@code last} or {@code previous}
    */
   static StoredRun read(String name) {
+    if (name.isBlank()) {
+      throw new InputException(Place.of("RUN"), "names no run; write its folder, last or previous");
+    }
     Path path = Path.of(name);
     if (!Files.exists(path) && (name.equals("last") || name.equals("previous"))) {
       return recent(name);

@@ -21,7 +21,8 @@ final class VerifyCommand extends BaseCommand {
     List<Published> verdicts;
     try (PluginHost host = Plugins.open(evensun())) {
       verdicts =
-          PublishedValues.compared(host.require("transfer-matrix"), host.services(() -> false));
+          PublishedValues.compared(
+              PublishedValues.all(host.require("transfer-matrix"), host.services(() -> false)));
     }
     if (global().json()) {
       console().out().println(JsonMapper.builder().build().writeValueAsString(verdicts));

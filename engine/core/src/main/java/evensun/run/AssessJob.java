@@ -12,6 +12,7 @@ import evensun.result.Measured;
 import evensun.result.Outcome;
 import evensun.result.Published;
 import evensun.result.RunResult;
+import evensun.spi.Services;
 import evensun.verify.PublishedValues;
 import java.util.List;
 import java.util.Map;
@@ -84,11 +85,21 @@ public final class AssessJob {
     }
   }
 
-  /** Published values beside computed ones; null where the solver of flat stacks is not loaded. */
+  /**
+   * Published values beside computed ones, those of rays where the run traces rays; null where the
+   * solver of flat stacks is not loaded.
+   */
   static @Nullable List<Published> published(Preparation preparation) {
     PluginHost host = preparation.host();
+    Services services = host.services(() -> false);
+    boolean rays = preparation.choice().statistical();
     return host.solver(SolverChoice.FLAT)
-        .map(solver -> PublishedValues.compared(solver, host.services(() -> false)))
+        .map(
+            flat ->
+                rays
+                    ? PublishedValues.all(flat, services)
+                    : PublishedValues.withoutRays(flat, services))
+        .map(PublishedValues::compared)
         .orElse(null);
   }
 

@@ -34,18 +34,24 @@ public final class PublishedValues {
    * @param services what the host offers to it
    */
   public static List<PublishedValue> all(OpticalSolver thinFilms, Services services) {
+    List<PublishedValue> values = new ArrayList<>(withoutRays(thinFilms, services));
+    services.solver("ray-trace").ifPresent(r -> values.addAll(rays(new RayProbe(r, services))));
+    return values;
+  }
+
+  /** All but those that rays are traced for, which take some seconds; parameters as above. */
+  public static List<PublishedValue> withoutRays(OpticalSolver thinFilms, Services services) {
     List<PublishedValue> values = new ArrayList<>(light());
     values.addAll(glasses());
     values.addAll(silicon());
     values.addAll(limits());
     values.addAll(films(new ThinFilmProbe(thinFilms, services)));
-    services.solver("ray-trace").ifPresent(r -> values.addAll(rays(new RayProbe(r, services))));
     return values;
   }
 
-  /** All of them, computed and compared; the parameters are those of {@link #all}. */
-  public static List<Published> compared(OpticalSolver thinFilms, Services services) {
-    return all(thinFilms, services).stream().map(PublishedValue::verdict).toList();
+  /** Values computed and compared. */
+  public static List<Published> compared(List<PublishedValue> values) {
+    return values.stream().map(PublishedValue::verdict).toList();
   }
 
   private static List<PublishedValue> light() {

@@ -39,7 +39,7 @@ class WrongInputIT {
 
   @Test
   void theTableIsNotEmpty() throws IOException {
-    assertThat(rows()).hasSizeGreaterThan(40);
+    assertThat(rows()).hasSizeGreaterThan(50);
   }
 
   @ParameterizedTest(name = "{0}")

@@ -55,7 +55,7 @@ public final class MeasuredSection {
     for (Measured curve : measured) {
       Series model =
           curve.subcell() == null
-              ? Series.of("reflectance", "reflected", drawn.spectral().reflectance())
+              ? Series.of("reflectance", "muted", drawn.spectral().reflectance())
               : subcells.stream()
                   .filter(s -> s.label().equals(curve.subcell()))
                   .findFirst()
