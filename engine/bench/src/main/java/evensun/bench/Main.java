@@ -20,7 +20,7 @@ import org.openjdk.jmh.runner.options.VerboseMode;
 public final class Main {
 
   private static final String USAGE =
-      "usage: java -jar benchmarks.jar [REGEX] [--forks N] [--seconds S], or search [--seeds N] [--cold N] [PROBLEM...]";
+      "usage: java -jar benchmarks.jar [REGEX] [--forks N] [--seconds S], or processor, or search [--seeds N] [--cold N] [PROBLEM...]";
 
   /** The class of benchmarks that want a fresh virtual machine each time. */
   private static final String COLD = "StartBenchmark";
@@ -31,6 +31,8 @@ public final class Main {
   public static void main(String[] args) throws Exception {
     if (args.length > 0 && args[0].equals("search")) {
       SearchTables.main(Arrays.copyOfRange(args, 1, args.length));
+    } else if (args.length > 0 && args[0].equals("processor")) {
+      ProcessorTimes.print();
     } else {
       measure(args);
     }
