@@ -252,13 +252,6 @@ public final class PublishedValues {
             trapping,
             () -> ideal(probe, 180)),
         value(
-            "silicon, 10 µm, ideal faces, by rays",
-            "mA cm⁻²",
-            40.117,
-            0.03,
-            trapping,
-            () -> ideal(probe, 10)),
-        value(
             "pyramids of bare silicon, reflectance at 600 nm, by rays",
             "%",
             100 * Facets.pyramids(n, k),

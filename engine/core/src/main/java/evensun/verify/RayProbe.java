@@ -45,7 +45,8 @@ final class RayProbe {
    */
   double idealCurrent(double[] nm, double[] bins, double[] n, double[] k, double widthUm) {
     List<Feature> ideal = List.of(new IdealFace(Side.FRONT), new IdealFace(Side.REAR));
-    double[] absorptance = answer(nm, bins, n, k, widthUm, ideal).absorptance[0];
+    Map<String, String> few = Map.of("rays", "16");
+    double[] absorptance = answer(nm, bins, n, k, widthUm, ideal, few).absorptance[0];
     double sum = 0;
     for (int w = 0; w < bins.length; w++) {
       sum += bins[w] * absorptance[w];
@@ -66,12 +67,24 @@ final class RayProbe {
             Side.FRONT);
     double[] one = {1};
     return answer(
-            new double[] {600}, one, new double[] {n}, new double[] {k}, 1e4, List.of(pyramids))
+            new double[] {600},
+            one,
+            new double[] {n},
+            new double[] {k},
+            1e4,
+            List.of(pyramids),
+            Map.of("rays", "8192"))
         .reflectance[0][0];
   }
 
   private Response answer(
-      double[] nm, double[] bins, double[] n, double[] k, double widthUm, List<Feature> features) {
+      double[] nm,
+      double[] bins,
+      double[] n,
+      double[] k,
+      double widthUm,
+      List<Feature> features,
+      Map<String, String> options) {
     Problem problem =
         new Problem(
             Samples.of(nm),
@@ -84,7 +97,7 @@ final class RayProbe {
             List.of(Incidence.normal()),
             1,
             0.01,
-            Map.of());
+            options);
     Design design = Design.of(problem);
     java.util.Arrays.fill(design.n[0], 1);
     System.arraycopy(n, 0, design.n[1], 0, n.length);
