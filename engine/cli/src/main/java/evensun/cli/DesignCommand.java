@@ -166,6 +166,9 @@ final class DesignCommand extends BaseCommand {
       return null;
     }
     Path file = resume.resolve(ProgressLine.STATE);
+    if (!Files.exists(file)) {
+      return null; // stopped before anything was saved: it starts again
+    }
     try {
       return SearchStateCodec.read(Files.readString(file));
     } catch (IOException | RuntimeException e) {

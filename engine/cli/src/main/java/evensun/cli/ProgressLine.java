@@ -27,14 +27,16 @@ final class ProgressLine implements SearchListener {
 
   private static final JsonMapper JSON = JsonMapper.builder().build();
   private static final long SHOW_NANOS = 200_000_000L;
-  private static final long SAVE_NANOS = 5_000_000_000L;
+
+  /** Saving takes at most this part of the time. */
+  private static final double SAVING_SHARE = 0.05;
 
   private final @Nullable PrintStream terminal;
   private final RunFolder folder;
   private final Path log;
   private final String unit;
   private long shown = System.nanoTime();
-  private long saved = System.nanoTime();
+  private long nextSave = Long.MIN_VALUE;
   private @Nullable SearchState latest;
   private int width;
 
@@ -101,8 +103,7 @@ final class ProgressLine implements SearchListener {
   @Override
   public void state(SearchState state) {
     latest = state;
-    long now = System.nanoTime();
-    if (now - saved > SAVE_NANOS) {
+    if (System.nanoTime() > nextSave) {
       save();
     }
   }
@@ -110,8 +111,10 @@ final class ProgressLine implements SearchListener {
   /** Saves the latest state, if there is one. */
   void save() {
     if (latest != null) {
-      saved = System.nanoTime();
+      long start = System.nanoTime();
       folder.write(STATE, SearchStateCodec.write(latest));
+      long end = System.nanoTime();
+      nextSave = end + (long) ((end - start) / SAVING_SHARE);
     }
   }
 

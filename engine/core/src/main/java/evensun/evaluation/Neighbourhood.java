@@ -3,8 +3,10 @@ package evensun.evaluation;
 import evensun.result.Sensitivity;
 import evensun.result.WhatIf;
 import evensun.search.problem.Variable;
+import evensun.spi.EvaluationFailed;
 import evensun.stack.ResolvedSubcell;
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.Comparator;
 import java.util.LinkedHashMap;
 import java.util.List;
@@ -28,6 +30,7 @@ public final class Neighbourhood implements AutoCloseable {
   private final Aim aim;
   private final @Nullable Aim efficiency;
   private final List<ResolvedSubcell> subcells;
+  private final Map<String, String> failures = new LinkedHashMap<>();
 
   /**
    * The surroundings of a design.
@@ -64,22 +67,39 @@ public final class Neighbourhood implements AutoCloseable {
     return sums;
   }
 
-  /** What a small change of each quantity does, the largest effect first. */
+  /**
+   * What a small change of each quantity does, the largest effect first; without those that lead to
+   * a design which cannot be evaluated.
+   */
   public List<Sensitivity> sensitivities() {
     Point here = at(0, centre[0]);
     List<Sensitivity> all = new ArrayList<>();
     for (int v = 0; v < parameters.size(); v++) {
-      all.add(sensitivity(v, here));
+      try {
+        all.add(sensitivity(v, here));
+      } catch (EvaluationFailed e) {
+        failures.putIfAbsent(parameters.get(v).key(), e.getMessage());
+      }
     }
     all.sort(Comparator.comparingDouble(s -> aim.shown(s.toleranceAimChange())));
     return all;
   }
 
-  /** The aim and the currents against each quantity between its bounds. */
+  /** Why designs around this one could not be evaluated so far, by the key of what was moved. */
+  public Map<String, String> failures() {
+    return Collections.unmodifiableMap(failures);
+  }
+
+  /**
+   * The aim and the currents against each quantity between its bounds, where they can be evaluated.
+   */
   public List<WhatIf> curves() {
     List<WhatIf> curves = new ArrayList<>();
     for (int v = 0; v < parameters.size(); v++) {
-      curves.add(curve(v));
+      WhatIf curve = curve(v);
+      if (curve.value().size() > 1) {
+        curves.add(curve);
+      }
     }
     return curves;
   }
@@ -131,7 +151,13 @@ public final class Neighbourhood implements AutoCloseable {
     subcells.forEach(subcell -> currents.put(subcell.name(), new ArrayList<>()));
     for (int i = 0; i < CURVE_POINTS; i++) {
       double value = variable.low() + (variable.high() - variable.low()) * i / (CURVE_POINTS - 1);
-      Point point = at(v, value);
+      Point point;
+      try {
+        point = at(v, value);
+      } catch (EvaluationFailed e) {
+        failures.putIfAbsent(variable.key(), e.getMessage());
+        continue;
+      }
       values.add(value);
       aims.add(aim.shown(point.aim()));
       for (int s = 0; s < subcells.size(); s++) {

@@ -11,8 +11,8 @@ import org.jspecify.annotations.Nullable;
  * @param aimUnit unit of the aim
  * @param aimAsDrawn the aim of the stack as drawn; null where it could not be evaluated
  * @param aimFound the aim of the design found
- * @param stopped why it stopped: {@code converged}, {@code evaluations}, {@code time} or {@code
- *     interrupted}
+ * @param stopped why it stopped: {@code converged}, {@code evaluations}, {@code time}, {@code
+ *     failures} or {@code interrupted}
  * @param generations generations of the genetic algorithm
  * @param evaluations designs evaluated
  * @param failures designs that could not be evaluated

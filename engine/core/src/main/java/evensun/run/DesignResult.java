@@ -15,6 +15,8 @@ import evensun.result.Outcome;
 import evensun.result.RunResult;
 import evensun.result.SearchRecord;
 import evensun.result.SearchRecord.ConstraintRecord;
+import evensun.result.Sensitivity;
+import evensun.result.WhatIf;
 import evensun.run.DesignJob.Found;
 import evensun.run.DesignJob.Look;
 import evensun.search.SearchOutcome;
@@ -72,6 +74,9 @@ final class DesignResult {
           drawn.outcome() == null
               ? null
               : preparation.measurements().against(drawn.outcome(), findings);
+      List<Sensitivity> sensitivities = around.sensitivities();
+      List<WhatIf> curves = around.curves();
+      around.failures().forEach(this::neighbourFailed);
       return new RunResult(
           RunResult.FORMAT,
           "design",
@@ -83,8 +88,8 @@ final class DesignResult {
           Usage.spectrum(preparation.stack()),
           AssessJob.depth(bench),
           AssessJob.angular(preparation, bench, AssessJob.USUAL_ANGLE_STEP_DEG),
-          around.sensitivities(),
-          around.curves(),
+          sensitivities,
+          curves,
           new SecondOpinions(preparation, varied, best).opinions(),
           measured,
           FlatTwin.beside(preparation, bench),
@@ -110,6 +115,16 @@ final class DesignResult {
         best.toArray(),
         aims.first(),
         Aims.efficiency(preparation.model()).orElse(null));
+  }
+
+  private void neighbourFailed(String key, String reason) {
+    findings.add(
+        new Finding(
+            "neighbour-failed",
+            Severity.WARNING,
+            key,
+            "designs beside the one found could not be evaluated and are left out of its surroundings: "
+                + reason));
   }
 
   private void set(Bench bench, Candidate best) {

@@ -6,6 +6,8 @@ import static org.assertj.core.api.Assertions.within;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.List;
 import java.util.concurrent.TimeUnit;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
@@ -111,6 +113,55 @@ class DesignIT {
     JsonNode end = JSON.readTree(Files.readString(broken.resolve("result.json")));
     assertThat(end.get("design")).isEqualTo(whole.get("design"));
     assertThat(end.get("search").get("history")).isEqualTo(whole.get("search").get("history"));
+  }
+
+  /** Witness: a limit of 150 nm and a range that begins at 200 nm exclude each other. */
+  @Test
+  void aLimitThatNoDesignKeepsIsASeriousFinding() throws IOException {
+    Path scenario = folder.resolve("thin.yaml");
+    Files.writeString(
+        scenario,
+        Files.readString(Program.scenario(PLANAR))
+            + "\n  limits: [{quantity: thicknessNm, of: [perovskite], atMost: 150}]\n");
+    Program.Run run =
+        new Program(folder)
+            .run("design", scenario.toString(), "--out", "run", "--set", "search.evaluations=500");
+    assertThat(run.status()).as(run.err()).isZero();
+    JsonNode result = JSON.readTree(Files.readString(folder.resolve("run/result.json")));
+    JsonNode broken = null;
+    for (JsonNode finding : result.get("findings")) {
+      broken = finding.get("code").asString().equals("limit-broken") ? finding : broken;
+    }
+    assertThat(broken).isNotNull();
+    assertThat(broken.get("severity").asString()).isEqualTo("serious");
+    // It comes nearest that breaks the limit least.
+    assertThat(result.get("design").get("perovskite.thicknessNm").asDouble())
+        .isCloseTo(200, within(1e-6));
+  }
+
+  /** Witness: the design assessed by itself in the same other way. */
+  @Test
+  void secondOpinionsAreWhatAnAssessmentOfTheDesignSays() throws IOException {
+    JsonNode result = design(PLANAR, "--set", "search.evaluations=600");
+    List<String> other = new ArrayList<>(List.of("assess", Program.scenario(PLANAR).toString()));
+    result
+        .get("design")
+        .propertyStream()
+        .forEach(e -> other.addAll(List.of("--set", e.getKey() + "=" + e.getValue())));
+    for (String opinion : List.of("grid.stepNm=2.5", "solver.options.kernel=reference")) {
+      List<String> arguments = new ArrayList<>(other);
+      arguments.addAll(
+          List.of("--set", "solver.id=transfer-matrix", "--set", opinion, "--format", "json"));
+      Program.Run run = new Program(folder).run(arguments.toArray(String[]::new));
+      assertThat(run.status()).as(run.err()).isZero();
+      double wanted = JSON.readTree(run.out()).get("matchedCurrentMaPerCm2").asDouble();
+      String what = opinion.startsWith("grid") ? "2.5 nm" : "reference kernel";
+      double told = Double.NaN;
+      for (JsonNode said : result.get("secondOpinion")) {
+        told = said.get("what").asString().contains(what) ? said.get("aim").asDouble() : told;
+      }
+      assertThat(told).as(what).isCloseTo(wanted, within(1e-9));
+    }
   }
 
   @Test

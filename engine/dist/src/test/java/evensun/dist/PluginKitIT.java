@@ -153,6 +153,37 @@ class PluginKitIT {
     }
   }
 
+  /** Witness: the rule that more than half of the designs failing is a fault of the solver. */
+  @Test
+  void aSolverThatFailsTooOftenEndsTheRunWithEverythingKept() throws IOException {
+    Path source = project.resolve("src/main/java/example/beerlambert/BeerLambertEvaluator.java");
+    String evaluate = "public void evaluate(Design design, Response into) {";
+    assertThat(source).content().contains(evaluate);
+    Files.writeString(
+        source,
+        Files.readString(source)
+            .replace(
+                evaluate,
+                evaluate
+                    + " if (design.thicknessNm[0] > 101) {"
+                    + " throw new evensun.spi.EvaluationFailed(\"the lamp is off\"); }"));
+    Path scenario = scenario("solver: {id: beer-lambert}");
+    Files.writeString(
+        scenario, Files.readString(scenario).replaceFirst("\\[60, 150\\]", "[100, 150]"));
+    Run run =
+        evensun(
+            "design", scenario.toString(), "--plugins", compile().toString(), "--out", "failing");
+    assertThat(run.status()).as(run.err()).isEqualTo(3);
+    Path folder = work.resolve("failing");
+    JsonNode result = JSON.readTree(Files.readString(folder.resolve("result.json")));
+    assertThat(result.get("search").get("stopped").asString()).isEqualTo("failures");
+    assertThat(result.get("search").get("failures").asInt()).isGreaterThan(25);
+    assertThat(result.get("search").get("notes").toString() + result.get("findings"))
+        .contains("the lamp is off");
+    assertThat(folder.resolve("report.html")).exists();
+    assertThat(folder.resolve("search-state.json")).exists();
+  }
+
   @Test
   void aScenarioAloneStartsNoProgram() throws IOException {
     Path program = Files.writeString(work.resolve("program"), "#!/bin/sh\ntouch ran\n");
