@@ -51,7 +51,8 @@ final class DesignCommand extends BaseCommand {
       names = "--resume",
       paramLabel = "RUN",
       description = {
-        "Goes on with a run that was stopped; it ends where it would have ended. With --out the run",
+        "Goes on with a run that was stopped; it ends where it would have ended. With --out the"
+            + " run",
         "stays as it is."
       })
   Path resume;
@@ -71,7 +72,8 @@ final class DesignCommand extends BaseCommand {
   @Option(
       names = "--exhaustive",
       description = {
-        "Also looks at every point of a grid, for up to four varied quantities, and says whether the",
+        "Also looks at every point of a grid, for up to four varied quantities, and says whether"
+            + " the",
         "search had missed something; done unasked where it takes less than two seconds."
       })
   boolean exhaustive;

@@ -6,6 +6,7 @@ import evensun.result.Electrical.CurvePoint;
 import evensun.result.Electrical.SubcellElectrical;
 import evensun.scenario.Connection;
 import evensun.spi.Finding;
+import evensun.spi.Severity;
 import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
@@ -73,6 +74,11 @@ public final class DeviceModel {
     return subcells;
   }
 
+  /** Temperature of the cell in K. */
+  public double temperatureK() {
+    return device.temperatureK();
+  }
+
   /** The same device with other subcells, such as those of another bandgap. */
   public DeviceModel withSubcells(List<SubcellParameters> others) {
     return new DeviceModel(others, device, irradianceWPerM2, spectrum);
@@ -93,18 +99,37 @@ public final class DeviceModel {
    */
   public double[] currentMaPerCm2(double[] photocurrentMaPerCm2, double... voltageV) {
     DeviceOptics optics = DeviceOptics.ofCurrents(photocurrentMaPerCm2);
-    DeviceState state = state(optics, Reciprocity.choose(optics, subcells, device));
+    DeviceState state = state(optics, pairing(optics, choose(optics)));
     Circuit circuit = state.circuit(state.collected(optics.photocurrents()));
     return Arrays.stream(voltageV).map(circuit::at).toArray();
+  }
+
+  /**
+   * Which saturation currents suit a design.
+   *
+   * @param optics photocurrents, with spectra where there are any
+   */
+  public PairingChoice choose(DeviceOptics optics) {
+    return Reciprocity.choose(optics, subcells, device);
+  }
+
+  private Pairing pairing(DeviceOptics optics, PairingChoice choice) {
+    return Reciprocity.pairing(choice, optics, subcells, device);
+  }
+
+  /** Solves the device with the saturation currents that suit this design. */
+  public DeviceAnalysis analyse(DeviceOptics optics) {
+    return analyse(optics, choose(optics));
   }
 
   /**
    * Solves the device.
    *
    * @param optics photocurrents, with spectra where there are any
+   * @param choice where the saturation currents come from
    * @throws IllegalArgumentException when it has another number of subcells
    */
-  public DeviceAnalysis analyse(DeviceOptics optics) {
+  public DeviceAnalysis analyse(DeviceOptics optics, PairingChoice choice) {
     if (optics.subcellCount() != subcells.size()) {
       throw new IllegalArgumentException(
           "the device has "
@@ -112,12 +137,31 @@ public final class DeviceModel {
               + " subcells but photocurrents of "
               + optics.subcellCount());
     }
-    Pairing pairing = Reciprocity.choose(optics, subcells, device);
+    Pairing pairing = pairing(optics, choice);
     DeviceState state = state(optics, pairing);
     Electrical electrical = electrical(state, pairing, optics);
     List<Finding> findings = new ArrayList<>(pairing.findings());
+    if (choice.reciprocal()) {
+      findings.addAll(doubts(optics));
+    }
     findings.addAll(DeviceFindings.of(state, optics, electrical));
     return new DeviceAnalysis(electrical, findings);
+  }
+
+  /** Reciprocity suited the designs it was chosen at; it may suit this one less. */
+  private List<Finding> doubts(DeviceOptics optics) {
+    return choose(optics).findings().stream()
+        .map(
+            f ->
+                new Finding(
+                    "reciprocity-doubtful",
+                    Severity.WARNING,
+                    f.where(),
+                    f.message()
+                        .replaceFirst(
+                            ".*?: ",
+                            "reciprocity, chosen for the run, is doubtful for this design: ")))
+        .toList();
   }
 
   private DeviceState state(DeviceOptics optics, Pairing pairing) {

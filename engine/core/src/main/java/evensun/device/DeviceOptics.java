@@ -104,6 +104,11 @@ public final class DeviceOptics {
     return wavelengthNm[w];
   }
 
+  /** [w] in nm; a fresh array. */
+  double[] wavelengthsNm() {
+    return wavelengthNm.clone();
+  }
+
   double incidentMaPerCm2(int w) {
     return incidentMaPerCm2[w];
   }

@@ -3,10 +3,11 @@ package evensun.device;
 import java.util.List;
 
 /**
- * Efficiency from photocurrents and bandgaps alone, for a search; a smooth function of both.
+ * Efficiency from photocurrents and bandgaps or saturation currents alone, for a search; a smooth
+ * function of them.
  *
- * <p>Saturation currents come from the step edge of each bandgap. One worker belongs to one thread
- * and allocates nothing per call.
+ * <p>Saturation currents come from the step edge of each bandgap, or are given. One worker belongs
+ * to one thread and allocates nothing per call.
  */
 public final class PowerModel {
 
@@ -51,12 +52,38 @@ public final class PowerModel {
    */
   public double efficiencyPercent(double[] photocurrentMaPerCm2, double[] bandgapEv) {
     for (int i = 0; i < bandgapEv.length; i++) {
-      double collected =
-          Math.max(0, photocurrentMaPerCm2[i]) * subcells.get(i).collectionFraction();
-      set(i, collected, BlackBody.aboveMaPerCm2(bandgapEv[i], temperatureK));
+      set(
+          i,
+          collected(photocurrentMaPerCm2, i),
+          BlackBody.aboveMaPerCm2(bandgapEv[i], temperatureK));
     }
     circuit.maximise();
     return percent(circuit.power, irradianceWPerM2);
+  }
+
+  /**
+   * Efficiency at maximum power with saturation currents of the subcells' own absorptance.
+   *
+   * @param photocurrentMaPerCm2 [subcell] absorbed light in mA cm⁻², before collection; negative
+   *     counts as 0
+   * @param saturationMaPerCm2 [subcell] radiative saturation currents in mA cm⁻²; an absorber that
+   *     takes nothing has none
+   * @return percent of the incident irradiance, at least 0
+   */
+  public double reciprocalEfficiencyPercent(
+      double[] photocurrentMaPerCm2, double[] saturationMaPerCm2) {
+    for (int i = 0; i < saturationMaPerCm2.length; i++) {
+      set(
+          i,
+          collected(photocurrentMaPerCm2, i),
+          Math.max(Double.MIN_NORMAL, saturationMaPerCm2[i]));
+    }
+    circuit.maximise();
+    return percent(circuit.power, irradianceWPerM2);
+  }
+
+  private double collected(double[] photocurrentMaPerCm2, int i) {
+    return Math.max(0, photocurrentMaPerCm2[i]) * subcells.get(i).collectionFraction();
   }
 
   /**

@@ -30,12 +30,12 @@ final class Reciprocity {
 
   private Reciprocity() {}
 
-  /** The pairing for a device: reciprocity where it is wanted and holds for all subcells. */
-  static Pairing choose(
+  /** Which pairing a device has: reciprocity where it is wanted and holds for all subcells. */
+  static PairingChoice choose(
       DeviceOptics optics, List<SubcellParameters> subcells, DeviceParameters device) {
     boolean asked = device.saturation() == Saturation.RECIPROCITY;
     if (device.saturation() == Saturation.STEP_EDGE || !(optics.hasSpectra() || asked)) {
-      return stepEdge(subcells, device, List.of());
+      return new PairingChoice(false, List.of());
     }
     List<Finding> refusals = new ArrayList<>();
     for (int s = 0; s < subcells.size(); s++) {
@@ -43,23 +43,25 @@ final class Reciprocity {
       refusal(optics, s, subcell.bandgapEv(), device.temperatureK())
           .ifPresent(reason -> refusals.add(finding(subcell.name(), reason, device)));
     }
-    if (!refusals.isEmpty()) {
-      return stepEdge(subcells, device, refusals);
-    }
-    List<Double> currents = new ArrayList<>();
-    for (int s = 0; s < subcells.size(); s++) {
-      currents.add(saturationMaPerCm2(optics, s, device.temperatureK()));
-    }
-    return new Pairing(Pairing.RECIPROCITY, true, currents, List.of());
+    return new PairingChoice(refusals.isEmpty(), refusals);
   }
 
-  private static Pairing stepEdge(
-      List<SubcellParameters> subcells, DeviceParameters device, List<Finding> findings) {
-    List<Double> currents =
-        subcells.stream()
-            .map(s -> BlackBody.aboveMaPerCm2(s.bandgapEv(), device.temperatureK()))
-            .toList();
-    return new Pairing(Pairing.STEP_EDGE, false, currents, findings);
+  /** The pairing of a design, as it was chosen for this or for all designs of a run. */
+  static Pairing pairing(
+      PairingChoice choice,
+      DeviceOptics optics,
+      List<SubcellParameters> subcells,
+      DeviceParameters device) {
+    double temperatureK = device.temperatureK();
+    List<Double> currents = new ArrayList<>();
+    for (int s = 0; s < subcells.size(); s++) {
+      currents.add(
+          choice.reciprocal()
+              ? saturationMaPerCm2(optics, s, temperatureK)
+              : BlackBody.aboveMaPerCm2(subcells.get(s).bandgapEv(), temperatureK));
+    }
+    String name = choice.reciprocal() ? Pairing.RECIPROCITY : Pairing.STEP_EDGE;
+    return new Pairing(name, choice.reciprocal(), currents, choice.findings());
   }
 
   private static Finding finding(String subcell, String reason, DeviceParameters device) {
@@ -81,13 +83,10 @@ final class Reciprocity {
    * @return mA cm⁻²; what lies outside the grid is missing
    */
   static double saturationMaPerCm2(DeviceOptics optics, int s, double temperatureK) {
-    double[] edges = optics.edgesNm();
+    double[] emitted = Emission.binsMaPerCm2(optics.wavelengthsNm(), temperatureK);
     double sum = 0;
-    for (int w = 0; w < optics.wavelengthCount(); w++) {
-      sum +=
-          optics.absorptance(s, w)
-              * BlackBody.betweenMaPerCm2(
-                  Constants.HC_EV_NM / edges[w + 1], Constants.HC_EV_NM / edges[w], temperatureK);
+    for (int w = 0; w < emitted.length; w++) {
+      sum += optics.absorptance(s, w) * emitted[w];
     }
     return sum;
   }

@@ -1,5 +1,6 @@
 package evensun.device;
 
+import java.util.Arrays;
 import java.util.function.DoubleUnaryOperator;
 
 /**
@@ -12,15 +13,23 @@ import java.util.function.DoubleUnaryOperator;
  */
 final class SeriesCircuit extends Circuit {
 
-  private static final int SCAN_POINTS = 400;
+  /** Currents looked at between those of two subcells. */
+  private static final int BETWEEN = 24;
+
+  /** Currents closer than this, relative to themselves, count as one. */
+  private static final double KNEES_APART = 1e-6;
 
   private final DoubleUnaryOperator balance = this::balance;
   private final DoubleUnaryOperator excess = this::excess;
+  private final double[] knees;
+  private final double[] nodes;
   private double slope;
   private double target;
 
   SeriesCircuit(Diode[] diodes, double[] coupling, double seriesOhmCm2) {
     super(diodes, coupling, seriesOhmCm2);
+    knees = new double[2 * diodes.length + 1];
+    nodes = new double[knees.length * BETWEEN];
   }
 
   /** Voltage at the terminals for a current; minus infinity above the limiting current. */
@@ -87,29 +96,62 @@ final class SeriesCircuit extends Circuit {
   }
 
   /**
-   * With breakdown the power may have several maxima: look at all of them, then refine the best.
+   * With breakdown the power may have a maximum below the current of each subcell, which then turns
+   * into reverse: looks between any two of these currents, and refines every maximum.
    */
   private void scan(double most) {
-    int best = 0;
+    int count = place(most);
     double highest = 0;
-    for (int i = 1; i < SCAN_POINTS; i++) {
-      double j = most * i / SCAN_POINTS;
-      double p = j * voltageAt(j);
-      if (p > highest) {
-        highest = p;
-        best = i;
+    double at = 0;
+    double before = 0;
+    double here = power(nodes[0]);
+    for (int i = 0; i + 1 < count; i++) {
+      double after = power(nodes[i + 1]);
+      if (here > 0 && here >= before && here >= after) {
+        boolean rising = balance(nodes[i]) > 0;
+        double from = rising ? nodes[i] : i == 0 ? 0 : nodes[i - 1];
+        double to = rising ? nodes[i + 1] : nodes[i];
+        double refined = Bracket.root(balance, from, to, PRECISION);
+        double peak = power(refined);
+        double best = Math.max(peak, here);
+        if (best > highest) {
+          highest = best;
+          at = peak >= here ? refined : nodes[i];
+        }
       }
+      before = here;
+      here = after;
     }
-    if (best == 0) {
+    if (highest > 0) {
+      settle(at);
+    } else {
       rest();
-      return;
     }
-    double from = most * (best - 1) / SCAN_POINTS;
-    double to = most * (best + 1) / SCAN_POINTS;
-    settle(Bracket.root(balance, from, to, PRECISION));
-    if (power < highest) {
-      settle(most * best / SCAN_POINTS);
+  }
+
+  private double power(double j) {
+    return j * voltageAt(j);
+  }
+
+  /**
+   * Places rising currents between those of the subcells, densely near them; returns their number.
+   */
+  private int place(double most) {
+    for (int i = 0; i < diodes.length; i++) {
+      knees[2 * i] = Math.min(most, photocurrent[i]);
+      knees[2 * i + 1] = Math.min(most, most(i));
     }
+    knees[2 * diodes.length] = most;
+    Arrays.sort(knees);
+    int count = 0;
+    double from = 0;
+    for (double knee : knees) {
+      for (int i = 1; i <= BETWEEN && knee > from * (1 + KNEES_APART); i++) {
+        nodes[count++] = from + (knee - from) * 0.5 * (1 - Math.cos(Math.PI * i / BETWEEN));
+      }
+      from = count == 0 ? 0 : nodes[count - 1];
+    }
+    return count;
   }
 
   /** A current at which the voltage is certainly not positive. */

@@ -29,6 +29,14 @@ public interface Aim {
     return isSmallest() ? -value : value;
   }
 
+  /**
+   * Whether the value follows smoothly from the currents and sums of a reading, so that their
+   * derivatives serve it.
+   */
+  default boolean isSmooth() {
+    return false;
+  }
+
   /** Whether the value is the smallest of the currents, so that their derivatives serve it. */
   default boolean isSmallestCurrent() {
     return false;

@@ -179,14 +179,14 @@ public final class Bench implements AutoCloseable {
   }
 
   /**
-   * One of the sums the bench was made with, of the design whose currents were asked for last.
+   * Where a sum the bench was made with stands among its sums.
    *
    * @throws java.util.NoSuchElementException for a sum that it was not made with
    */
-  public double sum(LightSum wanted) {
+  int indexOf(LightSum wanted) {
     for (int i = 0; i < lightSums.size(); i++) {
       if (lightSums.get(i) == wanted) {
-        return sums.sum[sums.sum.length - lightSums.size() + i];
+        return sums.sum.length - lightSums.size() + i;
       }
     }
     throw new java.util.NoSuchElementException("the bench takes no such sum");

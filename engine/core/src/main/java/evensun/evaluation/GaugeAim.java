@@ -68,6 +68,11 @@ public final class GaugeAim implements Aim {
   }
 
   @Override
+  public boolean isSmooth() {
+    return gauge.quantity().isSmooth();
+  }
+
+  @Override
   public boolean isSmallestCurrent() {
     return gauge.quantity() == Quantity.MATCHED_CURRENT && !smallest;
   }

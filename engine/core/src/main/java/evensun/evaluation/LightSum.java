@@ -2,6 +2,7 @@ package evensun.evaluation;
 
 import evensun.spi.Channel;
 import evensun.spi.Samples;
+import evensun.stack.ResolvedSubcell;
 import java.util.List;
 import java.util.function.Predicate;
 import java.util.stream.IntStream;
@@ -20,13 +21,23 @@ public record LightSum(List<Integer> channels, boolean transmitted, Samples weig
     channels = List.copyOf(channels);
   }
 
+  /** What a subcell takes of light with these weights. */
+  static LightSum of(Model model, ResolvedSubcell subcell, Samples weight) {
+    return new LightSum(
+        channels(model, channel -> model.belongsTo(channel, subcell)),
+        model.exitBelongsTo(subcell),
+        weight);
+  }
+
   /** Absorbed light in mA cm⁻². */
   static LightSum absorbed(Model model, Predicate<Channel> counts, boolean transmitted) {
-    List<Integer> channels =
-        IntStream.range(0, model.channels().size())
-            .filter(c -> counts.test(model.channels().get(c)))
-            .boxed()
-            .toList();
-    return new LightSum(channels, transmitted, model.problem().incidentMaPerCm2());
+    return new LightSum(channels(model, counts), transmitted, model.problem().incidentMaPerCm2());
+  }
+
+  private static List<Integer> channels(Model model, Predicate<Channel> counts) {
+    return IntStream.range(0, model.channels().size())
+        .filter(c -> counts.test(model.channels().get(c)))
+        .boxed()
+        .toList();
   }
 }

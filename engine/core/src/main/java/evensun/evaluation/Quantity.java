@@ -55,6 +55,14 @@ public enum Quantity {
     return of;
   }
 
+  /** Whether it follows smoothly from currents and other sums of light. */
+  boolean isSmooth() {
+    return switch (this) {
+      case CURRENT_SUM, REFLECTED, TRANSMITTED, PARASITIC, EFFICIENCY -> true;
+      case MISMATCH, MATCHED_CURRENT, PHOTOCURRENT, BANDGAP, THICKNESS -> false;
+    };
+  }
+
   /** The quantity of a name. */
   public static Quantity of(String key) {
     for (Quantity quantity : values()) {

@@ -7,6 +7,7 @@ package evensun.evaluation;
 public final class Reading {
 
   private final Bench bench;
+  private final double[] sums;
   private final double[] photocurrentMaPerCm2;
   private final double[] bandgapEv;
 
@@ -14,6 +15,7 @@ public final class Reading {
   public Reading(Bench bench) {
     this.bench = bench;
     int subcells = bench.model().stack().subcells().size();
+    sums = new double[bench.sumCount()];
     photocurrentMaPerCm2 = new double[subcells];
     bandgapEv = new double[subcells];
   }
@@ -24,9 +26,38 @@ public final class Reading {
    * @throws evensun.spi.EvaluationFailed when it cannot be evaluated
    */
   public Reading take() {
-    bench.currents(photocurrentMaPerCm2);
+    bench.currents(sums);
+    return filled();
+  }
+
+  /**
+   * Evaluates it with derivatives.
+   *
+   * @param byThickness [i*L + l] derivative of each number of {@link #sums} by the thickness of
+   *     each layer, per nm
+   */
+  Reading take(double[] byThickness) {
+    bench.currentsAndGradient(sums, byThickness);
+    return filled();
+  }
+
+  private Reading filled() {
+    System.arraycopy(sums, 0, photocurrentMaPerCm2, 0, photocurrentMaPerCm2.length);
     bench.subcellGaps(bandgapEv);
     return this;
+  }
+
+  /** The photocurrents, then the sums that the bench was made with. */
+  double[] sums() {
+    return sums;
+  }
+
+  /** Writes one of {@link #sums}, to see what follows from it. */
+  void set(int index, double value) {
+    sums[index] = value;
+    if (index < photocurrentMaPerCm2.length) {
+      photocurrentMaPerCm2[index] = value;
+    }
   }
 
   /** Photocurrents, [subcell] mA cm⁻²; not to be written. */
@@ -46,6 +77,6 @@ public final class Reading {
 
   /** A sum that the bench was made with. */
   public double sum(LightSum sum) {
-    return bench.sum(sum);
+    return sums[bench.indexOf(sum)];
   }
 }

@@ -6,6 +6,7 @@ import evensun.search.problem.Verdict;
 import evensun.spi.EvaluationFailed;
 import java.util.List;
 import java.util.stream.Stream;
+import org.jspecify.annotations.Nullable;
 
 /** A stack as the search sees it: numbers in, the aims out. */
 public final class StackObjective implements Objective {
@@ -13,15 +14,11 @@ public final class StackObjective implements Objective {
   /** Matched currents closer than this do not decide a bandgap, in mA cm⁻². */
   public static final double GAP_TIE_MA_PER_CM2 = 0.02;
 
-  /** Step of the differences by bandgap in eV, and by fractions. */
-  private static final double DIFFERENCE_STEP = 1e-4;
-
   private final Model model;
   private final List<Parameter> parameters;
   private final List<Variable> variables;
   private final List<Aim> aims;
   private final List<Limit> limits;
-  private final List<Tie> ties;
 
   /** An objective without limits. */
   public StackObjective(
@@ -45,7 +42,6 @@ public final class StackObjective implements Objective {
       List<Aim> aims,
       List<Limit> limits) {
     this.limits = List.copyOf(limits);
-    this.ties = Tie.of(model.stack());
     this.model = model;
     this.parameters = List.copyOf(parameters);
     this.variables = List.copyOf(variables);
@@ -100,11 +96,8 @@ public final class StackObjective implements Objective {
     private final Reading reading = new Reading(bench);
     private final List<Aim> own = aims.stream().map(Aim::forAnotherThread).toList();
     private final List<Limit> kept = limits.stream().map(Limit::forAnotherThread).toList();
-    private final int subcells = model.stack().subcells().size();
-    private final double[] currents = new double[subcells];
-    private final double[] shifted = new double[subcells];
-    private final double[] byThickness =
-        new double[bench.sumCount() * model.problem().layerCount()];
+    private final @Nullable Derivatives derivatives =
+        Derivatives.of(own.get(0), bench, parameters, variables);
 
     @Override
     public Verdict judge(double[] design) {
@@ -140,54 +133,20 @@ public final class StackObjective implements Objective {
 
     @Override
     public int partCount() {
-      return isSmallestCurrent() && bench.hasGradient() ? subcells : 0;
+      return derivatives == null ? 0 : derivatives.partCount();
     }
 
     @Override
     public boolean parts(double[] values, double[] parts, double[][] gradient) {
-      if (partCount() == 0) {
+      if (derivatives == null) {
         return false;
       }
       try {
         set(values);
-        bench.currentsAndGradient(parts, byThickness);
-        for (int v = 0; v < values.length; v++) {
-          if (parameters.get(v).kind() == Parameter.Kind.THICKNESS) {
-            byThickness(v, gradient);
-          } else {
-            byDifference(values, v, gradient);
-          }
-        }
+        derivatives.take(values, parts, gradient);
         return true;
       } catch (EvaluationFailed e) {
         return false;
-      }
-    }
-
-    private void byThickness(int v, double[][] gradient) {
-      int layers = model.problem().layerCount();
-      for (int s = 0; s < subcells; s++) {
-        gradient[s][v] = byThickness[s * layers + parameters.get(v).index()];
-        for (Tie tie : ties) {
-          if (tie.leader().key().equals(parameters.get(v).key())) {
-            gradient[s][v] += tie.ratio() * byThickness[s * layers + tie.follower().index()];
-          }
-        }
-      }
-    }
-
-    /** Central difference, one-sided at a bound. */
-    private void byDifference(double[] values, int v, double[][] gradient) {
-      Variable variable = variables.get(v);
-      double up = Math.min(values[v] + DIFFERENCE_STEP, variable.high());
-      double down = Math.max(values[v] - DIFFERENCE_STEP, variable.low());
-      bench.set(parameters.get(v), up);
-      bench.currents(currents);
-      bench.set(parameters.get(v), down);
-      bench.currents(shifted);
-      bench.set(parameters.get(v), values[v]);
-      for (int s = 0; s < subcells; s++) {
-        gradient[s][v] = up > down ? (currents[s] - shifted[s]) / (up - down) : 0;
       }
     }
 

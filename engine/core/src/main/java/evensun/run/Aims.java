@@ -1,5 +1,6 @@
 package evensun.run;
 
+import evensun.device.ScenarioDevice;
 import evensun.evaluation.Aim;
 import evensun.evaluation.Bench;
 import evensun.evaluation.EfficiencyAim;
@@ -42,7 +43,8 @@ record Aims(List<Aim> all, List<Limit> limits) {
     if (stack.isMonochromatic()) {
       throw new InputException(
           search.place(),
-          "a search needs currents, and a grid of one wavelength has none; make grid.toNm larger than grid.fromNm");
+          "a search needs currents, and a grid of one wavelength has none; make grid.toNm larger"
+              + " than grid.fromNm");
     }
     if (stack.subcells().isEmpty()) {
       throw new InputException(search.place(), "a search needs at least one subcell");
@@ -96,13 +98,21 @@ record Aims(List<Aim> all, List<Limit> limits) {
             () ->
                 new InputException(
                     place,
-                    "efficiency needs a bandgap for every subcell; an absorber has none (evensun materials lists those that do)"));
+                    "efficiency needs a bandgap for every subcell; an absorber has none (evensun"
+                        + " materials lists those that do)"));
   }
 
   /** Efficiency of the device as the scenario describes it, or empty where a gap is missing. */
   static Optional<Aim> efficiency(Model model) {
     try (Bench bench = model.newBench()) {
-      return Electrics.device(bench).map(device -> new EfficiencyAim(device.model()));
+      boolean reciprocal = Electrics.choice(model).reciprocal();
+      return Electrics.device(bench)
+          .map(ScenarioDevice::model)
+          .map(
+              device ->
+                  reciprocal
+                      ? EfficiencyAim.fromReciprocity(device, model)
+                      : EfficiencyAim.fromStepEdges(device));
     }
   }
 }

@@ -1,8 +1,7 @@
 package evensun.run;
 
-import evensun.evaluation.Aim;
+import evensun.device.PairingChoice;
 import evensun.evaluation.Bench;
-import evensun.evaluation.EfficiencyAim;
 import evensun.evaluation.Limit;
 import evensun.evaluation.Model;
 import evensun.evaluation.Neighbourhood;
@@ -41,6 +40,7 @@ final class DesignResult {
   private final Aims aims;
   private final Varied varied;
   private final SearchSettings settings;
+  private final PairingChoice pairing;
   private final Findings findings = new Findings();
 
   DesignResult(Preparation preparation, Aims aims, Varied varied, SearchSettings settings) {
@@ -48,6 +48,7 @@ final class DesignResult {
     this.aims = aims;
     this.varied = varied;
     this.settings = settings;
+    this.pairing = Electrics.choice(preparation.model());
   }
 
   RunResult of(
@@ -57,7 +58,7 @@ final class DesignResult {
         Neighbourhood around = around(best)) {
       Drawn drawn = drawn(bench);
       set(bench, best);
-      Electrics.Powered powered = Electrics.power(Outcomes.of(bench, varied.parameters()), bench);
+      Electrics.Powered powered = powered(bench);
       Outcome outcome = powered.outcome();
       SearchRecord record =
           new SearchRecords(varied, aims)
@@ -69,7 +70,6 @@ final class DesignResult {
       findings.about(record);
       gapNotDecided();
       limitsBroken(best);
-      pairingOfTheAim(outcome);
       List<Measured> measured =
           drawn.outcome() == null
               ? null
@@ -123,8 +123,13 @@ final class DesignResult {
             "neighbour-failed",
             Severity.WARNING,
             key,
-            "designs beside the one found could not be evaluated and are left out of its surroundings: "
+            "designs beside the one found could not be evaluated and are left out of its"
+                + " surroundings: "
                 + reason));
+  }
+
+  private Electrics.Powered powered(Bench bench) {
+    return Electrics.power(Outcomes.of(bench, varied.parameters()), bench, pairing);
   }
 
   private void set(Bench bench, Candidate best) {
@@ -153,7 +158,7 @@ final class DesignResult {
   /** When the stack as drawn cannot be evaluated the search's result still counts. */
   private Drawn drawn(Bench bench) {
     try {
-      Outcome outcome = Electrics.power(Outcomes.of(bench, varied.parameters()), bench).outcome();
+      Outcome outcome = powered(bench).outcome();
       Reading reading = new Reading(bench).take();
       return new Drawn(
           outcome, aims.all().stream().map(aim -> aim.shown(aim.value(reading))).toList());
@@ -182,26 +187,6 @@ final class DesignResult {
     }
   }
 
-  /** The search always works with step edges; the report may have something better. */
-  private void pairingOfTheAim(Outcome found) {
-    boolean efficiency = aims.all().stream().anyMatch(DesignResult::isEfficiency);
-    if (efficiency
-        && found.electrical() != null
-        && !found.electrical().pairing().contains("step edge")) {
-      findings.add(
-          new Finding(
-              "aim-from-step-edges",
-              Severity.WARNING,
-              "search.aim",
-              "the search ranked designs with saturation currents from step edges, the reported efficiency uses %s; set device.saturation: step-edge to have both alike"
-                  .formatted(found.electrical().pairing())));
-    }
-  }
-
-  private static boolean isEfficiency(Aim aim) {
-    return aim instanceof EfficiencyAim;
-  }
-
   private void limitsBroken(Candidate best) {
     if (!best.isFeasible()) {
       findings.add(
@@ -209,7 +194,8 @@ final class DesignResult {
               "limit-broken",
               Severity.SERIOUS,
               "search.limits",
-              "no design was found that keeps every limit; this one comes nearest: widen a range or a limit"));
+              "no design was found that keeps every limit; this one comes nearest: widen a range or"
+                  + " a limit"));
     }
   }
 

@@ -1,15 +1,22 @@
 package evensun.run;
 
 import evensun.device.DeviceAnalysis;
+import evensun.device.DeviceModel;
 import evensun.device.DeviceOptics;
+import evensun.device.PairingChoice;
 import evensun.device.ScenarioDevice;
 import evensun.device.SubcellParameters;
 import evensun.evaluation.Bench;
 import evensun.evaluation.DepthProfiles;
+import evensun.evaluation.Model;
+import evensun.evaluation.Outcomes;
+import evensun.evaluation.Parameter;
 import evensun.result.DepthLayer;
 import evensun.result.Outcome;
 import evensun.result.Outcome.SubcellOutcome;
+import evensun.scenario.SearchSpec.VarySpec;
 import evensun.scenario.SubcellSpec;
+import evensun.spi.EvaluationFailed;
 import evensun.spi.Finding;
 import evensun.stack.ResolvedStack;
 import evensun.stack.ResolvedSubcell;
@@ -69,18 +76,75 @@ final class Electrics {
     return DepthProfiles.of(bench).orElse(null);
   }
 
-  /** Adds the electrical side to the outcome of the bench's present design. */
+  /** Adds the electrical side to the outcome of the bench's present design, alone. */
   static Powered power(Outcome outcome, Bench bench) {
+    return power(outcome, bench, null);
+  }
+
+  /**
+   * Adds the electrical side to the outcome of the bench's present design.
+   *
+   * @param choice where saturation currents come from; null to choose for this design alone
+   */
+  static Powered power(Outcome outcome, Bench bench, @Nullable PairingChoice choice) {
     Optional<ScenarioDevice> device = device(bench);
     if (device.isEmpty()) {
       return new Powered(outcome, List.of());
     }
-    DeviceAnalysis analysis =
-        device.get().model().analyse(DeviceOptics.of(outcome.spectral(), outcome.subcells()));
+    DeviceModel model = device.get().model();
+    DeviceOptics optics = optics(outcome);
+    DeviceAnalysis analysis = model.analyse(optics, choice == null ? model.choose(optics) : choice);
     List<Finding> findings = new ArrayList<>(device.get().findings());
     findings.addAll(analysis.findings());
     List<SubcellOutcome> collected = collected(outcome, device.get().model().subcells());
     return new Powered(outcome.withElectrical(collected, analysis.electrical()), findings);
+  }
+
+  private static DeviceOptics optics(Outcome outcome) {
+    return DeviceOptics.of(outcome.spectral(), outcome.subcells());
+  }
+
+  /**
+   * Where saturation currents come from in every design of a search: reciprocity only where it
+   * suits the stack as drawn and both ends of the gaps that vary. A design that cannot be evaluated
+   * does not count.
+   */
+  static PairingChoice choice(Model model) {
+    ResolvedStack stack = model.stack();
+    try (Bench bench = model.newBench()) {
+      PairingChoice choice = choice(bench);
+      List<VarySpec> gaps =
+          stack.scenario().search().stream()
+              .flatMap(search -> search.ranges().stream())
+              .filter(
+                  vary -> Parameter.of(vary.key(), stack).filter(Parameter::setsGap).isPresent())
+              .toList();
+      if (choice.reciprocal() && !gaps.isEmpty()) {
+        gaps.forEach(gap -> set(bench, gap, gap.low()));
+        choice = choice.and(choice(bench));
+        gaps.forEach(gap -> set(bench, gap, gap.high()));
+        choice = choice.and(choice(bench));
+      }
+      return choice;
+    }
+  }
+
+  private static void set(Bench bench, VarySpec gap, double value) {
+    if (!gap.isTied()) {
+      bench.set(Parameter.of(gap.key(), bench.model().stack()).orElseThrow(), value);
+    }
+  }
+
+  private static PairingChoice choice(Bench bench) {
+    Optional<ScenarioDevice> device = device(bench);
+    if (device.isEmpty()) {
+      return new PairingChoice(false, List.of());
+    }
+    try {
+      return device.get().model().choose(optics(Outcomes.of(bench, List.of())));
+    } catch (EvaluationFailed e) {
+      return new PairingChoice(true, List.of());
+    }
   }
 
   private static List<SubcellOutcome> collected(

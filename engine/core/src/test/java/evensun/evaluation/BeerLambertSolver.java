@@ -4,6 +4,7 @@ import evensun.spi.Channel;
 import evensun.spi.Design;
 import evensun.spi.EvaluationFailed;
 import evensun.spi.Evaluator;
+import evensun.spi.Gradient;
 import evensun.spi.OpticalSolver;
 import evensun.spi.PreparedSolver;
 import evensun.spi.Problem;
@@ -11,6 +12,7 @@ import evensun.spi.Response;
 import evensun.spi.Services;
 import evensun.spi.Traits;
 import java.util.List;
+import java.util.Optional;
 import java.util.Set;
 import java.util.stream.IntStream;
 
@@ -51,9 +53,66 @@ final class BeerLambertSolver implements OpticalSolver {
 
       @Override
       public Evaluator newEvaluator() {
-        return (design, into) -> evaluate(problem, design, into);
+        return new BeerLambert(problem);
       }
     };
+  }
+
+  /** With derivatives in closed form: a thicker layer takes more and shades what lies below it. */
+  private final class BeerLambert implements Evaluator {
+    private final Problem problem;
+
+    BeerLambert(Problem problem) {
+      this.problem = problem;
+    }
+
+    @Override
+    public void evaluate(Design design, Response into) {
+      BeerLambertSolver.this.evaluate(problem, design, into);
+    }
+
+    @Override
+    public <A> Optional<A> ability(Class<A> type) {
+      return type == Gradient.class
+          ? Optional.of(type.cast((Gradient) this::differentiate))
+          : Optional.empty();
+    }
+
+    private void differentiate(Design design, Response into, double[] slopes) {
+      evaluate(design, into);
+      java.util.Arrays.fill(slopes, 0);
+      int layers = problem.layerCount();
+      for (int w = 0; w < problem.wavelengthCount(); w++) {
+        double left = 1;
+        for (int l = 0; l < layers; l++) {
+          double alpha =
+              4 * Math.PI * design.k[design.material[l]][w] / problem.wavelengthNm().at(w);
+          double pass = Math.exp(-alpha * design.thicknessNm[l]);
+          for (int s = 0; s < into.sum.length; s++) {
+            double[] own = into.weight[s * layers + l];
+            slopes[s * layers + l] += own == null ? 0 : own[w] * left * alpha * pass;
+            slopes[s * layers + l] -= alpha * below(into, design, l, w, s, left * pass);
+          }
+          left *= pass;
+        }
+      }
+    }
+
+    /** What a sum takes of the light that arrives below a layer. */
+    private double below(Response into, Design design, int layer, int w, int s, double arriving) {
+      double taken = 0;
+      double left = arriving;
+      for (int l = layer + 1; l < problem.layerCount(); l++) {
+        double k = design.k[design.material[l]][w];
+        double pass =
+            Math.exp(-4 * Math.PI * k * design.thicknessNm[l] / problem.wavelengthNm().at(w));
+        double[] weight = into.weight[s * problem.layerCount() + l];
+        taken += weight == null ? 0 : weight[w] * left * (1 - pass);
+        left *= pass;
+      }
+      double[] beyond = into.transmittanceWeight[s];
+      return taken + (beyond == null ? 0 : beyond[w] * left);
+    }
   }
 
   private void evaluate(Problem problem, Design design, Response into) {

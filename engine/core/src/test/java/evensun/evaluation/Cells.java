@@ -1,5 +1,6 @@
 package evensun.evaluation;
 
+import evensun.light.Constants;
 import evensun.light.Spectrum;
 import evensun.material.Composition;
 import evensun.material.Material;
@@ -16,6 +17,7 @@ import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.function.DoubleBinaryOperator;
 
 /** Scenarios of invented materials whose currents can be worked out by hand. */
 final class Cells {
@@ -41,6 +43,7 @@ final class Cells {
         switch (name) {
           case "air", "clear" -> grey(name, 0, Optional.empty());
           case "grey" -> grey(name, 0.05, Optional.empty());
+          case "tail" -> tail();
           case "edge" -> grey(name, 0, Optional.of(new Tuning(1, 2, 1.5)));
           case "alloy" -> grey(name, 0, Optional.of(ALLOY));
           default -> throw new evensun.scenario.InputException(place, "no material " + name);
@@ -48,6 +51,11 @@ final class Cells {
   }
 
   private static Material grey(String name, double k, Optional<Tuning> tuning) {
+    return grey(name, tuning, (gap, nm) -> tuning.isPresent() ? gap / 100 : k);
+  }
+
+  private static Material grey(
+      String name, Optional<Tuning> tuning, DoubleBinaryOperator kOfGapAndNm) {
     return new Material() {
       @Override
       public MaterialRecord record() {
@@ -81,10 +89,20 @@ final class Cells {
       public Filler on(double[] wavelengthNm) {
         return (gap, n, kRow) -> {
           Arrays.fill(n, name.equals("air") ? 1 : 1.5);
-          Arrays.fill(kRow, tuning.isPresent() ? gap / 100 : k);
+          Arrays.setAll(kRow, w -> kOfGapAndNm.applyAsDouble(gap, wavelengthNm[w]));
         };
       }
     };
+  }
+
+  /** k = 0.05/(1 + exp((gap − E)/10 meV)). */
+  static double tailK(double gapEv, double wavelengthNm) {
+    double below = gapEv - Constants.HC_EV_NM / wavelengthNm;
+    return 0.05 / (1 + Math.exp(below / 0.010));
+  }
+
+  private static Material tail() {
+    return grey("tail", Optional.of(new Tuning(1, 2, 1.5)), (gap, nm) -> tailK(gap, nm));
   }
 
   static ResolvedStack stack(String yaml) {
@@ -118,21 +136,21 @@ final class Cells {
   /** Two subcells: a thin grey layer and a thicker one below it. */
   static String twoCells(double topNm, double bottomNm) {
     return """
-        evensun: 1
-        title: Two grey cells
-        light: {spectrum: AM1.5G}
-        grid: {fromNm: 400, toNm: 800, stepNm: 10}
-        stack:
-          - {medium: air}
-          - {name: upper, material: grey, thicknessNm: %s}
-          - {name: spacer, material: clear, thicknessNm: 50}
-          - {name: lower, material: grey, thicknessNm: %s}
-          - {name: back, material: clear}
-        subcells:
-          - {name: top, absorbers: [upper]}
-          - {name: bottom, absorbers: [lower]}
-        connection: series
-        """
+    evensun: 1
+    title: Two grey cells
+    light: {spectrum: AM1.5G}
+    grid: {fromNm: 400, toNm: 800, stepNm: 10}
+    stack:
+      - {medium: air}
+      - {name: upper, material: grey, thicknessNm: %s}
+      - {name: spacer, material: clear, thicknessNm: 50}
+      - {name: lower, material: grey, thicknessNm: %s}
+      - {name: back, material: clear}
+    subcells:
+      - {name: top, absorbers: [upper]}
+      - {name: bottom, absorbers: [lower]}
+    connection: series
+    """
         .formatted(topNm, bottomNm);
   }
 }

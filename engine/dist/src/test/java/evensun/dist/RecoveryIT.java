@@ -24,6 +24,7 @@ import tools.jackson.databind.node.ObjectNode;
 class RecoveryIT {
 
   private static final ObjectMapper JSON = JsonMapper.builder().build();
+
   /** Named as the copy in a run's folder, from which a run resumes. */
   private static final String SCENARIO = "scenario.yaml";
 
@@ -91,10 +92,7 @@ class RecoveryIT {
     // A process that lives for a moment starts faster without the second compiler.
     builder.environment().put("JAVA_TOOL_OPTIONS", "-XX:TieredStopAtLevel=1");
     Process process =
-        builder
-            .redirectErrorStream(true)
-            .redirectOutput(ProcessBuilder.Redirect.DISCARD)
-            .start();
+        builder.redirectErrorStream(true).redirectOutput(ProcessBuilder.Redirect.DISCARD).start();
     Path log = folder.resolve("broken/progress.jsonl");
     long before = first ? 0 : Files.size(log);
     while (process.isAlive() && !(grown(log, before) && evaluated(log) >= evaluations)) {
