@@ -119,17 +119,42 @@ public final class DesignJob {
       String repeatCommand) {
     check(order);
     ProvenanceBuilder provenance = new ProvenanceBuilder(preparation);
+    if (spec.choices().isEmpty()) {
+      Found found = found(objective, settings, listener, resumed, cancelled, order);
+      Candidate best = found.best();
+      Look look = look(objective, found, settings.threads(), order, cancelled);
+      return new DesignResult(preparation, aims, varied, settings)
+          .of(context(List.of()), found, best, look, provenance, repeatCommand);
+    }
+    try (Alternatives all = Alternatives.of(preparation, spec.choices(), varied.variables())) {
+      Found found = found(all, settings, listener, resumed, cancelled, order);
+      Candidate best = found.best();
+      Look look = look(all, found, settings.threads(), order, cancelled);
+      Alternatives.Option option = all.option(best);
+      return new DesignResult(option.preparation(), option.aims(), option.varied(), settings)
+          .of(context(all.words(best)), found, all.own(best), look, provenance, repeatCommand);
+    }
+  }
+
+  private DesignResult.Context context(List<String> chosen) {
+    return new DesignResult.Context(preparation, aims, varied, chosen);
+  }
+
+  private Found found(
+      Objective wanted,
+      SearchSettings settings,
+      SearchListener listener,
+      @Nullable SearchState resumed,
+      BooleanSupplier cancelled,
+      Order order) {
     Found found =
         isFront()
-            ? front(new ParetoSearch(objective, settings, listener, cancelled), resumed, order)
-            : single(new Search(objective, settings, listener, cancelled), resumed);
-    Candidate best = found.best();
-    if (best == null) {
+            ? front(new ParetoSearch(wanted, settings, listener, cancelled), resumed, order)
+            : single(new Search(wanted, settings, listener, cancelled), resumed);
+    if (found.best() == null) {
       throw nothing(found.outcome(), cancelled);
     }
-    Look look = look(found, best, settings.threads(), order, cancelled);
-    return new DesignResult(preparation, aims, varied, settings)
-        .of(found, best, look, provenance, repeatCommand);
+    return found;
   }
 
   private boolean isFront() {
@@ -137,7 +162,7 @@ public final class DesignJob {
   }
 
   private void check(Order order) {
-    int count = varied.variables().size();
+    int count = varied.variables().size() + spec.choices().size();
     if (order.exhaustive() && count > Exhaustive.MOST_VARIABLES) {
       throw new InputException(
           Place.option("--exhaustive"),
@@ -208,12 +233,13 @@ public final class DesignJob {
    * stops it wants to leave.
    */
   private Look look(
-      Found found, Candidate best, int threads, Order order, BooleanSupplier cancelled) {
+      Objective wanted, Found found, int threads, Order order, BooleanSupplier cancelled) {
+    Candidate best = found.best();
     if (found.outcome().stop() == StopReason.INTERRUPTED) {
       return new Look(List.of(), Checks.NONE);
     }
-    KeptAims kept = new KeptAims(objective, best.verdict());
-    Objective around = isFront() ? kept : objective;
+    KeptAims kept = new KeptAims(wanted, best.verdict());
+    Objective around = isFront() ? kept : wanted;
     Candidate centre = isFront() ? new Candidate(best.values(), kept.kept(best.verdict())) : best;
     int evaluations = found.outcome().evaluations();
     List<Freedom> freedoms =

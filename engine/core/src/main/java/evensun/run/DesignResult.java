@@ -28,6 +28,7 @@ import evensun.spi.Severity;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Objects;
 import org.jspecify.annotations.Nullable;
 
 /** Everything a review needs about a design that a search found. */
@@ -43,6 +44,16 @@ final class DesignResult {
   private final PairingChoice pairing;
   private final Findings findings = new Findings();
 
+  /**
+   * What surrounds a design whose choices are made.
+   *
+   * @param preparation the stack as drawn
+   * @param aims its aims
+   * @param varied all that varied beside the choices
+   * @param chosen what was chosen, in words
+   */
+  record Context(Preparation preparation, Aims aims, Varied varied, List<String> chosen) {}
+
   DesignResult(Preparation preparation, Aims aims, Varied varied, SearchSettings settings) {
     this.preparation = preparation;
     this.aims = aims;
@@ -52,17 +63,27 @@ final class DesignResult {
   }
 
   RunResult of(
-      Found found, Candidate best, Look look, ProvenanceBuilder provenance, String repeatCommand) {
+      Context context,
+      Found found,
+      Candidate best,
+      Look look,
+      ProvenanceBuilder provenance,
+      String repeatCommand) {
     Model model = preparation.model();
     try (Bench bench = model.newBench(aims.lightSums());
         Neighbourhood around = around(best)) {
-      Drawn drawn = drawn(bench);
+      Drawn drawn = drawn(context);
       set(bench, best);
-      Electrics.Powered powered = powered(bench);
+      Electrics.Powered powered = powered(bench, varied);
       Outcome outcome = powered.outcome();
       SearchRecord record =
-          new SearchRecords(varied, aims)
-              .record(found, best, drawn.aims(), look, constraints(bench));
+          new SearchRecords(context.varied(), varied, aims, context.chosen())
+              .record(
+                  found,
+                  Objects.requireNonNull(found.best()),
+                  drawn.aims(),
+                  look,
+                  constraints(bench));
       findings.about(preparation.stack(), model, bench.design());
       findings.addAll(powered.findings());
       findings.about(outcome);
@@ -128,8 +149,8 @@ final class DesignResult {
                 + reason));
   }
 
-  private Electrics.Powered powered(Bench bench) {
-    return Electrics.power(Outcomes.of(bench, varied.parameters()), bench, pairing);
+  private Electrics.Powered powered(Bench bench, Varied shown) {
+    return Electrics.power(Outcomes.of(bench, shown.parameters()), bench, pairing);
   }
 
   private void set(Bench bench, Candidate best) {
@@ -156,12 +177,13 @@ final class DesignResult {
   private record Drawn(@Nullable Outcome outcome, List<Double> aims) {}
 
   /** When the stack as drawn cannot be evaluated the search's result still counts. */
-  private Drawn drawn(Bench bench) {
-    try {
-      Outcome outcome = powered(bench).outcome();
+  private Drawn drawn(Context context) {
+    Aims own = context.aims();
+    try (Bench bench = context.preparation().model().newBench(own.lightSums())) {
+      Outcome outcome = powered(bench, context.varied()).outcome();
       Reading reading = new Reading(bench).take();
       return new Drawn(
-          outcome, aims.all().stream().map(aim -> aim.shown(aim.value(reading))).toList());
+          outcome, own.all().stream().map(aim -> aim.shown(aim.value(reading))).toList());
     } catch (EvaluationFailed e) {
       findings.add(
           new Finding(

@@ -13,6 +13,8 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
+import java.util.Set;
+import java.util.stream.Collectors;
 import java.util.stream.IntStream;
 import org.jspecify.annotations.Nullable;
 
@@ -27,9 +29,20 @@ final class SearchRecords {
 
   private final Varied varied;
   private final List<Aim> aims;
+  private final List<String> chosen;
+  private final Set<String> present;
   private final Aim aim;
 
-  SearchRecords(Varied varied, Aims aims) {
+  /**
+   * Records of a search.
+   *
+   * @param varied all that varied, in the order of a candidate's values
+   * @param found what varies in the found design: not the thickness of a layer left out
+   * @param chosen what was chosen, in words
+   */
+  SearchRecords(Varied varied, Varied found, Aims aims, List<String> chosen) {
+    this.present = found.variables().stream().map(Variable::key).collect(Collectors.toSet());
+    this.chosen = List.copyOf(chosen);
     this.varied = varied;
     this.aims = aims.all();
     this.aim = aims.first();
@@ -108,6 +121,9 @@ final class SearchRecords {
     List<SearchRecord.VariableRecord> records = new ArrayList<>();
     for (int v = 0; v < varied.variables().size(); v++) {
       Variable variable = varied.variables().get(v);
+      if (!present.contains(variable.key())) {
+        continue;
+      }
       double found = best.values().get(v);
       records.add(
           new SearchRecord.VariableRecord(
@@ -126,7 +142,7 @@ final class SearchRecords {
   }
 
   private List<String> notes(SearchOutcome outcome, List<Freedom> freedoms) {
-    List<String> notes = new ArrayList<>();
+    List<String> notes = new ArrayList<>(chosen);
     outcome
         .failures()
         .forEach(f -> notes.add(f.count() + " designs: " + f.first().verdict().failure()));

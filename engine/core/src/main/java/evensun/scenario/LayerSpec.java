@@ -50,6 +50,11 @@ public record LayerSpec(
         place);
   }
 
+  /** This layer left out: of no thickness. */
+  public LayerSpec absent() {
+    return new LayerSpec(name, material, gap, 0, coherence, features, place);
+  }
+
   /** What is mixed in this layer, in the order of the file; empty when it is of one material. */
   public List<ComponentSpec> components() {
     return features.stream().flatMap(feature -> feature.components().stream()).toList();

@@ -1,5 +1,7 @@
 package evensun.scenario;
 
+import evensun.scenario.SearchSpec.ChoiceSpec;
+import java.util.ArrayList;
 import java.util.Collections;
 import java.util.LinkedHashMap;
 import java.util.List;
@@ -45,6 +47,44 @@ public record Scenario(
     stack = List.copyOf(stack);
     subcells = List.copyOf(subcells);
     measured = List.copyOf(measured);
+  }
+
+  /**
+   * This scenario with every choice of its search made.
+   *
+   * @param chosen the alternative of each choice
+   */
+  public Scenario settled(List<String> chosen) {
+    List<LayerSpec> layers = new ArrayList<>(stack);
+    List<ChoiceSpec> choices = search.orElseThrow().choices();
+    for (int i = 0; i < choices.size(); i++) {
+      ChoiceSpec choice = choices.get(i);
+      String name = chosen.get(i);
+      layers.replaceAll(
+          layer -> layer.name().equals(choice.layer()) ? made(layer, choice, name) : layer);
+    }
+    return new Scenario(
+        source,
+        title,
+        light,
+        grid,
+        materials,
+        incidentMedium,
+        layers,
+        exit,
+        subcells,
+        connection,
+        device,
+        solver,
+        search.map(spec -> spec.settled(chosen)),
+        measured);
+  }
+
+  private static LayerSpec made(LayerSpec layer, ChoiceSpec choice, String name) {
+    if (choice.isPresence()) {
+      return name.equals(ChoiceSpec.ABSENT) ? layer.absent() : layer;
+    }
+    return layer.withMaterial(layer.material(), name);
   }
 
   /** This scenario on another grid. */

@@ -1,13 +1,16 @@
 package evensun.scenario;
 
+import java.util.HashSet;
 import java.util.List;
 import java.util.OptionalDouble;
 import java.util.OptionalInt;
+import java.util.Set;
 
 /**
  * What to search.
  *
  * @param vary what may vary, in the order of the file
+ * @param choices between which alternatives it may choose
  * @param limits what a design must keep
  * @param aims what is wanted: one, or several of which none is to be sacrificed to another
  * @param seed seed of the search
@@ -17,6 +20,7 @@ import java.util.OptionalInt;
  */
 public record SearchSpec(
     List<VarySpec> vary,
+    List<ChoiceSpec> choices,
     List<LimitSpec> limits,
     List<AimSpec> aims,
     long seed,
@@ -27,12 +31,59 @@ public record SearchSpec(
   public SearchSpec {
     vary = List.copyOf(vary);
     limits = List.copyOf(limits);
+    choices = List.copyOf(choices);
     aims = List.copyOf(aims);
   }
 
   /** This search with another seed. */
   SearchSpec withSeed(long other) {
-    return new SearchSpec(vary, limits, aims, other, evaluations, timeSeconds, place);
+    return new SearchSpec(vary, choices, limits, aims, other, evaluations, timeSeconds, place);
+  }
+
+  /**
+   * This search with every choice made: none is left, and the thickness of an absent layer does not
+   * vary, nor what follows it.
+   *
+   * @param chosen the alternative of each choice
+   */
+  SearchSpec settled(List<String> chosen) {
+    Set<String> gone = new HashSet<>();
+    for (int i = 0; i < choices.size(); i++) {
+      if (choices.get(i).isPresence() && chosen.get(i).equals(ChoiceSpec.ABSENT)) {
+        gone.add(choices.get(i).layer() + ".thicknessNm");
+      }
+    }
+    List<VarySpec> left =
+        vary.stream().filter(v -> !gone.contains(v.key()) && !gone.contains(v.sameAs())).toList();
+    return new SearchSpec(left, List.of(), limits, aims, seed, evaluations, timeSeconds, place);
+  }
+
+  /**
+   * A choice between alternatives that have no order.
+   *
+   * @param key such as {@code front-contact.material} or {@code spacer.present}
+   * @param names materials, or {@code present} and {@code absent}
+   * @param drawn which of them is drawn
+   * @param place where it stands
+   */
+  public record ChoiceSpec(String key, List<String> names, int drawn, Place place) {
+
+    /** The alternative without the layer. */
+    public static final String ABSENT = "absent";
+
+    public ChoiceSpec {
+      names = List.copyOf(names);
+    }
+
+    /** The layer that is chosen for. */
+    public String layer() {
+      return key.substring(0, key.lastIndexOf('.'));
+    }
+
+    /** Whether it is about the layer being there, not about its material. */
+    public boolean isPresence() {
+      return key.endsWith(".present");
+    }
   }
 
   /** Every quantity with its own range; that of a tied one follows from what it follows. */

@@ -23,10 +23,12 @@ final class SearchBinder {
     }
     Fields fields = search.get();
     QuantityBinder quantities = new QuantityBinder(stack, subcells);
-    List<VarySpec> vary = VaryBinder.bind(fields, stack);
+    VaryBinder.Varied varied = VaryBinder.bind(fields, stack);
+    List<VarySpec> vary = varied.ranges();
     SearchSpec spec =
         new SearchSpec(
             vary,
+            varied.choices(),
             LimitBinder.bind(fields, quantities),
             new AimBinder(fields, quantities).bind(usualAim(vary)),
             fields.whole("seed", 0, Long.MAX_VALUE).orElse(1),

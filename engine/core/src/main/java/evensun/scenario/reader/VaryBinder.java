@@ -1,5 +1,6 @@
 package evensun.scenario.reader;
 
+import evensun.scenario.SearchSpec.ChoiceSpec;
 import evensun.scenario.SearchSpec.VarySpec;
 import evensun.scenario.tree.Fields;
 import evensun.scenario.tree.Interval;
@@ -30,23 +31,32 @@ final class VaryBinder {
     this.stack = stack;
   }
 
-  static List<VarySpec> bind(Fields search, StackBinder.Stack stack) {
+  /** What varies: numbers in a range, and choices between alternatives. */
+  record Varied(List<VarySpec> ranges, List<ChoiceSpec> choices) {}
+
+  static Varied bind(Fields search, StackBinder.Stack stack) {
     search.require("vary", "what may vary, such as perovskite.thicknessNm: [200, 1000]");
     Optional<Mapping> vary = search.mapping("vary");
     if (vary.isEmpty()) {
-      return List.of();
+      return new Varied(List.of(), List.of());
     }
     Fields fields = new Fields("search.vary", vary.get(), search.faults());
-    return new VaryBinder(fields, vary.get(), stack).specs();
+    VaryBinder binder = new VaryBinder(fields, vary.get(), stack);
+    ChoiceBinder choices = new ChoiceBinder(fields, stack);
+    return new Varied(binder.specs(choices), choices.bound());
   }
 
-  private List<VarySpec> specs() {
+  private List<VarySpec> specs(ChoiceBinder choices) {
     if (vary.entries().isEmpty()) {
       fields.fault(fields.place(), "must name at least one quantity");
     }
     List<VarySpec> specs = new ArrayList<>();
     for (String key : fields.keys()) {
       Entry entry = entry(key);
+      if (ChoiceBinder.isChoice(key)) {
+        choices.bind(entry);
+        continue;
+      }
       VaryKeys.interval(fields, entry, stack).flatMap(in -> spec(entry, in)).ifPresent(specs::add);
     }
     checkTies(specs);
