@@ -29,7 +29,8 @@ class AssessIT {
         "all-thin-film.yaml",
         "badly-matched.yaml",
         "perovskite-on-pyramids.yaml",
-        "textured-rear.yaml"
+        "textured-rear.yaml",
+        "measured-surface.yaml"
       })
   void everyDemoIsAssessedAsOneJsonDocument(String name) {
     Program.Run run =
