@@ -22,6 +22,15 @@ record Current(double value, double error) {
     return new Current(value, Math.sqrt(squares / (count * (count - 1.0))));
   }
 
+  /** Largest standard error of what a layer or the exit medium absorbs. */
+  static double largestError(Problem problem, Estimate estimate) {
+    double largest = 0;
+    for (int row = LitDevice.TRANSMITTED; row < estimate.mean.length; row++) {
+      largest = Math.max(largest, of(problem, estimate, row).error());
+    }
+    return largest;
+  }
+
   private static double current(Problem problem, double[] share) {
     double sum = 0;
     for (int w = 0; w < share.length; w++) {

@@ -31,15 +31,9 @@ record RayCount(int perReplicate) {
     return new RayCount(rays);
   }
 
-  /** Largest standard error of a current, in mA cm⁻². */
   private static double error(Problem problem, Design start, Services services, int rays) {
     try (RayEvaluator pilot = new RayEvaluator(problem, services, new Traces(problem, rays))) {
-      Estimate estimate = pilot.estimate(start, 0);
-      double largest = 0;
-      for (int row = 0; row < estimate.mean.length; row++) {
-        largest = Math.max(largest, Current.of(problem, estimate, row).error());
-      }
-      return largest;
+      return Current.largestError(problem, pilot.estimate(start, 0));
     }
   }
 }

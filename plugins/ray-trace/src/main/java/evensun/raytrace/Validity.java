@@ -119,10 +119,7 @@ final class Validity {
 
   private void addStatistics() {
     Estimate estimate = evaluator.estimate(design, 0);
-    double largest = 0;
-    for (int row = 0; row < estimate.mean.length; row++) {
-      largest = Math.max(largest, Current.of(problem, estimate, row).error());
-    }
+    double largest = Current.largestError(problem, estimate);
     Facts facts = new Facts(problem, design, evaluator);
     add(
         "energy-balance",

@@ -20,16 +20,16 @@ final class AngleNodes {
   private static final int MOST_EXACT = 16;
 
   /** Nodes even in the tangential index n sin θ, that films feel. */
-  private static final int EVEN = 40;
+  private static final int EVEN = 32;
 
   /** Nodes where the light is. */
-  private static final int POPULAR = 20;
+  private static final int POPULAR = 14;
 
   /** Nodes even in the cosine beyond, inside the cone that leads there. */
-  private static final int CONE = 12;
+  private static final int CONE = 10;
 
   /** Steps from one critical angle to that of another wavelength. */
-  private static final int CRITICAL = 6;
+  private static final int CRITICAL = 5;
 
   /** Least cosine asked for: light along the surface is reflected. */
   private static final double LEAST_COSINE = 1e-4;
@@ -68,8 +68,9 @@ final class AngleNodes {
     List<Double> nodes = new ArrayList<>();
     double low = met[0];
     double high = met[met.length - 1];
-    addSpread(met, low, high, little ? 3 : 1, nodes);
-    addCone(little ? 2 : 1, nodes);
+    int sparing = little ? 4 : 1;
+    addSpread(met, low, high, sparing, nodes);
+    addCone(sparing, nodes);
     return distinct(
         nodes.stream()
             .filter(c -> c >= low && c <= high)
@@ -102,7 +103,7 @@ final class AngleNodes {
     if (high == 0) {
       return;
     }
-    int steps = CRITICAL / sparing;
+    int steps = (CRITICAL + sparing - 1) / sparing;
     for (int i = 0; i <= steps; i++) {
       into.add(low + (high - low) * i / steps);
     }
