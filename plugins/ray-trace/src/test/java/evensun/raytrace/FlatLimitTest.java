@@ -55,7 +55,7 @@ class FlatLimitTest {
   @ParameterizedTest
   @ValueSource(booleans = {false, true})
   void diffuseLightIsTheMeanOverDirections(boolean rays) {
-    Stacks flat = rays ? stack(new Scatter(1, 1, Side.FRONT)).rays(2048) : stack();
+    Stacks flat = rays ? stack(new Scatter(1, 1, Side.FRONT)).rays(16384) : stack();
     flat.light(new Incidence(0, Polarisation.UNPOLARISED, Side.FRONT, true));
     Response diffuse = flat.solve();
     int steps = 400;
