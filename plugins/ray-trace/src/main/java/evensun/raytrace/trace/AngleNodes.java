@@ -19,7 +19,10 @@ final class AngleNodes {
 
   private static final int MOST_EXACT = 16;
 
-  /** Nodes even in the tangential index n sin θ, that films feel. */
+  /**
+   * Nodes even in the tangential index n sin θ, that films feel; in the cosine for light from a
+   * thinner medium, that is reflected along the surface.
+   */
   private static final int EVEN = 32;
 
   /** Nodes where the light is. */
@@ -79,8 +82,7 @@ final class AngleNodes {
             .toArray());
   }
 
-  private static void addSpread(
-      double[] met, double low, double high, int sparing, List<Double> into) {
+  private void addSpread(double[] met, double low, double high, int sparing, List<Double> into) {
     into.add(low);
     into.add(high);
     double least = Math.sqrt(1 - high * high);
@@ -88,7 +90,7 @@ final class AngleNodes {
     int even = EVEN / sparing;
     for (int i = 0; i <= even; i++) {
       double sine = least + (most - least) * i / even;
-      into.add(Math.sqrt(1 - sine * sine));
+      into.add(index < 1 ? low + (high - low) * i / even : Math.sqrt(1 - sine * sine));
     }
     int popular = POPULAR / sparing;
     for (int i = 0; i <= popular; i++) {
