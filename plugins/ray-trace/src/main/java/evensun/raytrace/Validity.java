@@ -57,22 +57,23 @@ final class Validity {
 
   private void addRelief(Relief relief, String where) {
     double ratio = relief.featureUm() / longestUm();
-    add(
-        "geometrical-optics",
-        Severity.NOTE,
-        where,
-        "rays take shapes of %s µm for planes without edges; that errs by more than the statistical errors stated with the results",
-        relief.featureUm());
+    findings.add(
+        new Finding(
+            "geometrical-optics",
+            Severity.NOTE,
+            where,
+            Words.of(
+                "rays take shapes of %s µm for planes without edges; that errs by more than the statistical errors stated with the results",
+                relief.featureUm())));
     if (ratio < WAVELENGTHS) {
-      add(
-          "texture-near-wavelength",
-          ratio < 1.5 ? Severity.SERIOUS : Severity.WARNING,
-          where,
-          "shapes of %s µm are %s times the longest wavelength of %s µm wide; below %s times, diffraction changes what rays predict",
-          relief.featureUm(),
-          ratio,
-          longestUm(),
-          WAVELENGTHS);
+      findings.add(
+          new Finding(
+              "texture-near-wavelength",
+              ratio < 1.5 ? Severity.SERIOUS : Severity.WARNING,
+              where,
+              Words.of(
+                  "shapes of %s µm are %s times the longest wavelength of %s µm wide; below %s times, diffraction changes what rays predict",
+                  relief.featureUm(), ratio, longestUm(), WAVELENGTHS)));
     }
   }
 
@@ -85,14 +86,14 @@ final class Validity {
     }
     double share = total / 1000 / relief.featureUm();
     if (share > FILM_SHARE) {
-      add(
-          "film-against-texture",
-          Severity.WARNING,
-          names,
-          "films of together %s nm follow shapes %s µm wide; beyond %s %% of the width, tips and valleys are no longer flat facets with films of one thickness",
-          total,
-          relief.featureUm(),
-          100 * FILM_SHARE);
+      findings.add(
+          new Finding(
+              "film-against-texture",
+              Severity.WARNING,
+              names,
+              Words.of(
+                  "films of together %s nm follow shapes %s µm wide; beyond %s %% of the width, tips and valleys are no longer flat facets with films of one thickness",
+                  total, relief.featureUm(), 100 * FILM_SHARE)));
     }
   }
 
@@ -107,13 +108,14 @@ final class Validity {
     double thickness = 1000 * traced.device().thicknessUm(design, medium);
     double fringe = nm * nm / (2 * n * thickness);
     if (fringe > FRINGE_STEPS * step) {
-      add(
-          "thick-layer-interference",
-          Severity.WARNING,
-          traced.device().plainName(medium),
-          "interference within a layer of %s nm is left out, though its fringes of %s nm would show on this grid; rays add intensities",
-          thickness,
-          fringe);
+      findings.add(
+          new Finding(
+              "thick-layer-interference",
+              Severity.WARNING,
+              traced.device().plainName(medium),
+              Words.of(
+                  "interference within a layer of %s nm is left out, though its fringes of %s nm would show on this grid; rays add intensities",
+                  thickness, fringe)));
     }
   }
 
@@ -121,25 +123,23 @@ final class Validity {
     Estimate estimate = evaluator.estimate(design, 0);
     double largest = Current.largestError(problem, estimate);
     Facts facts = new Facts(problem, design, evaluator);
-    add(
-        "energy-balance",
-        Severity.NOTE,
-        "rays",
-        "the rays lose or make %s %% of the light before results are made to add up; currents have a standard error of at most %s mA cm⁻²",
-        100 * facts.imbalance(evaluator.estimate(design, 0)),
-        largest);
+    findings.add(
+        new Finding(
+            "energy-balance",
+            Severity.NOTE,
+            "rays",
+            Words.of(
+                "the rays lose or make %s %% of the light before results are made to add up; currents have a standard error of at most %s mA cm⁻²",
+                100 * facts.imbalance(evaluator.estimate(design, 0)), largest)));
     if (largest > 1.5 * problem.wantedErrorMaPerCm2()) {
-      add(
-          "ray-error",
-          Severity.WARNING,
-          "rays",
-          "a current has a standard error of %s mA cm⁻², more than the wanted %s; set more rays in the options of solver ray-trace",
-          largest,
-          problem.wantedErrorMaPerCm2());
+      findings.add(
+          new Finding(
+              "ray-error",
+              Severity.WARNING,
+              "rays",
+              Words.of(
+                  "a current has a standard error of %s mA cm⁻², more than the wanted %s; set more rays in the options of solver ray-trace",
+                  largest, problem.wantedErrorMaPerCm2())));
     }
-  }
-
-  private void add(String code, Severity severity, String where, String message, Object... values) {
-    findings.add(new Finding(code, severity, where, Words.of(message, values)));
   }
 }
