@@ -68,7 +68,8 @@ public record SearchRecord(
    * @param step step of the deposition tool, 0 for any value
    * @param drawn value as drawn
    * @param found value found
-   * @param equallyGoodLow lower end of the range that is equally good, others re-optimised
+   * @param equallyGoodLow lower end of the range that is equally good, others re-optimised; null
+   *     when it was not found within the evaluations allowed
    * @param equallyGoodHigh upper end of that range
    * @param bound {@code low} or {@code high} when the value stands on that bound, else null
    */

@@ -13,6 +13,7 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
+import java.util.Optional;
 import java.util.Set;
 import java.util.stream.Collectors;
 import java.util.stream.IntStream;
@@ -125,6 +126,7 @@ final class SearchRecords {
         continue;
       }
       double found = best.values().get(v);
+      boolean known = !freedoms.isEmpty() && !isOpen(variable, freedoms.get(v));
       records.add(
           new SearchRecord.VariableRecord(
               variable.key(),
@@ -134,11 +136,33 @@ final class SearchRecords {
               variable.step(),
               variable.drawn(),
               found,
-              freedoms.isEmpty() ? null : freedoms.get(v).low(),
-              freedoms.isEmpty() ? null : freedoms.get(v).high(),
+              known ? freedoms.get(v).low() : null,
+              known ? freedoms.get(v).high() : null,
               bound(variable, found)));
     }
     return records;
+  }
+
+  /** Whether not even the smallest move could be tried out within the evaluations allowed. */
+  private static boolean isOpen(Variable variable, Freedom freedom) {
+    return !variable.isChoice()
+        && variable.step() == 0
+        && variable.low() < variable.high()
+        && freedom.low() == freedom.high();
+  }
+
+  private Optional<String> open(List<Freedom> freedoms) {
+    List<String> keys = new ArrayList<>();
+    for (int v = 0; v < freedoms.size(); v++) {
+      if (isOpen(varied.variables().get(v), freedoms.get(v))) {
+        keys.add(freedoms.get(v).key());
+      }
+    }
+    return keys.isEmpty()
+        ? Optional.empty()
+        : Optional.of(
+            "the range that is equally good was not found within the evaluations allowed for "
+                + String.join(", ", keys));
   }
 
   private List<String> notes(SearchOutcome outcome, List<Freedom> freedoms) {
@@ -154,6 +178,7 @@ final class SearchRecords {
               EQUALLY_GOOD,
               aim.unit()));
     }
+    open(freedoms).ifPresent(notes::add);
     freedoms.stream()
         .filter(f -> !f.bound().isEmpty() && f.gainPerUnit() > 0)
         .forEach(f -> notes.add(atBound(f)));
