@@ -8,6 +8,7 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import org.jspecify.annotations.Nullable;
 
 /** The varied quantities as a person at the deposition tool says them. */
 final class Deposit {
@@ -17,14 +18,22 @@ final class Deposit {
 
   private Deposit() {}
 
-  /** Such as {@code 92 nm antireflection, 431.2 nm perovskite of 1.680 eV}. */
-  static String phrase(List<VariableRecord> variables) {
+  /**
+   * Such as {@code 92 nm antireflection, 431.2 nm perovskite of 1.680 eV}; layers for which another
+   * material was chosen come first.
+   */
+  static String phrase(List<VariableRecord> variables, List<Swap> swaps) {
     Map<String, List<VariableRecord>> byLayer = new LinkedHashMap<>();
+    Map<String, String> chosen = new LinkedHashMap<>();
+    for (Swap swap : swaps) { // first, since a long list is cut short
+      byLayer.put(swap.layer(), new ArrayList<>());
+      chosen.put(swap.layer(), swap.found());
+    }
     for (VariableRecord variable : variables) {
       byLayer.computeIfAbsent(Keys.layer(variable.key()), k -> new ArrayList<>()).add(variable);
     }
     List<String> phrases = new ArrayList<>();
-    byLayer.forEach((layer, values) -> phrases.add(layer(layer, values)));
+    byLayer.forEach((layer, values) -> phrases.add(layer(layer, values, chosen.get(layer))));
     if (phrases.size() > MOST_PHRASES) {
       int more = phrases.size() - MOST_PHRASES + 1;
       return String.join(", ", phrases.subList(0, MOST_PHRASES - 1))
@@ -35,8 +44,15 @@ final class Deposit {
     return joined(phrases);
   }
 
-  private static String layer(String layer, List<VariableRecord> values) {
+  private static String layer(
+      String layer, List<VariableRecord> values, @Nullable String material) {
+    if (material != null && material.isEmpty()) {
+      return "no " + Clip.to(layer, MOST_LETTERS);
+    }
     StringBuilder text = new StringBuilder(Clip.to(layer, MOST_LETTERS));
+    if (material != null) {
+      text.append(" of ").append(Clip.to(material, MOST_LETTERS));
+    }
     for (VariableRecord value : values) {
       if (Keys.isThickness(value.key())) {
         text.insert(0, Numbers.thickness(value.found()) + " ");

@@ -30,10 +30,11 @@ public final class Sentence {
           + Numbers.count(search.evaluations(), "design")
           + " tried, all failed.";
     }
+    List<Swap> swaps = Swap.between(result.asDrawn(), result.found());
     String deposit =
-        search.variables().isEmpty()
+        search.variables().isEmpty() && swaps.isEmpty()
             ? "Deposit the stack as listed"
-            : "Deposit " + Deposit.phrase(search.variables());
+            : "Deposit " + Deposit.phrase(search.variables(), swaps);
     return deposit + ": " + gives(result, search) + GridWords.headline(search) + ".";
   }
 

@@ -3,6 +3,7 @@ package evensun.report.summary;
 import evensun.report.decision.FrontWords;
 import evensun.report.decision.GridWords;
 import evensun.report.decision.Sentence;
+import evensun.report.decision.Swap;
 import evensun.report.decision.VerdictRules;
 import evensun.report.figure.Budget;
 import evensun.report.figure.Share;
@@ -50,8 +51,11 @@ public record Summary(
     List<Listing> tables = new ArrayList<>();
     tables.add(currents(result));
     SearchRecord search = result.search();
-    if (search != null && !search.variables().isEmpty()) {
-      tables.add(varied(search));
+    if (search != null) {
+      List<Swap> swaps = Swap.between(result.asDrawn(), result.found());
+      if (!search.variables().isEmpty() || !swaps.isEmpty()) {
+        tables.add(varied(search, swaps));
+      }
     }
     Budget.of(result.found()).ifPresent(found -> tables.add(ledger(result, found)));
     String points =
@@ -106,8 +110,17 @@ public record Summary(
             .orElse(null);
   }
 
-  private static Listing varied(SearchRecord search) {
+  private static Listing varied(SearchRecord search, List<Swap> swaps) {
     List<List<String>> rows = new ArrayList<>();
+    for (Swap swap : swaps) {
+      rows.add(
+          List.of(
+              Clip.to(swap.layer(), 40) + " material",
+              swap.drawn().isEmpty() ? "absent" : Clip.to(swap.drawn(), 48),
+              "→",
+              swap.found().isEmpty() ? "absent" : Clip.to(swap.found(), 48),
+              ""));
+    }
     for (VariableRecord v : search.variables()) {
       rows.add(
           List.of(
