@@ -2,10 +2,6 @@ package evensun.cli;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
-import java.io.ByteArrayInputStream;
-import java.io.ByteArrayOutputStream;
-import java.io.PrintStream;
-import java.nio.charset.StandardCharsets;
 import org.junit.jupiter.api.Test;
 import picocli.CommandLine;
 
@@ -13,18 +9,10 @@ import picocli.CommandLine;
 class HelpTest {
 
   private static String help(String... arguments) {
-    ByteArrayOutputStream out = new ByteArrayOutputStream();
-    ByteArrayOutputStream err = new ByteArrayOutputStream();
-    Console console =
-        new Console(
-            new ByteArrayInputStream(new byte[0]),
-            new PrintStream(out, true, StandardCharsets.UTF_8),
-            new PrintStream(err, true, StandardCharsets.UTF_8),
-            false,
-            false);
-    assertThat(Main.run(console, arguments)).isZero();
-    assertThat(err.toString(StandardCharsets.UTF_8)).isEmpty();
-    return out.toString(StandardCharsets.UTF_8);
+    Called called = Called.with(arguments);
+    assertThat(called.status()).isZero();
+    assertThat(called.err()).isEmpty();
+    return called.out();
   }
 
   @Test

@@ -63,21 +63,8 @@ public record Scenario(
       layers.replaceAll(
           layer -> layer.name().equals(choice.layer()) ? made(layer, choice, name) : layer);
     }
-    return new Scenario(
-        source,
-        title,
-        light,
-        grid,
-        materials,
-        incidentMedium,
-        layers,
-        exit,
-        subcells,
-        connection,
-        device,
-        solver,
-        search.map(spec -> spec.settled(chosen)),
-        measured);
+    return copy(
+        grid, incidentMedium, layers, exit, solver, search.map(spec -> spec.settled(chosen)));
   }
 
   private static LayerSpec made(LayerSpec layer, ChoiceSpec choice, String name) {
@@ -89,79 +76,53 @@ public record Scenario(
 
   /** This scenario on another grid. */
   public Scenario withGrid(GridSpec other) {
-    return new Scenario(
-        source,
-        title,
-        light,
-        other,
-        materials,
-        incidentMedium,
-        stack,
-        exit,
-        subcells,
-        connection,
-        device,
-        solver,
-        search,
-        measured);
+    return copy(other, incidentMedium, stack, exit, solver, search);
   }
 
   /** This scenario with another solver. */
   public Scenario withSolver(SolverSpec other) {
-    return new Scenario(
-        source,
-        title,
-        light,
-        grid,
-        materials,
-        incidentMedium,
-        stack,
-        exit,
-        subcells,
-        connection,
-        device,
-        Optional.of(other),
-        search,
-        measured);
+    return copy(grid, incidentMedium, stack, exit, Optional.of(other), search);
   }
 
   /** This scenario with another seed of its search, if it has one, and of rays. */
   public Scenario withSeed(long seed) {
-    return new Scenario(
-        source,
-        title,
-        light,
-        grid,
-        materials,
-        incidentMedium,
-        stack,
-        exit,
-        subcells,
-        connection,
-        device,
-        solver,
-        search.map(spec -> spec.withSeed(seed)),
-        measured);
+    return copy(grid, incidentMedium, stack, exit, solver, search.map(spec -> spec.withSeed(seed)));
   }
 
   /** This scenario with one material replaced by another wherever it stands. */
   public Scenario withMaterial(String name, String other) {
-    return new Scenario(
-        source,
-        title,
-        light,
+    return copy(
         grid,
-        materials,
         incidentMedium.material().equals(name)
             ? incidentMedium.withMaterial(other)
             : incidentMedium,
         stack.stream().map(layer -> layer.withMaterial(name, other)).toList(),
         exit.material().equals(name) ? exit.withMaterial(other) : exit,
+        solver,
+        search);
+  }
+
+  private Scenario copy(
+      GridSpec otherGrid,
+      MediumSpec otherIncident,
+      List<LayerSpec> otherStack,
+      MediumSpec otherExit,
+      Optional<SolverSpec> otherSolver,
+      Optional<SearchSpec> otherSearch) {
+    return new Scenario(
+        source,
+        title,
+        light,
+        otherGrid,
+        materials,
+        otherIncident,
+        otherStack,
+        otherExit,
         subcells,
         connection,
         device,
-        solver,
-        search,
+        otherSolver,
+        otherSearch,
         measured);
   }
 }
