@@ -17,7 +17,7 @@ if errorlevel 1 goto tooold
 for /f "tokens=2 delims=. " %%V in ('"%JAVA_EXE%" --version 2^>nul ^| findstr /r "^[a-z]* [0-9]"') do set "JAVA_FEATURE=%%V"
 if %JAVA_FEATURE% LSS 17 goto tooold
 
-"%JAVA_EXE%" -XX:-UsePerfData -Xshare:auto -Dfile.encoding=UTF-8 "-Devensun.home=%EVENSUN_HOME%" %EVENSUN_JAVA_OPTS% -cp "%EVENSUN_HOME%\lib\*" evensun.cli.Main %*
+"%JAVA_EXE%" -XX:-UsePerfData -Xshare:auto "@%~dp0search.options" -Dfile.encoding=UTF-8 "-Devensun.home=%EVENSUN_HOME%" %EVENSUN_JAVA_OPTS% -cp "%EVENSUN_HOME%\lib\*" evensun.cli.Main %*
 exit /b %ERRORLEVEL%
 
 :tooold

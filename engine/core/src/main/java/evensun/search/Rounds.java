@@ -21,6 +21,12 @@ record Rounds(SearchSettings settings) {
   /** So many combining rounds in a row without a gain end the search. */
   private static final int IDLE = 5;
 
+  /** The same where nearly all fresh rounds ended at one value: a short round and a long one. */
+  private static final int IDLE_WHERE_AGREED = 2;
+
+  /** Values are alike, and a gain is not worth while, within this part of the range of values. */
+  private static final double ALIKE = 1e-5;
+
   /** More combining rounds would only polish noise. */
   private static final int COMBINING = 12;
 
@@ -95,12 +101,22 @@ record Rounds(SearchSettings settings) {
     if (count >= limit()) {
       return true;
     }
-    if (count < fresh() + IDLE) {
+    if (count < fresh()) {
       return false;
     }
-    double before = best(roundBests.subList(0, count - IDLE));
-    double scale = before - history.get(0).mean();
-    return !(best(roundBests) - before > 1e-5 * scale);
+    double alike = ALIKE * (best(roundBests) - history.get(0).mean());
+    int idle = agreed(roundBests, alike) ? IDLE_WHERE_AGREED : IDLE;
+    if (count < fresh() + idle) {
+      return false;
+    }
+    return !(best(roundBests) - best(roundBests.subList(0, count - idle)) > alike);
+  }
+
+  /** Whether all fresh rounds but one at most found the best value there is, each by itself. */
+  private boolean agreed(List<Double> roundBests, double alike) {
+    double best = best(roundBests);
+    long agreeing = roundBests.subList(0, fresh()).stream().filter(b -> b >= best - alike).count();
+    return fresh() >= 3 && agreeing >= fresh() - 1;
   }
 
   private static double best(List<Double> roundBests) {

@@ -33,7 +33,7 @@ class AssessIT {
         "measured-surface.yaml"
       })
   void everyDemoIsAssessedAsOneJsonDocument(String name) {
-    Program.Run run =
+    Run run =
         new Program(folder).run("assess", Program.scenario(name).toString(), "--format", "json");
     assertThat(run.status()).isZero();
     assertThat(run.err()).isEmpty();
@@ -53,7 +53,7 @@ class AssessIT {
           {"assess", "x.yaml", "--no-such-option", "--format", "json"},
           {"assess", file.toString(), "--format", "json", "--threads", "0"}
         }) {
-      Program.Run run = new Program(folder).run(arguments);
+      Run run = new Program(folder).run(arguments);
       assertThat(run.status()).isEqualTo(2);
       assertThat(run.err()).isNotBlank().doesNotContain("Exception");
       assertThat(ONE_DOCUMENT.readTree(run.out()).get("errors").size()).isPositive();
@@ -63,8 +63,8 @@ class AssessIT {
   @Test
   void aScenarioComesFromStandardInput() throws IOException {
     String text = Files.readString(Program.scenario("perovskite-on-silicon.yaml"));
-    Program.Run piped = new Program(folder).runWithInput(text, "assess", "-", "--format", "json");
-    Program.Run file =
+    Run piped = new Program(folder).runWithInput(text, "assess", "-", "--format", "json");
+    Run file =
         new Program(folder)
             .run(
                 "assess",
@@ -78,7 +78,7 @@ class AssessIT {
 
   @Test
   void aReportIsWrittenWhenAFolderIsNamed() {
-    Program.Run run =
+    Run run =
         new Program(folder)
             .run(
                 "assess",

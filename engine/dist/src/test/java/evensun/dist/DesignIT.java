@@ -27,7 +27,7 @@ class DesignIT {
 
   private JsonNode design(String name, String... more) throws IOException {
     String[] arguments = {"design", Program.scenario(name).toString(), "--out", "run"};
-    Program.Run run = new Program(folder).run(concat(arguments, more));
+    Run run = new Program(folder).run(concat(arguments, more));
     assertThat(run.err()).isEmpty();
     assertThat(run.status()).isZero();
     return JSON.readTree(Files.readString(folder.resolve("run/result.json")));
@@ -107,8 +107,7 @@ class DesignIT {
     assertThat(stopped.get("search").get("stopped").asString()).isEqualTo("interrupted");
     assertThat(broken.resolve("report.html")).exists();
 
-    Program.Run resumed =
-        new Program(folder).run("design", "--resume", "broken", "--set", "grid.stepNm=1");
+    Run resumed = new Program(folder).run("design", "--resume", "broken", "--set", "grid.stepNm=1");
     assertThat(resumed.status()).isZero();
     JsonNode end = JSON.readTree(Files.readString(broken.resolve("result.json")));
     assertThat(end.get("design")).isEqualTo(whole.get("design"));
@@ -123,7 +122,7 @@ class DesignIT {
         scenario,
         Files.readString(Program.scenario(PLANAR))
             + "\n  limits: [{quantity: thicknessNm, of: [perovskite], atMost: 150}]\n");
-    Program.Run run =
+    Run run =
         new Program(folder)
             .run("design", scenario.toString(), "--out", "run", "--set", "search.evaluations=500");
     assertThat(run.status()).as(run.err()).isZero();
@@ -152,7 +151,7 @@ class DesignIT {
       List<String> arguments = new ArrayList<>(other);
       arguments.addAll(
           List.of("--set", "solver.id=transfer-matrix", "--set", opinion, "--format", "json"));
-      Program.Run run = new Program(folder).run(arguments.toArray(String[]::new));
+      Run run = new Program(folder).run(arguments.toArray(String[]::new));
       assertThat(run.status()).as(run.err()).isZero();
       double wanted = JSON.readTree(run.out()).get("matchedCurrentMaPerCm2").asDouble();
       String what = opinion.startsWith("grid") ? "2.5 nm" : "reference kernel";
@@ -170,10 +169,10 @@ class DesignIT {
     Files.createDirectories(mine.getParent());
     Files.writeString(mine, "mine");
     String scenario = Program.scenario(PLANAR).toString();
-    Program.Run run = new Program(folder).run("design", scenario, "--out", "run");
+    Run run = new Program(folder).run("design", scenario, "--out", "run");
     assertThat(run.status()).isEqualTo(2);
     assertThat(run.err().strip()).hasLineCount(1).contains("not empty").contains("--force");
-    Program.Run forced = new Program(folder).run("design", scenario, "--out", "run", "--force");
+    Run forced = new Program(folder).run("design", scenario, "--out", "run", "--force");
     assertThat(forced.status()).isZero();
     assertThat(mine).hasContent("mine");
   }

@@ -3,23 +3,16 @@ package evensun.dist;
 import java.io.File;
 import java.io.IOException;
 import java.io.UncheckedIOException;
-import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
-import java.util.concurrent.TimeUnit;
 
 /** The built distribution, and processes started from it as a user does. */
 final class Distribution {
 
-  private static final long LIMIT_SECONDS = 300;
-
   private Distribution() {}
-
-  /** How a process ended. */
-  record Run(int status, String out, String err) {}
 
   /** The assembled folder; it must not be written to. */
   static Path folder() {
@@ -63,28 +56,7 @@ final class Distribution {
 
   /** Runs the launcher of a folder; environment values of "" are taken out. */
   static Run run(Path launcher, Path workingFolder, Map<String, String> more, String... args) {
-    try {
-      Path out = Files.createTempFile("evensun", ".out");
-      Path err = Files.createTempFile("evensun", ".err");
-      Process process =
-          builder(launcher, workingFolder, more, args)
-              .redirectOutput(out.toFile())
-              .redirectError(err.toFile())
-              .start();
-      process.getOutputStream().close();
-      if (!process.waitFor(LIMIT_SECONDS, TimeUnit.SECONDS)) {
-        process.destroyForcibly();
-        throw new IllegalStateException("no end within " + LIMIT_SECONDS + " s");
-      }
-      Run run = new Run(process.exitValue(), read(out), read(err));
-      Files.delete(out);
-      Files.delete(err);
-      return run;
-    } catch (IOException e) {
-      throw new UncheckedIOException(e);
-    } catch (InterruptedException e) {
-      throw new IllegalStateException(e);
-    }
+    return Run.of(builder(launcher, workingFolder, more, args), "");
   }
 
   static ProcessBuilder builder(
@@ -111,10 +83,6 @@ final class Distribution {
       }
     }
     return folder;
-  }
-
-  private static String read(Path file) throws IOException {
-    return Files.readString(file, StandardCharsets.UTF_8);
   }
 
   private static Path property(String name) {

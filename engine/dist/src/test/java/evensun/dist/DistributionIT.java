@@ -2,7 +2,6 @@ package evensun.dist;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
-import evensun.dist.Distribution.Run;
 import evensun.spi.OpticalSolver;
 import java.io.File;
 import java.io.IOException;

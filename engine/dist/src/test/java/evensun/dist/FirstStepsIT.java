@@ -21,11 +21,11 @@ class FirstStepsIT {
 
   @TempDir Path folder;
 
-  private Program.Run run(String... arguments) {
+  private Run run(String... arguments) {
     return new Program(folder).run(arguments);
   }
 
-  private static JsonNode json(Program.Run run) {
+  private static JsonNode json(Run run) {
     return JsonMapper.shared().readTree(run.out());
   }
 
@@ -38,10 +38,10 @@ class FirstStepsIT {
     "four-terminal, 2"
   })
   void aNewScenarioIsAssessedUnchanged(String like, int subcells) {
-    Program.Run made = run("new", "my cell.yaml", "--like", like);
+    Run made = run("new", "my cell.yaml", "--like", like);
     assertThat(made.status()).isZero();
     assertThat(made.out()).startsWith("my cell.yaml: ").endsWith("assess 'my cell.yaml'\n");
-    Program.Run assessed = run("assess", "my cell.yaml", "--format", "json");
+    Run assessed = run("assess", "my cell.yaml", "--format", "json");
     assertThat(assessed.err()).isEmpty();
     assertThat(assessed.status()).isZero();
     assertThat(json(assessed).get("subcells").size()).isEqualTo(subcells);
@@ -66,7 +66,7 @@ class FirstStepsIT {
   @Test
   void aFileThatExistsStays() throws IOException {
     Path mine = Files.writeString(folder.resolve("cell.yaml"), "mine");
-    Program.Run run = run("new", "cell.yaml");
+    Run run = run("new", "cell.yaml");
     assertThat(run.status()).isEqualTo(2);
     assertThat(run.err())
         .isEqualTo("cell.yaml: exists already and is left as it is; choose another name\n");
@@ -83,7 +83,7 @@ class FirstStepsIT {
         "new nowhere/cell.yaml | nowhere/cell.yaml: there is no such folder; create it first",
       })
   void wrongNamesAreRefused(String arguments, String message) {
-    Program.Run run = run(arguments.split(" "));
+    Run run = run(arguments.split(" "));
     assertThat(run.status()).isEqualTo(2);
     assertThat(run.err()).isEqualTo(message + "\n");
     assertThat(folder).isEmptyDirectory();
@@ -91,7 +91,7 @@ class FirstStepsIT {
 
   @Test
   void aWaferInMicrometresIsAFinding() {
-    Program.Run run =
+    Run run =
         run(
             "assess",
             Program.scenario("perovskite-on-silicon.yaml").toString(),
@@ -140,8 +140,7 @@ class FirstStepsIT {
 
   @Test
   void everyFindingOfADemoIsExplained() {
-    Program.Run demo =
-        run("assess", Program.scenario("badly-matched.yaml").toString(), "--format", "json");
+    Run demo = run("assess", Program.scenario("badly-matched.yaml").toString(), "--format", "json");
     var codes = json(demo).get("findings").findValuesAsString("code");
     assertThat(codes).isNotEmpty();
     assertThat(json(run("explain", "--format", "json")).findValuesAsString("code"))

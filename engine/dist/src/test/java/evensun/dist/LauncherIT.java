@@ -2,7 +2,6 @@ package evensun.dist;
 
 import static org.assertj.core.api.Assertions.assertThat;
 
-import evensun.dist.Distribution.Run;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;

@@ -3,7 +3,6 @@ package evensun.dist;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
-import evensun.dist.Distribution.Run;
 import java.io.IOException;
 import java.nio.file.FileVisitResult;
 import java.nio.file.Files;

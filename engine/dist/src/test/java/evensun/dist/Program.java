@@ -1,27 +1,17 @@
 package evensun.dist;
 
-import java.io.IOException;
-import java.io.UncheckedIOException;
-import java.nio.charset.StandardCharsets;
-import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.concurrent.TimeUnit;
 
 /** The unpacked distribution as a user runs it: a process of its own in a folder of its own. */
 final class Program {
-
-  private static final long LONGEST_SECONDS = 240;
 
   private final Path workingFolder;
 
   Program(Path workingFolder) {
     this.workingFolder = workingFolder;
   }
-
-  /** What a run of the program left behind. */
-  record Run(int status, String out, String err) {}
 
   /** The unpacked distribution. */
   static Path folder() {
@@ -56,32 +46,6 @@ final class Program {
   }
 
   Run runWithInput(String input, String... arguments) {
-    try {
-      Path out = Files.createTempFile("evensun-out", ".txt");
-      Path err = Files.createTempFile("evensun-err", ".txt");
-      Path in = Files.writeString(Files.createTempFile("evensun-in", ".txt"), input);
-      Process process =
-          builder(workingFolder, arguments)
-              .redirectOutput(out.toFile())
-              .redirectError(err.toFile())
-              .redirectInput(in.toFile())
-              .start();
-      if (!process.waitFor(LONGEST_SECONDS, TimeUnit.SECONDS)) {
-        process.destroyForcibly();
-        throw new IllegalStateException("still running: " + String.join(" ", arguments));
-      }
-      return new Run(process.exitValue(), read(out), read(err));
-    } catch (IOException e) {
-      throw new UncheckedIOException(e);
-    } catch (InterruptedException e) {
-      Thread.currentThread().interrupt();
-      throw new IllegalStateException(e);
-    }
-  }
-
-  private static String read(Path file) throws IOException {
-    String text = Files.readString(file, StandardCharsets.UTF_8);
-    Files.delete(file);
-    return text;
+    return Run.of(builder(workingFolder, arguments), input);
   }
 }

@@ -41,7 +41,7 @@ class RecoveryIT {
   }
 
   private JsonNode run(String... arguments) throws IOException {
-    Program.Run run = new Program(folder).run(arguments);
+    Run run = new Program(folder).run(arguments);
     assertThat(run.status()).as(run.err()).isZero();
     return result("run");
   }
@@ -78,7 +78,7 @@ class RecoveryIT {
           .as("moment %d, at %d evaluations", i, moments.get(i))
           .isEqualTo(kill ? KILLED : INTERRUPTED);
     }
-    Program.Run resumed = new Program(folder).run("design", "--resume", "broken");
+    Run resumed = new Program(folder).run("design", "--resume", "broken");
     assertThat(resumed.status()).as(resumed.err()).isZero();
     assertThat(result("broken")).isEqualTo(whole);
   }

@@ -73,7 +73,7 @@ class ReportIT {
   @Test
   void theReportOfADesignIsWholeQuietAndSaysTheNumbersOfItsResult() throws IOException {
     String scenario = Program.scenario("perovskite-on-silicon.yaml").toString();
-    Program.Run run = new Program(folder).run("design", scenario, "--out", "run");
+    Run run = new Program(folder).run("design", scenario, "--out", "run");
     assertThat(run.status()).isZero();
     JsonNode result =
         JsonMapper.shared().readTree(Files.readString(folder.resolve("run/result.json")));

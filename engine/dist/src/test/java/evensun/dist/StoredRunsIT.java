@@ -31,12 +31,12 @@ class StoredRunsIT {
     String scenario = Program.scenario("perovskite-on-silicon.yaml").toString();
     String[] arguments =
         Stream.concat(Stream.of("design", scenario), Stream.of(more)).toArray(String[]::new);
-    Program.Run run = new Program(folder).run(arguments);
+    Run run = new Program(folder).run(arguments);
     assertThat(run.status()).as(run.err()).isZero();
   }
 
-  private static Program.Run run(String... arguments) {
-    Program.Run run = new Program(folder).run(arguments);
+  private static Run run(String... arguments) {
+    Run run = new Program(folder).run(arguments);
     assertThat(run.status()).as(run.err()).isZero();
     return run;
   }

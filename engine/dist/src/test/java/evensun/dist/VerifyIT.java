@@ -14,7 +14,7 @@ class VerifyIT {
 
   @Test
   void everyPublishedValueAgreesAndNamesItsSource() {
-    Program.Run run = new Program(folder).run("verify", "--format", "json");
+    Run run = new Program(folder).run("verify", "--format", "json");
     assertThat(run.status()).isZero();
     JsonNode values = JsonMapper.builder().build().readTree(run.out());
     assertThat(values.size()).isGreaterThanOrEqualTo(20);

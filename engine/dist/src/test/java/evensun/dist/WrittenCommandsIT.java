@@ -41,7 +41,7 @@ class WrittenCommandsIT {
   static void prepare() {
     assertThat(new Program(prepared).run("new", "my-cell.yaml").status()).isZero();
     for (int i = 0; i < 2; i++) {
-      Program.Run run =
+      Run run =
           new Program(prepared)
               .run("design", Program.scenario("perovskite-on-silicon.yaml").toString(), "--quiet");
       assertThat(run.status()).as(run.err()).isZero();

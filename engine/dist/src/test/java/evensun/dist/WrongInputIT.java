@@ -48,7 +48,7 @@ class WrongInputIT {
     Files.writeString(folder.resolve("tandem.yaml"), row.scenario());
     row.makeFile(folder);
     List<String> before = files();
-    Program.Run run = new Program(folder).run(row.argumentList());
+    Run run = new Program(folder).run(row.argumentList());
     assertThat(run.err()).startsWith(row.message()).endsWith("\n");
     assertThat(run.err().lines()).hasSize(1);
     assertThat(run.err()).doesNotContain("Exception", "\tat ", "internal error");

@@ -92,8 +92,10 @@ public final class SearchTables {
       for (int seed = 1; seed <= count && STACKS.containsKey(name); seed++) {
         List<String> command = new ArrayList<>();
         command.add(ProcessHandle.current().info().command().orElse("java"));
-        // As the program starts itself.
-        command.addAll(List.of("-XX:+UseSerialGC", "-XX:LoopUnrollLimit=400", "-cp"));
+        // As the program starts itself; its folder of sources is where benchmarks are run.
+        command.addAll(List.of("-XX:+UseParallelGC", "-XX:LoopUnrollLimit=400"));
+        command.add("@engine/dist/src/main/launcher/search.options");
+        command.add("-cp");
         command.add(System.getProperty("java.class.path"));
         command.addAll(List.of(SearchTables.class.getName(), "--once", name, "" + seed));
         new ProcessBuilder(command).inheritIO().start().waitFor();
