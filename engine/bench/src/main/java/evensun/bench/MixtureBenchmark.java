@@ -1,5 +1,7 @@
 package evensun.bench;
 
+import evensun.effectivemedium.kernel.Permittivity;
+import evensun.effectivemedium.kernel.PowerMeans;
 import evensun.effectivemedium.kernel.SetBruggeman;
 import evensun.material.Material;
 import evensun.material.MaterialLibrary;
@@ -8,7 +10,9 @@ import org.openjdk.jmh.annotations.Benchmark;
 import org.openjdk.jmh.annotations.BenchmarkMode;
 import org.openjdk.jmh.annotations.Mode;
 import org.openjdk.jmh.annotations.OutputTimeUnit;
+import org.openjdk.jmh.annotations.Param;
 import org.openjdk.jmh.annotations.Scope;
+import org.openjdk.jmh.annotations.Setup;
 import org.openjdk.jmh.annotations.State;
 
 /** What a search pays for moving the fractions of a mixture, at 181 wavelengths. */
@@ -17,27 +21,30 @@ import org.openjdk.jmh.annotations.State;
 @State(Scope.Thread)
 public class MixtureBenchmark {
 
-  private static final String[] PARTS = {"lead-halide-perovskite", "titanium-dioxide", "air"};
+  private static final int COUNT = 3;
 
-  private final SetBruggeman rule = new SetBruggeman();
-  private final double[][] partRe = new double[PARTS.length][ThinFilmBenchmark.WAVELENGTHS];
-  private final double[][] partIm = new double[PARTS.length][ThinFilmBenchmark.WAVELENGTHS];
-  private final double[] fraction = new double[PARTS.length];
+  /** What fills a scaffold of titanium dioxide with pores left: an absorber, or a metal. */
+  @Param({"lead-halide-perovskite", "silver"})
+  public String material = "lead-halide-perovskite";
+
+  private final double[] fraction = new double[COUNT];
   private final double[] re = new double[ThinFilmBenchmark.WAVELENGTHS];
   private final double[] im = new double[ThinFilmBenchmark.WAVELENGTHS];
+  private final double[][] n = new double[COUNT][re.length];
+  private final double[][] k = new double[COUNT][re.length];
+  private final double[][] partRe = new double[COUNT][re.length];
+  private final double[][] partIm = new double[COUNT][re.length];
+  private final SetBruggeman rule = new SetBruggeman(COUNT, re.length);
   private int turn;
 
-  /** A scaffold of titanium dioxide filled with perovskite, with pores left. */
-  public MixtureBenchmark() {
-    for (int p = 0; p < PARTS.length; p++) {
-      Material part = MaterialLibrary.builtIn().find(PARTS[p]).orElseThrow();
-      part.on(StartBenchmark.gridNm()).fill(1.62, partRe[p], partIm[p]);
-      for (int w = 0; w < re.length; w++) {
-        double n = partRe[p][w];
-        double k = partIm[p][w];
-        partRe[p][w] = n * n - k * k;
-        partIm[p][w] = 2 * n * k;
-      }
+  /** Reads the materials. */
+  @Setup
+  public void prepare() {
+    String[] parts = {material, "titanium-dioxide", "air"};
+    for (int p = 0; p < COUNT; p++) {
+      Material part = MaterialLibrary.builtIn().find(parts[p]).orElseThrow();
+      part.on(StartBenchmark.gridNm()).fill(1.62, n[p], k[p]);
+      Permittivity.ofIndex(n[p], k[p], partRe[p], partIm[p]);
     }
   }
 
@@ -48,6 +55,8 @@ public class MixtureBenchmark {
     fraction[0] = 0.3 + 0.3 * turn / 89;
     fraction[1] = 0.3;
     fraction[2] = 0.7 - fraction[0];
+    PowerMeans.mean(n, k, fraction, re, im);
+    Permittivity.ofIndex(re, im, re, im);
     rule.mix(partRe, partIm, fraction, 2, re, im);
     return im;
   }

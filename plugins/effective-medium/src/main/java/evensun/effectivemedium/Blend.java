@@ -33,7 +33,7 @@ final class Blend {
   private final double[] vacuumIm;
   private final double[] mixedRe;
   private final double[] mixedIm;
-  private final SetBruggeman set = new SetBruggeman();
+  private final SetBruggeman set;
 
   private final double[][] fraction;
   private final boolean[] stale;
@@ -73,6 +73,7 @@ final class Blend {
     vacuumRe = new double[wavelengths];
     vacuumIm = new double[wavelengths];
     Arrays.fill(vacuumRe, 1);
+    set = new SetBruggeman(components, wavelengths);
     mixedRe = new double[wavelengths];
     mixedIm = new double[wavelengths];
     fraction = new double[slots][components];
@@ -176,7 +177,7 @@ final class Blend {
       return false;
     }
     switch (rule) {
-      case BRUGGEMAN -> bruggeman(f);
+      case BRUGGEMAN -> bruggeman(slot, f);
       case MAXWELL_GARNETT ->
           HostedSpheres.mix(epsRe, epsIm, f, epsRe[host], epsIm[host], mixedRe, mixedIm);
       case LORENTZ_LORENZ ->
@@ -196,11 +197,13 @@ final class Blend {
     return true;
   }
 
-  private void bruggeman(double[] f) {
+  private void bruggeman(int slot, double[] f) {
     double d = (1 - depolarisationFactor) / depolarisationFactor;
     if (f.length == 2) {
       PairBruggeman.mix(rowN[0], rowK[0], rowN[1], rowK[1], f[1], d, mixedRe, mixedIm);
     } else {
+      PowerMeans.mean(rowN, rowK, f, n[slot], k[slot]);
+      Permittivity.ofIndex(n[slot], k[slot], mixedRe, mixedIm);
       set.mix(epsRe, epsIm, f, d, mixedRe, mixedIm);
     }
   }

@@ -36,6 +36,11 @@ record Eps(double re, double im) {
     return Math.hypot(re, im);
   }
 
+  /** From the positive real axis, in (-pi, pi]. */
+  double angle() {
+    return Math.atan2(im, re);
+  }
+
   /** Square root in the upper half plane. */
   Eps root() {
     double modulus = Math.sqrt(abs());

@@ -55,6 +55,14 @@ final class Mixing {
     };
   }
 
+  /** A dielectric or a metal that hardly absorbs, or not at all. */
+  static Eps almostReal(Random random) {
+    double size = Math.exp(random.nextGaussian());
+    double angle = random.nextBoolean() ? 0 : Math.pow(10, -1 - 7 * random.nextDouble());
+    double side = random.nextBoolean() ? 1 : -1;
+    return new Eps(side * size * Math.cos(angle), size * Math.sin(angle));
+  }
+
   /** The residual of Bruggeman's rule relative to the size of its terms. */
   static double bruggemanResidual(double p, double[] f, Eps[] components, Eps eps) {
     Eps sum = Eps.of(0);

@@ -196,6 +196,35 @@ class MixingRulesTest {
   }
 
   @ParameterizedTest
+  @ValueSource(ints = {3, 4, 5})
+  void bruggemanSettlesForMetalsAlmostWithoutLoss(int count) {
+    // Law: of the roots of the equation, evaluated apart from the kernel, one lies in the cone that
+    // the components span (Denjoy-Wolff), here almost a half-plane.
+    Random random = new Random(9);
+    for (int i = 0; i < 3000; i++) {
+      double p = 0.05 + 0.9 * random.nextDouble();
+      double[] f = Mixing.fractions(random, count);
+      Eps[] components = new Eps[count];
+      for (int c = 0; c < count; c++) {
+        components[c] = Mixing.almostReal(random);
+      }
+      Eps mixed = Mixing.mix(BRUGGEMAN, p, f, components);
+      assertThat(Mixing.bruggemanResidual(p, f, components, mixed)).isLessThan(1e-9);
+      double[] angles = Arrays.stream(components).mapToDouble(Eps::angle).sorted().toArray();
+      assertThat(mixed.angle()).isBetween(angles[0] - 1e-9, angles[count - 1] + 1e-9);
+    }
+  }
+
+  @Test
+  void spheresOfAMetalWithoutLossAbsorbWhereTheyResonate() {
+    // By hand: -5 and 2 in equal parts, 2 eps^2 + 1.5 eps + 10 = 0, eps = -0.375 + i
+    // sqrt(77.75)/4; of the two roots the one that absorbs, as with a little loss in the metal.
+    double[] f = {0.5, 0.25, 0.25};
+    Eps mixed = Mixing.mix(BRUGGEMAN, f, Eps.of(-5), Eps.of(2), Eps.of(2));
+    assertThat(mixed.distance(new Eps(-0.375, Math.sqrt(77.75) / 4))).isLessThan(1e-14);
+  }
+
+  @ParameterizedTest
   @ValueSource(ints = {2, 3, 4})
   void bruggemanTakesTheRootThatContinuityGives(int count) {
     // Independent calculation: the root followed from the pure first component, whatever it is.
@@ -211,8 +240,8 @@ class MixingRulesTest {
 
   @Test
   void rowsAreTheirWavelengthsOneByOne() {
-    // Independent calculation: every wavelength alone, without the root at the one before; the
-    // components swing between dielectric, absorber and metal, and jump once.
+    // Independent calculation: every wavelength alone; the components swing between dielectric,
+    // absorber and metal, and jump once.
     int wavelengths = 400;
     Blend rows = new Blend(BRUGGEMAN, -1, Mixture.SPHERE, 3, 1, wavelengths);
     double[][] n = new double[3][wavelengths];
