@@ -39,7 +39,10 @@ final class AssessCommand extends BaseCommand {
   @Option(
       names = "--set",
       paramLabel = "KEY=VALUE",
-      description = "Changes one value of the scenario, such as wafer.thicknessNm (repeatable).")
+      description = {
+        "Changes one value of the scenario, such as wafer.thicknessNm; front-contact.material=NAME",
+        "takes another material, spacer.present=false leaves a layer out (repeatable)."
+      })
   List<String> settings = new ArrayList<>();
 
   @Option(

@@ -42,7 +42,10 @@ final class DesignCommand extends BaseCommand {
   @Option(
       names = "--set",
       paramLabel = "KEY=VALUE",
-      description = "Changes one value of the scenario, such as search.seed (repeatable).")
+      description = {
+        "Changes one value of the scenario, such as search.seed; front-contact.material=NAME takes",
+        "another material as drawn, spacer.present=false leaves a layer out (repeatable)."
+      })
   List<String> settings = new ArrayList<>();
 
   @Mixin OutputOptions output = new OutputOptions();

@@ -90,12 +90,16 @@ public final class Bench implements AutoCloseable {
 
   private void write(Parameter parameter, double value) {
     switch (parameter.kind()) {
-      case THICKNESS -> setThickness(parameter.index(), value);
+      case THICKNESS -> setThickness(parameter.index(), isThere(parameter.index()) ? value : 0);
       case BANDGAP -> setBandgap(parameter.index(), value);
       case COMPOSITION ->
           setBandgap(parameter.index(), composition(parameter.index()).bandgapEv(value));
       case KNOB -> design.knob[parameter.index()] = value;
     }
+  }
+
+  private boolean isThere(int layer) {
+    return model.stack().layers().get(layer).spec().present();
   }
 
   /** The present value of a parameter, in its unit. */

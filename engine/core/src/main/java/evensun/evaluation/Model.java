@@ -185,7 +185,7 @@ public final class Model implements AutoCloseable {
     /** Writes the stack as drawn into a design. */
     Design drawn(Design design) {
       for (int l = 0; l < stack.layers().size(); l++) {
-        design.thicknessNm[l] = stack.layers().get(l).spec().thicknessNm();
+        design.thicknessNm[l] = stack.layers().get(l).spec().drawnNm();
         design.material[l] = stack.layers().get(l).slot();
       }
       for (ResolvedKnob knob : stack.knobs()) {

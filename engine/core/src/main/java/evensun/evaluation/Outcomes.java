@@ -182,6 +182,9 @@ public final class Outcomes {
     entries.add(entry(incident.name(), stack.incidentSlot(), "incident", null, false, -1));
     for (int l = 0; l < stack.layers().size(); l++) {
       ResolvedLayer layer = stack.layers().get(l);
+      if (!layer.spec().present()) {
+        continue;
+      }
       double nm = bench.design().thicknessNm[l];
       entries.add(entry(layer.name(), layer.slot(), "layer", nm, layer.coherent(), l));
     }

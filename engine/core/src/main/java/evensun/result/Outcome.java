@@ -21,6 +21,7 @@ import org.jspecify.annotations.Nullable;
  * @param spectral spectra on the grid
  * @param quantities further numbers the solver reports
  * @param electrical the electrical side, when it was asked for
+ * @param choices alternative of each choice of a search by its key; empty without choices
  */
 public record Outcome(
     @Nullable Double incidentMaPerCm2,
@@ -33,10 +34,43 @@ public record Outcome(
     List<StackEntry> stack,
     Spectral spectral,
     List<QuantityRecord> quantities,
-    @Nullable Electrical electrical) {
+    @Nullable Electrical electrical,
+    Map<String, String> choices) {
 
   /** Subcells whose currents differ by less than this are called balanced, in mA cm⁻². */
   public static final double BALANCED_MA_PER_CM2 = 0.05;
+
+  public Outcome {
+    choices = choices == null ? Map.of() : choices; // runs of earlier versions
+  }
+
+  /** An outcome without choices. */
+  public Outcome(
+      @Nullable Double incidentMaPerCm2,
+      List<SubcellOutcome> subcells,
+      @Nullable Double matchedCurrentMaPerCm2,
+      @Nullable Double mismatchMaPerCm2,
+      @Nullable String limitingSubcell,
+      @Nullable Losses losses,
+      Map<String, Double> design,
+      List<StackEntry> stack,
+      Spectral spectral,
+      List<QuantityRecord> quantities,
+      @Nullable Electrical electrical) {
+    this(
+        incidentMaPerCm2,
+        subcells,
+        matchedCurrentMaPerCm2,
+        mismatchMaPerCm2,
+        limitingSubcell,
+        losses,
+        design,
+        stack,
+        spectral,
+        quantities,
+        electrical,
+        Map.of());
+  }
 
   /**
    * Statistical error of the matched current, null where there is none: the largest of the subcells
@@ -72,7 +106,25 @@ public record Outcome(
         stack,
         spectral,
         quantities,
-        device);
+        device,
+        choices);
+  }
+
+  /** This outcome as that of a design for which a search chose these alternatives. */
+  public Outcome withChoices(Map<String, String> chosen) {
+    return new Outcome(
+        incidentMaPerCm2,
+        subcells,
+        matchedCurrentMaPerCm2,
+        mismatchMaPerCm2,
+        limitingSubcell,
+        losses,
+        design,
+        stack,
+        spectral,
+        quantities,
+        electrical,
+        chosen);
   }
 
   /**

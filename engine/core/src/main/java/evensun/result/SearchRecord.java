@@ -27,6 +27,7 @@ import org.jspecify.annotations.Nullable;
  * @param stepCost what standing on the tool's steps costs, in the unit of the aim: against the best
  *     design nearby that disregards them; null where nothing stands on steps or it is not known
  * @param wanted {@code largest} or {@code smallest}, what is wanted of the aim
+ * @param choices between which alternatives it chose
  */
 public record SearchRecord(
     String aim,
@@ -46,7 +47,54 @@ public record SearchRecord(
     List<String> notes,
     @Nullable Grid grid,
     @Nullable Double stepCost,
-    String wanted) {
+    String wanted,
+    List<ChoiceRecord> choices) {
+
+  public SearchRecord {
+    choices = choices == null ? List.of() : List.copyOf(choices); // runs of earlier versions
+  }
+
+  /** A search without choices. */
+  public SearchRecord(
+      String aim,
+      String aimUnit,
+      @Nullable Double aimAsDrawn,
+      double aimFound,
+      String stopped,
+      int generations,
+      int evaluations,
+      int failures,
+      @Nullable Double refinementGain,
+      List<Generation> history,
+      List<VariableRecord> variables,
+      List<Optimum> optima,
+      List<ConstraintRecord> constraints,
+      @Nullable Front front,
+      List<String> notes,
+      @Nullable Grid grid,
+      @Nullable Double stepCost,
+      String wanted) {
+    this(
+        aim,
+        aimUnit,
+        aimAsDrawn,
+        aimFound,
+        stopped,
+        generations,
+        evaluations,
+        failures,
+        refinementGain,
+        history,
+        variables,
+        optima,
+        constraints,
+        front,
+        notes,
+        grid,
+        stepCost,
+        wanted,
+        List.of());
+  }
 
   /**
    * One generation.
@@ -86,12 +134,51 @@ public record SearchRecord(
       @Nullable String bound) {}
 
   /**
+   * A choice between alternatives, such as the materials of a layer.
+   *
+   * @param key as in the scenario
+   * @param drawn alternative as drawn
+   * @param found alternative found
+   * @param alternatives all of them
+   */
+  public record ChoiceRecord(
+      String key, String drawn, String found, List<AlternativeRecord> alternatives) {
+
+    /** The alternative without a layer, of the choice whether it is there. */
+    public static final String ABSENT = "absent";
+
+    /** Whether it is about a layer being there, not about its material. */
+    public boolean isPresence() {
+      return key.endsWith(".present");
+    }
+  }
+
+  /**
+   * An alternative.
+   *
+   * @param name such as a material, or {@code present} and {@code absent}
+   * @param aim the best aim found with it, all else chosen anew; null where none was found
+   */
+  public record AlternativeRecord(String name, @Nullable Double aim) {}
+
+  /**
    * A distinct good design.
    *
    * @param aim its aim
-   * @param values value of each varied quantity by key
+   * @param values value of each quantity that varies in it by key
+   * @param choices alternative of each choice that matters in it by key
    */
-  public record Optimum(double aim, Map<String, Double> values) {}
+  public record Optimum(double aim, Map<String, Double> values, Map<String, String> choices) {
+
+    public Optimum {
+      choices = choices == null ? Map.of() : choices;
+    }
+
+    /** A design of a search without choices. */
+    public Optimum(double aim, Map<String, Double> values) {
+      this(aim, values, Map.of());
+    }
+  }
 
   /**
    * A limit.
@@ -126,9 +213,21 @@ public record SearchRecord(
    * A design on the front.
    *
    * @param aims value of each aim
-   * @param values value of each varied quantity by key
+   * @param values value of each quantity that varies in it by key
+   * @param choices alternative of each choice that matters in it by key
    */
-  public record FrontPoint(List<Double> aims, Map<String, Double> values) {}
+  public record FrontPoint(
+      List<Double> aims, Map<String, Double> values, Map<String, String> choices) {
+
+    public FrontPoint {
+      choices = choices == null ? Map.of() : choices;
+    }
+
+    /** A design of a search without choices. */
+    public FrontPoint(List<Double> aims, Map<String, Double> values) {
+      this(aims, values, Map.of());
+    }
+  }
 
   /**
    * Every point of a grid over the ranges, its best points refined.

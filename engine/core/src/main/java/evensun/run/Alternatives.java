@@ -9,7 +9,10 @@ import evensun.search.problem.Objective;
 import evensun.search.problem.Variable;
 import evensun.search.problem.Verdict;
 import java.util.ArrayList;
+import java.util.Arrays;
+import java.util.HashSet;
 import java.util.List;
+import java.util.Set;
 
 /**
  * A search with choices: one stack made ready for every combination of alternatives. The numbers
@@ -33,6 +36,11 @@ final class Alternatives implements Objective, AutoCloseable {
    * @param objective all this as the search sees it
    */
   record Option(Preparation preparation, Aims aims, Varied varied, StackObjective objective) {
+
+    boolean hasLayer(String name) {
+      return preparation.stack().layers().stream()
+          .anyMatch(layer -> layer.name().equals(name) && layer.spec().present());
+    }
 
     /** The values of this combination's own variables. */
     double[] own(List<Variable> numbers, List<Double> values) {
@@ -137,21 +145,20 @@ final class Alternatives implements Objective, AutoCloseable {
     return new Candidate(own, candidate.verdict());
   }
 
-  /** What was chosen, in words. */
-  List<String> words(Candidate candidate) {
-    List<String> names = names(combination(candidate.values()));
-    List<String> words = new ArrayList<>();
-    for (int i = 0; i < choices.size(); i++) {
-      ChoiceSpec choice = choices.get(i);
-      words.add(
-          "%s: %s chosen of %s; as drawn %s"
-              .formatted(
-                  choice.key(),
-                  names.get(i),
-                  String.join(", ", choice.names()),
-                  choice.names().get(choice.drawn())));
-    }
-    return words;
+  /** What the values of its candidates mean. */
+  Designs designs() {
+    return new Designs(variables(), this::present);
+  }
+
+  /** Keys of what varies in a design; the material of a layer left out does not matter. */
+  private Set<String> present(Candidate candidate) {
+    Option option = option(candidate);
+    Set<String> keys = new HashSet<>();
+    option.varied().variables().forEach(v -> keys.add(v.key()));
+    choices.stream()
+        .filter(c -> c.isPresence() || option.hasLayer(c.layer()))
+        .forEach(c -> keys.add(c.key()));
+    return keys;
   }
 
   @Override
@@ -215,7 +222,7 @@ final class Alternatives implements Objective, AutoCloseable {
         return false;
       }
       for (int part = 0; part < into.length; part++) {
-        java.util.Arrays.fill(gradient[part], 0);
+        Arrays.fill(gradient[part], 0);
         for (int i = 0; i < own.length; i++) {
           int column = index(numbers, option.varied().variables().get(i).key());
           gradient[part][column] = inner[part][i];
@@ -225,7 +232,7 @@ final class Alternatives implements Objective, AutoCloseable {
     }
 
     private static List<Double> boxed(double[] values) {
-      return java.util.Arrays.stream(values).boxed().toList();
+      return Arrays.stream(values).boxed().toList();
     }
 
     @Override

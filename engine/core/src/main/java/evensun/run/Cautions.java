@@ -27,7 +27,7 @@ final class Cautions {
     List<Caution> cautions = new ArrayList<>();
     cautions.add(LIMITS);
     Map<String, Caution> byMaterial = new LinkedHashMap<>();
-    for (MaterialSlot slot : stack.slots()) {
+    for (MaterialSlot slot : stack.usedSlots()) {
       byMaterial.computeIfAbsent(slot.name(), name -> caution(slot));
     }
     byMaterial.values().stream().filter(c -> !c.text().isEmpty()).forEach(cautions::add);

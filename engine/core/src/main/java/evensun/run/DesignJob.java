@@ -16,6 +16,7 @@ import evensun.search.StopReason;
 import evensun.search.problem.Candidate;
 import evensun.search.problem.KeptAims;
 import evensun.search.problem.Objective;
+import evensun.search.problem.Variable;
 import evensun.search.proof.Exhaustive;
 import evensun.search.proof.Freedom;
 import evensun.search.proof.Proof;
@@ -23,8 +24,11 @@ import evensun.spi.EvaluationFailed;
 import evensun.stack.ResolvedStack;
 import java.util.List;
 import java.util.OptionalInt;
+import java.util.Set;
 import java.util.concurrent.CancellationException;
 import java.util.function.BooleanSupplier;
+import java.util.function.UnaryOperator;
+import java.util.stream.Collectors;
 import org.jspecify.annotations.Nullable;
 
 /** The main job: search the best design of a scenario and record everything a review needs. */
@@ -124,7 +128,7 @@ public final class DesignJob {
       Candidate best = found.best();
       Look look = look(objective, found, settings.threads(), order, cancelled);
       return new DesignResult(preparation, aims, varied, settings)
-          .of(context(List.of()), found, best, look, provenance, repeatCommand);
+          .of(context(designs()), found, best, look, provenance, repeatCommand);
     }
     try (Alternatives all = Alternatives.of(preparation, spec.choices(), varied.variables())) {
       Found found = found(all, settings, listener, resumed, cancelled, order);
@@ -132,12 +136,17 @@ public final class DesignJob {
       Look look = look(all, found, settings.threads(), order, cancelled);
       Alternatives.Option option = all.option(best);
       return new DesignResult(option.preparation(), option.aims(), option.varied(), settings)
-          .of(context(all.words(best)), found, all.own(best), look, provenance, repeatCommand);
+          .of(context(all.designs()), found, all.own(best), look, provenance, repeatCommand);
     }
   }
 
-  private DesignResult.Context context(List<String> chosen) {
-    return new DesignResult.Context(preparation, aims, varied, chosen);
+  private DesignResult.Context context(Designs designs) {
+    return new DesignResult.Context(preparation, aims, varied, designs);
+  }
+
+  private Designs designs() {
+    Set<String> all = varied.variables().stream().map(Variable::key).collect(Collectors.toSet());
+    return new Designs(varied.variables(), candidate -> all);
   }
 
   private Found found(
@@ -219,14 +228,23 @@ public final class DesignJob {
    * @param shown index of the design on the front, or -1
    */
   record Found(
-      SearchOutcome outcome,
-      @Nullable Candidate best,
-      List<Candidate> front,
-      int knee,
-      int shown) {}
+      SearchOutcome outcome, @Nullable Candidate best, List<Candidate> front, int knee, int shown) {
 
-  /** What a look around the found design says. */
-  record Look(List<Freedom> freedoms, Checks checks) {}
+    /** Other good designs. */
+    List<Candidate> others() {
+      return front.isEmpty() ? outcome.optima() : front;
+    }
+  }
+
+  /**
+   * What a look around the found design says.
+   *
+   * @param freedoms how far each value can move; empty when nobody looked
+   * @param alternatives [variable][alternative] the best aim with each alternative of a choice, in
+   *     the sense of the search; NaN where none was found
+   * @param checks a grid, and the cost of steps
+   */
+  record Look(List<Freedom> freedoms, List<List<Double>> alternatives, Checks checks) {}
 
   /**
    * A look around, on a front with the other aims kept. Not for an interrupted search: whoever
@@ -236,18 +254,22 @@ public final class DesignJob {
       Objective wanted, Found found, int threads, Order order, BooleanSupplier cancelled) {
     Candidate best = found.best();
     if (found.outcome().stop() == StopReason.INTERRUPTED) {
-      return new Look(List.of(), Checks.NONE);
+      return new Look(List.of(), List.of(), Checks.NONE);
     }
     KeptAims kept = new KeptAims(wanted, best.verdict());
     Objective around = isFront() ? kept : wanted;
-    Candidate centre = isFront() ? new Candidate(best.values(), kept.kept(best.verdict())) : best;
+    UnaryOperator<Candidate> seen =
+        c -> isFront() ? new Candidate(c.values(), kept.kept(c.verdict())) : c;
+    Candidate centre = seen.apply(best);
     int evaluations = found.outcome().evaluations();
+    Proof proof = new Proof(around, threads, evaluations, cancelled);
     List<Freedom> freedoms =
+        best.isFeasible() ? proof.freedoms(centre, SearchRecords.EQUALLY_GOOD) : List.of();
+    List<List<Double>> alternatives =
         best.isFeasible()
-            ? new Proof(around, threads, evaluations, cancelled)
-                .freedoms(centre, SearchRecords.EQUALLY_GOOD)
+            ? proof.alternatives(centre, found.others().stream().map(seen).toList())
             : List.of();
-    return new Look(
-        freedoms, Checks.of(around, centre, order.exhaustive(), evaluations, threads, cancelled));
+    Checks checks = Checks.of(around, centre, order.exhaustive(), evaluations, threads, cancelled);
+    return new Look(freedoms, alternatives, checks);
   }
 }

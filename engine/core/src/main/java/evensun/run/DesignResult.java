@@ -50,9 +50,9 @@ final class DesignResult {
    * @param preparation the stack as drawn
    * @param aims its aims
    * @param varied all that varied beside the choices
-   * @param chosen what was chosen, in words
+   * @param designs what the values of candidates mean
    */
-  record Context(Preparation preparation, Aims aims, Varied varied, List<String> chosen) {}
+  record Context(Preparation preparation, Aims aims, Varied varied, Designs designs) {}
 
   DesignResult(Preparation preparation, Aims aims, Varied varied, SearchSettings settings) {
     this.preparation = preparation;
@@ -75,9 +75,11 @@ final class DesignResult {
       Drawn drawn = drawn(context);
       set(bench, best);
       Electrics.Powered powered = powered(bench, varied);
-      Outcome outcome = powered.outcome();
+      Designs designs = context.designs();
+      Outcome outcome =
+          powered.outcome().withChoices(designs.choices(Objects.requireNonNull(found.best())));
       SearchRecord record =
-          new SearchRecords(context.varied(), varied, aims, context.chosen())
+          new SearchRecords(context.designs(), aims)
               .record(
                   found,
                   Objects.requireNonNull(found.best()),
@@ -180,7 +182,8 @@ final class DesignResult {
   private Drawn drawn(Context context) {
     Aims own = context.aims();
     try (Bench bench = context.preparation().model().newBench(own.lightSums())) {
-      Outcome outcome = powered(bench, context.varied()).outcome();
+      Outcome outcome =
+          powered(bench, context.varied()).outcome().withChoices(context.designs().drawnChoices());
       Reading reading = new Reading(bench).take();
       return new Drawn(
           outcome, own.all().stream().map(aim -> aim.shown(aim.value(reading))).toList());

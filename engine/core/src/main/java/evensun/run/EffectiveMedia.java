@@ -29,7 +29,7 @@ final class EffectiveMedia {
     ResolvedStack stack = bench.model().stack();
     List<MaterialUse> uses = new ArrayList<>();
     for (int l = 0; l < stack.layers().size(); l++) {
-      if (stack.layers().get(l).isMixed()) {
+      if (stack.layers().get(l).isMixed() && stack.layers().get(l).spec().present()) {
         uses.add(use(stack, bench.design(), index, l));
       }
     }

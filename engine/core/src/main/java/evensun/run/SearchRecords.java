@@ -6,16 +6,13 @@ import evensun.run.DesignJob.Found;
 import evensun.run.DesignJob.Look;
 import evensun.search.SearchOutcome;
 import evensun.search.problem.Candidate;
+import evensun.search.problem.Optima;
 import evensun.search.problem.Variable;
 import evensun.search.proof.Freedom;
 import java.util.ArrayList;
-import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
-import java.util.Map;
 import java.util.Optional;
-import java.util.Set;
-import java.util.stream.Collectors;
 import java.util.stream.IntStream;
 import org.jspecify.annotations.Nullable;
 
@@ -28,23 +25,17 @@ final class SearchRecords {
   /** Loss up to which designs count as equally good, in the unit of the aim. */
   static final double EQUALLY_GOOD = 0.02;
 
-  private final Varied varied;
+  private final Designs designs;
   private final List<Aim> aims;
-  private final List<String> chosen;
-  private final Set<String> present;
   private final Aim aim;
 
   /**
    * Records of a search.
    *
-   * @param varied all that varied, in the order of a candidate's values
-   * @param found what varies in the found design: not the thickness of a layer left out
-   * @param chosen what was chosen, in words
+   * @param designs what the values of its candidates mean
    */
-  SearchRecords(Varied varied, Varied found, Aims aims, List<String> chosen) {
-    this.present = found.variables().stream().map(Variable::key).collect(Collectors.toSet());
-    this.chosen = List.copyOf(chosen);
-    this.varied = varied;
+  SearchRecords(Designs designs, Aims aims) {
+    this.designs = designs;
     this.aims = aims.all();
     this.aim = aims.first();
   }
@@ -76,13 +67,14 @@ final class SearchRecords {
         outcome.refinementGain(),
         history(outcome),
         variables(best, freedoms),
-        outcome.optima().stream().map(this::optimum).toList(),
+        optima(outcome.optima()),
         constraints,
         found.front().isEmpty() ? null : front(found, asDrawn),
         notes(outcome, freedoms),
         look.checks().grid(this),
         look.checks().stepCost(),
-        wanted(aim));
+        wanted(aim),
+        choices(best, look.alternatives()));
   }
 
   private static String wanted(Aim aim) {
@@ -115,14 +107,15 @@ final class SearchRecords {
     List<Double> values = candidate.verdict().aims();
     return new SearchRecord.FrontPoint(
         IntStream.range(0, aims.size()).mapToObj(i -> aims.get(i).shown(values.get(i))).toList(),
-        values(candidate));
+        designs.values(candidate),
+        designs.choices(candidate));
   }
 
   private List<SearchRecord.VariableRecord> variables(Candidate best, List<Freedom> freedoms) {
     List<SearchRecord.VariableRecord> records = new ArrayList<>();
-    for (int v = 0; v < varied.variables().size(); v++) {
-      Variable variable = varied.variables().get(v);
-      if (!present.contains(variable.key())) {
+    for (int v = 0; v < designs.variables().size(); v++) {
+      Variable variable = designs.variables().get(v);
+      if (variable.isChoice() || !designs.has(best, v)) {
         continue;
       }
       double found = best.values().get(v);
@@ -143,6 +136,35 @@ final class SearchRecords {
     return records;
   }
 
+  private List<SearchRecord.ChoiceRecord> choices(Candidate best, List<List<Double>> alternatives) {
+    List<SearchRecord.ChoiceRecord> records = new ArrayList<>();
+    for (int v = 0; v < designs.variables().size(); v++) {
+      Variable variable = designs.variables().get(v);
+      if (variable.isChoice() && designs.has(best, v)) {
+        List<Double> reached = alternatives.isEmpty() ? List.of() : alternatives.get(v);
+        records.add(
+            new SearchRecord.ChoiceRecord(
+                variable.key(),
+                Designs.name(variable, variable.drawn()),
+                Designs.name(variable, best.values().get(v)),
+                alternatives(variable.choices(), reached)));
+      }
+    }
+    return records;
+  }
+
+  private List<SearchRecord.AlternativeRecord> alternatives(
+      List<String> names, List<Double> reached) {
+    List<SearchRecord.AlternativeRecord> records = new ArrayList<>();
+    for (int i = 0; i < names.size(); i++) {
+      boolean known = i < reached.size() && Double.isFinite(reached.get(i));
+      records.add(
+          new SearchRecord.AlternativeRecord(
+              names.get(i), known ? aim.shown(reached.get(i)) : null));
+    }
+    return records;
+  }
+
   /** Whether not even the smallest move could be tried out within the evaluations allowed. */
   private static boolean isOpen(Variable variable, Freedom freedom) {
     return !variable.isChoice()
@@ -154,7 +176,7 @@ final class SearchRecords {
   private Optional<String> open(List<Freedom> freedoms) {
     List<String> keys = new ArrayList<>();
     for (int v = 0; v < freedoms.size(); v++) {
-      if (isOpen(varied.variables().get(v), freedoms.get(v))) {
+      if (isOpen(designs.variables().get(v), freedoms.get(v))) {
         keys.add(freedoms.get(v).key());
       }
     }
@@ -166,7 +188,7 @@ final class SearchRecords {
   }
 
   private List<String> notes(SearchOutcome outcome, List<Freedom> freedoms) {
-    List<String> notes = new ArrayList<>(chosen);
+    List<String> notes = new ArrayList<>();
     outcome
         .failures()
         .forEach(f -> notes.add(f.count() + " designs: " + f.first().verdict().failure()));
@@ -190,7 +212,7 @@ final class SearchRecords {
 
   private String atBound(Freedom freedom) {
     Variable variable =
-        varied.variables().stream().filter(v -> v.key().equals(freedom.key())).findAny().get();
+        designs.variables().stream().filter(v -> v.key().equals(freedom.key())).findAny().get();
     double width = (variable.high() - variable.low()) / 10;
     return String.format(
         Locale.ROOT,
@@ -229,14 +251,29 @@ final class SearchRecords {
   }
 
   SearchRecord.Optimum optimum(Candidate candidate) {
-    return new SearchRecord.Optimum(aim.shown(candidate.aim()), values(candidate));
+    return new SearchRecord.Optimum(
+        aim.shown(candidate.aim()), designs.values(candidate), designs.choices(candidate));
   }
 
-  private Map<String, Double> values(Candidate candidate) {
-    Map<String, Double> values = new LinkedHashMap<>();
-    for (int v = 0; v < varied.variables().size(); v++) {
-      values.put(varied.variables().get(v).key(), candidate.values().get(v));
+  /** Designs that differ only in what they do not have are one. */
+  private List<SearchRecord.Optimum> optima(List<Candidate> candidates) {
+    List<SearchRecord.Optimum> optima = new ArrayList<>();
+    for (Candidate candidate : candidates) {
+      SearchRecord.Optimum optimum = optimum(candidate);
+      if (optima.stream().noneMatch(other -> isSame(optimum, other))) {
+        optima.add(optimum);
+      }
     }
-    return values;
+    return optima;
+  }
+
+  private boolean isSame(SearchRecord.Optimum a, SearchRecord.Optimum b) {
+    return a.choices().equals(b.choices())
+        && designs.variables().stream()
+            .filter(v -> a.values().containsKey(v.key()))
+            .allMatch(
+                v ->
+                    Math.abs(a.values().get(v.key()) - b.values().get(v.key()))
+                        <= Optima.SAME * (v.high() - v.low()));
   }
 }

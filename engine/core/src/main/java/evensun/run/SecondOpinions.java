@@ -63,7 +63,7 @@ final class SecondOpinions {
     }
     otherSolvers(scenario, opinions);
     Set<String> names = new LinkedHashSet<>();
-    preparation.stack().slots().stream().map(MaterialSlot::name).forEach(names::add);
+    preparation.stack().usedSlots().stream().map(MaterialSlot::name).forEach(names::add);
     for (String name : names) {
       if (!scenario.materials().containsKey(name)) {
         otherTables(name, scenario, opinions);

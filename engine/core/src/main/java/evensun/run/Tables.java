@@ -30,6 +30,7 @@ public final class Tables {
     tables.put("tables/optical-constants.csv", constants(result));
     if (result.search() != null) {
       tables.put("tables/search-history.csv", history(result.search()));
+      tables.put("tables/designs.csv", DesignTable.of(result.search()));
     }
     if (result.depth() != null) {
       tables.put("tables/generation.csv", generation(result.depth()));
@@ -108,10 +109,10 @@ public final class Tables {
     return csv(rows);
   }
 
-  private static String csv(List<List<Object>> rows) {
+  static String csv(List<? extends List<?>> rows) {
     StringBuilder text = new StringBuilder();
     try (CSVPrinter printer = new CSVPrinter(text, CSVFormat.RFC4180)) {
-      for (List<Object> row : rows) {
+      for (List<?> row : rows) {
         printer.printRecord(row);
       }
     } catch (IOException e) {

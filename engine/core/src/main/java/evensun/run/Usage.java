@@ -21,19 +21,23 @@ final class Usage {
     ResolvedStack stack = bench.model().stack();
     List<MaterialUse> uses = new ArrayList<>();
     for (int s = 0; s < stack.slots().size(); s++) {
-      uses.add(use(bench, s, stack.slots().get(s)));
+      MaterialSlot slot = stack.slots().get(s);
+      List<String> layers = slot.layers().stream().filter(stack.scenario()::isThere).toList();
+      if (!layers.isEmpty()) {
+        uses.add(use(bench, s, slot, layers));
+      }
     }
     uses.addAll(EffectiveMedia.of(bench));
     return uses;
   }
 
-  private static MaterialUse use(Bench bench, int s, MaterialSlot slot) {
+  private static MaterialUse use(Bench bench, int s, MaterialSlot slot, List<String> layers) {
     MaterialRecord record = slot.material().record();
     double gap = bench.bandgapEv(s);
     return new MaterialUse(
         slot.name(),
         record.title(),
-        slot.layers(),
+        layers,
         record.source(),
         record.form(),
         record.fromNm(),

@@ -1,5 +1,6 @@
 package evensun.scenario;
 
+import evensun.scenario.FaceSpec.RoughnessSpec;
 import evensun.scenario.FeatureSpec.ComponentSpec;
 import java.util.List;
 
@@ -9,7 +10,8 @@ import java.util.List;
  * @param name unique name
  * @param material material name; empty where the features name the materials instead
  * @param gap how the bandgap of a tunable material is chosen
- * @param thicknessNm thickness in nm, at least 0
+ * @param thicknessNm thickness in nm, at least 0; of a layer left out the one it would have
+ * @param present whether it is there; a layer left out keeps its name and its place
  * @param coherence what the scenario says about interference inside
  * @param features what is not flat, uniform and pure about it
  * @param place where it stands
@@ -19,6 +21,7 @@ public record LayerSpec(
     String material,
     GapChoice gap,
     double thicknessNm,
+    boolean present,
     Coherence coherence,
     List<FeatureSpec> features,
     Place place) {
@@ -35,7 +38,7 @@ public record LayerSpec(
       double thicknessNm,
       Coherence coherence,
       Place place) {
-    this(name, material, gap, thicknessNm, coherence, List.of(), place);
+    this(name, material, gap, thicknessNm, true, coherence, List.of(), place);
   }
 
   /** This layer with one material replaced by another. */
@@ -45,14 +48,30 @@ public record LayerSpec(
         material.equals(old) ? other : material,
         gap,
         thicknessNm,
+        present,
         coherence,
         features.stream().map(feature -> feature.withMaterial(old, other)).toList(),
         place);
   }
 
-  /** This layer left out: of no thickness. */
-  public LayerSpec absent() {
-    return new LayerSpec(name, material, gap, 0, coherence, features, place);
+  /** This layer there, or left out. */
+  public LayerSpec withPresent(boolean there) {
+    return new LayerSpec(name, material, gap, thicknessNm, there, coherence, features, place);
+  }
+
+  /** Thickness in the stack as drawn in nm, 0 where the layer is left out. */
+  public double drawnNm() {
+    return present ? thicknessNm : 0;
+  }
+
+  /**
+   * The features that the stack has: of a layer left out all but the roughness of its own face,
+   * since the shape of a boundary belongs to all its films.
+   */
+  public List<FeatureSpec> drawnFeatures() {
+    return present
+        ? features
+        : features.stream().filter(feature -> !(feature instanceof RoughnessSpec)).toList();
   }
 
   /** What is mixed in this layer, in the order of the file; empty when it is of one material. */

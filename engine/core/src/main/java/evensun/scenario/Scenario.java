@@ -64,14 +64,25 @@ public record Scenario(
           layer -> layer.name().equals(choice.layer()) ? made(layer, choice, name) : layer);
     }
     return copy(
-        grid, incidentMedium, layers, exit, solver, search.map(spec -> spec.settled(chosen)));
+        grid, incidentMedium, layers, exit, solver, search.map(spec -> spec.settled(layers)));
   }
 
   private static LayerSpec made(LayerSpec layer, ChoiceSpec choice, String name) {
     if (choice.isPresence()) {
-      return name.equals(ChoiceSpec.ABSENT) ? layer.absent() : layer;
+      return layer.withPresent(!name.equals(ChoiceSpec.ABSENT));
     }
     return layer.withMaterial(layer.material(), name);
+  }
+
+  /**
+   * Whether what a name stands for is there: a medium, or a layer that is not left out.
+   *
+   * @param name a layer, {@code layer/component} or a medium
+   */
+  public boolean isThere(String name) {
+    int slash = name.indexOf('/');
+    String layer = slash < 0 ? name : name.substring(0, slash);
+    return stack.stream().noneMatch(each -> each.name().equals(layer) && !each.present());
   }
 
   /** This scenario on another grid. */

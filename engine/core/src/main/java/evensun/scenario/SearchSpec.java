@@ -1,10 +1,10 @@
 package evensun.scenario;
 
-import java.util.HashSet;
 import java.util.List;
 import java.util.OptionalDouble;
 import java.util.OptionalInt;
 import java.util.Set;
+import java.util.stream.Collectors;
 
 /**
  * What to search.
@@ -41,32 +41,51 @@ public record SearchSpec(
   }
 
   /**
-   * This search with every choice made: none is left, and the thickness of an absent layer does not
-   * vary, nor what follows it.
+   * This search with every choice made: none is left.
    *
-   * @param chosen the alternative of each choice
+   * @param layers the stack with its choices made
    */
-  SearchSpec settled(List<String> chosen) {
-    Set<String> gone = new HashSet<>();
-    for (int i = 0; i < choices.size(); i++) {
-      if (choices.get(i).isPresence() && chosen.get(i).equals(ChoiceSpec.ABSENT)) {
-        gone.add(choices.get(i).layer() + ".thicknessNm");
-      }
-    }
+  SearchSpec settled(List<LayerSpec> layers) {
+    return with(vary, List.of()).on(layers);
+  }
+
+  /**
+   * This search on a stack: the thickness of a layer that is left out, and may not come back, does
+   * not vary, nor what follows it.
+   */
+  public SearchSpec on(List<LayerSpec> layers) {
+    Set<String> gone =
+        layers.stream()
+            .filter(layer -> !layer.present() && !mayBePresent(layer))
+            .map(layer -> layer.name() + ".thicknessNm")
+            .collect(Collectors.toSet());
     List<VarySpec> left =
         vary.stream().filter(v -> !gone.contains(v.key()) && !gone.contains(v.sameAs())).toList();
-    return new SearchSpec(left, List.of(), limits, aims, seed, evaluations, timeSeconds, place);
+    return with(left, choices);
+  }
+
+  private boolean mayBePresent(LayerSpec layer) {
+    return choices.stream()
+        .anyMatch(choice -> choice.isPresence() && choice.layer().equals(layer.name()));
+  }
+
+  private SearchSpec with(List<VarySpec> otherVary, List<ChoiceSpec> otherChoices) {
+    return new SearchSpec(
+        otherVary, otherChoices, limits, aims, seed, evaluations, timeSeconds, place);
   }
 
   /**
    * A choice between alternatives that have no order.
    *
    * @param key such as {@code front-contact.material} or {@code spacer.present}
-   * @param names materials, or {@code present} and {@code absent}
+   * @param names materials, or {@code present} and {@code absent}; one alone is settled
    * @param drawn which of them is drawn
    * @param place where it stands
    */
   public record ChoiceSpec(String key, List<String> names, int drawn, Place place) {
+
+    /** The alternative with the layer. */
+    public static final String PRESENT = "present";
 
     /** The alternative without the layer. */
     public static final String ABSENT = "absent";

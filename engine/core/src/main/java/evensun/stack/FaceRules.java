@@ -168,7 +168,7 @@ final class FaceRules {
 
   private Reach thickness(int l) {
     LayerSpec layer = layers.get(l).spec();
-    return Reach.of(scenario, layer.name() + ".thicknessNm", layer.thicknessNm());
+    return Reach.of(scenario, layer.name() + ".thicknessNm", layer.drawnNm());
   }
 
   private static Reach angle(Texture texture) {

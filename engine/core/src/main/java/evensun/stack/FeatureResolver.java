@@ -63,7 +63,7 @@ final class FeatureResolver {
             ? slots.slot(spec.name(), spec.material(), spec.gap(), spec.place())
             : components.get(0).slot();
     List<Feature> features = new ArrayList<>();
-    for (FeatureSpec feature : spec.features()) {
+    for (FeatureSpec feature : spec.drawnFeatures()) {
       features.add(feature(spec, feature, components));
     }
     return new ResolvedLayer(spec, slot, coherent, features, components);

@@ -46,6 +46,15 @@ public record ResolvedStack(
     return grid.size() == 1;
   }
 
+  /** The rows of optical constants that a layer or a medium which is there uses. */
+  public List<MaterialSlot> usedSlots() {
+    return slots.stream().filter(slot -> isUsed(slot, scenario)).toList();
+  }
+
+  static boolean isUsed(MaterialSlot slot, Scenario scenario) {
+    return slot.layers().stream().anyMatch(scenario::isThere);
+  }
+
   /** Index that stands for the exit medium where layers are counted. */
   public int exitLayer() {
     return layers.size();

@@ -137,7 +137,9 @@ public final class StackResolver {
       try {
         var filler = all.get(s).material().on(wavelengthNm);
         filler.fill(all.get(s).fillValue(), n, k);
-        findings.addAll(filler.findings());
+        if (ResolvedStack.isUsed(all.get(s), scenario)) {
+          findings.addAll(filler.findings());
+        }
       } catch (MaterialRangeException e) {
         faults.add(new Fault(placeOf(all.get(s)), range(e, spectrum)));
         continue;
@@ -163,7 +165,7 @@ public final class StackResolver {
   }
 
   private double thickestNm(LayerSpec layer) {
-    return Reach.of(scenario, layer.name() + ".thicknessNm", layer.thicknessNm()).high();
+    return Reach.of(scenario, layer.name() + ".thicknessNm", layer.drawnNm()).high();
   }
 
   private void checkIncident(double[] k) {

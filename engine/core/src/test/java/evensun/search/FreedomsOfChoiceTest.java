@@ -8,6 +8,7 @@ import evensun.search.problem.Candidate;
 import evensun.search.problem.Objective;
 import evensun.search.problem.Variable;
 import evensun.search.problem.Verdict;
+import evensun.search.proof.Proof;
 import evensun.search.proof.StepCost;
 import java.util.List;
 import org.junit.jupiter.api.Test;
@@ -81,6 +82,30 @@ class FreedomsOfChoiceTest {
       assertThat(outcome.best().values().get(1)).isCloseTo(70, within(0.01));
       assertThat(outcome.optima()).extracting(c -> c.values().get(0)).contains(0.0, 2.0);
     }
+  }
+
+  /**
+   * Closed form: the alternatives reach 1, 3 and 2, each at its own place; a design known to be on
+   * another hill counts where it is better than what a climb from the best one reaches.
+   */
+  @Test
+  void everyAlternativeIsTriedWithAllElseChosenAnew() {
+    double[] height = {1, 3, 2};
+    double[] place = {35, 70, 50};
+    Problem choice =
+        Problem.of(
+            x -> height[(int) x[0]] - Math.pow((x[1] - place[(int) x[0]]) / 100, 2),
+            Variable.choice("layer.material", List.of("one", "two", "three"), 0),
+            variable("layer.thicknessNm", 0, 100));
+    Candidate best = Candidate.of(new double[] {1, 70}, Verdict.of(3, 0));
+    Candidate other = Candidate.of(new double[] {2, 40}, Verdict.of(7, 0));
+    Proof proof = new Proof(choice, 2, 3000, () -> false);
+    List<List<Double>> none = proof.alternatives(best, List.of());
+    assertThat(none.get(0).get(0)).isCloseTo(1, within(1e-6));
+    assertThat(none.get(0).get(1)).isEqualTo(3);
+    assertThat(none.get(0).get(2)).isCloseTo(2, within(1e-6));
+    assertThat(none.get(1)).isEmpty();
+    assertThat(proof.alternatives(best, List.of(other)).get(0).get(2)).isEqualTo(7);
   }
 
   /** Closed form: the hill of −(x−3)² − (y−3)² under x + y ≤ 4 is at (2, 2). */

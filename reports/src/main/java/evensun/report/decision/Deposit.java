@@ -3,6 +3,7 @@ package evensun.report.decision;
 import evensun.report.text.Clip;
 import evensun.report.text.Keys;
 import evensun.report.text.Numbers;
+import evensun.result.SearchRecord.ChoiceRecord;
 import evensun.result.SearchRecord.VariableRecord;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
@@ -19,15 +20,17 @@ final class Deposit {
   private Deposit() {}
 
   /**
-   * Such as {@code 92 nm antireflection, 431.2 nm perovskite of 1.680 eV}; layers for which another
-   * material was chosen come first.
+   * Such as {@code 92 nm antireflection, 431.2 nm perovskite of 1.680 eV}; layers about which
+   * something was chosen come first.
    */
-  static String phrase(List<VariableRecord> variables, List<Swap> swaps) {
+  static String phrase(List<VariableRecord> variables, List<ChoiceRecord> choices) {
     Map<String, List<VariableRecord>> byLayer = new LinkedHashMap<>();
     Map<String, String> chosen = new LinkedHashMap<>();
-    for (Swap swap : swaps) { // first, since a long list is cut short
-      byLayer.put(swap.layer(), new ArrayList<>());
-      chosen.put(swap.layer(), swap.found());
+    for (ChoiceRecord choice : choices) { // first, since a long list is cut short
+      if (isNews(choice)) {
+        byLayer.put(Keys.layer(choice.key()), new ArrayList<>());
+        chosen.merge(Keys.layer(choice.key()), material(choice), (a, b) -> a.isEmpty() ? b : a);
+      }
     }
     for (VariableRecord variable : variables) {
       byLayer.computeIfAbsent(Keys.layer(variable.key()), k -> new ArrayList<>()).add(variable);
@@ -44,13 +47,23 @@ final class Deposit {
     return joined(phrases);
   }
 
+  /** A layer that stays as it is goes without saying; its material, once chosen, does not. */
+  private static boolean isNews(ChoiceRecord choice) {
+    return !choice.isPresence() || !choice.found().equals(choice.drawn());
+  }
+
+  private static String material(ChoiceRecord choice) {
+    boolean there = choice.isPresence() && !choice.found().equals(ChoiceRecord.ABSENT);
+    return there ? "" : choice.found();
+  }
+
   private static String layer(
       String layer, List<VariableRecord> values, @Nullable String material) {
-    if (material != null && material.isEmpty()) {
+    if (ChoiceRecord.ABSENT.equals(material)) {
       return "no " + Clip.to(layer, MOST_LETTERS);
     }
     StringBuilder text = new StringBuilder(Clip.to(layer, MOST_LETTERS));
-    if (material != null) {
+    if (material != null && !material.isEmpty()) {
       text.append(" of ").append(Clip.to(material, MOST_LETTERS));
     }
     for (VariableRecord value : values) {

@@ -30,11 +30,8 @@ public final class Sentence {
           + Numbers.count(search.evaluations(), "design")
           + " tried, all failed.";
     }
-    List<Swap> swaps = Swap.between(result.asDrawn(), result.found());
-    String deposit =
-        search.variables().isEmpty() && swaps.isEmpty()
-            ? "Deposit the stack as listed"
-            : "Deposit " + Deposit.phrase(search.variables(), swaps);
+    String what = Deposit.phrase(search.variables(), search.choices());
+    String deposit = what.isEmpty() ? "Deposit the stack as listed" : "Deposit " + what;
     return deposit + ": " + gives(result, search) + GridWords.headline(search) + ".";
   }
 

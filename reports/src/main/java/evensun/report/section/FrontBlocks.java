@@ -12,7 +12,6 @@ import evensun.report.text.Numbers;
 import evensun.result.SearchRecord;
 import evensun.result.SearchRecord.Front;
 import evensun.result.SearchRecord.FrontPoint;
-import evensun.result.SearchRecord.VariableRecord;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.function.IntPredicate;
@@ -102,21 +101,24 @@ final class FrontBlocks {
     for (int aim = 0; aim < front.aims().size(); aim++) {
       table.numbers(name(aim), front.units().get(aim));
     }
-    search.variables().forEach(v -> table.numbers(Keys.words(v.key()), v.unit()));
-    for (int i = 0; i < front.points().size(); i++) {
-      table.row(row(i, front.points().get(i)));
+    List<FrontPoint> points = front.points();
+    DesignColumns columns =
+        new DesignColumns(
+            search,
+            points.stream().map(FrontPoint::values).toList(),
+            points.stream().map(FrontPoint::choices).toList());
+    columns.addTo(table);
+    for (int i = 0; i < points.size(); i++) {
+      table.row(row(i, points.get(i), columns));
     }
     return table.build();
   }
 
-  private List<String> row(int number, FrontPoint point) {
+  private List<String> row(int number, FrontPoint point, DesignColumns columns) {
     List<String> cells = new ArrayList<>();
     cells.add(FrontWords.name(front, number));
     point.aims().forEach(aim -> cells.add(Numbers.significant(aim, 5)));
-    for (VariableRecord v : search.variables()) {
-      Double value = point.values().get(v.key());
-      cells.add(value == null ? "" : Numbers.bare(value, v.unit()));
-    }
+    cells.addAll(columns.cells(point.values(), point.choices()));
     return cells;
   }
 }

@@ -16,7 +16,6 @@ import evensun.result.SearchRecord.ConstraintRecord;
 import evensun.result.SearchRecord.Front;
 import evensun.result.SearchRecord.Generation;
 import evensun.result.SearchRecord.Optimum;
-import evensun.result.SearchRecord.VariableRecord;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -136,18 +135,18 @@ public final class SearchSection {
         new Table.Builder("table-optima", "Distinct designs found, best first")
             .words("design")
             .numbers(Keys.aim(search.aim()), search.aimUnit());
-    for (VariableRecord v : search.variables()) {
-      table.numbers(Keys.words(v.key()), v.unit());
-    }
+    DesignColumns columns =
+        new DesignColumns(
+            search,
+            search.optima().stream().map(Optimum::values).toList(),
+            search.optima().stream().map(Optimum::choices).toList());
+    columns.addTo(table);
     for (int i = 0; i < search.optima().size(); i++) {
       Optimum optimum = search.optima().get(i);
       List<String> cells = new ArrayList<>();
       cells.add(i == 0 ? "found" : Integer.toString(i + 1));
       cells.add(Numbers.fixed(optimum.aim(), 3));
-      for (VariableRecord v : search.variables()) {
-        Double value = optimum.values().get(v.key());
-        cells.add(value == null ? "" : Numbers.bare(value, v.unit()));
-      }
+      cells.addAll(columns.cells(optimum.values(), optimum.choices()));
       table.row(cells);
     }
     return table.build();

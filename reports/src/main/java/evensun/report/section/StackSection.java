@@ -1,5 +1,6 @@
 package evensun.report.section;
 
+import evensun.report.decision.ChoiceWords;
 import evensun.report.decision.Sentence;
 import evensun.report.figure.Figure;
 import evensun.report.figure.Share;
@@ -17,6 +18,8 @@ import evensun.result.Outcome.StackEntry;
 import evensun.result.Outcome.SubcellOutcome;
 import evensun.result.RunResult;
 import evensun.result.SearchRecord;
+import evensun.result.SearchRecord.AlternativeRecord;
+import evensun.result.SearchRecord.ChoiceRecord;
 import evensun.result.SearchRecord.VariableRecord;
 import java.util.ArrayList;
 import java.util.List;
@@ -36,6 +39,9 @@ public final class StackSection {
     List<Block> blocks = new ArrayList<>();
     blocks.add(picture(result));
     SearchRecord search = result.search();
+    if (search != null && !search.choices().isEmpty() && !Sentence.failed(search)) {
+      blocks.add(new Block.Grid(choices(search), false));
+    }
     if (search != null && !search.variables().isEmpty()) {
       blocks.add(new Block.Grid(variables(search, Sentence.failed(search)), false));
     }
@@ -127,6 +133,33 @@ public final class StackSection {
     double high = v.equallyGoodHigh() == null ? v.found() : v.equallyGoodHigh();
     String bound = v.bound() == null ? "" : v.bound().equals("low") ? "lower" : "upper";
     return new Window(low, high, bound);
+  }
+
+  private static Table choices(SearchRecord search) {
+    Table.Builder table =
+        new Table.Builder("table-choices", "Choices, and the best found with each alternative")
+            .words("choice")
+            .words("alternative")
+            .words("state")
+            .numbers(Keys.aim(search.aim()), search.aimUnit())
+            .words("against the design found");
+    for (ChoiceRecord choice : search.choices()) {
+      for (AlternativeRecord alternative : choice.alternatives()) {
+        table.row(
+            Keys.words(choice.key()),
+            alternative.name(),
+            state(choice, alternative.name()),
+            alternative.aim() == null ? "" : Numbers.fixed(alternative.aim(), 2),
+            alternative.name().equals(choice.found()) ? "" : ChoiceWords.cost(search, alternative));
+      }
+    }
+    return table.build();
+  }
+
+  private static String state(ChoiceRecord choice, String name) {
+    String drawn = name.equals(choice.drawn()) ? "as drawn" : "";
+    String found = name.equals(choice.found()) ? "found" : "";
+    return drawn + (drawn.isEmpty() || found.isEmpty() ? "" : ", ") + found;
   }
 
   private static Table variables(SearchRecord search, boolean failed) {

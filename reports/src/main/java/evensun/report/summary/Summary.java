@@ -1,9 +1,9 @@
 package evensun.report.summary;
 
+import evensun.report.decision.ChoiceWords;
 import evensun.report.decision.FrontWords;
 import evensun.report.decision.GridWords;
 import evensun.report.decision.Sentence;
-import evensun.report.decision.Swap;
 import evensun.report.decision.VerdictRules;
 import evensun.report.figure.Budget;
 import evensun.report.figure.Share;
@@ -17,6 +17,7 @@ import evensun.result.Outcome;
 import evensun.result.Outcome.SubcellOutcome;
 import evensun.result.RunResult;
 import evensun.result.SearchRecord;
+import evensun.result.SearchRecord.ChoiceRecord;
 import evensun.result.SearchRecord.VariableRecord;
 import java.util.ArrayList;
 import java.util.List;
@@ -52,9 +53,8 @@ public record Summary(
     tables.add(currents(result));
     SearchRecord search = result.search();
     if (search != null) {
-      List<Swap> swaps = Swap.between(result.asDrawn(), result.found());
-      if (!search.variables().isEmpty() || !swaps.isEmpty()) {
-        tables.add(varied(search, swaps));
+      if (!search.variables().isEmpty() || !search.choices().isEmpty()) {
+        tables.add(varied(search));
       }
     }
     Budget.of(result.found()).ifPresent(found -> tables.add(ledger(result, found)));
@@ -110,16 +110,16 @@ public record Summary(
             .orElse(null);
   }
 
-  private static Listing varied(SearchRecord search, List<Swap> swaps) {
+  private static Listing varied(SearchRecord search) {
     List<List<String>> rows = new ArrayList<>();
-    for (Swap swap : swaps) {
+    for (ChoiceRecord choice : search.choices()) {
       rows.add(
           List.of(
-              Clip.to(swap.layer(), 40) + " material",
-              swap.drawn().isEmpty() ? "absent" : Clip.to(swap.drawn(), 48),
+              Clip.to(Keys.words(choice.key()), 48),
+              Clip.to(choice.drawn(), 48),
               "→",
-              swap.found().isEmpty() ? "absent" : Clip.to(swap.found(), 48),
-              ""));
+              Clip.to(choice.found(), 48),
+              ChoiceWords.runnerUp(search, choice)));
     }
     for (VariableRecord v : search.variables()) {
       rows.add(

@@ -17,7 +17,7 @@ public final class Keys {
   public static String property(String key) {
     String name = key.substring(key.lastIndexOf('.') + 1);
     String bare = name.replaceFirst("(Nm|Ev|Deg|K|Percent|MaPerCm2)$", "");
-    return spaced(bare.isEmpty() ? name : bare);
+    return bare.equals("present") ? "presence" : spaced(bare.isEmpty() ? name : bare);
   }
 
   /** Layer and property: {@code perovskite thickness}. */

@@ -12,6 +12,7 @@ import evensun.scenario.tree.Values;
 import java.util.ArrayList;
 import java.util.HashSet;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 
 /** Binds choices under {@code search.vary}: the material of a layer, and whether it is there. */
@@ -19,6 +20,9 @@ final class ChoiceBinder {
 
   private static final String MATERIAL = ".material";
   private static final String PRESENT = ".present";
+
+  private static final Map<String, String> PRESENCE =
+      Map.of("true", ChoiceSpec.PRESENT, "false", ChoiceSpec.ABSENT);
 
   private final Fields fields;
   private final StackBinder.Stack stack;
@@ -51,7 +55,7 @@ final class ChoiceBinder {
       return;
     }
     List<String> alternatives = alternatives(entry);
-    if (alternatives.size() < 2) {
+    if (alternatives.isEmpty()) {
       return;
     }
     if (key.endsWith(PRESENT)) {
@@ -68,9 +72,8 @@ final class ChoiceBinder {
         Values.text(fields.who() + ": " + entry.key(), item, fields.faults()).ifPresent(names::add);
       }
     }
-    if (names.size() < 2 || new HashSet<>(names).size() < names.size()) {
-      fault(
-          entry, "must be a list of two or more different alternatives, such as " + example(entry));
+    if (names.isEmpty() || new HashSet<>(names).size() < names.size()) {
+      fault(entry, "must be a list of different alternatives, such as " + example(entry));
       return List.of();
     }
     return names;
@@ -83,14 +86,16 @@ final class ChoiceBinder {
   }
 
   private void presence(Entry entry, LayerSpec layer, List<String> alternatives) {
-    if (!alternatives.equals(List.of("true", "false"))
-        && !alternatives.equals(List.of("false", "true"))) {
+    List<String> names = alternatives.stream().map(PRESENCE::get).toList();
+    int drawn = names.indexOf(layer.present() ? ChoiceSpec.PRESENT : ChoiceSpec.ABSENT);
+    if (!PRESENCE.keySet().containsAll(alternatives)) {
       fault(entry, "must be [true, false] but was " + alternatives);
+    } else if (drawn < 0) {
+      fault(entry, "must list what is drawn as well, which is " + layer.present());
     } else if (layer.thicknessNm() == 0) {
       fault(entry, "needs the thickness that the layer has when it is there, but thicknessNm is 0");
     } else {
-      bound.add(
-          new ChoiceSpec(entry.key(), List.of("present", ChoiceSpec.ABSENT), 0, entry.keyPlace()));
+      bound.add(new ChoiceSpec(entry.key(), names, drawn, entry.keyPlace()));
     }
   }
 
@@ -99,7 +104,12 @@ final class ChoiceBinder {
     if (layer.material().isEmpty() || !layer.components().isEmpty()) {
       fault(entry, "cannot vary: the layer is mixed or graded and has no material of its own");
     } else if (drawn < 0) {
-      fault(entry, "must list the material as drawn as well, " + layer.material());
+      fault(
+          entry,
+          "must list the material as drawn as well: the layer is of "
+              + layer.material()
+              + ", the alternatives are "
+              + String.join(", ", alternatives));
     } else {
       bound.add(new ChoiceSpec(entry.key(), alternatives, drawn, entry.keyPlace()));
     }

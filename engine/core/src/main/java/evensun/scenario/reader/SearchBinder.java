@@ -36,7 +36,7 @@ final class SearchBinder {
             fields.number("timeSeconds", TIME),
             fields.place());
     fields.finish();
-    return Optional.of(spec);
+    return Optional.of(spec.on(stack.layers()));
   }
 
   /** Matched current cannot decide a bandgap, efficiency can. */

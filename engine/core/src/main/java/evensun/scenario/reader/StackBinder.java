@@ -32,6 +32,9 @@ final class StackBinder {
   private static final String WHAT_THICKNESS =
       "a number in " + THICKNESS + "; only the last entry, the exit medium, has none";
 
+  private static final List<String> NOT_OF_EXIT =
+      List.of("thicknessNm", "present", "coherence", "mixture", "grading", "planarises");
+
   private final Fields root;
   private final List<Node> entries;
   private final Map<String, Place> names = new HashMap<>();
@@ -159,6 +162,7 @@ final class StackBinder {
             material,
             gap,
             fields.number("thicknessNm", THICKNESS).orElse(Double.NaN),
+            fields.flag("present", true),
             coherence(fields),
             FeatureBinder.bind(fields, material, gap),
             fields.place());
@@ -199,7 +203,7 @@ final class StackBinder {
   }
 
   private void noThickness(Fields exit) {
-    for (String key : List.of("thicknessNm", "coherence", "mixture", "grading", "planarises")) {
+    for (String key : NOT_OF_EXIT) {
       if (exit.has(key)) {
         exit.know(key);
         if (endsTooLate) {

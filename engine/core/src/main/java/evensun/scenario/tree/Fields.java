@@ -163,7 +163,12 @@ public final class Fields {
 
   /** Whether a key is there and true. */
   public boolean flag(String key) {
-    return choice(key, FLAGS).orElse(false);
+    return flag(key, false);
+  }
+
+  /** True or false, with what holds where it is not written. */
+  public boolean flag(String key, boolean usual) {
+    return choice(key, FLAGS).orElse(usual);
   }
 
   /** A mapping under a key; empty when it is absent or after a fault. */

@@ -13,6 +13,7 @@ import evensun.search.refine.DerivativeFree;
 import evensun.search.refine.LocalModel;
 import evensun.search.refine.LocalProblem;
 import evensun.search.refine.MaxMinSolver;
+import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 import java.util.function.BooleanSupplier;
@@ -32,6 +33,25 @@ public final class Proof {
   private static final double INSIDE = 0.02;
 
   private static final int BISECTIONS = 6;
+
+  /** How far the best of the other values may lie from where they are. */
+  private enum Climb {
+    /** Beside a design that was the best. */
+    NEAR(0.02, 20),
+    /** With another alternative, which may want everything else to be different. */
+    FAR(0.4, 100);
+
+    /** First radius as a fraction of the range. */
+    final double radius;
+
+    /** Evaluations for each value, without derivatives. */
+    final int evaluations;
+
+    Climb(double radius, int evaluations) {
+      this.radius = radius;
+      this.evaluations = evaluations;
+    }
+  }
 
   private final Objective objective;
   private final Space space;
@@ -65,7 +85,7 @@ public final class Proof {
    * @return empty when it was cancelled
    */
   public List<Freedom> freedoms(Candidate best, double loss) {
-    Individual start = new Individual(0, Numbers.list(space.genes(best.toArray())), best.verdict());
+    Individual start = individual(best);
     double floor = best.aim() - loss;
     try (Judges judges = new Judges(objective, threads, cancelled)) {
       List<Double> ends =
@@ -82,6 +102,62 @@ public final class Proof {
     } catch (SearchInterruptedException interrupted) {
       return List.of();
     }
+  }
+
+  /**
+   * What every alternative of every choice is worth: the first aim with that alternative, all other
+   * values chosen anew from the best designs that are known.
+   *
+   * @param best a design that keeps all limits
+   * @param others good designs to start from as well
+   * @return [variable][alternative] NaN where no design was found that keeps all limits; empty for
+   *     variables that are no choice, and when it was cancelled
+   */
+  public List<List<Double>> alternatives(Candidate best, List<Candidate> others) {
+    List<int[]> tries = new ArrayList<>();
+    for (int v = 0; v < space.size(); v++) {
+      for (int a = 0; a < space.variables().get(v).choices().size(); a++) {
+        tries.add(new int[] {v, a});
+      }
+    }
+    try (Judges judges = new Judges(objective, threads, cancelled)) {
+      List<Double> aims =
+          judges.each(
+              tries.size(),
+              (worker, i) ->
+                  with(new Local(judges, worker), best, others, tries.get(i)[0], tries.get(i)[1]));
+      List<List<Double>> table = new ArrayList<>();
+      IntStream.range(0, space.size()).forEach(v -> table.add(new ArrayList<>()));
+      IntStream.range(0, tries.size()).forEach(i -> table.get(tries.get(i)[0]).add(aims.get(i)));
+      return table;
+    } catch (SearchInterruptedException interrupted) {
+      return List.of();
+    }
+  }
+
+  private double with(
+      Local local, Candidate best, List<Candidate> others, int variable, int alternative) {
+    if (best.values().get(variable) == alternative) {
+      return best.aim();
+    }
+    double reached =
+        others.stream()
+            .filter(other -> other.isFeasible() && other.values().get(variable) == alternative)
+            .mapToDouble(Candidate::aim)
+            .max()
+            .orElse(Double.NEGATIVE_INFINITY);
+    double refined =
+        aim(held(local, individual(best), variable, gene(variable, alternative), Climb.FAR));
+    double most = Math.max(reached, refined);
+    return Double.isFinite(most) ? most : Double.NaN;
+  }
+
+  private Individual individual(Candidate candidate) {
+    return new Individual(0, Numbers.list(space.genes(candidate.toArray())), candidate.verdict());
+  }
+
+  private double gene(int variable, int alternative) {
+    return (double) alternative / Math.max(1, space.stepCount(variable));
   }
 
   private Freedom freedom(int i, Individual start, double low, double high, double gain) {
@@ -153,7 +229,7 @@ public final class Proof {
     double tried = bad;
     int bisections = 0;
     while (local.left > 0 && bisections < BISECTIONS && Math.abs(bad - good) > 1e-5) {
-      Individual held = held(local, at, variable, tried);
+      Individual held = held(local, at, variable, tried, Climb.NEAR);
       if (Fitness.of(held.verdict(), floor).isFeasible()) {
         good = tried;
         at = held;
@@ -167,7 +243,7 @@ public final class Proof {
   }
 
   /** The best design with one gene held. */
-  private Individual held(Local local, Individual from, int variable, double gene) {
+  private Individual held(Local local, Individual from, int variable, double gene, Climb climb) {
     double[] genes = from.geneArray();
     genes[variable] = space.snap(variable, gene);
     Verdict verdict = local.judges.judge(local.worker, space.values(genes));
@@ -181,10 +257,12 @@ public final class Proof {
     if (local.worker.partCount() > 0) {
       LocalModel model = new LocalModel(problem, free, limits);
       double[] point = model.pointOf(genes);
-      problem.judge(model.genesOf(new MaxMinSolver(model, point, 0.02, 1e3).climb(60, 1e-6)));
+      problem.judge(
+          model.genesOf(new MaxMinSolver(model, point, climb.radius, 1e3).climb(60, 1e-6)));
     } else {
       new DerivativeFree(problem, free)
-          .quadratic(0.02, 1e-5, Math.min(local.left, 20 * (free.length + 1)));
+          .quadratic(
+              climb.radius, 1e-5, Math.min(local.left, climb.evaluations * (free.length + 1)));
     }
     local.left -= 1 + problem.tally().evaluations();
     return problem.best();
@@ -197,7 +275,8 @@ public final class Proof {
       return 0;
     }
     double step = Math.max(INSIDE, space.isStepped(variable) ? 1.0 / space.stepCount(variable) : 0);
-    Individual inside = held(local, start, variable, gene <= ON_BOUND ? step : 1 - step);
+    Individual inside =
+        held(local, start, variable, gene <= ON_BOUND ? step : 1 - step, Climb.NEAR);
     double loss = start.verdict().aims().get(0) - aim(inside);
     double moved = Math.abs(inside.genes().get(variable) - gene) * space.span(variable);
     return Double.isFinite(loss) && moved > 0 ? Math.max(0, loss / moved) : 0;
