@@ -126,7 +126,8 @@ public final class Numbers {
     if (standardError == null || !(standardError > 0)) {
       return "";
     }
-    return NBSP + "±" + NBSP + fixed(standardError, standardError < 0.02 ? 3 : 2);
+    String value = standardError < 0.02 ? standardError(standardError) : fixed(standardError, 2);
+    return NBSP + "±" + NBSP + value;
   }
 
   /** A change of a current density with its unit. */

@@ -35,6 +35,12 @@ class NumbersTest {
   }
 
   @ParameterizedTest
+  @CsvSource({"0.31, ± 0.31", "0.0123, ± 0.012", "0.0004, ± <0.001", "0, ''"})
+  void anErrorIsNeverRoundedToNothing(double error, String text) {
+    assertThat(Numbers.plusMinus(error).replace('\u00a0', ' ').strip()).isEqualTo(text);
+  }
+
+  @ParameterizedTest
   @CsvSource({"0.012, +0.01", "-0.012, −0.01", "0.001, 0.00", "-0.001, 0.00", "0, 0.00"})
   void aSignStandsOnlyBeforeWhatIsNotZero(double value, String text) {
     assertThat(Numbers.signed(value, 2)).isEqualTo(text);
