@@ -1,5 +1,7 @@
 package evensun.report;
 
+import evensun.report.text.Hashes;
+import gg.jte.Content;
 import java.io.IOException;
 import java.io.InputStream;
 import java.io.UncheckedIOException;
@@ -13,7 +15,7 @@ import java.nio.charset.StandardCharsets;
  * @param script the page's own script
  * @param policy content security policy with the hash of each
  */
-public record Assets(String css, String echarts, String script, String policy) {
+public record Assets(String css, Content echarts, String script, String policy) {
 
   /** Changes together with the version of the dependency; a test opens the resource. */
   private static final String ECHARTS =
@@ -32,9 +34,11 @@ public record Assets(String css, String echarts, String script, String policy) {
 
   private static Assets load() {
     String css = text("/evensun/report/report.css");
-    String echarts = text(ECHARTS);
     String script = text("/evensun/report/report.js");
-    return new Assets(css, echarts, script, policy(css, script));
+    // As bytes: the page is bytes too, and a megabyte need not become text in between.
+    byte[] echarts = bytes(ECHARTS);
+    return new Assets(
+        css, output -> output.writeBinaryContent(echarts), script, policy(css, script));
   }
 
   private static String policy(String css, String script) {
@@ -48,11 +52,15 @@ public record Assets(String css, String echarts, String script, String policy) {
   }
 
   private static String text(String resource) {
+    return new String(bytes(resource), StandardCharsets.UTF_8);
+  }
+
+  private static byte[] bytes(String resource) {
     try (InputStream in = Assets.class.getResourceAsStream(resource)) {
       if (in == null) {
         throw new IllegalStateException("missing from the distribution: " + resource);
       }
-      return new String(in.readAllBytes(), StandardCharsets.UTF_8);
+      return in.readAllBytes();
     } catch (IOException e) {
       throw new UncheckedIOException(e);
     }

@@ -4,9 +4,7 @@ import evensun.report.compare.ComparisonPages;
 import evensun.report.compare.NamedRun;
 import evensun.report.summary.MarkdownLayout;
 import evensun.report.summary.TextLayout;
-import evensun.result.ResultJson;
 import java.util.List;
-import java.util.stream.Collectors;
 
 /** Results side by side, as a page and as a summary. */
 public final class CompareWriter {
@@ -14,16 +12,12 @@ public final class CompareWriter {
   private CompareWriter() {}
 
   /**
-   * The page.
+   * The page as UTF-8.
    *
    * @param runs two to six
    */
-  public static String write(List<NamedRun> runs) {
-    String all =
-        runs.stream()
-            .map(run -> ResultJson.writeLine(run.result()))
-            .collect(Collectors.joining("\n"));
-    return ReportWriter.render(ComparisonPages.page(runs, Hashes.shortSha256(all)));
+  public static byte[] write(List<NamedRun> runs) {
+    return ReportWriter.render(ComparisonPages.page(runs));
   }
 
   /** The differences as text. */

@@ -31,7 +31,6 @@ import evensun.result.Electrical;
 import evensun.result.Outcome;
 import evensun.result.Outcome.SubcellOutcome;
 import evensun.result.Provenance;
-import evensun.result.ResultJson;
 import evensun.result.RunResult;
 import java.util.ArrayList;
 import java.util.List;
@@ -65,17 +64,25 @@ final class ReportPages {
 
   private ReportPages() {}
 
-  /** The page of a result. */
-  static ReportPage of(RunResult result) {
-    List<Section> sections = new ArrayList<>();
-    SECTIONS.forEach(section -> section.apply(result).ifPresent(sections::add));
+  /**
+   * The page of a result.
+   *
+   * @param shortHash first digits of the hash of its file
+   */
+  static ReportPage of(RunResult result, String shortHash) {
+    List<Section> sections =
+        SECTIONS.parallelStream()
+            .map(section -> section.apply(result))
+            .flatMap(Optional::stream)
+            .toList();
     Provenance provenance = result.provenance();
     String started = provenance.startedUtc();
     return new ReportPage(
         result.search() == null ? "Assessment" : "Design review",
         result.title(),
         started.substring(0, Math.min(DAY_LENGTH, started.length())),
-        Hashes.shortSha256(ResultJson.writeLine(result)),
+        shortHash,
+        "First digits of the SHA-256 of result.json",
         decision(result),
         sections,
         Glossary.all(),

@@ -1,34 +1,43 @@
 package evensun.report;
 
 import evensun.report.page.ReportPage;
+import evensun.report.page.Section;
+import evensun.report.template.JtereportGenerated;
+import evensun.report.template.JtesectionGenerated;
+import evensun.report.text.Hashes;
 import evensun.result.RunResult;
-import gg.jte.ContentType;
-import gg.jte.TemplateEngine;
-import gg.jte.output.StringOutput;
-import java.util.Map;
+import gg.jte.Content;
+import gg.jte.html.OwaspHtmlTemplateOutput;
+import java.util.List;
 
 /** Writes the report of a run: one HTML file that needs nothing else. Safe for threads. */
 public final class ReportWriter {
 
-  /** Where the templates were compiled to. */
-  static final String TEMPLATES = "evensun.report.template";
-
   private ReportWriter() {}
 
-  /** The page, a function of the result alone. */
-  public static String write(RunResult result) {
-    return render(ReportPages.of(result));
+  /**
+   * The page as UTF-8, a function of the result alone.
+   *
+   * @param result the result
+   * @param file its file as it is stored, whose hash the page names
+   */
+  public static byte[] write(RunResult result, byte[] file) {
+    return render(ReportPages.of(result, Hashes.shortSha256(file)));
   }
 
-  /** Lays out a page. */
-  static String render(ReportPage page) {
-    StringOutput output = new StringOutput();
-    engine().render("report.jte", Map.of("page", page, "assets", Assets.get()), output);
-    return output.toString();
+  /** Lays out a page; sections know nothing of one another and are laid out side by side. */
+  static byte[] render(ReportPage page) {
+    List<Content> sections = page.sections().parallelStream().map(ReportWriter::section).toList();
+    PageOutput output = new PageOutput();
+    JtereportGenerated.render(
+        new OwaspHtmlTemplateOutput(output), null, page, sections, Assets.get());
+    return output.bytes();
   }
 
-  private static TemplateEngine engine() {
-    return TemplateEngine.createPrecompiled(
-        null, ContentType.Html, ReportWriter.class.getClassLoader(), TEMPLATES);
+  private static Content section(Section section) {
+    PageOutput output = new PageOutput();
+    JtesectionGenerated.render(new OwaspHtmlTemplateOutput(output), null, section);
+    byte[] html = output.bytes();
+    return into -> into.writeBinaryContent(html);
   }
 }

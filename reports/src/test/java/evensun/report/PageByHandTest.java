@@ -28,7 +28,7 @@ class PageByHandTest {
   void start() throws IOException {
     browser = Browser.start(false);
     Path file = folder.resolve("hand.html");
-    Files.writeString(file, ReportWriter.write(SampleRuns.full()));
+    Files.writeString(file, Written.page(SampleRuns.full()));
     browser.width(1280);
     browser.open(file);
   }
@@ -137,9 +137,9 @@ class PageByHandTest {
       Path file = folder.resolve("comparison.html");
       List<NamedRun> runs =
           List.of(
-              new NamedRun("drawn", SampleRuns.assessment()),
-              new NamedRun("<b>found", SampleRuns.full()));
-      Files.writeString(file, CompareWriter.write(runs));
+              Written.named("drawn", SampleRuns.assessment()),
+              Written.named("<b>found", SampleRuns.full()));
+      Files.writeString(file, Written.comparison(runs));
       own.console();
       own.open(file);
       for (int px : new int[] {400, 1280}) {

@@ -57,7 +57,7 @@ class PageInBrowserTest {
 
   private Path open(String name, RunResult result) throws IOException {
     Path file = folder.resolve(name + ".html");
-    Files.writeString(file, ReportWriter.write(result));
+    Files.writeString(file, Written.page(result));
     browser.width(1280);
     browser.console();
     browser.requests(file);
@@ -126,7 +126,7 @@ class PageInBrowserTest {
 
   /** Charts the page is to show. */
   private static long charts(RunResult run) {
-    return ReportPages.of(run).sections().stream()
+    return Written.model(run).sections().stream()
         .flatMap(section -> section.blocks().stream())
         .mapToLong(
             block ->
@@ -184,7 +184,7 @@ class PageInBrowserTest {
 
   @Test
   void everythingIsThereWithoutScripts() throws IOException {
-    String html = ReportWriter.write(SampleRuns.full());
+    String html = Written.page(SampleRuns.full());
     String bare = html.replaceAll("(?s)<script>.*?</script>", "");
     Path file = folder.resolve("bare.html");
     Files.writeString(file, bare);
@@ -204,7 +204,7 @@ class PageInBrowserTest {
   void theAccessibilityRulesFindNothingSerious(boolean dark) throws IOException {
     try (Browser own = Browser.start(dark)) {
       Path file = folder.resolve("access-" + dark + ".html");
-      Files.writeString(file, ReportWriter.write(SampleRuns.full()));
+      Files.writeString(file, Written.page(SampleRuns.full()));
       own.width(1280);
       own.open(file);
       assertThat(own.run("return matchMedia('(prefers-color-scheme: dark)').matches"))
@@ -230,7 +230,7 @@ class PageInBrowserTest {
   @Test
   void aPageIsUsableWithinTwoSecondsOfProcessorTime() throws IOException {
     Path file = folder.resolve("soon.html");
-    Files.writeString(file, ReportWriter.write(SampleRuns.full()));
+    Files.writeString(file, Written.page(SampleRuns.full()));
     browser.width(1280);
     browser.open(file);
     double before = browser.busySeconds();

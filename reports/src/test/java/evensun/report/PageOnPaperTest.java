@@ -75,7 +75,7 @@ class PageOnPaperTest {
   @MethodSource("papers")
   void aPageIsACleanDocumentOnPaper(Map.Entry<double[], RunResult> paper) throws IOException {
     RunResult run = paper.getValue();
-    Path file = Files.writeString(folder.resolve("paper.html"), ReportWriter.write(run));
+    Path file = Files.writeString(folder.resolve("paper.html"), Written.page(run));
     browser.width(1280);
     browser.open(file);
     long figures = (Long) browser.run(MARK);
@@ -107,7 +107,7 @@ class PageOnPaperTest {
       throws IOException {
     int sheets = pdf.getNumberOfPages();
     assertThat(sheets).isBetween(3, 40);
-    String line = run.title() + " · 2026-03-04 · " + ReportPages.of(run).shortHash();
+    String line = run.title() + " · 2026-03-04 · " + Written.model(run).shortHash();
     for (int sheet = 1; sheet <= sheets; sheet++) {
       assertThat(text(pdf, sheet, sheet)).contains(line, sheet + " / " + sheets);
     }

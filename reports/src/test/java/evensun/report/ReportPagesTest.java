@@ -26,18 +26,19 @@ class ReportPagesTest {
 
   private static ReportPage page(String name) {
     return switch (name) {
-      case "full" -> ReportPages.of(SampleRuns.full());
-      case "assessment" -> ReportPages.of(SampleRuns.assessment());
-      case "one-wavelength" -> ReportPages.of(AwkwardRuns.oneWavelength());
-      case "failed-search" -> ReportPages.of(AwkwardRuns.failedSearch());
-      case "comparison" -> ComparisonPages.page(drawnAndSearched(), "12345678");
+      case "full" -> Written.model(SampleRuns.full());
+      case "assessment" -> Written.model(SampleRuns.assessment());
+      case "one-wavelength" -> Written.model(AwkwardRuns.oneWavelength());
+      case "failed-search" -> Written.model(AwkwardRuns.failedSearch());
+      case "comparison" -> ComparisonPages.page(drawnAndSearched());
       default -> throw new IllegalArgumentException(name);
     };
   }
 
   private static List<NamedRun> drawnAndSearched() {
     return List.of(
-        new NamedRun("drawn", SampleRuns.assessment()), new NamedRun("found", SampleRuns.full()));
+        new NamedRun("drawn", SampleRuns.assessment(), "12345678"),
+        new NamedRun("found", SampleRuns.full(), "9abcdef0"));
   }
 
   @ParameterizedTest
@@ -54,7 +55,7 @@ class ReportPagesTest {
 
   @Test
   void sectionsWithoutDataAreAbsent() {
-    assertThat(ids(ReportPages.of(SampleRuns.full())))
+    assertThat(ids(Written.model(SampleRuns.full())))
         .containsExactly(
             "stack",
             "light",
@@ -68,7 +69,7 @@ class ReportPagesTest {
             "assumptions",
             "provenance",
             "cautions");
-    assertThat(ids(ReportPages.of(SampleRuns.assessment())))
+    assertThat(ids(Written.model(SampleRuns.assessment())))
         .containsExactly("stack", "light", "assumptions", "provenance", "cautions");
   }
 
@@ -85,6 +86,6 @@ class ReportPagesTest {
   }
 
   private static Level level(RunResult result) {
-    return ReportPages.of(result).decision().verdict().level();
+    return Written.model(result).decision().verdict().level();
   }
 }

@@ -9,6 +9,7 @@ import java.nio.charset.StandardCharsets;
 import java.security.MessageDigest;
 import java.util.ArrayList;
 import java.util.Base64;
+import java.util.HexFormat;
 import java.util.List;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
@@ -23,21 +24,31 @@ class ReportWriterTest {
   void aStoredResultGivesThePageOfTheLivingOne() {
     RunResult run = SampleRuns.full();
     RunResult stored = ResultJson.parse(ResultJson.write(run), "stored");
-    assertThat(ReportWriter.write(stored)).isEqualTo(ReportWriter.write(run));
+    assertThat(Written.page(stored)).isEqualTo(Written.page(run));
+  }
+
+  /** Outside witness: the hash that anyone computes of the stored file. */
+  @Test
+  void theHashOnThePageIsThatOfTheStoredFile() throws Exception {
+    RunResult run = SampleRuns.full();
+    byte[] hash = MessageDigest.getInstance("SHA-256").digest(Written.file(run));
+    String digits = HexFormat.of().formatHex(hash).substring(0, 8);
+    assertThat(first(Written.page(run), "<title>([^<]*)</title>")).endsWith(" · " + digits);
+    assertThat(Written.comparison(List.of(Written.named("a", run), Written.named("b", run))))
+        .contains(">" + digits + "</td>");
   }
 
   @Test
   void everyPageStaysUnderThreeMegabytes() {
     for (RunResult run :
         List.of(SampleRuns.full(), AwkwardRuns.sixtyLayers(), AwkwardRuns.hostile())) {
-      assertThat(ReportWriter.write(run).getBytes(StandardCharsets.UTF_8))
-          .hasSizeLessThan(MOST_BYTES);
+      assertThat(Written.page(run).getBytes(StandardCharsets.UTF_8)).hasSizeLessThan(MOST_BYTES);
     }
   }
 
   @Test
   void thePolicyNamesTheHashOfEveryScriptAndStyleAndNothingElse() throws Exception {
-    String html = ReportWriter.write(SampleRuns.full());
+    String html = Written.page(SampleRuns.full());
     String policy =
         first(html, "Content-Security-Policy\" content=\"([^\"]*)\"").replace("&#39;", "'");
     assertThat(policy).startsWith("default-src 'none'; ").contains("base-uri 'none'");
@@ -55,8 +66,8 @@ class ReportWriterTest {
 
   @Test
   void noTextOfAScenarioBecomesMarkup() {
-    String html = ReportWriter.write(AwkwardRuns.hostile());
-    String quiet = ReportWriter.write(SampleRuns.full());
+    String html = Written.page(AwkwardRuns.hostile());
+    String quiet = Written.page(SampleRuns.full());
     // The page's own script and style elements and no more; the hostile image nowhere.
     assertThat(count(html, "<script>")).isEqualTo(count(quiet, "<script>")).isEqualTo(2);
     String withoutOwnScripts = html.replaceAll("(?s)<script>.*?</script>", "");
@@ -68,9 +79,9 @@ class ReportWriterTest {
   void aComparisonNamesWhatDiffers() {
     List<NamedRun> runs =
         List.of(
-            new NamedRun("first", SampleRuns.assessment()),
-            new NamedRun("second", SampleRuns.full()));
-    assertThat(CompareWriter.write(runs)).contains("not fully comparable", "table-stack");
+            Written.named("first", SampleRuns.assessment()),
+            Written.named("second", SampleRuns.full()));
+    assertThat(Written.comparison(runs)).contains("not fully comparable", "table-stack");
     assertThat(CompareWriter.text(runs, ""))
         .contains("B passes")
         .contains("more than A; not fully comparable: some are as drawn, others searched")

@@ -84,7 +84,7 @@ class TextureSectionTest {
       List<double[]> rays =
           drawing.shapes().stream()
               .filter(shape -> shape.look().equals("ray"))
-              .map(shape -> numbers(((Shape.Outline) shape).path()))
+              .map(shape -> numbers(((Shape.Outline) shape).path().toString()))
               .toList();
       assertThat(rays).hasSizeGreaterThan(5);
       for (double[] ray : rays) {

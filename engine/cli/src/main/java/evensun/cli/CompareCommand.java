@@ -56,7 +56,7 @@ final class CompareCommand extends BaseCommand {
     List<NamedRun> runs =
         names.stream()
             .map(StoredRuns::read)
-            .map(run -> new NamedRun(run.name(), run.result()))
+            .map(run -> NamedRun.of(run.name(), run.result(), run.content()))
             .toList();
     Path page = out == null ? null : PageFile.write(out, CompareWriter.write(runs), force);
     String path = page == null ? "" : page.toString();

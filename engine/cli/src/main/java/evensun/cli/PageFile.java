@@ -3,7 +3,6 @@ package evensun.cli;
 import evensun.scenario.InputException;
 import evensun.scenario.Place;
 import java.io.IOException;
-import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
@@ -19,7 +18,7 @@ final class PageFile {
    * @param replace whether an existing file may be replaced
    * @throws InputException when the file exists and may not be replaced, or cannot be written
    */
-  static Path write(Path file, String html, boolean replace) {
+  static Path write(Path file, byte[] html, boolean replace) {
     Place place = Place.option("--out");
     if (file.toString().isBlank()) {
       throw new InputException(place, "names no file; write one, such as --out page.html");
@@ -33,7 +32,7 @@ final class PageFile {
     }
     Path part = file.resolveSibling(file.getFileName() + ".part");
     try {
-      Files.write(part, html.getBytes(StandardCharsets.UTF_8));
+      Files.write(part, html);
       return Files.move(part, file, StandardCopyOption.REPLACE_EXISTING);
     } catch (IOException e) {
       throw new InputException(place, "\"" + file + "\" cannot be written");

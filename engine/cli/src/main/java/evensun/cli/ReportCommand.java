@@ -35,7 +35,7 @@ final class ReportCommand extends BaseCommand {
   @Override
   public Integer call() {
     StoredRun stored = StoredRuns.read(run);
-    String html = ReportWriter.write(stored.result());
+    byte[] html = ReportWriter.write(stored.result(), stored.content());
     Path page = out == null ? inRun(stored, html) : PageFile.write(out, html, true);
     console()
         .out()
@@ -46,7 +46,7 @@ final class ReportCommand extends BaseCommand {
     return ExitStatus.DONE;
   }
 
-  private static Path inRun(StoredRun stored, String html) {
+  private static Path inRun(StoredRun stored, byte[] html) {
     RunFolder folder = RunFolder.open(stored.folder());
     folder.write(RunFiles.REPORT, html);
     return folder.file(RunFiles.REPORT);

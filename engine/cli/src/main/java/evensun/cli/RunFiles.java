@@ -38,9 +38,10 @@ final class RunFiles {
 
   /** Result, tables and report; returns the path of the report. */
   static Path results(RunFolder folder, RunResult result) {
-    folder.write(RESULT, ResultJson.write(result));
+    byte[] file = ResultJson.write(result).getBytes(StandardCharsets.UTF_8);
+    folder.write(RESULT, file);
     Tables.of(result).forEach(folder::write);
-    folder.write(REPORT, ReportWriter.write(result).getBytes(StandardCharsets.UTF_8));
+    folder.write(REPORT, ReportWriter.write(result, file));
     return folder.file(REPORT);
   }
 }

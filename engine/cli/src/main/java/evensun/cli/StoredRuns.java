@@ -26,14 +26,29 @@ final class StoredRuns {
   /**
    * A run.
    *
-   * @param folder its folder
+   * @param file its result.json
    * @param result its result
    */
-  record StoredRun(Path folder, RunResult result) {
+  record StoredRun(Path file, RunResult result) {
+
+    /** Its folder. */
+    Path folder() {
+      Path parent = file.getParent();
+      return parent == null ? Path.of("") : parent;
+    }
+
+    /** Its result.json as it is stored. */
+    byte[] content() {
+      try {
+        return Files.readAllBytes(file);
+      } catch (IOException e) {
+        throw new InputException(Place.of(file.toString()), "cannot be read");
+      }
+    }
 
     /** The folder's own name; a page names no path of this machine. */
     String name() {
-      return folder.toAbsolutePath().normalize().getFileName().toString();
+      return folder().toAbsolutePath().normalize().getFileName().toString();
     }
   }
 
@@ -50,7 +65,6 @@ final class StoredRuns {
     if (!Files.exists(path) && (name.equals("last") || name.equals("previous"))) {
       return recent(name);
     }
-    Path folder = Files.isRegularFile(path) ? path.toAbsolutePath().getParent() : path;
     Path file = Files.isRegularFile(path) ? path : path.resolve(RunFiles.RESULT);
     if (!Files.isRegularFile(file)) {
       throw new InputException(
@@ -59,7 +73,7 @@ final class StoredRuns {
               ? "holds no " + RunFiles.RESULT + "; give the folder of a finished run"
               : "there is no such run; evensun runs lists those of a folder");
     }
-    return new StoredRun(folder, result(file));
+    return new StoredRun(file, result(file));
   }
 
   private static StoredRun recent(String name) {
@@ -108,7 +122,8 @@ final class StoredRuns {
 
   private static Stream<StoredRun> readable(Path folder) {
     try {
-      return Stream.of(new StoredRun(folder, ResultJson.read(folder.resolve(RunFiles.RESULT))));
+      Path file = folder.resolve(RunFiles.RESULT);
+      return Stream.of(new StoredRun(file, ResultJson.read(file)));
     } catch (IOException | ResultFormatException e) {
       return Stream.empty();
     }

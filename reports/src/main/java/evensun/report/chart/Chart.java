@@ -1,6 +1,6 @@
 package evensun.report.chart;
 
-import evensun.report.figure.Figure;
+import evensun.report.figure.Drawing;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.stream.IntStream;
@@ -70,8 +70,8 @@ public record Chart(
     return picked;
   }
 
-  /** The chart drawn for those without JavaScript and for paper. */
-  public Figure figure() {
-    return Figure.of(new ChartDrawing(this), title);
+  /** The chart drawn for those without JavaScript and for paper, so many px wide. */
+  public Drawing drawing(double widthPx) {
+    return new ChartDrawing(this).draw(widthPx);
   }
 }

@@ -2,13 +2,13 @@ package evensun.report.chart;
 
 import evensun.report.figure.Canvas;
 import evensun.report.figure.Drawing;
-import evensun.report.figure.Figure;
 import evensun.report.figure.Path;
 import evensun.report.figure.Shape.Anchor;
 import evensun.report.figure.Ticks;
 import evensun.report.text.Clip;
 import evensun.report.text.Numbers;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.Comparator;
 import java.util.List;
 import org.jspecify.annotations.Nullable;
@@ -18,7 +18,7 @@ import org.jspecify.annotations.Nullable;
  *
  * @param chart what to draw
  */
-record ChartDrawing(Chart chart) implements Figure.Sketch {
+record ChartDrawing(Chart chart) {
 
   private static final double TOP = 26;
   private static final double BOTTOM = 44;
@@ -26,13 +26,22 @@ record ChartDrawing(Chart chart) implements Figure.Sketch {
   private static final double LABEL_ROOM_PX = 16;
   private static final double HALF_LETTER_PX = 3.6;
   private static final double BUNCHED_PX = 24;
-  private static final int MOST_POINTS = 240;
+  private static final double POINTS_PER_PX = 0.3;
+  private static final int MOST_SPOTS = 60;
 
   /** The inner frame in px. */
   private record Frame(Chart chart, double left, double top, double width, double height) {
 
     double x(double value) {
       return left + chart.x().fraction(value) * width;
+    }
+
+    double[] xs() {
+      double[] xs = new double[chart.xs().size()];
+      for (int i = 0; i < xs.length; i++) {
+        xs[i] = x(chart.xs().get(i));
+      }
+      return xs;
     }
 
     double y(double value) {
@@ -49,10 +58,10 @@ record ChartDrawing(Chart chart) implements Figure.Sketch {
     }
   }
 
-  @Override
-  public Drawing draw(double widthPx) {
-    return chart.xs().size() > MOST_POINTS
-        ? new ChartDrawing(chart.thinned(MOST_POINTS)).draw(widthPx)
+  Drawing draw(double widthPx) {
+    int most = (int) (widthPx * POINTS_PER_PX);
+    return chart.kind() != Kind.POINTS && chart.xs().size() > most
+        ? new ChartDrawing(chart.thinned(most)).drawAll(widthPx)
         : drawAll(widthPx);
   }
 
@@ -111,21 +120,27 @@ record ChartDrawing(Chart chart) implements Figure.Sketch {
   }
 
   private void stack(Canvas canvas, Frame frame, boolean wide) {
-    double[] base = new double[chart.xs().size()];
+    double[] x = frame.xs();
+    double[] sum = new double[x.length];
+    double[] base = new double[x.length];
+    Arrays.fill(base, frame.y(0));
+    List<Area> areas = new ArrayList<>();
     for (Series row : chart.series()) {
-      double[] top = new double[base.length];
+      double[] top = new double[x.length];
       Path path = new Path();
-      for (int i = 0; i < base.length; i++) {
-        top[i] = base[i] + orZero(row.values().get(i));
-        point(path, i, frame.x(chart.xs().get(i)), frame.y(top[i]));
+      for (int i = 0; i < x.length; i++) {
+        sum[i] += orZero(row.values().get(i));
+        top[i] = frame.y(sum[i]);
+        point(path, i, x[i], top[i]);
       }
-      for (int i = base.length - 1; i >= 0; i--) {
-        path.line(frame.x(chart.xs().get(i)), frame.y(base[i]));
+      for (int i = x.length - 1; i >= 0; i--) {
+        path.line(x[i], base[i]);
       }
       canvas.outline(path.close(), "part fill-" + row.role(), row.label());
+      areas.add(new Area(row, base, top));
       base = top;
     }
-    stackLabels(canvas, frame, wide);
+    areas.forEach(area -> name(canvas, frame, area, x, wide));
   }
 
   private static double orZero(@Nullable Double value) {
@@ -140,28 +155,26 @@ record ChartDrawing(Chart chart) implements Figure.Sketch {
     }
   }
 
-  /** Names each area where it is thick enough for the whole name, near its middle. */
-  private void stackLabels(Canvas canvas, Frame frame, boolean wide) {
-    double[] base = new double[chart.xs().size()];
-    for (Series row : chart.series()) {
-      String text = Clip.to(row.label(), wide ? 34 : 16);
-      int half = (int) Math.ceil(text.length() * HALF_LETTER_PX / frame.width() * base.length) + 1;
-      Spot best = null;
-      double centre = centre(row);
-      for (int i = half; i < base.length - half; i++) {
-        Spot spot = Spot.at(frame, row, base, i, half, centre);
-        best =
-            spot.room() > LABEL_ROOM_PX && (best == null || spot.score() > best.score())
-                ? spot
-                : best;
-      }
-      if (best != null) {
-        double x = frame.x(chart.xs().get(best.index()));
-        canvas.label(x, best.y() + 4, text, Anchor.MIDDLE, "part-name on-" + row.role());
-      }
-      for (int i = 0; i < base.length; i++) {
-        base[i] += orZero(row.values().get(i));
-      }
+  /** An area of a stack: the y of its lower and upper edge at each point, in px. */
+  private record Area(Series row, double[] base, double[] top) {}
+
+  /** Names an area where it is thick enough for the whole name, near its middle. */
+  private static void name(Canvas canvas, Frame frame, Area area, double[] x, boolean wide) {
+    String text = Clip.to(area.row().label(), wide ? 34 : 16);
+    int half = (int) Math.ceil(text.length() * HALF_LETTER_PX / frame.width() * x.length) + 1;
+    int step = 1 + x.length / MOST_SPOTS;
+    Spot best = null;
+    double centre = centre(area.row());
+    for (int i = half; i < x.length - half; i += step) {
+      Spot spot = Spot.at(frame, area, i, half, centre);
+      best =
+          spot.room() > LABEL_ROOM_PX && (best == null || spot.score() > best.score())
+              ? spot
+              : best;
+    }
+    if (best != null) {
+      String look = "part-name on-" + area.row().role();
+      canvas.label(x[best.index()], best.y() + 4, text, Anchor.MIDDLE, look);
     }
   }
 
@@ -179,14 +192,14 @@ record ChartDrawing(Chart chart) implements Figure.Sketch {
   /** A place for a name: its room from edge to edge in px, and how good it is. */
   private record Spot(int index, double y, double room, double score) {
 
-    static Spot at(Frame frame, Series row, double[] base, int index, int half, double centre) {
+    static Spot at(Frame frame, Area area, int index, int half, double centre) {
       double low = frame.bottom();
       double high = frame.top();
       for (int k = index - half; k <= index + half; k++) {
-        low = Math.min(low, frame.y(base[k]));
-        high = Math.max(high, frame.y(base[k] + orZero(row.values().get(k))));
+        low = Math.min(low, area.base()[k]);
+        high = Math.max(high, area.top()[k]);
       }
-      double away = Math.abs(index - centre) / base.length * frame.height() / 10;
+      double away = Math.abs(index - centre) / area.base().length * frame.height() / 10;
       return new Spot(
           index, (low + high) / 2, low - high, Math.min(low - high, frame.height() / 4) - away);
     }
@@ -195,19 +208,20 @@ record ChartDrawing(Chart chart) implements Figure.Sketch {
   private record End(Series row, double y) {}
 
   private void lines(Canvas canvas, Frame frame, boolean named) {
+    double[] x = frame.xs();
     List<End> ends = new ArrayList<>();
     for (Series row : chart.series()) {
       Path path = new Path();
       boolean pen = false;
       double lastY = Double.NaN;
-      for (int i = 0; i < chart.xs().size(); i++) {
+      for (int i = 0; i < x.length; i++) {
         Double value = row.values().get(i);
         if (value == null) {
           pen = false;
           continue;
         }
         lastY = frame.y(value);
-        point(path, pen ? 1 : 0, frame.x(chart.xs().get(i)), lastY);
+        point(path, pen ? 1 : 0, x[i], lastY);
         pen = true;
       }
       canvas.outline(

@@ -12,11 +12,14 @@ import evensun.report.summary.Summary;
 import evensun.report.summary.Summary.Listing;
 import evensun.report.text.Clip;
 import evensun.report.text.Glossary;
+import evensun.report.text.Hashes;
 import evensun.report.text.Numbers;
 import evensun.result.RunResult;
+import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.stream.Collectors;
 
 /** A comparison as a page and as a summary. */
 public final class ComparisonPages {
@@ -27,9 +30,8 @@ public final class ComparisonPages {
    * The page.
    *
    * @param runs two to six
-   * @param shortHash first digits of the hash of all results
    */
-  public static ReportPage page(List<NamedRun> runs, String shortHash) {
+  public static ReportPage page(List<NamedRun> runs) {
     Comparison comparison = new Comparison(runs);
     List<Section> sections = new ArrayList<>();
     sections.add(which(comparison));
@@ -44,11 +46,17 @@ public final class ComparisonPages {
         "Comparison",
         Numbers.count(runs.size(), "design") + ": " + Clip.to(first.title(), 80),
         started.substring(0, Math.min(10, started.length())),
-        shortHash,
+        shortHash(runs),
+        "First digits of the SHA-256 of those of the runs, in their order",
         decision(comparison),
         sections,
         Glossary.all(),
         "Written by Evensun from the result.json of each run.");
+  }
+
+  private static String shortHash(List<NamedRun> runs) {
+    String all = runs.stream().map(NamedRun::shortHash).collect(Collectors.joining());
+    return Hashes.shortSha256(all.getBytes(StandardCharsets.UTF_8));
   }
 
   private static Decision decision(Comparison comparison) {
@@ -62,14 +70,16 @@ public final class ComparisonPages {
             .words("")
             .words("run")
             .words("title")
-            .words("started (UTC)");
+            .words("started (UTC)")
+            .words("result.json");
     for (int i = 0; i < comparison.runs().size(); i++) {
       NamedRun run = comparison.runs().get(i);
       table.row(
           Matrix.letter(i),
           run.name(),
           Clip.to(run.result().title(), 120),
-          run.result().provenance().startedUtc());
+          run.result().provenance().startedUtc(),
+          run.shortHash());
     }
     List<Block.Point> warnings =
         comparison.warnings().stream()

@@ -30,7 +30,7 @@ public final class Canvas {
   /** Adds a path. */
   public void outline(Path path, String look, String note) {
     if (!path.isEmpty()) {
-      shapes.add(new Shape.Outline(path.toString(), look, note));
+      shapes.add(new Shape.Outline(path, look, note));
     }
   }
 

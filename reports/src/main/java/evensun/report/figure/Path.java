@@ -1,7 +1,9 @@
 package evensun.report.figure;
 
-/** Writes the commands of an SVG path, to a tenth of a px. */
+/** The commands of an SVG path, to a tenth of a px: letters and numbers, and nothing else. */
 public final class Path {
+
+  private static final double FARTHEST_PX = 1e6;
 
   private final StringBuilder text = new StringBuilder();
 
@@ -22,7 +24,10 @@ public final class Path {
   }
 
   private Path add(char command, double x, double y) {
-    text.append(command).append(number(x)).append(' ').append(number(y));
+    text.append(command);
+    append(text, x);
+    text.append(' ');
+    append(text, y);
     return this;
   }
 
@@ -38,10 +43,21 @@ public final class Path {
 
   /** A coordinate, to a tenth of a px. */
   public static String number(double value) {
-    long tenths = Math.round(value * 10);
-    String sign = tenths < 0 ? "-" : "";
-    long whole = Math.abs(tenths) / 10;
-    long rest = Math.abs(tenths) % 10;
-    return rest == 0 ? sign + whole : sign + whole + "." + rest;
+    StringBuilder text = new StringBuilder(8);
+    append(text, value);
+    return text.toString();
+  }
+
+  private static void append(StringBuilder text, double value) {
+    long tenths = Math.round(Math.max(-FARTHEST_PX, Math.min(FARTHEST_PX, value)) * 10);
+    if (tenths < 0) {
+      text.append('-');
+      tenths = -tenths;
+    }
+    text.append(tenths / 10);
+    int rest = (int) (tenths % 10);
+    if (rest != 0) {
+      text.append('.').append((char) ('0' + rest));
+    }
   }
 }

@@ -9,7 +9,8 @@ import java.util.List;
  * @param kind what the page is, such as {@code Design review}
  * @param title title of the scenario
  * @param dateUtc day of the run, ISO 8601
- * @param shortHash first digits of the result's hash
+ * @param shortHash first digits of a hash
+ * @param hashMeaning what that hash is of
  * @param decision the first screen
  * @param sections the rest, in order of importance
  * @param glossary terms used
@@ -20,6 +21,7 @@ public record ReportPage(
     String title,
     String dateUtc,
     String shortHash,
+    String hashMeaning,
     Decision decision,
     List<Section> sections,
     List<Term> glossary,

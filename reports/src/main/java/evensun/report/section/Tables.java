@@ -42,17 +42,19 @@ final class Tables {
   }
 
   private static List<String> row(Chart chart, int i) {
+    boolean share = chart.y().min() == 0 && chart.y().max() == 1;
     List<String> row = new ArrayList<>();
     row.add(Numbers.significant(chart.xs().get(i), 6));
     for (Series series : chart.series()) {
       Double value = series.values().get(i);
-      row.add(value == null ? "" : cell(value));
+      row.add(value == null ? "" : cell(value, share));
     }
     return row;
   }
 
-  private static String cell(double value) {
-    return Math.abs(value) >= 1000 || value != 0 && Math.abs(value) < 1e-4
+  /** A share of one to four decimals; anything else to four digits where these say nothing. */
+  private static String cell(double value, boolean share) {
+    return !share && (Math.abs(value) >= 1000 || value != 0 && Math.abs(value) < 1e-4)
         ? Numbers.significant(value, 4)
         : Numbers.fixed(value, 4);
   }

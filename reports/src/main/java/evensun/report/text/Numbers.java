@@ -23,6 +23,14 @@ public final class Numbers {
 
   private static final double TIE = 1e-6;
 
+  /** Powers of ten that a double holds exactly. */
+  private static final double[] TENS = {
+    1, 1e1, 1e2, 1e3, 1e4, 1e5, 1e6, 1e7, 1e8, 1e9, 1e10, 1e11, 1e12, 1e13, 1e14, 1e15, 1e16, 1e17,
+    1e18, 1e19, 1e20, 1e21, 1e22
+  };
+
+  private static final int MOST_EXACT_POWER = TENS.length - 1;
+
   private Numbers() {}
 
   /** With so many decimals, rounded half up; never a negative zero. */
@@ -39,11 +47,10 @@ public final class Numbers {
   private static String fast(double value, int decimals) {
     double scaled = Math.abs(value) * POWERS[decimals];
     long down = (long) scaled;
-    double rest = scaled - down;
-    if (Math.abs(rest - 0.5) < TIE) {
+    if (isNearTie(scaled)) {
       return exact(value, decimals);
     }
-    long digits = rest > 0.5 ? down + 1 : down;
+    long digits = scaled - down > 0.5 ? down + 1 : down;
     StringBuilder text = new StringBuilder();
     if (value < 0 && digits != 0) {
       text.append(MINUS);
@@ -72,7 +79,10 @@ public final class Numbers {
 
   /** As {@link #fixed}, without trailing zeros. */
   public static String trimmed(double value, int decimals) {
-    String text = fixed(value, decimals);
+    return trimZeros(fixed(value, decimals));
+  }
+
+  private static String trimZeros(String text) {
     if (text.indexOf('.') < 0) {
       return text;
     }
@@ -97,6 +107,23 @@ public final class Numbers {
   }
 
   private static String powerOfTen(double value, int digits) {
+    int exponent = (int) Math.floor(Math.log10(Math.abs(value)));
+    if (Math.abs(exponent) > MOST_EXACT_POWER || digits > POWERS.length) {
+      return exactPowerOfTen(value, digits);
+    }
+    double scaled = exponent < 0 ? value * TENS[-exponent] : value / TENS[exponent];
+    String mantissa = fixed(scaled, digits - 1);
+    boolean ten = mantissa.startsWith("10") || mantissa.startsWith(MINUS + "10");
+    return ten || isNearTie(Math.abs(scaled) * POWERS[digits - 1])
+        ? exactPowerOfTen(value, digits)
+        : trimZeros(mantissa) + " × 10" + superscript(exponent);
+  }
+
+  private static boolean isNearTie(double scaled) {
+    return Math.abs(scaled - Math.floor(scaled) - 0.5) < TIE;
+  }
+
+  private static String exactPowerOfTen(double value, int digits) {
     BigDecimal rounded = BigDecimal.valueOf(value).round(new MathContext(digits));
     int exponent = rounded.precision() - rounded.scale() - 1;
     String mantissa = trimmed(rounded.movePointLeft(exponent).doubleValue(), digits - 1);

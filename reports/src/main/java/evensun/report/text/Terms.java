@@ -6,22 +6,13 @@ import java.util.Comparator;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Set;
-import java.util.regex.Matcher;
-import java.util.regex.Pattern;
-import java.util.stream.Collectors;
 import org.jspecify.annotations.Nullable;
 
 /** Finds the terms of the glossary in a text, each where it first occurs. */
 public final class Terms {
 
-  private static final Pattern ANY =
-      Pattern.compile(
-          Glossary.all().stream()
-              .map(Term::name)
-              .sorted(Comparator.comparingInt(String::length).reversed())
-              .map(Pattern::quote)
-              .collect(Collectors.joining("|", "(?<![\\p{L}-])(?:", ")(?![\\p{L}-])")),
-          Pattern.CASE_INSENSITIVE);
+  /** The longest first, so that a term wins over one that it begins with. */
+  private static final List<Term> LONGEST_FIRST = longestFirst();
 
   private Terms() {}
 
@@ -36,16 +27,22 @@ public final class Terms {
   /** The text in stretches; together they are the text. */
   public static List<Span> mark(String text) {
     List<Span> spans = new ArrayList<>();
-    Set<Term> seen = new HashSet<>();
-    Matcher matcher = ANY.matcher(text);
+    Set<String> seen = new HashSet<>();
     int from = 0;
-    while (matcher.find()) {
-      Term term = named(matcher.group());
-      if (seen.add(term)) {
-        plain(text, from, matcher.start(), spans);
-        spans.add(new Span(matcher.group(), term));
-        from = matcher.end();
+    int at = 0;
+    while (at < text.length()) {
+      Term term = isInsideWord(text, at - 1) ? null : termAt(text, at);
+      if (term == null) {
+        at++;
+        continue;
       }
+      int end = at + term.name().length();
+      if (seen.add(term.id())) {
+        plain(text, from, at, spans);
+        spans.add(new Span(text.substring(at, end), term));
+        from = end;
+      }
+      at = end;
     }
     plain(text, from, text.length(), spans);
     return spans;
@@ -57,10 +54,26 @@ public final class Terms {
     }
   }
 
-  private static Term named(String name) {
-    return Glossary.all().stream()
-        .filter(term -> term.name().equalsIgnoreCase(name))
-        .findFirst()
-        .orElseThrow();
+  private static @Nullable Term termAt(String text, int at) {
+    for (Term term : LONGEST_FIRST) {
+      String name = term.name();
+      if (text.regionMatches(true, at, name, 0, name.length())
+          && !isInsideWord(text, at + name.length())) {
+        return term;
+      }
+    }
+    return null;
+  }
+
+  private static boolean isInsideWord(String text, int at) {
+    return at >= 0
+        && at < text.length()
+        && (text.charAt(at) == '-' || Character.isLetter(text.charAt(at)));
+  }
+
+  private static List<Term> longestFirst() {
+    List<Term> terms = new ArrayList<>(Glossary.all());
+    terms.sort(Comparator.comparingInt((Term term) -> term.name().length()).reversed());
+    return List.copyOf(terms);
   }
 }

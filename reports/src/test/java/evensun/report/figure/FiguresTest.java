@@ -1,7 +1,6 @@
 package evensun.report.figure;
 
 import static org.assertj.core.api.Assertions.assertThat;
-import static org.assertj.core.api.Assertions.assertThatThrownBy;
 import static org.assertj.core.api.Assertions.within;
 
 import evensun.report.figure.LevelPicture.Vessel;
@@ -68,8 +67,15 @@ class FiguresTest {
 
   @Test
   void aPathHoldsNumbersAlone() {
-    assertThatThrownBy(() -> new Shape.Outline("M0 0\" onload=\"x", "line", ""))
-        .isInstanceOf(IllegalArgumentException.class);
+    double[] awkward = {0, -0.04, 12.35, -7, 1e300, Double.NaN, Double.NEGATIVE_INFINITY};
+    for (double x : awkward) {
+      for (double y : awkward) {
+        // The commands of a path as SVG has them.
+        assertThat(new Path().move(x, y).line(y, x).close().toString())
+            .matches("M-?[0-9.]+ -?[0-9.]+L-?[0-9.]+ -?[0-9.]+Z");
+      }
+    }
+    assertThat(new Path().move(-0.25, 1.04).toString()).isEqualTo("M-0.2 1");
   }
 
   @Test

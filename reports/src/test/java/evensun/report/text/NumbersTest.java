@@ -3,6 +3,7 @@ package evensun.report.text;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import java.math.BigDecimal;
+import java.math.MathContext;
 import java.math.RoundingMode;
 import java.util.Locale;
 import org.junit.jupiter.api.Test;
@@ -32,6 +33,33 @@ class NumbersTest {
       String text = exact.toPlainString().replace('-', '\u2212');
       assertThat(Numbers.fixed(value, decimals)).isEqualTo(text);
     }
+  }
+
+  /** Outside witness: exact decimal arithmetic of the JDK. */
+  @Test
+  void powersOfTenAreExactDecimalRoundingEverywhere() {
+    java.util.Random random = new java.util.Random(5);
+    for (int i = 0; i < 20_000; i++) {
+      int digits = 1 + random.nextInt(4);
+      // every third one is close to a tie or to a power of ten
+      int lead = i % 3 == 0 ? random.nextInt(100) * 10 + 95 : random.nextInt(1_000_000);
+      int exponent = random.nextInt(60) - 30;
+      double value = Double.parseDouble(Math.max(1, lead) + "e" + exponent);
+      if (value >= 1e-3 && value < 1e6) {
+        continue;
+      }
+      BigDecimal exact = BigDecimal.valueOf(value).round(new MathContext(digits));
+      String[] shown = Numbers.significant(-value, digits).substring(1).split(" × 10", -1);
+      String power = "e" + plain(shown[1]);
+      assertThat(new BigDecimal(shown[0] + power)).as(value + "").isEqualByComparingTo(exact);
+      assertThat(Double.parseDouble(shown[0])).isGreaterThanOrEqualTo(1).isLessThan(10);
+    }
+  }
+
+  private static String plain(String superscript) {
+    StringBuilder text = new StringBuilder();
+    superscript.chars().forEach(c -> text.append("⁻⁰¹²³⁴⁵⁶⁷⁸⁹".indexOf(c) - 1));
+    return text.toString().replace("-1", "-");
   }
 
   @ParameterizedTest
