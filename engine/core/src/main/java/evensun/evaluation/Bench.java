@@ -46,6 +46,7 @@ public final class Bench implements AutoCloseable {
     int channels = model.channels().size();
     double[] bins = model.problem().incidentMaPerCm2().toArray();
     Response response = Response.sums(count + lightSums.size(), channels);
+    response.sumStandardError = null; // statistical solvers take longer to tell it
     for (int s = 0; s < count; s++) {
       weigh(response, s, model, bins);
     }

@@ -1,5 +1,6 @@
 package evensun.raytrace;
 
+import evensun.raytrace.kernel.FilmSums;
 import evensun.raytrace.kernel.Weighing;
 import evensun.raytrace.trace.Angles;
 import evensun.spi.Design;
@@ -37,27 +38,16 @@ final class CoatingTable implements AutoCloseable {
   private final Design films1;
   private final long[] seen; // [material of the question] revision
   private final double[] thickness; // [film] as answered last
+  private final int first; // node
+  private final double[][] met; // [2 · node + polarisation][i] power that met the films
+  private final double[] staying; // [i] in one film
+  private final double[] rest; // [i] neither reflected nor transmitted, nor in a film
+  private final int from; // medium
   private boolean fresh;
 
   /** Some directions asked together. */
   private record Question(
       int firstNode, int nodes, PreparedSolver prepared, Evaluator evaluator, Response answer) {}
-
-  /** Rows of one table that answers go to. */
-  interface Target {
-
-    /**
-     * Takes the answer for one node and wavelength.
-     *
-     * @param node index in this table
-     * @param w index of the wavelength in the whole spectrum
-     * @param quantity as in {@link Weighing}, s before p
-     */
-    void coating(int node, int w, int quantity, double value);
-
-    /** Takes the absorptance of a film; the number of films stands for what is booked outside. */
-    void film(int node, int w, int film, int polarisation, double value);
-  }
 
   CoatingTable(Problem problem, Device device, Angles.Table table, Services services) {
     this.problem = problem;
@@ -74,6 +64,11 @@ final class CoatingTable implements AutoCloseable {
       films1.material[f] = f + 2;
     }
     double[] cosines = table.cosines();
+    first = table.first();
+    met = new double[2 * cosines.length][wavelengths.length];
+    staying = new double[wavelengths.length];
+    rest = new double[wavelengths.length];
+    from = boundary + (table.fromBelow() ? 1 : 0);
     Side side = table.fromBelow() ? Side.REAR : Side.FRONT;
     for (int at = 0; at < cosines.length; at += NODES_PER_QUESTION) {
       int end = Math.min(cosines.length, at + NODES_PER_QUESTION);
@@ -118,18 +113,28 @@ final class CoatingTable implements AutoCloseable {
     return incidences;
   }
 
-  /** Asks again where a film or a medium has changed. */
-  void refresh(Design design, Target into) {
+  /**
+   * Asks again where a film or a medium has changed.
+   *
+   * @param into [w][4 · node + quantity] R and T of all tables, see {@link Weighing}
+   */
+  void refresh(Design design, double[][] into) {
     if (!takeOver(design)) {
       return;
     }
     for (Question question : questions) {
       question.evaluator().evaluate(films1, question.answer());
-      for (int node = 0; node < question.nodes(); node++) {
-        for (int polarisation = 0; polarisation < 2; polarisation++) {
-          report(question, node, polarisation, into);
-        }
+      for (int i = 0; i < 2 * question.nodes(); i++) {
+        int at = Weighing.PER_NODE * (first + question.firstNode() + i / 2) + i % 2;
+        put(question.answer().reflectance[i], at, into);
+        put(question.answer().transmittance[i], at + 2, into);
       }
+    }
+  }
+
+  private void put(double[] row, int at, double[][] into) {
+    for (int i = 0; i < wavelengths.length; i++) {
+      into[wavelengths[i]][at] = row[i];
     }
   }
 
@@ -162,23 +167,59 @@ final class CoatingTable implements AutoCloseable {
     return true;
   }
 
-  private void report(Question question, int node, int polarisation, Target into) {
-    int i = 2 * node + polarisation;
-    Response answer = question.answer();
-    int count = films.size();
-    for (int at = 0; at < wavelengths.length; at++) {
-      int w = wavelengths[at];
-      double r = answer.reflectance[i][at];
-      double t = answer.transmittance[i][at];
-      double rest = 1 - r - t;
-      into.coating(question.firstNode() + node, w, polarisation, r);
-      into.coating(question.firstNode() + node, w, 2 + polarisation, t);
-      for (int f = 0; f < count; f++) {
-        double share = answer.absorptance[i * count + f][at];
-        into.film(question.firstNode() + node, w, f, polarisation, share);
-        rest -= share;
+  /**
+   * Keeps the light of one wavelength that met the films.
+   *
+   * @param all [2 · node + polarisation] of all tables
+   */
+  void keep(int w, double[] all) {
+    int i = Arrays.binarySearch(wavelengths, w);
+    for (int row = 0; i >= 0 && row < met.length; row++) {
+      met[row][i] = all[2 * first + row];
+    }
+  }
+
+  /**
+   * Adds what stays of the light that was kept: in the films, and in the layer that it came from.
+   *
+   * @param into [row][w] rows of {@link LitDevice#shares}
+   */
+  void addStaying(double[][] into) {
+    Arrays.fill(rest, 0);
+    for (Question question : questions) {
+      Response answer = question.answer();
+      for (int i = 0; i < 2 * question.nodes(); i++) {
+        double[] light = met[2 * question.firstNode() + i];
+        FilmSums.addRest(light, answer.reflectance[i], answer.transmittance[i], rest, rest.length);
       }
-      into.film(question.firstNode() + node, w, count, polarisation, rest);
+    }
+    for (int f = 0; f < films.size(); f++) {
+      sumFilm(f);
+      book(staying, films.get(f), into);
+      for (int i = 0; i < rest.length; i++) {
+        rest[i] -= staying[i];
+      }
+    }
+    if (device.isInner(from)) {
+      book(rest, device.layer(from), into);
+    }
+  }
+
+  private void sumFilm(int film) {
+    Arrays.fill(staying, 0);
+    for (Question question : questions) {
+      for (int i = 0; i < 2 * question.nodes(); i++) {
+        double[] light = met[2 * question.firstNode() + i];
+        double[] share = question.answer().absorptance[i * films.size() + film];
+        FilmSums.add(light, share, staying, staying.length);
+      }
+    }
+  }
+
+  private void book(double[] power, int layer, double[][] into) {
+    double[] row = into[LitDevice.LAYERS + layer];
+    for (int i = 0; i < wavelengths.length; i++) {
+      row[wavelengths[i]] += power[i];
     }
   }
 

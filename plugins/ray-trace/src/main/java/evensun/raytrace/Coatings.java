@@ -15,30 +15,17 @@ final class Coatings implements AutoCloseable {
   /** [w][4 · node + quantity] R and T of all tables, with a node to spare at the end. */
   final double[][] coating;
 
-  /**
-   * [table][w][(2 · node + polarisation) · (films + 1) + film] absorptance; after the films what
-   * the medium gets that the light comes from.
-   */
-  final double[][][] absorbed;
-
   private final Device device;
   private final Angles angles;
   private final List<CoatingTable> tables = new ArrayList<>(); // null where a boundary is ideal
-  private final List<CoatingTable.Target> targets = new ArrayList<>();
 
   Coatings(Problem problem, Device device, Angles angles, Services services) {
     this.device = device;
     this.angles = angles;
-    int wavelengths = problem.wavelengthCount();
-    coating = new double[wavelengths][Weighing.PER_NODE * (angles.count() + 1)];
-    absorbed = new double[angles.tables().size()][][];
-    for (int t = 0; t < absorbed.length; t++) {
+    coating = new double[problem.wavelengthCount()][Weighing.PER_NODE * (angles.count() + 1)];
+    for (int t = 0; t < angles.tables().size(); t++) {
       Angles.Table table = angles.tables().get(t);
-      Device.Boundary boundary = boundary(t);
-      absorbed[t] =
-          new double[wavelengths][2 * table.cosines().length * (boundary.films().size() + 1)];
-      targets.add(target(t));
-      tables.add(boundary.isIdeal() ? null : new CoatingTable(problem, device, table, services));
+      tables.add(boundary(t).isIdeal() ? null : new CoatingTable(problem, device, table, services));
     }
   }
 
@@ -48,29 +35,39 @@ final class Coatings implements AutoCloseable {
 
   /** Fills the tables for a design. */
   void refresh(Design design) {
-    for (int t = 0; t < absorbed.length; t++) {
-      if (boundary(t).isIdeal()) {
+    for (int t = 0; t < tables.size(); t++) {
+      if (tables.get(t) == null) {
         fillIdeal(design, angles.tables().get(t));
       } else {
-        tables.get(t).refresh(design, targets.get(t));
+        tables.get(t).refresh(design, coating);
       }
     }
   }
 
-  private CoatingTable.Target target(int table) {
-    int rows = boundary(table).films().size() + 1;
-    int first = angles.tables().get(table).first();
-    return new CoatingTable.Target() {
-      @Override
-      public void coating(int node, int w, int quantity, double value) {
-        coating[w][Weighing.PER_NODE * (first + node) + quantity] = value;
+  /**
+   * Keeps the light of one wavelength that met films.
+   *
+   * @param met [2 · node + polarisation] of all tables
+   */
+  void keep(int w, double[] met) {
+    for (CoatingTable table : tables) {
+      if (table != null) {
+        table.keep(w, met);
       }
+    }
+  }
 
-      @Override
-      public void film(int node, int w, int film, int polarisation, double value) {
-        absorbed[table][w][(2 * node + polarisation) * rows + film] = value;
+  /**
+   * Adds what stays in films of the light that was kept at every wavelength.
+   *
+   * @param into [row][w] rows of {@link LitDevice#shares}
+   */
+  void addStaying(double[][] into) {
+    for (CoatingTable table : tables) {
+      if (table != null) {
+        table.addStaying(into);
       }
-    };
+    }
   }
 
   private void fillIdeal(Design design, Angles.Table table) {

@@ -12,10 +12,15 @@ record Current(double value, double error) {
 
   /** The current of a row of an estimate; errors at different wavelengths go together. */
   static Current of(Problem problem, Estimate estimate, int row) {
-    double value = current(problem, estimate.mean[row]);
+    return of(problem, estimate, row, 0, problem.wavelengthCount());
+  }
+
+  /** The current of a band of wavelengths, the last not included. */
+  static Current of(Problem problem, Estimate estimate, int row, int from, int to) {
+    double value = current(problem, estimate.mean[row], from, to);
     double squares = 0;
     for (double[][] rows : estimate.replicate) {
-      double off = current(problem, rows[row]) - value;
+      double off = current(problem, rows[row], from, to) - value;
       squares += off * off;
     }
     int count = estimate.replicate.length;
@@ -31,9 +36,9 @@ record Current(double value, double error) {
     return largest;
   }
 
-  private static double current(Problem problem, double[] share) {
+  private static double current(Problem problem, double[] share, int from, int to) {
     double sum = 0;
-    for (int w = 0; w < share.length; w++) {
+    for (int w = from; w < to; w++) {
       sum += problem.incidentMaPerCm2().at(w) * share[w];
     }
     return sum;

@@ -7,6 +7,7 @@ import evensun.spi.Feature;
 import evensun.spi.Problem;
 import evensun.spi.Side;
 import evensun.spi.Texture;
+import java.util.ArrayList;
 import java.util.List;
 
 /** Refuses designs that cannot be evaluated. */
@@ -14,10 +15,23 @@ final class DesignCheck {
 
   private final Problem problem;
   private final long[] checked;
+  private final boolean fromBehind;
+  private final List<Shaped> shaped = new ArrayList<>();
+
+  /** A texture with facets of one angle, and its layer. */
+  private record Shaped(int layer, Texture texture) {}
 
   DesignCheck(Problem problem) {
     this.problem = problem;
     checked = new long[problem.materialCount()];
+    fromBehind = problem.incidences().stream().anyMatch(i -> i.side() == Side.REAR);
+    for (int l = 0; l < problem.layerCount(); l++) {
+      for (Feature feature : problem.layers().get(l).features()) {
+        if (feature instanceof Texture texture && texture.heightMap().isEmpty()) {
+          shaped.add(new Shaped(l, texture));
+        }
+      }
+    }
   }
 
   /**
@@ -33,9 +47,9 @@ final class DesignCheck {
             "layer \"%s\": thicknessNm must be finite and at least 0 nm but was %s",
             problem.layers().get(l).name(), nm);
       }
-      for (Feature feature : problem.layers().get(l).features()) {
-        checkAngle(design, l, feature);
-      }
+    }
+    for (int t = 0; t < shaped.size(); t++) {
+      checkAngle(design, shaped.get(t));
     }
     for (int m = 0; m < checked.length; m++) {
       if (checked[m] != design.revision[m] || checked[m] == 0) {
@@ -46,14 +60,12 @@ final class DesignCheck {
     checkLightFromBehind(design);
   }
 
-  private void checkAngle(Design design, int l, Feature feature) {
-    if (feature instanceof Texture texture && texture.heightMap().isEmpty()) {
-      double angle = texture.facetAngleDeg().in(design);
-      if (!(angle > 0 && angle < 90)) {
-        throw failed(
-            "layer \"%s\": facetAngleDeg must be in (0, 90) degrees but was %s",
-            problem.layers().get(l).name(), angle);
-      }
+  private void checkAngle(Design design, Shaped one) {
+    double angle = one.texture().facetAngleDeg().in(design);
+    if (!(angle > 0 && angle < 90)) {
+      throw failed(
+          "layer \"%s\": facetAngleDeg must be in (0, 90) degrees but was %s",
+          problem.layers().get(one.layer()).name(), angle);
     }
   }
 
@@ -70,8 +82,7 @@ final class DesignCheck {
   }
 
   private void checkLightFromBehind(Design design) {
-    boolean behind = problem.incidences().stream().anyMatch(i -> i.side() == Side.REAR);
-    if (!behind) {
+    if (!fromBehind) {
       return;
     }
     for (double k : design.k[problem.exitMaterial()]) {

@@ -1,5 +1,7 @@
 package evensun.raytrace;
 
+import java.util.Arrays;
+
 /**
  * Means and errors of replicates, made to add up to one.
  *
@@ -22,65 +24,82 @@ final class Estimate {
   /** [w] total before the correction. */
   final double[] total;
 
+  private final double[] rest; // [w] of one replicate
+
   Estimate(int rows, int wavelengths, int replicates) {
     mean = new double[rows][wavelengths];
     error = new double[rows][wavelengths];
     replicate = new double[replicates][rows][wavelengths];
     total = new double[wavelengths];
+    rest = new double[wavelengths];
   }
 
   /**
    * Takes shares over.
    *
-   * @param shares [w][replicate][row]
+   * @param shares [replicate][row][w]
    */
   void take(double[][][] shares) {
-    for (int w = 0; w < total.length; w++) {
-      take(w, shares[w]);
+    takeMeans(shares, replicate.length);
+    for (int r = 0; r < replicate.length; r++) {
+      spread(shares[r], replicate[r]);
+    }
+    for (int row = 0; row < mean.length; row++) {
+      for (int w = 0; w < total.length; w++) {
+        double corrected = mean[row][w] * (total[w] - 1);
+        error[row][w] = Math.sqrt(variance(row, w) + corrected * corrected);
+      }
     }
   }
 
-  private void take(int w, double[][] shares) {
-    int count = replicate.length;
-    total[w] = 0;
+  /** Takes over shares of which replicates were not told apart; errors stay what they were. */
+  void takeTogether(double[][][] shares) {
+    takeMeans(shares, 1);
+  }
+
+  private void takeMeans(double[][][] shares, int count) {
+    Arrays.fill(total, 0);
     for (int row = 0; row < mean.length; row++) {
-      double sum = 0;
+      Arrays.fill(mean[row], 0);
       for (int r = 0; r < count; r++) {
-        sum += shares[r][row];
+        add(shares[r][row], 1.0 / count, mean[row]);
       }
-      mean[row][w] = sum / count;
-      total[w] += mean[row][w];
+      add(mean[row], 1, total);
     }
-    for (int row = 0; row < mean.length; row++) {
-      mean[row][w] /= total[w];
-    }
-    for (int r = 0; r < count; r++) {
-      double rest = 1 - total(shares[r]) / total[w];
-      for (int row = 0; row < mean.length; row++) {
-        replicate[r][row][w] = shares[r][row] / total[w] + mean[row][w] * rest;
+    for (double[] row : mean) {
+      for (int w = 0; w < total.length; w++) {
+        row[w] /= total[w];
       }
-    }
-    for (int row = 0; row < mean.length; row++) {
-      error[row][w] = error(row, w);
     }
   }
 
-  private static double total(double[] shares) {
-    double sum = 0;
-    for (double share : shares) {
-      sum += share;
+  private static void add(double[] from, double times, double[] into) {
+    for (int w = 0; w < into.length; w++) {
+      into[w] += times * from[w];
     }
-    return sum;
   }
 
-  private double error(int row, int w) {
+  private void spread(double[][] shares, double[][] into) {
+    Arrays.fill(rest, 1);
+    for (double[] row : shares) {
+      for (int w = 0; w < rest.length; w++) {
+        rest[w] -= row[w] / total[w];
+      }
+    }
+    for (int row = 0; row < into.length; row++) {
+      for (int w = 0; w < rest.length; w++) {
+        into[row][w] = shares[row][w] / total[w] + mean[row][w] * rest[w];
+      }
+    }
+  }
+
+  /** Square of the standard error that replicates tell. */
+  double variance(int row, int w) {
     double squares = 0;
     for (double[][] rows : replicate) {
       double off = rows[row][w] - mean[row][w];
       squares += off * off;
     }
-    double variance = squares / (replicate.length * (replicate.length - 1.0));
-    double corrected = mean[row][w] * (total[w] - 1);
-    return Math.sqrt(variance + corrected * corrected);
+    return squares / (replicate.length * (replicate.length - 1.0));
   }
 }

@@ -1,5 +1,6 @@
 package evensun.raytrace;
 
+import evensun.raytrace.kernel.Weighing;
 import evensun.raytrace.trace.Angles;
 import evensun.raytrace.trace.IdealShare;
 import evensun.raytrace.trace.SectionTracer;
@@ -26,7 +27,6 @@ final class FacetOptics implements SectionTracer.Optics {
 
   @Override
   public double[] at(int boundary, boolean fromBelow, double cosine) {
-    double[] found = new double[4];
     if (device.boundaries().get(boundary).isIdeal()) {
       double outside = design.n[device.material(design, 0)][wavelength];
       double inside = design.n[device.material(design, 1)][wavelength];
@@ -36,21 +36,11 @@ final class FacetOptics implements SectionTracer.Optics {
     }
     double[] angle = {Math.max(1e-4, cosine)};
     Angles.Table table = new Angles.Table(boundary, fromBelow, angle, 0, new int[] {wavelength});
+    double[][] found = new double[wavelength + 1][];
+    found[wavelength] = new double[Weighing.PER_NODE];
     try (CoatingTable coating = new CoatingTable(problem, device, table, services)) {
-      coating.refresh(
-          design,
-          new CoatingTable.Target() {
-            @Override
-            public void coating(int node, int w, int quantity, double value) {
-              found[quantity] = value;
-            }
-
-            @Override
-            public void film(int node, int w, int film, int polarisation, double value) {
-              // A drawing shows where light goes, not which film it stays in.
-            }
-          });
+      coating.refresh(design, found);
     }
-    return found;
+    return found[wavelength];
   }
 }

@@ -36,8 +36,8 @@ final class Facts {
   List<Quantity> all() {
     List<Quantity> facts = new ArrayList<>();
     Forest forest = lit.traced().forest();
-    double rays = forest.rays() * forest.replicates();
-    facts.add(new Quantity("rayCount", "Rays per wavelength", rays, ""));
+    double rays = (double) forest.rays() / problem.wavelengthCount();
+    facts.add(new Quantity("rayCount", "Rays per wavelength (mean)", rays, ""));
     facts.add(
         new Quantity(
             "meetingCount", "Meetings of rays with facets", (double) forest.meetings(), ""));

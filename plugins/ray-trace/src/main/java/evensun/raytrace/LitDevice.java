@@ -1,6 +1,6 @@
 package evensun.raytrace;
 
-import evensun.raytrace.kernel.FilmSums;
+import evensun.raytrace.kernel.Attenuation;
 import evensun.raytrace.kernel.LightTree;
 import evensun.raytrace.kernel.Weighing;
 import evensun.raytrace.trace.Angles;
@@ -11,7 +11,6 @@ import evensun.spi.Polarisation;
 import evensun.spi.Problem;
 import evensun.spi.Services;
 import java.util.Arrays;
-import java.util.List;
 
 /** One traced beam with coatings: where the light of a design goes. Owned by one thread. */
 final class LitDevice implements AutoCloseable {
@@ -22,10 +21,13 @@ final class LitDevice implements AutoCloseable {
   static final int TRANSMITTED = 1;
   static final int LAYERS = 2;
 
-  /** [w][replicate][row] shares of the light before they are made to add up to one. */
+  /**
+   * [replicate][row][w] shares of the light before they are made to add up to one; where replicates
+   * were not told apart, those of all stand in the first.
+   */
   final double[][][] shares;
 
-  /** [w][replicate][deepest medium] light that left at the top. */
+  /** [replicate][deepest medium][w] light that left at the top. */
   final double[][][] top;
 
   private final Problem problem;
@@ -36,11 +38,11 @@ final class LitDevice implements AutoCloseable {
   private final Slots slots;
   private final Coatings coatings;
   private final Weighing weighing = new Weighing();
-  private final float[][] absorbed; // [w][leg]
+  private final Attenuation[] attenuation; // [w]
   private final double[] absorbedFor; // [m] thickness in µm
+  private final double[] alpha; // [m] per µm
   private final double[] booked;
   private final double[] met;
-  private final double[] staying; // [film] of one table
 
   LitDevice(Problem problem, Traces.Traced traced, Services services) {
     this.problem = problem;
@@ -52,17 +54,14 @@ final class LitDevice implements AutoCloseable {
     coatings = new Coatings(problem, device, angles, services);
     int wavelengths = problem.wavelengthCount();
     int replicates = forest.replicates();
-    shares = new double[wavelengths][replicates][LAYERS + problem.layerCount()];
-    top = new double[wavelengths][replicates][device.mediaCount()];
-    absorbed = new float[wavelengths][];
-    for (int w = 0; w < wavelengths; w++) {
-      absorbed[w] = new float[2 * forest.trees().get(w).count];
-    }
+    shares = new double[replicates][LAYERS + problem.layerCount()][wavelengths];
+    top = new double[replicates][device.mediaCount()][wavelengths];
+    attenuation = forest.trees().stream().map(Attenuation::new).toArray(Attenuation[]::new);
+    alpha = new double[device.mediaCount()];
     absorbedFor = new double[device.mediaCount()];
     Arrays.fill(absorbedFor, Double.NaN);
     booked = new double[slots.count()];
     met = new double[2 * (angles.count() + 1)];
-    staying = new double[problem.layerCount() + 1];
   }
 
   Traces.Traced traced() {
@@ -83,7 +82,7 @@ final class LitDevice implements AutoCloseable {
       absorbedFor[m] = thickness;
     }
     if (!same) {
-      for (int w = 0; w < absorbed.length; w++) {
+      for (int w = 0; w < attenuation.length; w++) {
         pass(design, w);
       }
     }
@@ -91,13 +90,15 @@ final class LitDevice implements AutoCloseable {
 
   private void pass(Design design, int w) {
     LightTree tree = forest.trees().get(w);
-    double[] alpha = alphaPerUm(design, w);
-    for (int leg = 0; leg < absorbed[w].length; leg++) {
-      absorbed[w][leg] = (float) absorbed(tree, leg, alpha);
+    fillAlphaPerUm(design, w);
+    float[] absorbed = attenuation[w].absorbed;
+    for (int leg = 0; leg < absorbed.length; leg++) {
+      absorbed[leg] = (float) absorbed(tree, leg);
     }
+    attenuation[w].settle(tree);
   }
 
-  private double absorbed(LightTree tree, int leg, double[] alpha) {
+  private double absorbed(LightTree tree, int leg) {
     double length = tree.fixedUm[leg];
     if (length == Double.POSITIVE_INFINITY) {
       return 1;
@@ -106,86 +107,95 @@ final class LitDevice implements AutoCloseable {
     return -Math.expm1(-alpha[medium] * (length + tree.perThickness[leg] * absorbedFor[medium]));
   }
 
-  /** [m] absorption coefficient per µm; 0 in the incident medium. */
-  double[] alphaPerUm(Design design, int w) {
-    double[] alpha = new double[device.mediaCount()];
+  /** 0 in the incident medium. */
+  private void fillAlphaPerUm(Design design, int w) {
     for (int m = 1; m < alpha.length; m++) {
-      double k = design.k[device.material(design, m)][w];
-      alpha[m] = 4 * Math.PI * k * 1000 / problem.wavelengthNm().at(w);
+      alpha[m] = alphaPerUm(design, m, w);
     }
-    return alpha;
   }
 
-  /** Follows the light of all wavelengths. */
+  /** Absorption coefficient of a medium per µm. */
+  double alphaPerUm(Design design, int medium, int w) {
+    double k = design.k[device.material(design, medium)][w];
+    return 4 * Math.PI * k * 1000 / problem.wavelengthNm().at(w);
+  }
+
+  /** Follows the light of all wavelengths, replicate by replicate. */
   void solve(Polarisation polarisation) {
-    double rayPower = 1.0 / forest.rays();
-    double s = polarisation == Polarisation.S ? 1 : polarisation == Polarisation.P ? 0 : 0.5;
-    for (int w = 0; w < shares.length; w++) {
-      for (int r = 0; r < forest.replicates(); r++) {
-        follow(w, r, s * rayPower, (1 - s) * rayPower);
-      }
+    int replicates = forest.replicates();
+    for (int r = 0; r < replicates; r++) {
+      solve(polarisation, r, r + 1);
     }
   }
 
-  /** Follows the light of one replicate; its legs can be read from {@link #weighing()}. */
-  void follow(int w, int r, double s, double p) {
+  /** Follows the light of all wavelengths without telling replicates apart. */
+  void solveTogether(Polarisation polarisation) {
+    solve(polarisation, 0, forest.replicates());
+  }
+
+  private void solve(Polarisation polarisation, int from, int to) {
+    double s = polarisation == Polarisation.S ? 1 : polarisation == Polarisation.P ? 0 : 0.5;
+    for (double[] row : shares[from]) {
+      Arrays.fill(row, 0);
+    }
+    for (int w = 0; w < attenuation.length; w++) {
+      LightTree tree = forest.trees().get(w);
+      double rayPower = 1.0 / (tree.rays * (to - from));
+      double inS = s * rayPower;
+      follow(w, tree.start[from], tree.start[to], inS, rayPower - inS, attenuation[w]);
+      collect(w, shares[from], top[from]);
+      coatings.keep(w, met);
+    }
+    coatings.addStaying(shares[from]);
+  }
+
+  /**
+   * Follows the light of one wavelength and replicate; its legs can be read from {@link
+   * #weighing()}.
+   *
+   * @param s power of every ray in s
+   * @param p power of every ray in p
+   * @param other what stays on the ways, as here or otherwise
+   */
+  void follow(int w, int r, double s, double p, Attenuation other) {
+    int[] start = forest.trees().get(w).start;
+    follow(w, start[r], start[r + 1], s, p, other);
+  }
+
+  private void follow(int w, int from, int to, double s, double p, Attenuation other) {
     Arrays.fill(booked, 0);
     Arrays.fill(met, 0);
     weighing.follow(
         forest.trees().get(w),
         angles.nodes().get(w),
-        r,
+        from,
+        to,
         coatings.coating[w],
-        absorbed[w],
+        other,
         s,
         p,
         booked,
         met);
-    collect(w, shares[w][r], top[w][r]);
   }
 
   Weighing weighing() {
     return weighing;
   }
 
-  /** [w][leg] share that stays on the way. */
-  float[][] absorbed() {
-    return absorbed;
+  /** What stays on the ways of a wavelength. */
+  Attenuation attenuation(int w) {
+    return attenuation[w];
   }
 
-  private void collect(int w, double[] share, double[] topShare) {
-    Arrays.fill(share, 0);
+  private void collect(int w, double[][] share, double[][] topShare) {
     for (int m = 0; m < device.mediaCount(); m++) {
-      topShare[m] = booked[slots.top(m)];
-      share[REFLECTED] += topShare[m];
+      topShare[m][w] = booked[slots.top(m)];
+      share[REFLECTED][w] += topShare[m][w];
       if (device.isInner(m)) {
-        share[LAYERS + device.layer(m)] = booked[slots.in(m)];
+        share[LAYERS + device.layer(m)][w] = booked[slots.in(m)];
       }
     }
-    share[TRANSMITTED] = booked[slots.in(device.mediaCount() - 1)];
-    for (int table : angles.at().get(w)) {
-      collectFilms(w, table, share);
-    }
-  }
-
-  private void collectFilms(int w, int index, double[] share) {
-    Angles.Table table = angles.tables().get(index);
-    List<Integer> films = device.boundaries().get(table.boundary()).films();
-    Arrays.fill(staying, 0);
-    FilmSums.add(
-        met,
-        2 * table.first(),
-        2 * table.cosines().length,
-        coatings.absorbed[index][w],
-        films.size() + 1,
-        staying);
-    for (int f = 0; f < films.size(); f++) {
-      share[LAYERS + films.get(f)] += staying[f];
-    }
-    int medium = table.boundary() + (table.fromBelow() ? 1 : 0);
-    if (device.isInner(medium)) {
-      share[LAYERS + device.layer(medium)] += staying[films.size()];
-    }
+    share[TRANSMITTED][w] = booked[slots.in(device.mediaCount() - 1)];
   }
 
   @Override

@@ -1,5 +1,6 @@
 package evensun.raytrace;
 
+import evensun.raytrace.kernel.Attenuation;
 import evensun.raytrace.kernel.LightTree;
 import java.util.OptionalDouble;
 
@@ -26,26 +27,28 @@ final class PathWalk {
    * @param s share of the light in s
    */
   OptionalDouble mean(double s) {
-    float[] absorbed = lit.absorbed()[w];
-    float[] kept = absorbed.clone();
-    for (int leg = 0; leg < absorbed.length; leg++) {
-      boolean inside = tree.slot[leg] == slot && tree.fixedUm[leg] != Float.POSITIVE_INFINITY;
-      absorbed[leg] = inside ? 0 : absorbed[leg];
+    Attenuation clear = new Attenuation(tree);
+    for (int leg = 0; leg < clear.absorbed.length; leg++) {
+      clear.absorbed[leg] = crosses(leg) ? 0 : lit.attenuation(w).absorbed[leg];
     }
+    clear.settle(tree);
     double path = 0;
     double entered = 0;
     for (int r = 0; r + 1 < tree.start.length; r++) {
-      lit.follow(w, r, s, 1 - s);
+      lit.follow(w, r, s, 1 - s, clear);
       for (int leg = 2 * tree.start[r]; leg < 2 * tree.start[r + 1]; leg++) {
-        if (tree.slot[leg] == slot && tree.fixedUm[leg] != Float.POSITIVE_INFINITY) {
+        if (crosses(leg)) {
           double power = lit.weighing().power(leg);
           path += power * (tree.fixedUm[leg] + tree.perThickness[leg] * thicknessUm);
           entered += comesFrom(leg) ? power : 0;
         }
       }
     }
-    System.arraycopy(kept, 0, absorbed, 0, kept.length);
     return entered > 0 ? OptionalDouble.of(path / entered / thicknessUm) : OptionalDouble.empty();
+  }
+
+  private boolean crosses(int leg) {
+    return tree.slot[leg] == slot && tree.fixedUm[leg] != Float.POSITIVE_INFINITY;
   }
 
   /** Whether a leg starts in another medium: its meeting was reached by a leg booked elsewhere. */

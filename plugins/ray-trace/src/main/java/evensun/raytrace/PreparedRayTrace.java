@@ -26,8 +26,7 @@ final class PreparedRayTrace implements PreparedSolver {
     this.services = services;
     channels = IntStream.range(0, problem.layerCount()).mapToObj(Channel::of).toList();
     try {
-      RayCount count = RayCount.choose(problem, start, options, services);
-      traces = new Traces(problem, count.perReplicate());
+      traces = new Traces(problem, RayCounts.choose(problem, start, options, services));
     } catch (EvaluationFailed e) {
       throw new UnsupportedProblem(e.getMessage());
     }

@@ -46,16 +46,16 @@ final class Profile {
    * @param into [z][w] out: absorbed fraction per nm
    */
   void solve(Design design, Polarisation light, int w, double absorptance, double[][] into) {
-    alphaPerUm = lit.alphaPerUm(design, w)[medium];
+    alphaPerUm = lit.alphaPerUm(design, medium, w);
     density = new double[depthUm.length];
     taken = 0;
     double s = light == Polarisation.S ? 1 : light == Polarisation.P ? 0 : 0.5;
     LightTree tree = forest.trees().get(w);
     for (int r = 0; r < forest.replicates(); r++) {
-      lit.follow(w, r, s, 1 - s);
+      lit.follow(w, r, s, 1 - s, lit.attenuation(w));
       for (int leg = 2 * tree.start[r]; leg < 2 * tree.start[r + 1]; leg++) {
         if (tree.slot[leg] == slot) {
-          add(tree, leg, lit.absorbed()[w][leg]);
+          add(tree, leg, lit.attenuation(w).absorbed[leg]);
         }
       }
     }

@@ -47,8 +47,9 @@ final class RayEvaluator implements Evaluator, ReflectanceParts, DepthProfile, R
   @Override
   public void evaluate(Design design, Response into) {
     check.check(design);
+    boolean errors = into.sumStandardError != null || into.absorptanceStandardError != null;
     for (int i = 0; i < beams.length; i++) {
-      solve(ready(design, beams[i]), problem.incidences().get(i));
+      solve(ready(design, beams[i]), problem.incidences().get(i), errors);
       Rows.write(i, estimate.mean, estimate.error, into);
       if (i == 0 && into.sum != null) {
         sum(into);
@@ -85,9 +86,14 @@ final class RayEvaluator implements Evaluator, ReflectanceParts, DepthProfile, R
     }
   }
 
-  private void solve(LitDevice lit, Incidence incidence) {
-    lit.solve(incidence.polarisation());
-    estimate.take(lit.shares);
+  private void solve(LitDevice lit, Incidence incidence, boolean errors) {
+    if (errors) {
+      lit.solve(incidence.polarisation());
+      estimate.take(lit.shares);
+    } else {
+      lit.solveTogether(incidence.polarisation());
+      estimate.takeTogether(lit.shares);
+    }
     if (incidence.side() == Side.REAR) {
       swapOuterRows();
     }
@@ -130,7 +136,7 @@ final class RayEvaluator implements Evaluator, ReflectanceParts, DepthProfile, R
   Estimate estimate(Design design, int incidence) {
     check.check(design);
     Incidence light = problem.incidences().get(incidence);
-    solve(ready(design, beams[incidence]), light);
+    solve(ready(design, beams[incidence]), light, true);
     return estimate;
   }
 
@@ -143,10 +149,10 @@ final class RayEvaluator implements Evaluator, ReflectanceParts, DepthProfile, R
     for (int w = 0; w < neverEntered.length; w++) {
       double never = 0;
       double all = 0;
-      for (double[] top : lit.top[w]) {
+      for (double[][] top : lit.top) {
         for (int m = 0; m < top.length; m++) {
-          never += m < absorber ? top[m] : 0;
-          all += top[m];
+          never += m < absorber ? top[m][w] : 0;
+          all += top[m][w];
         }
       }
       double reflected = found.mean[LitDevice.REFLECTED][w];

@@ -24,7 +24,7 @@ final class Traces {
   private static final int MOST_KEPT = 12;
 
   private final Problem problem;
-  private final int rays; // of each replicate
+  private final int[] rays; // [w] of each replicate
   private final Map<Key, Traced> kept = new LinkedHashMap<>(16, 0.75f, true);
 
   /** What decides a trace. */
@@ -44,9 +44,9 @@ final class Traces {
    */
   record Traced(Device device, List<Face> faces, Forest forest) {}
 
-  Traces(Problem problem, int rays) {
+  Traces(Problem problem, int[] rays) {
     this.problem = problem;
-    this.rays = rays;
+    this.rays = rays.clone();
   }
 
   /** The trace for a design, found once. */

@@ -71,7 +71,8 @@ class PyramidTest {
     double[][] k = {{0}, {50}};
     Media media = new Media(new double[] {0.6}, n, k, new double[2]);
     Forest forest =
-        Forest.trace(List.of(face), media, new Beam(0, false, Side.FRONT), 8, rays / 8, 3);
+        Forest.trace(
+            List.of(face), media, new Beam(0, false, Side.FRONT), 8, new int[] {rays / 8}, 3);
     return forest.trees().get(0);
   }
 

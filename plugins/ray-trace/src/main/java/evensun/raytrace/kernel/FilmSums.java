@@ -6,25 +6,32 @@ public final class FilmSums {
   private FilmSums() {}
 
   /**
-   * Adds up over directions; those without light cost nothing.
+   * Adds what a film takes from a direction.
    *
-   * @param met [first + direction] power from a direction
-   * @param first of the directions
-   * @param directions their number
-   * @param absorbed [direction · films + film] share that a film takes
-   * @param films number of films
-   * @param into [film] added to
+   * @param met [w] power from the direction
+   * @param absorbed [w] share that the film takes
+   * @param into [w] added to
+   * @param count number of wavelengths
    */
-  public static void add(
-      double[] met, int first, int directions, double[] absorbed, int films, double[] into) {
-    for (int d = 0; d < directions; d++) {
-      double power = met[first + d];
-      if (power != 0) {
-        int at = d * films;
-        for (int f = 0; f < films; f++) {
-          into[f] += power * absorbed[at + f];
-        }
-      }
+  public static void add(double[] met, double[] absorbed, double[] into, int count) {
+    for (int w = 0; w < count; w++) {
+      into[w] += met[w] * absorbed[w];
+    }
+  }
+
+  /**
+   * Adds what is neither reflected nor transmitted.
+   *
+   * @param met [w] power from the direction
+   * @param reflected [w] share
+   * @param transmitted [w] share
+   * @param into [w] added to
+   * @param count number of wavelengths
+   */
+  public static void addRest(
+      double[] met, double[] reflected, double[] transmitted, double[] into, int count) {
+    for (int w = 0; w < count; w++) {
+      into[w] += met[w] * (1 - reflected[w] - transmitted[w]);
     }
   }
 }

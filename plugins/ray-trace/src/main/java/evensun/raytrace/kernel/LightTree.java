@@ -47,6 +47,9 @@ public final class LightTree {
   /** [replicate] first event; one more entry closes the last. */
   public final int[] start;
 
+  /** Rays of each replicate. */
+  public final int rays;
+
   /** Takes the arrays over. */
   public LightTree(
       int[] parent,
@@ -57,7 +60,8 @@ public final class LightTree {
       byte[] slot,
       float[] fixedUm,
       float[] perThickness,
-      int[] start) {
+      int[] start,
+      int rays) {
     count = parent.length;
     this.parent = parent;
     this.kept = kept;
@@ -68,5 +72,6 @@ public final class LightTree {
     this.fixedUm = fixedUm;
     this.perThickness = perThickness;
     this.start = start;
+    this.rays = rays;
   }
 }

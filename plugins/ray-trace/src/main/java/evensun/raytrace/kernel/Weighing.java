@@ -8,19 +8,19 @@ public final class Weighing {
 
   private double[] legS = new double[0];
   private double[] legP = new double[0];
-  private double[] legPower = new double[0];
 
   /** For the loop. */
   public Weighing() {}
 
   /**
-   * Follows the light of one replicate.
+   * Follows the light of some meetings.
    *
    * @param tree what it does
    * @param nodes where its meetings look up
-   * @param replicate index of the replicate
+   * @param from first meeting, of a replicate
+   * @param to meeting after the last
    * @param coating [4 · node + quantity] R of s and p, T of s and p
-   * @param absorbed [2 · event + leg] share that stays on the way
+   * @param attenuation what stays on the ways
    * @param rootS power of every ray in s
    * @param rootP power of every ray in p
    * @param booked [slot] out: power that stayed
@@ -30,9 +30,10 @@ public final class Weighing {
   public void follow(
       LightTree tree,
       Nodes nodes,
-      int replicate,
+      int from,
+      int to,
       double[] coating,
-      float[] absorbed,
+      Attenuation attenuation,
       double rootS,
       double rootP,
       double[] booked,
@@ -40,19 +41,18 @@ public final class Weighing {
     if (legS.length < 2 * tree.count) {
       legS = new double[2 * tree.count];
       legP = new double[2 * tree.count];
-      legPower = new double[2 * tree.count];
     }
     follow(
-        tree.start[replicate],
-        tree.start[replicate + 1],
+        from,
+        to,
         tree.parent,
         tree.kept,
-        tree.factor,
+        attenuation.arriving,
         tree.slot,
         nodes.index,
         nodes.share,
         coating,
-        absorbed,
+        attenuation.absorbed,
         rootS,
         rootP,
         booked,
@@ -65,7 +65,7 @@ public final class Weighing {
       int to,
       int[] parent,
       float[] kept,
-      float[] factor,
+      double[] arriving,
       byte[] slot,
       int[] index,
       float[] share,
@@ -77,14 +77,13 @@ public final class Weighing {
       double[] met) {
     double[] s = legS;
     double[] p = legP;
-    double[] power = legPower;
     for (int e = from; e < to; e++) {
       int by = parent[e];
       double s0 = by < 0 ? rootS : s[by];
       double p0 = by < 0 ? rootP : p[by];
       double turned = (1 - kept[e]) * (p0 - s0);
-      double inS = factor[e] * (s0 + turned);
-      double inP = factor[e] * (p0 - turned);
+      double inS = arriving[e] * (s0 + turned);
+      double inP = arriving[e] * (p0 - turned);
       double highS = inS * share[e];
       double highP = inP * share[e];
       double lowS = inS - highS;
@@ -100,22 +99,18 @@ public final class Weighing {
       double throughS = lowS * coating[at + 2] + highS * coating[at + 6];
       double throughP = lowP * coating[at + 3] + highP * coating[at + 7];
       int leg = 2 * e;
-      double lost = absorbed[leg];
-      s[leg] = reflectedS * (1 - lost);
-      p[leg] = reflectedP * (1 - lost);
-      power[leg] = reflectedS + reflectedP;
-      booked[slot[leg]] += power[leg] * lost;
+      s[leg] = reflectedS;
+      p[leg] = reflectedP;
+      booked[slot[leg]] += (reflectedS + reflectedP) * absorbed[leg];
       leg++;
-      lost = absorbed[leg];
-      s[leg] = throughS * (1 - lost);
-      p[leg] = throughP * (1 - lost);
-      power[leg] = throughS + throughP;
-      booked[slot[leg]] += power[leg] * lost;
+      s[leg] = throughS;
+      p[leg] = throughP;
+      booked[slot[leg]] += (throughS + throughP) * absorbed[leg];
     }
   }
 
-  /** Power at the start of a leg of the replicate followed last, both polarisations. */
+  /** Power at the start of a leg of the meetings followed last, both polarisations. */
   public double power(int leg) {
-    return legPower[leg];
+    return legS[leg] + legP[leg];
   }
 }

@@ -12,15 +12,13 @@ import java.util.List;
  * and where meetings look up in them.
  *
  * @param tables all tables
- * @param at [w] tables that light of a wavelength comes to
  * @param nodes [w] where meetings look up
  * @param count number of nodes of all tables
  * @param freshBoundary the boundary that light from outside comes to first
  */
-public record Angles(
-    List<Table> tables, List<List<Integer>> at, List<Nodes> nodes, int count, int freshBoundary) {
+public record Angles(List<Table> tables, List<Nodes> nodes, int count, int freshBoundary) {
 
-  /** Wavelengths with less than this share of the most meetings have a table of their own. */
+  /** Wavelengths with less than this share of the most meetings of a ray share another table. */
   private static final double SPARSE = 0.1;
 
   /**
@@ -51,7 +49,6 @@ public record Angles(
     private final Media media;
     private final List<LightTree> trees;
     private final List<Table> tables = new ArrayList<>();
-    private final List<List<Integer>> at = new ArrayList<>();
     private final List<Nodes> nodes = new ArrayList<>();
     private int count;
 
@@ -59,23 +56,22 @@ public record Angles(
       this.media = media;
       this.trees = trees;
       for (LightTree tree : trees) {
-        at.add(new ArrayList<>());
         nodes.add(new Nodes(new int[tree.count], new float[tree.count]));
       }
     }
 
     void add(int kind, int boundary, boolean fromBelow, boolean ideal) {
-      int[] meetings = new int[trees.size()];
-      int most = 0;
+      double[] meetings = new double[trees.size()]; // of one ray
+      double most = 0;
       for (int w = 0; w < meetings.length; w++) {
         for (byte met : trees.get(w).table) {
-          meetings[w] += met == kind ? 1 : 0;
+          meetings[w] += met == kind ? 1.0 / trees.get(w).rays : 0;
         }
         most = Math.max(most, meetings[w]);
       }
       double border = SPARSE * most;
-      int[] dense = wavelengths(meetings, Math.max(1, border), Double.MAX_VALUE);
-      int[] sparse = wavelengths(meetings, 1, border);
+      int[] dense = wavelengths(meetings, Math.max(Double.MIN_VALUE, border), Double.MAX_VALUE);
+      int[] sparse = wavelengths(meetings, Double.MIN_VALUE, border);
       for (int[] lit : List.of(dense, sparse)) {
         if (lit.length > 0) {
           AngleNodes chooser = chooser(boundary, fromBelow, lit);
@@ -86,7 +82,7 @@ public record Angles(
       }
     }
 
-    private static int[] wavelengths(int[] meetings, double least, double below) {
+    private static int[] wavelengths(double[] meetings, double least, double below) {
       List<Integer> found = new ArrayList<>();
       for (int w = 0; w < meetings.length; w++) {
         if (meetings[w] >= least && meetings[w] < below) {
@@ -123,7 +119,6 @@ public record Angles(
     private void add(int kind, Table table, AngleNodes chooser) {
       for (int i = 0; i < table.lit().length; i++) {
         int w = table.lit()[i];
-        at.get(w).add(tables.size());
         LightTree tree = trees.get(w);
         Nodes into = nodes.get(w);
         for (int e = 0; e < tree.count; e++) {
@@ -139,7 +134,7 @@ public record Angles(
     }
 
     Angles make(int freshBoundary) {
-      return new Angles(tables, at, nodes, count, freshBoundary);
+      return new Angles(tables, nodes, count, freshBoundary);
     }
   }
 }

@@ -30,11 +30,11 @@ public record Face(
 
   /** How far it reaches above its mean plane, in µm. */
   public double aboveMeanUm() {
-    return relief.map(r -> r.highUm() - r.meanUm()).orElse(0.0);
+    return relief.isPresent() ? relief.get().highUm() - relief.get().meanUm() : 0;
   }
 
   /** How far it reaches below its mean plane, in µm. */
   public double belowMeanUm() {
-    return relief.map(r -> r.meanUm() - r.lowUm()).orElse(0.0);
+    return relief.isPresent() ? relief.get().meanUm() - relief.get().lowUm() : 0;
   }
 }

@@ -20,12 +20,12 @@ import java.util.Queue;
 final class Tracer {
 
   /** Guessed power below which light goes on by lot. */
-  private static final double WEAK = 0.2;
+  private static final double WEAK = 0.4;
 
   /**
    * Least share guessed for a leg that is possible: a film may send more light there than guessed.
    */
-  private static final double LEAST_SHARE = 0.05;
+  private static final double LEAST_SHARE = 0.02;
 
   /** Optical depth after which no light is left: 3e-7 of it. */
   private static final double OPAQUE = 15;
@@ -71,7 +71,7 @@ final class Tracer {
         meet(open.remove());
       }
     }
-    return tree.build();
+    return tree.build(rays);
   }
 
   private boolean arrives(Leg leg) {

@@ -61,7 +61,7 @@ final class TreeBuilder {
     perThickness = Arrays.copyOf(perThickness, 2 * size);
   }
 
-  LightTree build() {
+  LightTree build(int rays) {
     start[start.length - 1] = count;
     return new LightTree(
         Arrays.copyOf(parent, count),
@@ -72,6 +72,7 @@ final class TreeBuilder {
         Arrays.copyOf(slot, 2 * count),
         Arrays.copyOf(fixedUm, 2 * count),
         Arrays.copyOf(perThickness, 2 * count),
-        start);
+        start,
+        rays);
   }
 }

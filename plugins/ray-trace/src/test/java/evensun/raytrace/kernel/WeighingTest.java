@@ -20,19 +20,21 @@ class WeighingTest {
             new byte[] {3, 2, 2, 1},
             new float[4],
             new float[4],
-            new int[] {0, 2});
+            new int[] {0, 2},
+            1);
     Nodes nodes = new Nodes(new int[] {0, 1}, new float[] {0, 0.5f});
     // Node by node: R of s and p, T of s and p; one to spare.
     double[] coating = {0.1, 0.2, 0.9, 0.8, 0.3, 0.3, 0.6, 0.5, 0.5, 0.7, 0.4, 0.1, 0, 0, 0, 0};
-    float[] absorbed = {1, 0.5f, 0.25f, 1};
+    Attenuation attenuation = new Attenuation(tree);
+    System.arraycopy(new float[] {1, 0.5f, 0.25f, 1}, 0, attenuation.absorbed, 0, 4);
+    attenuation.settle(tree);
     double[] booked = new double[4];
     double[] met = new double[8];
     Weighing weighing = new Weighing();
-    weighing.follow(tree, nodes, 0, coating, absorbed, 0.6, 0.4, booked, met);
+    weighing.follow(tree, nodes, 0, 2, coating, attenuation, 0.6, 0.4, booked, met);
 
     // First meeting: s 0.06 and p 0.08 reflected and booked in slot 3; s 0.54 and p 0.32 go
-    // through,
-    // half of both is absorbed in slot 2, s 0.27 and p 0.16 arrive.
+    // through, half of both is absorbed in slot 2, s 0.27 and p 0.16 arrive.
     assertThat(booked[3]).isCloseTo(0.14, within(1e-12));
     // A quarter keeps its polarisation, and a lot of 1 in 2 doubles: s 2 · (0.0675 + 0.12).
     double s = 0.375;
