@@ -116,6 +116,18 @@ class DistributionIT {
     assertThat(stale).isEqualTo(with);
   }
 
+  /** The virtual machine itself tells with which settings it runs. */
+  @Test
+  void longWorkAndShortWorkStartTheirOwnWay() {
+    assertThat(flags("design")).containsPattern("Tier4InvocationThreshold += 50000 ");
+    assertThat(flags("assess")).containsPattern("TieredStopAtLevel += 1 ");
+  }
+
+  private String flags(String command) {
+    Map<String, String> print = Map.of("EVENSUN_JAVA_OPTS", "-XX:+PrintFlagsFinal");
+    return Distribution.run(launcher, work, print, command, "--help").out();
+  }
+
   @Test
   void aMissingJavaIsNamed() throws IOException {
     Run run = Distribution.run(launcher, work, withoutJava("none"), "--version");
