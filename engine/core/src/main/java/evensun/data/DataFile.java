@@ -13,6 +13,9 @@ import java.util.Optional;
 /**
  * A data file that ships with the program: lines {@code # key: value}, one line of column names,
  * rows of numbers separated by commas. Keys may repeat. Immutable.
+ *
+ * <p>Plain loops here and where these files are made use of: a scenario waits for them, and lambdas
+ * and streams are slow to start.
  */
 public final class DataFile {
 
@@ -61,13 +64,20 @@ public final class DataFile {
       int end = lineEnd(bytes, at);
       String line = new String(bytes, at, end - at, StandardCharsets.UTF_8);
       int colon = line.indexOf(": ");
-      header
-          .computeIfAbsent(line.substring(2, colon), key -> new ArrayList<>())
-          .add(line.substring(colon + 2).strip());
+      add(header, line.substring(2, colon), line.substring(colon + 2).strip());
       at = end + 1;
     }
     return new DataFile(
         name, header, rows && at < bytes.length ? columns(bytes, at) : new double[0][]);
+  }
+
+  private static void add(Map<String, List<String>> header, String key, String value) {
+    List<String> values = header.get(key);
+    if (values == null) {
+      values = new ArrayList<>();
+      header.put(key, values);
+    }
+    values.add(value);
   }
 
   private static int lineEnd(byte[] bytes, int from) {
@@ -81,10 +91,7 @@ public final class DataFile {
   /** The numbers after a line of column names. */
   private static double[][] columns(byte[] bytes, int from) {
     int at = lineEnd(bytes, from);
-    int count = 1;
-    for (int i = from; i < at; i++) {
-      count += bytes[i] == ',' ? 1 : 0;
-    }
+    int count = fields(bytes, from, at);
     int size = 0;
     for (int i = at + 1; i < bytes.length; i++) {
       size += bytes[i] == '\n' ? 1 : 0;
@@ -104,7 +111,8 @@ public final class DataFile {
 
   /** The first value of a key, or empty. */
   public Optional<String> value(String key) {
-    return values(key).stream().findFirst();
+    List<String> values = values(key);
+    return values.isEmpty() ? Optional.empty() : Optional.of(values.get(0));
   }
 
   /** All values of a key, in order. */
@@ -118,8 +126,35 @@ public final class DataFile {
    * @throws IllegalStateException when it is not: the program is damaged
    */
   public String required(String key) {
-    return value(key)
-        .orElseThrow(() -> new IllegalStateException("data file " + name + " lacks " + key));
+    List<String> values = values(key);
+    if (values.isEmpty()) {
+      throw new IllegalStateException("data file " + name + " lacks " + key);
+    }
+    return values.get(0);
+  }
+
+  /** The numbers of a value that must be there, separated by commas. */
+  public double[] numbers(String key) {
+    return numbersIn(required(key));
+  }
+
+  /** Numbers separated by commas. */
+  public static double[] numbersIn(String text) {
+    byte[] bytes = text.getBytes(StandardCharsets.US_ASCII);
+    double[] numbers = new double[fields(bytes, 0, bytes.length)];
+    Decimals decimals = new Decimals(bytes, 0);
+    for (int i = 0; i < numbers.length; i++) {
+      numbers[i] = decimals.next();
+    }
+    return numbers;
+  }
+
+  private static int fields(byte[] bytes, int from, int to) {
+    int count = 1;
+    for (int i = from; i < to; i++) {
+      count += bytes[i] == ',' ? 1 : 0;
+    }
+    return count;
   }
 
   /** [row] a column; a fresh array. */

@@ -2,7 +2,6 @@ package evensun.material;
 
 import evensun.data.DataFile;
 import java.util.ArrayList;
-import java.util.Arrays;
 import java.util.List;
 
 /**
@@ -52,7 +51,7 @@ final class Alloy implements GapCurves {
     double[][] columns = {file.column(1), file.column(2), file.column(3)};
     List<Member> members = new ArrayList<>();
     for (String points : file.values("critical-points")) {
-      double[] p = Arrays.stream(points.split(",")).mapToDouble(Double::parseDouble).toArray();
+      double[] p = DataFile.numbersIn(points);
       int from = 0;
       while (fraction[from] != p[0]) {
         from++;

@@ -6,8 +6,8 @@ import evensun.material.table.OpticalTable;
 import evensun.spi.Finding;
 import evensun.spi.Severity;
 import java.util.ArrayList;
-import java.util.Arrays;
 import java.util.List;
+import java.util.Optional;
 import java.util.OptionalDouble;
 
 /** Makes materials of the program's own data files. */
@@ -30,12 +30,8 @@ final class LibraryFile {
     return switch (file.value("model").orElse("table")) {
       case "table" -> table(file, record);
       case "constant" -> constant(file, record);
-      case "sum" -> ModelMaterial.of(record, LibraryTerms.dispersion(file));
-      case "moved-edge" ->
-          tunable(
-              file,
-              record,
-              new MovedEdge(file.values("anchor").stream().map(EdgeShape::load).toList()));
+      case "sum" -> ModelMaterial.of(record, LibraryTerms.dispersion(file), gap(file));
+      case "moved-edge" -> tunable(file, record, MovedEdge.load(file.values("anchor")));
       case "alloy" -> tunable(file, record, Alloy.load(file.required("shape")));
       case "ideal" -> ideal(file, record);
       default -> throw new IllegalStateException("unknown model in " + resource);
@@ -43,7 +39,7 @@ final class LibraryFile {
   }
 
   private static MaterialRecord record(DataFile file) {
-    double[] range = numbers(file.value("range-nm").orElse("100,100000"));
+    double[] range = DataFile.numbersIn(file.value("range-nm").orElse("100,100000"));
     List<String> notes = new ArrayList<>();
     for (String key : List.of("cleaned", "extended", "bandgap-note", "note")) {
       String lead = key.equals("cleaned") || key.equals("extended") ? key + " " : "";
@@ -51,8 +47,9 @@ final class LibraryFile {
         notes.add(lead.concat(value));
       }
     }
-    file.value("largest-interpolation-error")
-        .ifPresent(value -> notes.add("largest interpolation error: " + value));
+    for (String value : file.values("largest-interpolation-error")) {
+      notes.add("largest interpolation error: ".concat(value));
+    }
     return new MaterialRecord(
         file.required("name"),
         file.required("title"),
@@ -83,12 +80,14 @@ final class LibraryFile {
 
   private static Material table(DataFile file, MaterialRecord record) {
     OpticalTable table = OpticalTable.of(file.column(0), file.column(1), file.column(2));
-    OptionalDouble gap =
-        file.value("bandgap-ev")
-            .map(value -> OptionalDouble.of(Double.parseDouble(value)))
-            .orElse(OptionalDouble.empty());
-    boolean direct = gap.isPresent() && file.value("bandgap-note").isEmpty();
-    return TableMaterial.of(record, table, false, direct ? Bandgap.of(table) : gap);
+    return TableMaterial.of(record, table, false, gap(file));
+  }
+
+  /** The gap as the header holds it, found beforehand by {@link Bandgap}. */
+  private static OptionalDouble gap(DataFile file) {
+    return file.value("bandgap-ev").isPresent()
+        ? OptionalDouble.of(file.numbers("bandgap-ev")[0])
+        : OptionalDouble.empty();
   }
 
   private static Material constant(DataFile file, MaterialRecord record) {
@@ -100,12 +99,12 @@ final class LibraryFile {
   }
 
   private static Material tunable(DataFile file, MaterialRecord record, GapCurves curves) {
-    return new TunableMaterial(
-        record,
-        tuning(file),
-        curves,
-        file.values("marked-ev").stream().map(LibraryFile::marked).toList(),
-        file.value("miss-ev").map(LibraryFile::numbers).orElse(new double[0]));
+    List<TunableMaterial.MarkedRange> marked = new ArrayList<>();
+    for (String value : file.values("marked-ev")) {
+      marked.add(marked(value));
+    }
+    double[] missEv = file.value("miss-ev").isPresent() ? file.numbers("miss-ev") : new double[0];
+    return new TunableMaterial(record, tuning(file), curves, marked, missEv);
   }
 
   private static Material ideal(DataFile file, MaterialRecord record) {
@@ -117,15 +116,19 @@ final class LibraryFile {
   }
 
   private static Tuning tuning(DataFile file) {
-    double[] tuning = numbers(file.required("tuning-ev"));
+    double[] tuning = file.numbers("tuning-ev");
+    Optional<String> composition = file.value("composition");
     return new Tuning(
-        tuning[0], tuning[1], tuning[2], file.value("composition").map(LibraryFile::composition));
+        tuning[0],
+        tuning[1],
+        tuning[2],
+        composition.isPresent() ? Optional.of(composition(composition.get())) : Optional.empty());
   }
 
   /** Element and the three coefficients of the bandgap by its fraction. */
   private static Composition composition(String value) {
     String[] parts = value.split(",", 2);
-    double[] ev = numbers(parts[1]);
+    double[] ev = DataFile.numbersIn(parts[1]);
     return new Composition(parts[0], ev[0], ev[1], ev[2]);
   }
 
@@ -133,9 +136,5 @@ final class LibraryFile {
     String[] parts = value.split(",", 3);
     return new TunableMaterial.MarkedRange(
         Double.parseDouble(parts[0]), Double.parseDouble(parts[1]), parts[2]);
-  }
-
-  private static double[] numbers(String value) {
-    return Arrays.stream(value.split(",")).mapToDouble(Double::parseDouble).toArray();
   }
 }

@@ -14,7 +14,6 @@ final class LibraryTerms {
 
   private LibraryTerms() {}
 
-  // Plain loops here and in the index: a scenario waits for them, and lambdas are slow to start.
   static Dispersion dispersion(DataFile file) {
     List<Term> terms = new ArrayList<>();
     for (String text : file.values("term")) {

@@ -3,6 +3,7 @@ package evensun.material;
 import evensun.light.Constants;
 import evensun.material.dispersion.Dispersion;
 import evensun.material.dispersion.ForouhiBloomer;
+import evensun.material.dispersion.Term;
 import evensun.material.table.Bandgap;
 import evensun.spi.Finding;
 import evensun.spi.Severity;
@@ -19,18 +20,27 @@ public final class ModelMaterial implements Material {
 
   private final MaterialRecord record;
   private final Dispersion dispersion;
+  private final OptionalDouble bandgapEv;
 
-  private ModelMaterial(MaterialRecord record, Dispersion dispersion) {
+  private ModelMaterial(MaterialRecord record, Dispersion dispersion, OptionalDouble bandgapEv) {
     this.record = record;
     this.dispersion = dispersion;
+    this.bandgapEv = bandgapEv;
   }
 
   /** A material of a formula; its record says over which wavelengths the formula holds. */
   public static ModelMaterial of(MaterialRecord record, Dispersion dispersion) {
-    return new ModelMaterial(record, dispersion);
+    return of(
+        record, dispersion, Bandgap.of(ev -> alphaPerCm(dispersion, ev), LOWEST_EV, HIGHEST_EV));
   }
 
-  private double alphaPerCm(double ev) {
+  /** A material whose bandgap is stated, or that has none. */
+  public static ModelMaterial of(
+      MaterialRecord record, Dispersion dispersion, OptionalDouble bandgapEv) {
+    return new ModelMaterial(record, dispersion, bandgapEv);
+  }
+
+  private static double alphaPerCm(Dispersion dispersion, double ev) {
     double[] index = new double[2];
     dispersion.index(ev, index);
     return 4e7 * Math.PI * index[1] * ev / Constants.HC_EV_NM;
@@ -53,7 +63,7 @@ public final class ModelMaterial implements Material {
 
   @Override
   public OptionalDouble bandgapEv() {
-    return Bandgap.of(this::alphaPerCm, LOWEST_EV, HIGHEST_EV);
+    return bandgapEv;
   }
 
   @Override
@@ -85,8 +95,7 @@ public final class ModelMaterial implements Material {
         break;
       }
     }
-    boolean leaks = dispersion.terms().stream().anyMatch(ForouhiBloomer.class::isInstance);
-    if (leaks) {
+    if (leaks()) {
       findings.add(
           new Finding(
               "model-absorbs-below-gap",
@@ -96,5 +105,14 @@ public final class ModelMaterial implements Material {
                   + " the material is transparent; tauc-lorentz does not"));
     }
     return findings;
+  }
+
+  private boolean leaks() {
+    for (Term term : dispersion.terms()) {
+      if (term instanceof ForouhiBloomer) {
+        return true;
+      }
+    }
+    return false;
   }
 }

@@ -1,5 +1,6 @@
 package evensun.material;
 
+import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 
@@ -17,6 +18,15 @@ final class MovedEdge implements GapCurves {
 
   MovedEdge(List<EdgeShape> anchors) {
     this.anchors = List.copyOf(anchors);
+  }
+
+  /** Curves between the shapes of these names, by rising gap. */
+  static MovedEdge load(List<String> names) {
+    List<EdgeShape> anchors = new ArrayList<>();
+    for (String name : names) {
+      anchors.add(EdgeShape.load(name));
+    }
+    return new MovedEdge(anchors);
   }
 
   @Override

@@ -4,13 +4,11 @@ import evensun.spi.Finding;
 import evensun.spi.Severity;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.regex.Matcher;
-import java.util.regex.Pattern;
 
 /** What the record of a built-in material says to whoever uses it on a grid. */
 final class RecordFindings {
 
-  private static final Pattern RANGE = Pattern.compile("extended (\\d+) to (\\d+) nm: .*");
+  private static final String EXTENDED = "extended ";
 
   private RecordFindings() {}
 
@@ -28,8 +26,7 @@ final class RecordFindings {
                   + " of your own film before a decision rests on this layer"));
     }
     for (String note : record.notes()) {
-      Matcher range = RANGE.matcher(note);
-      if (range.matches() && reaches(range, wavelengthNm)) {
+      if (note.startsWith(EXTENDED) && reaches(note, wavelengthNm)) {
         findings.add(
             new Finding(
                 "material-extended",
@@ -44,10 +41,11 @@ final class RecordFindings {
     return findings;
   }
 
-  /** Whether the grid reaches more than 1 nm into an extended range. */
-  private static boolean reaches(Matcher range, double[] wavelengthNm) {
-    double from = Double.parseDouble(range.group(1));
-    double to = Double.parseDouble(range.group(2));
-    return wavelengthNm[0] < to - 1 && wavelengthNm[wavelengthNm.length - 1] > from + 1;
+  /** Whether the grid reaches more than 1 nm into the range of "extended FROM to TO nm: …". */
+  private static boolean reaches(String note, double[] wavelengthNm) {
+    int to = note.indexOf(" to ");
+    double fromNm = Double.parseDouble(note.substring(EXTENDED.length(), to));
+    double toNm = Double.parseDouble(note.substring(to + 4, note.indexOf(" nm: ")));
+    return wavelengthNm[0] < toNm - 1 && wavelengthNm[wavelengthNm.length - 1] > fromNm + 1;
   }
 }

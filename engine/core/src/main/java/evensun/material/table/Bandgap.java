@@ -45,10 +45,7 @@ public final class Bandgap {
    */
   public static OptionalDouble of(DoubleUnaryOperator alphaPerCm, double lowEv, double highEv) {
     double[] alpha = new double[(int) ((highEv - lowEv) / STEP_EV) + 1];
-    for (int i = 0; i < alpha.length; i++) {
-      alpha[i] = alphaPerCm.applyAsDouble(lowEv + i * STEP_EV);
-    }
-    int edge = edge(alpha);
+    int edge = edge(alphaPerCm, lowEv, alpha);
     return edge < 0
         ? OptionalDouble.empty()
         : steepest(
@@ -58,9 +55,11 @@ public final class Bandgap {
             Math.min(alpha.length - HALF_WINDOW - 1, edge + ABOVE));
   }
 
-  private static int edge(double[] alpha) {
+  /** Where α passes the edge for good, or −1; fills α as far as this takes. */
+  private static int edge(DoubleUnaryOperator alphaPerCm, double lowEv, double[] alpha) {
     int since = -1;
     for (int i = 0; i < alpha.length; i++) {
+      alpha[i] = alphaPerCm.applyAsDouble(lowEv + i * STEP_EV);
       if (alpha[i] < EDGE_PER_CM) {
         since = -1;
       } else if (since < 0) {
