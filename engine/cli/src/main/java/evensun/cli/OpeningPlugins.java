@@ -1,6 +1,7 @@
 package evensun.cli;
 
 import evensun.pluginhost.PluginHost;
+import evensun.run.BuildInfo;
 import java.util.concurrent.ExecutionException;
 import java.util.concurrent.FutureTask;
 
@@ -11,9 +12,15 @@ final class OpeningPlugins implements AutoCloseable {
 
   OpeningPlugins(Evensun evensun) {
     this.host = new FutureTask<>(() -> Plugins.open(evensun));
-    Thread aside = new Thread(host, "plugins");
+    Thread aside = new Thread(this::prepare, "plugins");
     aside.setDaemon(true);
     aside.start();
+  }
+
+  /** Loads the plugins, then works out what the record of the run will want to know. */
+  private void prepare() {
+    host.run();
+    BuildInfo.fingerprint();
   }
 
   /** The plugins, once they are loaded; whatever went wrong with their places is thrown here. */

@@ -8,11 +8,14 @@ import java.net.URISyntaxException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.Properties;
+import java.util.concurrent.ExecutionException;
+import java.util.concurrent.FutureTask;
 
 /** What this build is. */
 public final class BuildInfo {
 
   private static final Properties PROPERTIES = load();
+  private static final FutureTask<String> FINGERPRINT = new FutureTask<>(BuildInfo::hash);
 
   private BuildInfo() {}
 
@@ -21,17 +24,27 @@ public final class BuildInfo {
     return PROPERTIES.getProperty("version");
   }
 
-  /** First 12 digits of the SHA-256 of the core's jar; {@code "classes"} outside a jar. */
+  /**
+   * First 12 digits of the SHA-256 of the core's jar; {@code "classes"} outside a jar. Worked out
+   * by the first thread that asks; that takes a while, so ask aside when it will be needed.
+   */
   public static String fingerprint() {
+    FINGERPRINT.run();
     try {
-      Path jar =
-          Path.of(BuildInfo.class.getProtectionDomain().getCodeSource().getLocation().toURI());
-      return Files.isRegularFile(jar)
-          ? InputFiles.sha256(Files.readAllBytes(jar)).substring(0, 12)
-          : "classes";
-    } catch (URISyntaxException | IOException e) {
+      return FINGERPRINT.get();
+    } catch (ExecutionException e) {
+      return "unknown";
+    } catch (InterruptedException e) {
+      Thread.currentThread().interrupt();
       return "unknown";
     }
+  }
+
+  private static String hash() throws URISyntaxException, IOException {
+    Path jar = Path.of(BuildInfo.class.getProtectionDomain().getCodeSource().getLocation().toURI());
+    return Files.isRegularFile(jar)
+        ? InputFiles.sha256(Files.readAllBytes(jar)).substring(0, 12)
+        : "classes";
   }
 
   private static Properties load() {
