@@ -32,7 +32,7 @@ final class Browser implements AutoCloseable {
   }
 
   /** Starts a browser, or ends the test: skipped, or failed where a browser is required. */
-  static Browser start(boolean dark) throws IOException {
+  static Browser start() throws IOException {
     boolean there = Files.isExecutable(CHROMIUM) && Files.isExecutable(DRIVER);
     if (!there && !"true".equals(System.getenv("EVENSUN_REQUIRE_BROWSER"))) {
       System.err.println("SKIPPED: no browser at " + CHROMIUM + "; pages are not tested");
@@ -41,14 +41,14 @@ final class Browser implements AutoCloseable {
     if (!there) {
       throw new AssertionError("EVENSUN_REQUIRE_BROWSER is set, but there is no " + CHROMIUM);
     }
-    return new Browser(new ChromeDriver(service(), options(dark)));
+    return new Browser(new ChromeDriver(service(), options()));
   }
 
   private static ChromeDriverService service() {
     return new ChromeDriverService.Builder().usingDriverExecutable(DRIVER.toFile()).build();
   }
 
-  private static ChromeOptions options(boolean dark) throws IOException {
+  private static ChromeOptions options() throws IOException {
     ChromeOptions options = new ChromeOptions();
     options.setBinary(CHROMIUM.toFile());
     options.addArguments(
@@ -59,9 +59,6 @@ final class Browser implements AutoCloseable {
         "--no-first-run",
         "--disable-dev-shm-usage",
         "--user-data-dir=" + Files.createTempDirectory("browser"));
-    if (dark) {
-      options.addArguments("--blink-settings=preferredColorScheme=0");
-    }
     LoggingPreferences logs = new LoggingPreferences();
     logs.enable(LogType.BROWSER, java.util.logging.Level.ALL);
     logs.enable(LogType.PERFORMANCE, java.util.logging.Level.ALL);
@@ -76,8 +73,15 @@ final class Browser implements AutoCloseable {
     driver.manage().timeouts().scriptTimeout(Duration.ofSeconds(60));
     runLater(
         "var done = arguments[arguments.length - 1]; (function wait() {"
-            + " document.documentElement.dataset.drawn ? done() : setTimeout(wait, 20); })()");
+            + " document.documentElement.dataset.drawn || document.readyState === 'complete' &&"
+            + " !document.scripts.length ? done() : setTimeout(wait, 20); })()");
     return Duration.ofNanos(System.nanoTime() - start);
+  }
+
+  /** What the reader's system prefers: {@code light} or {@code dark}. */
+  void scheme(String name) {
+    Map<String, Object> feature = Map.of("name", "prefers-color-scheme", "value", name);
+    driver.executeCdpCommand("Emulation.setEmulatedMedia", Map.of("features", List.of(feature)));
   }
 
   void width(int px) {

@@ -26,7 +26,7 @@ class PageByHandTest {
 
   @BeforeAll
   void start() throws IOException {
-    browser = Browser.start(false);
+    browser = Browser.start();
     Path file = folder.resolve("hand.html");
     Files.writeString(file, Written.page(SampleRuns.full()));
     browser.width(1280);
@@ -133,7 +133,7 @@ class PageByHandTest {
 
   @Test
   void aComparisonIsAsQuietAsAReport() throws IOException {
-    try (Browser own = Browser.start(false)) {
+    try (Browser own = Browser.start()) {
       Path file = folder.resolve("comparison.html");
       List<NamedRun> runs =
           List.of(

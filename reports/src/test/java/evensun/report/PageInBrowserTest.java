@@ -6,8 +6,6 @@ import evensun.report.page.Block;
 import evensun.report.text.Numbers;
 import evensun.result.RunResult;
 import java.io.IOException;
-import java.io.InputStream;
-import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
@@ -20,7 +18,6 @@ import org.junit.jupiter.api.TestInstance.Lifecycle;
 import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
-import org.junit.jupiter.params.provider.ValueSource;
 
 /**
  * Pages as a browser sees them. Outside witness: the browser itself, and the result's own numbers.
@@ -33,7 +30,7 @@ class PageInBrowserTest {
 
   @BeforeAll
   void start() throws IOException {
-    browser = Browser.start(false);
+    browser = Browser.start();
   }
 
   @AfterAll
@@ -197,33 +194,6 @@ class PageInBrowserTest {
                     + "document.querySelectorAll('.still')].filter(s => s.offsetHeight >"
                     + " 100).length), 500)");
     assertThat(drawn).isEqualTo(charts(SampleRuns.full()));
-  }
-
-  @ParameterizedTest
-  @ValueSource(booleans = {false, true})
-  void theAccessibilityRulesFindNothingSerious(boolean dark) throws IOException {
-    try (Browser own = Browser.start(dark)) {
-      Path file = folder.resolve("access-" + dark + ".html");
-      Files.writeString(file, Written.page(SampleRuns.full()));
-      own.width(1280);
-      own.open(file);
-      assertThat(own.run("return matchMedia('(prefers-color-scheme: dark)').matches"))
-          .isEqualTo(dark);
-      own.run(rules());
-      Object serious =
-          own.runLater(
-              "var done = arguments[arguments.length - 1];"
-                  + " axe.run().then(r => done(r.violations.filter(v => v.impact === 'serious' ||"
-                  + " v.impact === 'critical').map(v => v.id + ': ' + v.nodes.slice(0, 4).map(n =>"
-                  + " n.target + ' ' + n.failureSummary).join(' | '))))");
-      assertThat((List<?>) serious).isEmpty();
-    }
-  }
-
-  private static String rules() throws IOException {
-    try (InputStream in = PageInBrowserTest.class.getResourceAsStream("/axe.min.js")) {
-      return new String(in.readAllBytes(), StandardCharsets.UTF_8);
-    }
   }
 
   /** Two seconds of the browser's processor, whatever else the machine does; charts included. */

@@ -54,7 +54,7 @@ class PageOnPaperTest {
 
   @BeforeAll
   void start() throws IOException {
-    browser = Browser.start(false);
+    browser = Browser.start();
   }
 
   @AfterAll

@@ -8,6 +8,7 @@ import evensun.report.page.Section;
 import evensun.report.page.Table;
 import java.util.List;
 import java.util.Locale;
+import java.util.Objects;
 import java.util.stream.Collectors;
 
 /** A page model as readable text, so that a change of what a page says shows as a difference. */
@@ -68,7 +69,7 @@ final class PageOutline {
     line("  x", chart.x().title(), range(chart.x().min(), chart.x().max()));
     line("  y", chart.y().title(), range(chart.y().min(), chart.y().max()));
     for (Series s : chart.series()) {
-      List<Double> v = s.values();
+      List<Double> v = s.values().stream().filter(Objects::nonNull).toList();
       line("  " + s.label(), s.role(), v.size() + " values", range(v.get(0), v.get(v.size() - 1)));
     }
     chart.marks().forEach(mark -> line("  mark", mark.label()));

@@ -29,6 +29,7 @@ class ReportPagesTest {
       case "full" -> Written.model(SampleRuns.full());
       case "assessment" -> Written.model(SampleRuns.assessment());
       case "one-wavelength" -> Written.model(AwkwardRuns.oneWavelength());
+      case "front" -> Written.model(FrontRuns.full());
       case "failed-search" -> Written.model(AwkwardRuns.failedSearch());
       case "comparison" -> ComparisonPages.page(drawnAndSearched());
       default -> throw new IllegalArgumentException(name);
@@ -42,7 +43,8 @@ class ReportPagesTest {
   }
 
   @ParameterizedTest
-  @ValueSource(strings = {"full", "assessment", "one-wavelength", "failed-search", "comparison"})
+  @ValueSource(
+      strings = {"full", "assessment", "front", "one-wavelength", "failed-search", "comparison"})
   void aPageSaysWhatItsGoldenFileSays(String name) throws IOException {
     String outline = PageOutline.of(page(name));
     Path golden = GOLDEN.resolve(name + ".txt");

@@ -86,14 +86,23 @@ final class SampleRuns {
 
   /** The full run under another title. */
   static RunResult titled(String title) {
-    RunResult r = full();
+    RunResult full = full();
+    return with(full, title, full.search());
+  }
+
+  /** The full run after another search. */
+  static RunResult searched(RunResult r, SearchRecord search) {
+    return with(r, r.title(), search);
+  }
+
+  private static RunResult with(RunResult r, String title, @Nullable SearchRecord search) {
     return new RunResult(
         r.formatVersion(),
         r.kind(),
         title,
         r.found(),
         r.asDrawn(),
-        r.search(),
+        search,
         r.materials(),
         r.spectrum(),
         r.depth(),

@@ -183,8 +183,9 @@ final class SearchRecords {
     return keys.isEmpty()
         ? Optional.empty()
         : Optional.of(
-            "the range that is equally good was not found within the evaluations allowed for "
-                + String.join(", ", keys));
+            "The range that is equally good was not found within the evaluations allowed for "
+                + String.join(", ", keys)
+                + ".");
   }
 
   private List<String> notes(SearchOutcome outcome, List<Freedom> freedoms) {
@@ -196,7 +197,7 @@ final class SearchRecords {
       notes.add(
           String.format(
               Locale.ROOT,
-              "equally good: the other values chosen anew, at most %s %s less",
+              "Equally good means at most %s %s less, with the other values chosen anew.",
               EQUALLY_GOOD,
               aim.unit()));
     }
@@ -216,7 +217,7 @@ final class SearchRecords {
     double width = (variable.high() - variable.low()) / 10;
     return String.format(
         Locale.ROOT,
-        "%s stands on its %s bound; moving that by %.3g %s would gain about %.2f %s",
+        "%s stands on its %s bound; a range wider by %.3g %s would gain about %.2f %s.",
         freedom.key(),
         freedom.bound().equals("low") ? "lower" : "upper",
         width,
@@ -231,7 +232,7 @@ final class SearchRecords {
     long reached = roundBests.stream().filter(b -> best - b <= EQUALLY_GOOD).count();
     return String.format(
         Locale.ROOT,
-        "%d of %d rounds came within %s %s of the best, the worst within %.2f",
+        "%d of %d rounds of the search came within %s %s of the best, the worst within %.2f.",
         reached,
         roundBests.size(),
         EQUALLY_GOOD,

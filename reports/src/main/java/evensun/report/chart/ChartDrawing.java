@@ -115,7 +115,7 @@ record ChartDrawing(Chart chart) {
 
   private static String text(Axis axis, double tick, int wanted) {
     return axis.logarithmic()
-        ? Numbers.significant(tick, 2)
+        ? Numbers.powerOfTen((int) Math.round(Math.log10(tick)))
         : Numbers.fixed(tick, Ticks.decimals(Ticks.step(axis.min(), axis.max(), wanted)));
   }
 

@@ -1,7 +1,12 @@
 package evensun.report.compare;
 
 import evensun.report.figure.Budget;
+import evensun.report.figure.Figure;
+import evensun.report.figure.LevelPicture.Vessel;
+import evensun.report.figure.LevelsBeside;
+import evensun.report.figure.LevelsBeside.Design;
 import evensun.report.figure.Share;
+import evensun.report.page.Table;
 import evensun.report.text.Clip;
 import evensun.report.text.Numbers;
 import evensun.result.MaterialUse;
@@ -98,6 +103,53 @@ final class Comparison {
     if (runs.stream().map(run -> of.apply(run.result())).distinct().count() > 1) {
       warnings.add(text);
     }
+  }
+
+  /** The subcells of every design as vessels; null where there are no currents. */
+  @Nullable Figure levels() {
+    List<Design> designs = new ArrayList<>();
+    for (int i = 0; i < runs.size(); i++) {
+      List<Vessel> vessels = vessels(runs.get(i).result().found());
+      if (!vessels.isEmpty()) {
+        designs.add(new Design(Matrix.letter(i), vessels, headline(i)));
+      }
+    }
+    String what =
+        "The subcells of each design, filled to their currents. The line is what the design passes;"
+            + " what stands above it, hatched, is unused.";
+    return designs.isEmpty() ? null : Figure.of(new LevelsBeside(designs), what);
+  }
+
+  private static List<Vessel> vessels(Outcome outcome) {
+    List<Vessel> vessels = new ArrayList<>();
+    for (SubcellOutcome subcell : outcome.subcells()) {
+      Double current = subcell.photocurrentMaPerCm2();
+      if (current != null) {
+        vessels.add(new Vessel(subcell.name(), current, null, subcell.standardErrorMaPerCm2()));
+      }
+    }
+    return vessels;
+  }
+
+  /** What the picture of the levels shows, a row per subcell of each design. */
+  Table currents() {
+    Table.Builder table =
+        new Table.Builder("table-levels", "The levels: every subcell's current")
+            .words("design")
+            .words("subcell")
+            .numbers("current", Numbers.MA)
+            .numbers("unused", Numbers.MA);
+    for (int i = 0; i < runs.size(); i++) {
+      Double level = headline(i);
+      for (Vessel vessel : vessels(runs.get(i).result().found())) {
+        table.row(
+            Matrix.letter(i),
+            vessel.name(),
+            Numbers.fixed(vessel.maPerCm2(), 3),
+            level == null ? "" : Numbers.fixed(vessel.maPerCm2() - level, 3));
+      }
+    }
+    return table.build();
   }
 
   Matrix results() {

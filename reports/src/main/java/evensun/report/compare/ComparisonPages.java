@@ -35,11 +35,10 @@ public final class ComparisonPages {
     Comparison comparison = new Comparison(runs);
     List<Section> sections = new ArrayList<>();
     sections.add(which(comparison));
-    sections.add(section("results", "Results", "result", comparison.results(), true, "mA cm⁻²"));
+    sections.add(results(comparison));
     losses(comparison).ifPresent(sections::add);
-    sections.add(section("stack", "Stack", "layer value", comparison.stack(), false, ""));
-    sections.add(
-        section("assumptions", "Assumptions", "assumption", comparison.assumptions(), false, ""));
+    sections.add(section("stack", "Stack", "layer value", comparison.stack()));
+    sections.add(section("assumptions", "Assumptions", "assumption", comparison.assumptions()));
     RunResult first = runs.get(0).result();
     String started = first.provenance().startedUtc();
     return new ReportPage(
@@ -60,8 +59,16 @@ public final class ComparisonPages {
   }
 
   private static Decision decision(Comparison comparison) {
+    Figure levels = comparison.levels();
     return new Decision(
-        comparison.sentence(), List.of(), null, List.of(), null, "", List.of(), List.of());
+        comparison.sentence(),
+        List.of(),
+        null,
+        List.of(),
+        levels,
+        levels == null ? "" : levels.description(),
+        List.of(),
+        List.of());
   }
 
   private static Section which(Comparison comparison) {
@@ -96,11 +103,16 @@ public final class ComparisonPages {
     return new Section("runs", "Runs", heading, blocks);
   }
 
-  private static Section section(
-      String id, String nav, String noun, Matrix matrix, boolean numeric, String unit) {
-    String caption = unit.isEmpty() ? nav : nav + ", " + unit + " where not said otherwise";
-    return new Section(
-        id, nav, heading(noun, matrix), grids(matrix, "table-" + id, caption, numeric));
+  private static Section section(String id, String nav, String noun, Matrix matrix) {
+    return new Section(id, nav, heading(noun, matrix), grids(matrix, "table-" + id, nav, false));
+  }
+
+  private static Section results(Comparison comparison) {
+    Matrix matrix = comparison.results();
+    String caption = "Results, " + Numbers.MA + " where not said otherwise";
+    List<Block> blocks = grids(matrix, "table-results", caption, true);
+    blocks.add(new Block.Grid(comparison.currents(), true));
+    return new Section("results", "Results", heading("result", matrix), blocks);
   }
 
   /** What differs, open; what is the same, folded. */

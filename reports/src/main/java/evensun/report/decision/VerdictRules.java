@@ -11,8 +11,11 @@ import evensun.result.RunResult;
 import evensun.result.SearchRecord;
 import evensun.result.SearchRecord.VariableRecord;
 import java.util.ArrayList;
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Objects;
+import java.util.stream.Collectors;
 
 /** The verdict, by rules that the page states. */
 public final class VerdictRules {
@@ -61,7 +64,9 @@ public final class VerdictRules {
     List<String> points = new ArrayList<>(findings(result, "warning"));
     SearchRecord search = result.search();
     if (search != null) {
-      stopped(search).ifPresent(points::add);
+      if (!found(result, "search-not-converged")) {
+        stopped(search).ifPresent(points::add);
+      }
       search.variables().stream()
           .filter(variable -> variable.bound() != null)
           .filter(variable -> !named(result, variable))
@@ -72,21 +77,41 @@ public final class VerdictRules {
     return points;
   }
 
+  /** One reason for findings that say the same of several things. */
   private static List<String> findings(RunResult result, String severity) {
-    return result.findings().stream()
-        .filter(finding -> finding.severity().equals(severity))
-        .map(finding -> words(result, finding))
-        .toList();
+    Map<String, List<FindingRecord>> alike = new LinkedHashMap<>();
+    for (FindingRecord finding : result.findings()) {
+      if (finding.severity().equals(severity)) {
+        String text = finding.code() + finding.message().replace(finding.where(), "");
+        alike.computeIfAbsent(text, key -> new ArrayList<>()).add(finding);
+      }
+    }
+    return alike.values().stream().map(same -> words(result, together(same))).toList();
+  }
+
+  private static FindingRecord together(List<FindingRecord> same) {
+    FindingRecord first = same.get(0);
+    String where = same.stream().map(FindingRecord::where).collect(Collectors.joining(", "));
+    return same.size() == 1
+        ? first
+        : new FindingRecord(
+            first.severity(), first.code(), where, first.message().replace(first.where(), where));
   }
 
   private static String words(RunResult result, FindingRecord finding) {
-    String where = Clip.to(spoken(result, finding.where()), 60);
     String message = Clip.to(finding.message(), MOST_LETTERS);
-    return where.isEmpty() || message.contains(where) ? message : where + ": " + message;
+    if (finding.where().isEmpty() || finding.message().contains(finding.where())) {
+      return message;
+    }
+    return Clip.to(spoken(result, finding.where()), 60) + ": " + message;
   }
 
   private static String spoken(RunResult result, String where) {
     return result.found().design().containsKey(where) ? Keys.words(where) : where;
+  }
+
+  private static boolean found(RunResult result, String code) {
+    return result.findings().stream().anyMatch(finding -> finding.code().equals(code));
   }
 
   private static java.util.Optional<String> stopped(SearchRecord search) {

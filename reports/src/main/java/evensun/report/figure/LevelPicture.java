@@ -31,10 +31,10 @@ public record LevelPicture(List<Vessel> vessels, @Nullable Double levelMaPerCm2)
       @Nullable Double drawnMaPerCm2,
       @Nullable Double standardErrorMaPerCm2) {}
 
-  private static final double TOP = 34;
-  private static final double DEPTH = 216;
+  static final double TOP = 34;
+  static final double DEPTH = 216;
   private static final double HEIGHT = TOP + DEPTH + 62;
-  private static final double LEFT = 34;
+  static final double LEFT = 34;
   private static final double VISIBLE_SURPLUS = 0.005;
 
   @Override
@@ -43,7 +43,7 @@ public record LevelPicture(List<Vessel> vessels, @Nullable Double levelMaPerCm2)
     double room = roomOnTheRight(widthPx);
     double slot = (widthPx - LEFT - room) / vessels.size();
     double pxPerMa = DEPTH / ceiling();
-    scale(canvas, widthPx - room, pxPerMa);
+    scale(canvas, widthPx - room, ceiling());
     for (int i = 0; i < vessels.size(); i++) {
       double wide = Math.min(slot * 0.58, 150);
       vessel(canvas, i, LEFT + slot * i + (slot - wide) / 2, wide, slot, pxPerMa);
@@ -65,16 +65,18 @@ public record LevelPicture(List<Vessel> vessels, @Nullable Double levelMaPerCm2)
     return Math.max(1e-9, largest * 1.04);
   }
 
-  private void scale(Canvas canvas, double right, double pxPerMa) {
-    for (double tick : Ticks.of(0, ceiling(), 5)) {
-      double y = y(tick, pxPerMa);
+  /** The scale at the left, up to a current. */
+  static void scale(Canvas canvas, double right, double ceiling) {
+    for (double tick : Ticks.of(0, ceiling, 5)) {
+      double y = y(tick, DEPTH / ceiling);
       canvas.stroke(LEFT, y, right, y, "grid");
       canvas.label(LEFT - 6, y + 4, Numbers.trimmed(tick, 2), Anchor.END, "tick");
     }
     canvas.label(0, TOP - 18, Numbers.MA, Anchor.START, "tick");
   }
 
-  private static double y(double maPerCm2, double pxPerMa) {
+  /** Where a current stands. */
+  static double y(double maPerCm2, double pxPerMa) {
     return TOP + DEPTH - maPerCm2 * pxPerMa;
   }
 
@@ -86,6 +88,19 @@ public record LevelPicture(List<Vessel> vessels, @Nullable Double levelMaPerCm2)
     double bottom = TOP + DEPTH;
     double level = levelMaPerCm2 == null ? vessel.maPerCm2() : levelMaPerCm2;
     double line = y(Math.min(level, vessel.maPerCm2()), pxPerMa);
+    body(canvas, x, wide, line, filled, role);
+    drawnMark(canvas, vessel, x, wide, pxPerMa);
+    labels(canvas, vessel, role, x + wide / 2, slot, line);
+  }
+
+  /**
+   * A vessel with what is in it.
+   *
+   * @param line where the level stands in it
+   * @param filled where what is above the level ends
+   */
+  static void body(Canvas canvas, double x, double wide, double line, double filled, String role) {
+    double bottom = TOP + DEPTH;
     canvas.box(x, line, wide, bottom - line, "fill-" + role, "");
     if (line - filled > 0.5) {
       canvas.box(x, filled, wide, line - filled, "pale-" + role, "");
@@ -95,8 +110,6 @@ public record LevelPicture(List<Vessel> vessels, @Nullable Double levelMaPerCm2)
         new Path().move(x, TOP - 4).line(x, bottom).line(x + wide, bottom).line(x + wide, TOP - 4),
         "vessel",
         "");
-    drawnMark(canvas, vessel, x, wide, pxPerMa);
-    labels(canvas, vessel, role, x + wide / 2, slot, line);
   }
 
   private static void drawnMark(

@@ -2,6 +2,7 @@ package evensun.report.page;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.stream.IntStream;
 
 /**
  * A table.
@@ -99,9 +100,22 @@ public record Table(
       return build(0);
     }
 
-    /** The table, its last rows being totals. */
+    /** The table, its last rows being totals; a column that holds nothing is left out. */
     public Table build(int totals) {
-      return new Table(id, caption, columns, rows, totals);
+      List<Integer> kept =
+          IntStream.range(0, columns.size()).filter(this::holdsSomething).boxed().toList();
+      return new Table(
+          id,
+          caption,
+          kept.stream().map(columns::get).toList(),
+          rows.stream().map(row -> kept.stream().map(row::get).toList()).toList(),
+          totals);
+    }
+
+    private boolean holdsSomething(int column) {
+      return column == 0
+          || rows.isEmpty()
+          || rows.stream().anyMatch(row -> !row.get(column).isEmpty());
     }
   }
 }

@@ -16,6 +16,7 @@ import evensun.result.SearchRecord.ConstraintRecord;
 import evensun.result.SearchRecord.Front;
 import evensun.result.SearchRecord.Generation;
 import evensun.result.SearchRecord.Optimum;
+import evensun.result.SearchRecord.VariableRecord;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -35,7 +36,7 @@ public final class SearchSection {
     }
     List<Block> blocks = new ArrayList<>();
     blocks.add(new Block.Prose(story(search)));
-    search.notes().forEach(note -> blocks.add(new Block.Prose(note)));
+    search.notes().forEach(note -> blocks.add(new Block.Prose(spoken(search, note))));
     stepCost(search).ifPresent(text -> blocks.add(new Block.Prose(text)));
     GridWords.of(search).ifPresent(text -> blocks.add(new Block.Prose(text + ".")));
     if (search.history().size() > 1 && search.front() == null) {
@@ -52,6 +53,15 @@ public final class SearchSection {
       blocks.addAll(FrontBlocks.of(search, front));
     }
     return Optional.of(new Section("search", "Search", heading(search), blocks));
+  }
+
+  /** A remark with its keys in words. */
+  private static String spoken(SearchRecord search, String note) {
+    String text = note;
+    for (VariableRecord variable : search.variables()) {
+      text = text.replace(variable.key(), Keys.words(variable.key()));
+    }
+    return text;
   }
 
   private static String heading(SearchRecord search) {

@@ -198,7 +198,7 @@ public final class StackSection {
     cells.add(range(v.low(), v.high(), v.unit()) + step(v));
     if (bounds) {
       String side = "low".equals(v.bound()) ? "lower" : "upper";
-      cells.add(v.bound() == null ? "" : "stands on the " + side);
+      cells.add(v.bound() == null ? "" : "at the " + side + " bound");
     }
     return cells;
   }

@@ -97,7 +97,7 @@ public final class Numbers {
   public static String significant(double value, int digits) {
     double size = Math.abs(value);
     if (size != 0 && (size < 1e-3 || size >= 1e6) && Double.isFinite(value)) {
-      return powerOfTen(value, digits);
+      return scientific(value, digits);
     }
     if (value == Math.rint(value) && size < POWERS[Math.min(digits, POWERS.length - 1)]) {
       return fixed(value, 0);
@@ -106,28 +106,33 @@ public final class Numbers {
     return trimmed(rounded.doubleValue(), Math.max(0, rounded.scale()));
   }
 
-  private static String powerOfTen(double value, int digits) {
+  private static String scientific(double value, int digits) {
     int exponent = (int) Math.floor(Math.log10(Math.abs(value)));
     if (Math.abs(exponent) > MOST_EXACT_POWER || digits > POWERS.length) {
-      return exactPowerOfTen(value, digits);
+      return exactScientific(value, digits);
     }
     double scaled = exponent < 0 ? value * TENS[-exponent] : value / TENS[exponent];
     String mantissa = fixed(scaled, digits - 1);
     boolean ten = mantissa.startsWith("10") || mantissa.startsWith(MINUS + "10");
     return ten || isNearTie(Math.abs(scaled) * POWERS[digits - 1])
-        ? exactPowerOfTen(value, digits)
-        : trimZeros(mantissa) + " × 10" + superscript(exponent);
+        ? exactScientific(value, digits)
+        : trimZeros(mantissa) + " × " + powerOfTen(exponent);
   }
 
   private static boolean isNearTie(double scaled) {
     return Math.abs(scaled - Math.floor(scaled) - 0.5) < TIE;
   }
 
-  private static String exactPowerOfTen(double value, int digits) {
+  private static String exactScientific(double value, int digits) {
     BigDecimal rounded = BigDecimal.valueOf(value).round(new MathContext(digits));
     int exponent = rounded.precision() - rounded.scale() - 1;
     String mantissa = trimmed(rounded.movePointLeft(exponent).doubleValue(), digits - 1);
-    return mantissa + " × 10" + superscript(exponent);
+    return mantissa + " × " + powerOfTen(exponent);
+  }
+
+  /** Ten to a power, such as {@code 10²¹}. */
+  public static String powerOfTen(int exponent) {
+    return "10" + superscript(exponent);
   }
 
   private static String superscript(int number) {

@@ -15,7 +15,12 @@ import java.util.List;
 import org.jspecify.annotations.Nullable;
 import org.junit.jupiter.api.Test;
 
-class GapPageTest {
+public class GapPageTest {
+
+  /** A map of two gaps as a page. */
+  public static String page() {
+    return GapPage.html(map(Junction.IDEAL, Junction.IDEAL));
+  }
 
   private static BandgapMap map(Junction... junctions) {
     return GapMapper.map(
