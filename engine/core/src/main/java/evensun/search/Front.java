@@ -2,7 +2,6 @@ package evensun.search;
 
 import evensun.search.problem.Candidate;
 import evensun.search.problem.Individual;
-import evensun.search.problem.Numbers;
 import evensun.search.problem.Verdict;
 import java.util.ArrayList;
 import java.util.Arrays;
@@ -37,8 +36,7 @@ final class Front {
    * @param nothing what is next to nothing, in parts of the range of an aim
    */
   static List<Individual> thinned(List<Individual> front, double nothing) {
-    double[][] scaled =
-        scaled(front.stream().map(i -> new Candidate(i.genes(), i.verdict())).toList());
+    double[][] scaled = scaledAims(front);
     List<Integer> order = new ArrayList<>();
     IntStream.range(0, front.size()).forEach(order::add);
     order.sort(Comparator.comparingDouble((Integer i) -> -rank(scaled[i])));
@@ -51,6 +49,11 @@ final class Front {
     return kept.stream().sorted().map(front::get).toList();
   }
 
+  /** The same of individuals. */
+  static double[][] scaledAims(List<Individual> front) {
+    return scaled(front.stream().map(i -> new Candidate(i.genes(), i.verdict())).toList());
+  }
+
   private static double rank(double[] scaled) {
     boolean best = Arrays.stream(scaled).anyMatch(aim -> aim == 1);
     return Arrays.stream(scaled).sum() + (best ? scaled.length : 0);
@@ -60,7 +63,8 @@ final class Front {
     return IntStream.range(0, a.length).allMatch(i -> a[i] >= b[i] - nothing);
   }
 
-  private static double[][] scaled(List<Candidate> front) {
+  /** The aims of a front in parts of the range that it spans, [design][aim]. */
+  static double[][] scaled(List<Candidate> front) {
     return scaled(front, front);
   }
 
@@ -74,70 +78,6 @@ final class Front {
       better |= difference > 0;
     }
     return better;
-  }
-
-  /**
-   * Genes halfway between neighbours of a front of two aims, where neighbours are farthest apart.
-   *
-   * @param most how many at most
-   */
-  static List<double[]> between(List<Individual> front, int most) {
-    List<Individual> row = new ArrayList<>(front);
-    List<double[]> middles = new ArrayList<>();
-    double[] range = range(front);
-    while (middles.size() < most && row.size() > 1) {
-      int widest = widest(row, range);
-      double[] middle = middle(row.get(widest), row.get(widest + 1));
-      middles.add(middle);
-      row.add(widest + 1, guessed(row.get(widest), row.get(widest + 1), middle));
-    }
-    return middles;
-  }
-
-  private static double[] range(List<Individual> front) {
-    double[] range = {1, 1};
-    if (front.size() > 1) {
-      Individual first = front.get(0);
-      Individual last = front.get(front.size() - 1);
-      for (int aim = 0; aim < range.length; aim++) {
-        range[aim] = Math.abs(aim(first, aim) - aim(last, aim));
-      }
-    }
-    return range;
-  }
-
-  private static int widest(List<Individual> row, double[] range) {
-    int widest = 0;
-    double most = -1;
-    for (int i = 0; i + 1 < row.size(); i++) {
-      double gap = 0;
-      for (int aim = 0; aim < range.length; aim++) {
-        gap += Math.abs(aim(row.get(i), aim) - aim(row.get(i + 1), aim)) / range[aim];
-      }
-      if (gap > most) {
-        most = gap;
-        widest = i;
-      }
-    }
-    return widest;
-  }
-
-  private static double[] middle(Individual a, Individual b) {
-    double[] middle = a.geneArray();
-    for (int i = 0; i < middle.length; i++) {
-      middle[i] = (middle[i] + b.genes().get(i)) / 2;
-    }
-    return middle;
-  }
-
-  /** Stands for a design that is not judged yet, its aims halfway as well. */
-  private static Individual guessed(Individual a, Individual b, double[] genes) {
-    List<Double> aims = List.of((aim(a, 0) + aim(b, 0)) / 2, (aim(a, 1) + aim(b, 1)) / 2);
-    return new Individual(0, Numbers.list(genes), new Verdict(aims, 0, 0, ""));
-  }
-
-  private static double aim(Individual design, int aim) {
-    return design.verdict().aims().get(aim);
   }
 
   /**

@@ -34,8 +34,8 @@ public final class ParetoSearch {
   /** Designs best in the first aim that are refined without regard to the others. */
   private static final int BEST_ALONE = 12;
 
-  /** Part of the evaluations at which the genetic part ends. */
-  private static final double GENETIC_SHARE = 0.85;
+  /** [aims] part of the evaluations at which the genetic part ends. */
+  private static final double[] GENETIC_SHARE = {0, 0, 0.85, 0.5};
 
   /** [refinement] part of the evaluations left that it may take. */
   private static final double[] REFINED_SHARE = {0.5, 0.5, 1};
@@ -150,7 +150,7 @@ public final class ParetoSearch {
       return state.with(Phase.REFINE, StopReason.CONVERGED);
     }
     double next = state.evaluations() + settings.effort().populationSize();
-    return next > GENETIC_SHARE * settings.budget().evaluations()
+    return next > GENETIC_SHARE[objective.aims().size()] * settings.budget().evaluations()
         ? state.with(Phase.REFINE, StopReason.EVALUATIONS)
         : state;
   }
@@ -174,7 +174,7 @@ public final class ParetoSearch {
                   budget / 4,
                   tally));
     } else {
-      all.addAll(between(judges, Front.of(all), tally));
+      all.addAll(between(judges, Front.of(all), budget / 4, tally));
     }
     List<Individual> front = Front.of(all);
     List<Individual> starts = new ArrayList<>(front);
@@ -192,13 +192,13 @@ public final class ParetoSearch {
         : next.inRound(state.round() + 1);
   }
 
-  /** Designs between neighbours of a front of two aims, as many as a generation lacks. */
-  private List<Individual> between(Judges judges, List<Individual> front, Tally tally) {
-    int most = settings.effort().populationSize() - front.size();
-    List<double[]> genes = new ArrayList<>();
-    if (objective.aims().size() == 2) {
-      Front.between(front, most).forEach(middle -> genes.add(space.snap(middle)));
-    }
+  /** Designs between neighbours of a front, as many as a generation lacks for each further aim. */
+  private List<Individual> between(Judges judges, List<Individual> front, int budget, Tally tally) {
+    int furtherAims = objective.aims().size() - 1;
+    int most = furtherAims * settings.effort().populationSize() - front.size();
+    List<double[]> genes =
+        new FrontGaps(space, front)
+            .filled(Math.min(most, budget)).stream().map(space::snap).toList();
     List<double[]> values = genes.stream().map(space::values).toList();
     List<Verdict> verdicts = judges.judge(values);
     List<Individual> filling = new ArrayList<>();

@@ -12,7 +12,9 @@ import evensun.scenario.tree.Node.Sequence;
 import evensun.scenario.tree.Shown;
 import evensun.scenario.tree.Values;
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.stream.Collectors;
 
@@ -51,15 +53,18 @@ final class VaryBinder {
       fields.fault(fields.place(), "must name at least one quantity");
     }
     List<VarySpec> specs = new ArrayList<>();
+    Map<String, Interval> intervals = new HashMap<>();
     for (String key : fields.keys()) {
       Entry entry = entry(key);
       if (ChoiceBinder.isChoice(key)) {
         choices.bind(entry);
         continue;
       }
-      VaryKeys.interval(fields, entry, stack).flatMap(in -> spec(entry, in)).ifPresent(specs::add);
+      Optional<Interval> in = VaryKeys.interval(fields, entry, stack);
+      in.ifPresent(interval -> intervals.put(key, interval));
+      in.flatMap(interval -> spec(entry, interval)).ifPresent(specs::add);
     }
-    checkTies(specs);
+    checkTies(specs, intervals);
     return specs;
   }
 
@@ -135,11 +140,11 @@ final class VaryBinder {
         : Optional.empty();
   }
 
-  /** A tie leads to a quantity of the same kind that varies by itself. */
-  private void checkTies(List<VarySpec> specs) {
+  /** A tie leads to a quantity of the same kind that varies by itself, and stays in range. */
+  private void checkTies(List<VarySpec> specs, Map<String, Interval> intervals) {
     for (VarySpec spec : specs) {
       if (spec.isTied()) {
-        String complaint = complaint(spec, specs);
+        String complaint = complaint(spec, specs, intervals.get(spec.key()));
         if (!complaint.isEmpty()) {
           fields.fault(spec.place(), Shown.plain(spec.key()) + ": sameAs " + complaint);
         }
@@ -147,7 +152,7 @@ final class VaryBinder {
     }
   }
 
-  private String complaint(VarySpec tied, List<VarySpec> specs) {
+  private String complaint(VarySpec tied, List<VarySpec> specs, Interval in) {
     String leader = Shown.plain(tied.sameAs());
     Optional<VarySpec> found =
         specs.stream().filter(s -> s.key().equals(tied.sameAs())).findFirst();
@@ -158,8 +163,26 @@ final class VaryBinder {
       return "must name a quantity that varies by itself, but " + leader + " follows another";
     }
     return quantity(tied.key()).equals(quantity(tied.sameAs()))
-        ? ""
+        ? outside(tied, found.get(), in)
         : "must name a quantity of the same kind but was " + leader;
+  }
+
+  private static String outside(VarySpec tied, VarySpec leader, Interval in) {
+    double low = tied.ratio() * leader.low();
+    double high = tied.ratio() * leader.high();
+    return in.contains(low) && in.contains(high)
+        ? ""
+        : "leads out of "
+            + in
+            + ": "
+            + Shown.number(tied.ratio())
+            + " times "
+            + Shown.plain(leader.key())
+            + " runs from "
+            + Shown.number(low)
+            + " to "
+            + Shown.number(high)
+            + "; narrow that range or change the ratio";
   }
 
   private static String quantity(String key) {

@@ -15,6 +15,12 @@ import java.util.List;
  */
 public final class FrontRefiner {
 
+  /**
+   * A climb whose evaluations are spent still takes the slopes of its last step and the way back
+   * behind the limits.
+   */
+  private static final int LAST_STEPS = 12;
+
   private final Objective objective;
   private final Space space;
   private final Judges judges;
@@ -61,10 +67,12 @@ public final class FrontRefiner {
       Individual from, Individual place, Objective.Worker worker, int evaluations) {
     KeptAims kept = new KeptAims(objective, place.verdict());
     Individual start = new Individual(from.birth(), from.genes(), kept.kept(from.verdict()));
+    int climb = worker.partCount() > 0 ? evaluations - space.size() - LAST_STEPS : evaluations;
     LocalProblem problem =
-        new LocalProblem(
-            space, judges, kept.on(worker), start, Double.NEGATIVE_INFINITY, evaluations);
-    refiner.improve(problem);
+        new LocalProblem(space, judges, kept.on(worker), start, Double.NEGATIVE_INFINITY, climb);
+    if (climb > 0) {
+      refiner.improve(problem);
+    }
     return problem;
   }
 }
