@@ -148,7 +148,7 @@ public record SearchRecord(
     public static final String ABSENT = "absent";
 
     /** Whether it is about a layer being there, not about its material. */
-    public boolean isPresence() {
+    public boolean asksForPresence() {
       return key.endsWith(".present");
     }
   }

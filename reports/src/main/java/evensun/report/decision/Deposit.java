@@ -49,11 +49,11 @@ final class Deposit {
 
   /** A layer that stays as it is goes without saying; its material, once chosen, does not. */
   private static boolean isNews(ChoiceRecord choice) {
-    return !choice.isPresence() || !choice.found().equals(choice.drawn());
+    return !choice.asksForPresence() || !choice.found().equals(choice.drawn());
   }
 
   private static String material(ChoiceRecord choice) {
-    boolean there = choice.isPresence() && !choice.found().equals(ChoiceRecord.ABSENT);
+    boolean there = choice.asksForPresence() && !choice.found().equals(ChoiceRecord.ABSENT);
     return there ? "" : choice.found();
   }
 
