@@ -155,8 +155,9 @@
       type: chart.kind === 'POINTS' ? 'scatter' : 'line',
       data: pairs(chart, row),
       symbol: chart.kind === 'POINTS' ? 'circle' : 'none',
-      symbolSize: 9,
-      itemStyle: { color: colour },
+      symbolSize: row.role === 'muted' ? 7 : 13,
+      z: row.role === 'muted' ? 2 : 3,
+      itemStyle: { color: colour, opacity: 1 },
       lineStyle: { width: stacked ? 0.8 : 2, color: stacked ? variable('paper') : colour, type: row.dashed ? [6, 4] : 'solid' },
       animation: false,
       emphasis: { disabled: true }
@@ -170,6 +171,8 @@
         made.markPoint = { symbol: 'circle', symbolSize: 0.1, silent: true, animation: false,
           data: [{ coord: spot, label: { show: true, color: labelColour(row.role), fontSize: 12, formatter: clip(row.label, 34) } }] };
       }
+    } else if (chart.kind === 'POINTS' && made.data.filter(function (p) { return p[1] !== null; }).length === 1) {
+      made.label = { show: true, position: 'right', distance: 8, color: variable('ink'), formatter: clip(row.label, 20) };
     } else if (wide && chart.kind === 'LINES' && shift !== null) {
       made.endLabel = { show: true, color: row.role.indexOf('sub') === 0 ? variable('ink-' + row.role) : colour, formatter: clip(row.label, 20), distance: 8, offset: [0, shift] };
     }

@@ -11,6 +11,7 @@ import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.Comparator;
 import java.util.List;
+import java.util.Objects;
 import org.jspecify.annotations.Nullable;
 
 /**
@@ -267,13 +268,24 @@ record ChartDrawing(Chart chart) {
     }
   }
 
+  /** A single point of a series stands out and is named. */
   private void points(Canvas canvas, Frame frame) {
     for (Series row : chart.series()) {
+      boolean single = row.values().stream().filter(Objects::nonNull).count() == 1;
+      double half = single ? 5.5 : 2.5;
       for (int i = 0; i < chart.xs().size(); i++) {
         Double value = row.values().get(i);
-        if (value != null) {
-          double x = frame.x(chart.xs().get(i));
-          canvas.box(x - 3.5, frame.y(value) - 3.5, 7, 7, "dot fill-" + row.role(), row.label());
+        if (value == null) {
+          continue;
+        }
+        double x = frame.x(chart.xs().get(i));
+        double y = frame.y(value);
+        canvas.box(x - half, y - half, 2 * half, 2 * half, "dot fill-" + row.role(), row.label());
+        if (single) {
+          boolean left = x > (frame.left() + frame.right()) / 2;
+          Anchor anchor = left ? Anchor.END : Anchor.START;
+          String name = Clip.to(row.label(), 20);
+          canvas.label(x + (left ? -11 : 11), y + 4, name, anchor, "part-name halo");
         }
       }
     }

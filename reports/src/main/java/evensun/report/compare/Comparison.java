@@ -115,7 +115,8 @@ final class Comparison {
       }
     }
     String what =
-        "The subcells of each design, filled to their currents. The line is what the design passes;"
+        "The subcells of each design in the order the light meets them, filled to their currents. The"
+            + " line is what the design passes;"
             + " what stands above it, hatched, is unused.";
     return designs.isEmpty() ? null : Figure.of(new LevelsBeside(designs), what);
   }

@@ -43,7 +43,7 @@ public final class ComparisonPages {
     String started = first.provenance().startedUtc();
     return new ReportPage(
         "Comparison",
-        Numbers.count(runs.size(), "design") + ": " + Clip.to(first.title(), 80),
+        title(runs),
         started.substring(0, Math.min(10, started.length())),
         shortHash(runs),
         "First digits of the SHA-256 of those of the runs, in their order",
@@ -51,6 +51,12 @@ public final class ComparisonPages {
         sections,
         Glossary.all(),
         "Written by Evensun from the result.json of each run.");
+  }
+
+  private static String title(List<NamedRun> runs) {
+    String count = Numbers.count(runs.size(), "design");
+    List<String> titles = runs.stream().map(run -> run.result().title()).distinct().toList();
+    return titles.size() > 1 ? count : count + ": " + Clip.to(titles.get(0), 80);
   }
 
   private static String shortHash(List<NamedRun> runs) {
@@ -88,13 +94,17 @@ public final class ComparisonPages {
           run.result().provenance().startedUtc(),
           run.shortHash());
     }
-    List<Block.Point> warnings =
-        comparison.warnings().stream()
-            .map(warning -> new Block.Point("warning", "comparison", warning, ""))
-            .toList();
+    List<String> warnings = comparison.warnings();
     List<Block> blocks = new ArrayList<>();
     if (!warnings.isEmpty()) {
-      blocks.add(new Block.Points(warnings));
+      blocks.add(
+          new Block.Points(
+              List.of(
+                  new Block.Point(
+                      "warning",
+                      "Read the differences below with care",
+                      "These runs were not computed alike: " + String.join(", ", warnings) + ".",
+                      ""))));
     }
     blocks.add(new Block.Grid(table.build(), false));
     String what = Numbers.count(comparison.runs().size(), "run");

@@ -35,6 +35,7 @@ public record LevelPicture(List<Vessel> vessels, @Nullable Double levelMaPerCm2)
   static final double DEPTH = 216;
   private static final double HEIGHT = TOP + DEPTH + 62;
   static final double LEFT = 34;
+  private static final double ROOM_FOR_A_VALUE_PX = 30;
   private static final double VISIBLE_SURPLUS = 0.005;
 
   @Override
@@ -90,7 +91,7 @@ public record LevelPicture(List<Vessel> vessels, @Nullable Double levelMaPerCm2)
     double line = y(Math.min(level, vessel.maPerCm2()), pxPerMa);
     body(canvas, x, wide, line, filled, role);
     drawnMark(canvas, vessel, x, wide, pxPerMa);
-    labels(canvas, vessel, role, x + wide / 2, slot, line);
+    labels(canvas, vessel, role, x + wide / 2, slot, valueBelow(vessel, line, pxPerMa));
   }
 
   /**
@@ -120,6 +121,13 @@ public record LevelPicture(List<Vessel> vessels, @Nullable Double levelMaPerCm2)
     }
     double y = y(drawn, pxPerMa);
     canvas.stroke(x - 6, y, x + wide + 6, y, "drawn");
+  }
+
+  /** Where the number in a vessel hangs from: the level, or the mark of the stack as drawn. */
+  private static double valueBelow(Vessel vessel, double line, double pxPerMa) {
+    Double drawn = vessel.drawnMaPerCm2();
+    double mark = drawn == null ? line : y(drawn, pxPerMa);
+    return mark > line && mark < line + ROOM_FOR_A_VALUE_PX ? mark : line;
   }
 
   private void labels(

@@ -193,8 +193,14 @@ public final class Numbers {
       case "deg", "°" -> trimmed(value, 1) + "°";
       case MA -> ma(value);
       case "%" -> withUnit(fixed(value, 2), unit);
+      case "" -> fraction(value);
       default -> withUnit(significant(value, 4), unit);
     };
+  }
+
+  /** A number without a unit, as exact as a fraction can be made. */
+  private static String fraction(double value) {
+    return Math.abs(value) < 0.01 ? significant(value, 3) : trimmed(value, 3);
   }
 
   /** The bare number of {@link #quantity}, for a column that names the unit. */
@@ -203,6 +209,7 @@ public final class Numbers {
       case "nm" -> trimmed(value, 1);
       case "eV" -> fixed(value, 3);
       case "%", MA -> fixed(value, 2);
+      case "" -> fraction(value);
       default -> significant(value, 4);
     };
   }
