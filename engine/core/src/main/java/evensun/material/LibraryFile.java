@@ -99,12 +99,17 @@ final class LibraryFile {
   }
 
   private static Material tunable(DataFile file, MaterialRecord record, GapCurves curves) {
+    double[] missEv = file.value("miss-ev").isPresent() ? file.numbers("miss-ev") : new double[0];
+    return new TunableMaterial(
+        record, tuning(file), curves, marked(file, "marked-ev"), marked(file, "weak-ev"), missEv);
+  }
+
+  private static List<TunableMaterial.MarkedRange> marked(DataFile file, String key) {
     List<TunableMaterial.MarkedRange> marked = new ArrayList<>();
-    for (String value : file.values("marked-ev")) {
+    for (String value : file.values(key)) {
       marked.add(marked(value));
     }
-    double[] missEv = file.value("miss-ev").isPresent() ? file.numbers("miss-ev") : new double[0];
-    return new TunableMaterial(record, tuning(file), curves, marked, missEv);
+    return marked;
   }
 
   private static Material ideal(DataFile file, MaterialRecord record) {

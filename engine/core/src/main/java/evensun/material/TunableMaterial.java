@@ -4,6 +4,7 @@ import evensun.light.Constants;
 import evensun.material.table.Bandgap;
 import evensun.spi.Finding;
 import evensun.spi.Severity;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
@@ -20,14 +21,22 @@ final class TunableMaterial implements Material {
   private final Tuning tuning;
   private final GapCurves curves;
   private final List<MarkedRange> marked;
+  private final List<MarkedRange> weak;
   private final double[] missEv;
 
   /** A range of the gap in which the numbers deserve a word. */
-  record MarkedRange(double lowEv, double highEv, String what) {}
+  record MarkedRange(double lowEv, double highEv, String what) {
+
+    boolean holds(double bandgapEv) {
+      return bandgapEv >= lowEv && bandgapEv < highEv;
+    }
+  }
 
   /**
    * A tunable absorber.
    *
+   * @param marked ranges without a measured composition nearby
+   * @param weak ranges in which an anchor absorbs less than its neighbours let expect
    * @param missEv by how much the curves miss the gap, from the lowest gap up in steps of 0.02 eV;
    *     found here when it is empty, which takes a while
    */
@@ -36,11 +45,13 @@ final class TunableMaterial implements Material {
       Tuning tuning,
       GapCurves curves,
       List<MarkedRange> marked,
+      List<MarkedRange> weak,
       double[] missEv) {
     this.record = record;
     this.tuning = tuning;
     this.curves = curves;
     this.marked = List.copyOf(marked);
+    this.weak = List.copyOf(weak);
     this.missEv = missEv.length == meshSize() ? missEv.clone() : missEv();
   }
 
@@ -71,10 +82,18 @@ final class TunableMaterial implements Material {
 
   @Override
   public List<Finding> findingsAt(double bandgapEv) {
-    return marked.stream()
-        .filter(m -> bandgapEv >= m.lowEv() && bandgapEv < m.highEv())
-        .map(m -> new Finding("gap-estimated", Severity.WARNING, record.name(), m.what()))
-        .toList();
+    List<Finding> findings = new ArrayList<>();
+    for (MarkedRange range : marked) {
+      if (range.holds(bandgapEv)) {
+        findings.add(new Finding("gap-estimated", Severity.WARNING, record.name(), range.what()));
+      }
+    }
+    for (MarkedRange range : weak) {
+      if (range.holds(bandgapEv)) {
+        findings.add(new Finding("anchor-weak", Severity.WARNING, record.name(), range.what()));
+      }
+    }
+    return findings;
   }
 
   private final class GapFiller implements Filler {

@@ -55,7 +55,7 @@ public final class AssessJob {
       Outcome outcome = powered.outcome();
       Findings findings = new Findings();
       findings.addAll(powered.findings());
-      findings.about(preparation.stack(), model, bench.design());
+      findings.about(bench);
       findings.about(outcome);
       findings.aboutErrors(outcome, false);
       List<Measured> measured = preparation.measurements().against(outcome, findings);

@@ -86,7 +86,7 @@ final class DesignResult {
                   drawn.aims(),
                   look,
                   constraints(bench));
-      findings.about(preparation.stack(), model, bench.design());
+      findings.about(bench);
       findings.addAll(powered.findings());
       findings.about(outcome);
       findings.aboutErrors(outcome, true);

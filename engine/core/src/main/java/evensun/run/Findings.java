@@ -1,10 +1,10 @@
 package evensun.run;
 
+import evensun.evaluation.Bench;
 import evensun.evaluation.Model;
 import evensun.result.FindingRecord;
 import evensun.result.Outcome;
 import evensun.result.SearchRecord;
-import evensun.spi.Design;
 import evensun.spi.Finding;
 import evensun.spi.Severity;
 import evensun.stack.ResolvedStack;
@@ -36,11 +36,16 @@ final class Findings {
     more.forEach(this::add);
   }
 
-  /** What the stack and the solver say. */
-  void about(ResolvedStack stack, Model model, Design design) {
+  /** What the stack, its materials at the gaps of a design, and the solver say. */
+  void about(Bench bench) {
+    Model model = bench.model();
+    ResolvedStack stack = model.stack();
     addAll(stack.findings());
     addAll(Slips.of(stack));
-    addAll(model.prepared().examine(design));
+    for (int slot = 0; slot < stack.slots().size(); slot++) {
+      addAll(stack.slots().get(slot).material().findingsAt(bench.bandgapEv(slot)));
+    }
+    addAll(model.prepared().examine(bench.design()));
     if (!stack.isMonochromatic() && !stack.subcells().isEmpty()) {
       perfectCollection(stack);
       outsideGrid(stack);

@@ -3,13 +3,21 @@ package evensun.material;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
+import evensun.light.Spectra;
 import evensun.light.Spectrum;
 import evensun.material.table.Bandgap;
 import evensun.material.table.OpticalTable;
+import evensun.spi.Finding;
 import java.io.IOException;
 import java.io.InputStream;
 import java.nio.charset.StandardCharsets;
 import java.util.Arrays;
+import java.util.DoubleSummaryStatistics;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.regex.Matcher;
+import java.util.regex.Pattern;
 import java.util.stream.IntStream;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
@@ -170,5 +178,48 @@ class TunableMaterialTest {
     assertThat(perovskite.findingsAt(1.3)).hasSize(1);
     assertThat(perovskite.findingsAt(1.68)).isEmpty();
     assertThat(material("aluminium-gallium-arsenide").findingsAt(2.1)).hasSize(1);
+  }
+
+  // Independent calculation from n and k alone: what 500 nm take in one pass of AM1.5G, every 10
+  // meV
+  // of each range, against the least and most that the finding promises.
+  @Test
+  void saysWhatItsWeakAnchorIsWorth() {
+    Pattern promised = Pattern.compile("take ([0-9.]+) to ([0-9.]+) mA");
+    Material caesium = material("lead-halide-perovskite.caesium");
+    Map<String, DoubleSummaryStatistics> worth = new HashMap<>();
+    for (int milliEv = 1660; milliEv < 2150; milliEv += 2) {
+      double gapEv = milliEv / 1000.0;
+      List<Finding> findings = caesium.findingsAt(gapEv);
+      assertThat(findings).extracting(Finding::code).containsExactly("anchor-weak");
+      worth
+          .computeIfAbsent(findings.get(0).message(), message -> new DoubleSummaryStatistics())
+          .accept(
+              onePass("lead-halide-perovskite", gapEv) - onePass(caesium.record().name(), gapEv));
+    }
+    assertThat(worth).hasSize(3);
+    worth.forEach(
+        (message, difference) -> {
+          Matcher range = promised.matcher(message);
+          assertThat(range.find()).isTrue();
+          assertThat(difference.getMin())
+              .isCloseTo(Double.parseDouble(range.group(1)), within(0.15));
+          assertThat(difference.getMax())
+              .isCloseTo(Double.parseDouble(range.group(2)), within(0.15));
+        });
+    assertThat(caesium.findingsAt(1.62)).isEmpty();
+    assertThat(caesium.findingsAt(2.3)).isEmpty();
+  }
+
+  /** What 500 nm absorb without reflection, mA cm⁻². */
+  private static double onePass(String name, double gapEv) {
+    Spectrum light = Spectra.named("AM1.5G");
+    OpticalTable table = at(name, gapEv);
+    double sum = 0;
+    for (int nm = 300; nm < 900; nm++) {
+      double absorbed = 1 - Math.exp(-table.alphaPerCmAt(nm + 0.5) * 500e-7);
+      sum += absorbed * light.photonCurrentMaPerCm2(nm, nm + 1);
+    }
+    return sum;
   }
 }
