@@ -3,11 +3,14 @@ package evensun.run;
 import evensun.evaluation.Model;
 import evensun.light.Spectrum;
 import evensun.pluginhost.PluginHost;
+import evensun.scenario.InputException;
 import evensun.scenario.InputFiles;
 import evensun.scenario.Scenario;
 import evensun.scenario.SearchSpec;
+import evensun.scenario.SolverSpec;
 import evensun.spi.Incidence;
 import evensun.spi.Services;
+import evensun.spi.UnsupportedProblem;
 import evensun.stack.ResolvedStack;
 import evensun.stack.StackResolver;
 import java.util.List;
@@ -38,7 +41,20 @@ public final class Preparation implements AutoCloseable {
     this.host = host;
     this.services = host.services(cancelled);
     this.choice = SolverChoice.of(stack, host);
-    this.model = Model.of(stack, choice.solver(), choice.options(), seed(), services);
+    this.model = prepare();
+  }
+
+  /** What a solver refuses although its options were set stands where they do. */
+  private Model prepare() {
+    try {
+      return Model.of(stack, choice.solver(), choice.options(), seed(), services);
+    } catch (UnsupportedProblem e) {
+      SolverSpec spec = stack.scenario().solver().orElse(null);
+      if (spec == null || spec.options().isEmpty()) {
+        throw e;
+      }
+      throw new InputException(spec.place(), e.getMessage());
+    }
   }
 
   /**
@@ -47,9 +63,9 @@ public final class Preparation implements AutoCloseable {
    * @param scenario as read
    * @param host loaded solvers
    * @param cancelled whether the user asked to stop
-   * @throws evensun.scenario.InputException with every fault found
+   * @throws InputException with every fault found
    * @throws evensun.pluginhost.PluginException when the solver is not loaded
-   * @throws evensun.spi.UnsupportedProblem when the solver cannot take the stack
+   * @throws UnsupportedProblem when the solver cannot take the stack
    */
   public static Preparation of(Scenario scenario, PluginHost host, BooleanSupplier cancelled) {
     InputFiles files = new InputFiles(scenario.source().folder());

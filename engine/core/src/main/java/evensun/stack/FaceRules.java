@@ -97,7 +97,7 @@ final class FaceRules {
       filmsNm += thickness(l).high();
     }
     if (texture.isPresent() && filmsNm > 0) {
-      double heightNm = 1e3 * Relief.of(texture.get(), angle(texture.get()).low()).heightUm();
+      double heightNm = 1e3 * Relief.ofOneShapeUm(texture.get(), angle(texture.get()).low());
       if (filmsNm >= heightNm) {
         Written one =
             written(boundaries.get(b)).stream()

@@ -21,7 +21,7 @@ import java.util.Optional;
 /** Answers designs by re-weighting what rays do. */
 final class RayEvaluator implements Evaluator, ReflectanceParts, DepthProfile, RaySection {
 
-  private static final int MOST_KEPT = 8;
+  private static final int MOST_KEPT = 16;
 
   private final Problem problem;
   private final Services services;

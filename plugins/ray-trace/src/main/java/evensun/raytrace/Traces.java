@@ -21,7 +21,7 @@ import java.util.Map;
  */
 final class Traces {
 
-  private static final int MOST_KEPT = 12;
+  private static final int MOST_KEPT = 16;
 
   private final Problem problem;
   private final int[] rays; // [w] of each replicate

@@ -118,7 +118,7 @@ public record Texture(
   public enum Arrangement {
     /** On a square grid, edge to edge. */
     GRID,
-    /** At random places with random sizes, overlapping. */
+    /** At random places, overlapping, with widths even within half of their mean about it. */
     SCATTERED
   }
 }

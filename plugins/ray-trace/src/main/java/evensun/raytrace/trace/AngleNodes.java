@@ -34,8 +34,12 @@ final class AngleNodes {
   /** Steps from one critical angle to that of another wavelength. */
   private static final int CRITICAL = 5;
 
-  /** Least cosine asked for: light along the surface is reflected. */
-  private static final double LEAST_COSINE = 1e-4;
+  /**
+   * Least cosine asked for, in place of the 1e-4 of light from all directions that runs flatter
+   * still. Along its surface a medium that absorbs ever so little has its incident and its
+   * reflected wave mixed strongly, which between nodes would count for light less flat.
+   */
+  private static final double LEAST_COSINE = 0.01;
 
   private final double[] critical; // [lit] cosine, 0 where there is none
   private final double index; // of the medium the light comes from, over that beyond
