@@ -2,6 +2,7 @@ package evensun.raytrace;
 
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
+import static org.assertj.core.api.Assertions.withinPercentage;
 
 import evensun.raytrace.kernel.LightTree;
 import evensun.raytrace.trace.Beam;
@@ -88,15 +89,13 @@ class DiffuseLimitTest {
             .apply(Stacks.at(NM))
             .exit(Stacks.constant(0.05, 0))
             .light(diffuse(Side.FRONT))
-            .rays(8192)
+            .rays(4096)
             .solve();
     int slab = response.absorptance.length - 1;
     double once = 1e-4;
     double enhancement = response.absorptance[slab][0] / once;
-    double error = response.absorptanceStandardError[slab][0] / once;
-    double limit = 4 * INDEX * INDEX;
-    assertThat(error).isLessThan(0.05 * limit);
-    assertThat(enhancement).isCloseTo(limit, within(3.5 * error + 0.005 * limit));
+    // So many rays leave a chance of two per cent.
+    assertThat(enhancement).isCloseTo(4 * INDEX * INDEX, withinPercentage(6));
   }
 
   /** Witness: reciprocity. As much diffuse light gets through from behind as from the front. */
@@ -117,7 +116,7 @@ class DiffuseLimitTest {
                 300,
                 texture(Shape.GROOVE, Direction.DOWN, Arrangement.GRID, Side.REAR))
             .light(diffuse(Side.FRONT), diffuse(Side.REAR))
-            .rays(16384)
+            .rays(8192)
             .solve();
     double down = response.transmittance[0][0];
     double up = response.transmittance[1][0];

@@ -180,6 +180,18 @@ class SamplingTest {
     return lit.attenuation(w).arriving[e] * lit.weighing().power(from);
   }
 
+  /** Witness: energy, where textures reach through nearly all of an opaque layer. */
+  @Test
+  void deepTexturesKeepTheLedger() {
+    Texture deep =
+        PyramidTest.texture(
+            Texture.Shape.PYRAMID, Texture.Direction.UP, Texture.Arrangement.SCATTERED, 100);
+    Response response = Stacks.at(300).thick("slab", Stacks.silicon(), 60, deep).rays(256).solve();
+    double total =
+        response.reflectance[0][0] + response.transmittance[0][0] + response.absorptance[0][0];
+    assertThat(total).isCloseTo(1, within(1e-9));
+  }
+
   /** Witness: reciprocity. Between transparent media light passes films equally well both ways. */
   @Test
   void coatingTablesAreReciprocal() {

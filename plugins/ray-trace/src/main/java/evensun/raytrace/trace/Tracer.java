@@ -143,10 +143,14 @@ final class Tracer {
     return depth(leg) > OPAQUE;
   }
 
-  /** Optical depth of a leg, in no design of this trace more. */
+  /**
+   * Optical depth of a leg, in no design of this trace less. Textures may reach through more of a
+   * layer than the thickness it has at least by its power of two.
+   */
   private double depth(Leg leg) {
     int m = leg.medium();
-    return media.alphaPerUm(m) * (leg.fixedUm + leg.perThickness * media.leastUm()[m]);
+    double um = leg.fixedUm + leg.perThickness * media.leastUm()[m];
+    return media.alphaPerUm(m) * Math.max(0, um);
   }
 
   private void meet(Leg leg) {
