@@ -76,7 +76,7 @@ final class AssessCommand extends BaseCommand {
       Scenario scenario = preparation.stack().scenario();
       if (output.out != null) {
         folder = RunFolder.create(output.out, output.force);
-        RunFiles.inputs(folder, scenario, preparation);
+        RunFiles.inputs(folder, scenario, preparation, settings);
       }
       boolean full = folder != null;
       double step = angleStepDeg == null ? AssessJob.USUAL_ANGLE_STEP_DEG : angleStepDeg;

@@ -8,6 +8,7 @@ import evensun.run.RunFolder;
 import evensun.scenario.InputException;
 import evensun.scenario.Place;
 import evensun.scenario.Scenario;
+import evensun.search.ForeignStateException;
 import evensun.search.SearchSettings;
 import evensun.search.SearchState;
 import evensun.search.SearchStateCodec;
@@ -101,7 +102,7 @@ final class DesignCommand extends BaseCommand {
         Preparation preparation = Preparation.of(scenario, host, interruption)) {
       DesignJob job = new DesignJob(preparation);
       RunFolder folder = folder(scenario);
-      RunFiles.inputs(folder, scenario, preparation);
+      RunFiles.inputs(folder, scenario, preparation, settings);
       result = search(job, folder, global, interruption);
       report = RunFiles.results(folder, result);
     }
@@ -116,6 +117,7 @@ final class DesignCommand extends BaseCommand {
   private Scenario scenario() {
     if (resume != null) {
       RunFolder.open(resume);
+      settings.addAll(0, RunFiles.settings(resume));
       return ScenarioInput.read(
           resume.resolve(RunFiles.SCENARIO).toString(), settings, console().in());
     }
@@ -153,6 +155,11 @@ final class DesignCommand extends BaseCommand {
     try {
       return job.run(
           searchSettings, progress, savedState(), interruption, order(), repeatCommand());
+    } catch (ForeignStateException e) {
+      throw new InputException(
+          Place.of(resume.resolve(ProgressLine.STATE).toString()),
+          "belongs to a search that varied or wanted something else, or had another seed; go on"
+              + " without --set, or start a new run with evensun design");
     } finally {
       progress.end();
       progress.save();

@@ -85,7 +85,7 @@ public final class ParetoSearch {
   /**
    * Continues a search; it ends bit for bit where the uninterrupted one ends.
    *
-   * @throws IllegalArgumentException when the state belongs to another search
+   * @throws ForeignStateException when the state belongs to another search
    */
   public ParetoOutcome resume(SearchState saved) {
     saved.checkBelongsTo(fingerprint());

@@ -57,7 +57,7 @@ public final class Search {
   /**
    * Continues a search; it ends bit for bit where the uninterrupted one ends.
    *
-   * @throws IllegalArgumentException when the state belongs to another search
+   * @throws ForeignStateException when the state belongs to another search
    */
   public SearchOutcome resume(SearchState saved) {
     saved.checkBelongsTo(fingerprint());

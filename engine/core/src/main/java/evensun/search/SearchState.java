@@ -133,7 +133,7 @@ public record SearchState(
   /** Refuses to go on with the state of another search. */
   void checkBelongsTo(String search) {
     if (!fingerprint.equals(search)) {
-      throw new IllegalArgumentException(
+      throw new ForeignStateException(
           "the saved state belongs to another search: it was made with "
               + fingerprint
               + "; this one has "

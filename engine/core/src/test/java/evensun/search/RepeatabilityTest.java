@@ -80,6 +80,7 @@ class RepeatabilityTest {
     Search search = new Search(PROBLEM, SETTINGS, SearchListener.NONE, () -> false);
     assertThatThrownBy(() -> search.resume(other))
         .isInstanceOf(IllegalArgumentException.class)
+        .isInstanceOf(ForeignStateException.class)
         .hasMessageContaining("another search");
   }
 

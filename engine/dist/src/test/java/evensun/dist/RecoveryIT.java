@@ -63,18 +63,64 @@ class RecoveryIT {
 
   @Test
   void killedAtTenMomentsItResumesToTheVerySameEnd() throws Exception {
-    JsonNode whole = run("design", SCENARIO, "--out", "run", "--threads", "1");
+    resumesToTheVerySameEnd(MOMENTS, 0.95);
+  }
+
+  /** What {@code --set} changed is known to the run that resumes. */
+  @Test
+  void aSearchWithChoicesResumesToTheVerySameEnd() throws Exception {
+    resumesToTheVerySameEnd(
+        3,
+        0.9,
+        "--set",
+        "grid.stepNm=20",
+        "--set",
+        "search.evaluations=4000",
+        "--set",
+        "search.vary.front-contact.material=[indium-tin-oxide, aluminium-zinc-oxide]",
+        "--set",
+        "search.vary.recombination.present=[true, false]");
+  }
+
+  @Test
+  void aFrontResumesToTheVerySameEnd() throws Exception {
+    resumesToTheVerySameEnd(
+        3,
+        0.6,
+        "--set",
+        "grid.stepNm=20",
+        "--set",
+        "search.evaluations=4000",
+        "--set",
+        "search.aim=[matched-current, {smallest: thicknessNm, of: [perovskite]}, {smallest:"
+            + " reflectedMaPerCm2}]");
+  }
+
+  /**
+   * Disturbs a run at random moments.
+   *
+   * @param count how many
+   * @param latest the last of them at this part of its evaluations
+   * @param settings of the first command; those that resume go without
+   */
+  private void resumesToTheVerySameEnd(int count, double latest, String... settings)
+      throws Exception {
+    JsonNode whole = run(started("run", "1", settings));
     int evaluations = whole.get("search").get("evaluations").asInt();
     Random random = new Random(20);
     List<Integer> moments = new ArrayList<>();
-    for (int i = 0; i < MOMENTS; i++) {
-      moments.add((int) (evaluations * (0.02 + 0.93 * random.nextDouble())));
+    for (int i = 0; i < count; i++) {
+      moments.add((int) (evaluations * (0.02 + (latest - 0.02) * random.nextDouble())));
     }
     moments.sort(null);
-    for (int i = 0; i < MOMENTS; i++) {
+    for (int i = 0; i < count; i++) {
       String threads = THREADS[i % THREADS.length];
-      boolean kill = i % 5 != 4; // the others are stopped as by Ctrl-C
-      assertThat(disturbed(i == 0, threads, moments.get(i), kill))
+      boolean kill = i % 5 != Math.min(4, count / 2); // the others are stopped as by Ctrl-C
+      String[] command =
+          i == 0
+              ? started("broken", threads, settings)
+              : new String[] {"design", "--resume", "broken", "--threads", threads};
+      assertThat(disturbed(i == 0, command, moments.get(i), kill))
           .as("moment %d, at %d evaluations", i, moments.get(i))
           .isEqualTo(kill ? KILLED : INTERRUPTED);
     }
@@ -83,12 +129,17 @@ class RecoveryIT {
     assertThat(result("broken")).isEqualTo(whole);
   }
 
+  private static String[] started(String out, String threads, String... settings) {
+    List<String> command =
+        new ArrayList<>(List.of("design", SCENARIO, "--out", out, "--threads", threads));
+    command.addAll(List.of(settings));
+    return command.toArray(String[]::new);
+  }
+
   /** Starts or resumes the run, disturbs it once it has come so far, and tells how it ended. */
-  private int disturbed(boolean first, String threads, int evaluations, boolean kill)
+  private int disturbed(boolean first, String[] command, int evaluations, boolean kill)
       throws IOException, InterruptedException {
-    String[] start = {"design", SCENARIO, "--out", "broken", "--threads", threads};
-    String[] resume = {"design", "--resume", "broken", "--threads", threads};
-    ProcessBuilder builder = Program.builderWithSignals(folder, first ? start : resume);
+    ProcessBuilder builder = Program.builderWithSignals(folder, command);
     // A process that lives for a moment starts faster without the second compiler.
     builder.environment().put("JAVA_TOOL_OPTIONS", "-XX:TieredStopAtLevel=1");
     Process process =
