@@ -546,6 +546,17 @@
     all('main > section').forEach(function (section) { observer.observe(section); });
   }
 
+  /* What a link leads to may stand in something folded. */
+  function unfolding() {
+    document.addEventListener('click', function (event) {
+      var link = event.target.closest && event.target.closest('a[href^="#"]');
+      var target = link && document.getElementById(link.getAttribute('href').slice(1));
+      for (var fold = target && target.closest('details'); fold; fold = fold.parentNode.closest('details')) {
+        fold.open = true;
+      }
+    });
+  }
+
   function printing() {
     var opened = [];
     window.addEventListener('beforeprint', function () {
@@ -590,6 +601,7 @@
   all('[data-together]').forEach(together);
   glossary();
   follow();
+  unfolding();
   printing();
   drawAll();
 })();

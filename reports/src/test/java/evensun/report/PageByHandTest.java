@@ -105,6 +105,14 @@ class PageByHandTest {
                 "return [...document.querySelectorAll('a[href^=\"#\"]')].filter(a =>"
                     + " !document.getElementById(a.hash.slice(1))).map(a => a.hash)"))
         .isEqualTo(List.of());
+    // Every one of them is in the list of all, but those behind a chart, which open with it.
+    assertThat(
+            browser.run(
+                "return [...document.querySelectorAll('main figure, main .table')].filter(e =>"
+                    + " !e.closest('#decision') && !e.parentNode.closest('figure') &&"
+                    + " !document.querySelector('.places a[href=\"#' + e.id + '\"]')).map(e =>"
+                    + " e.id)"))
+        .isEqualTo(List.of());
   }
 
   @Test

@@ -1,6 +1,7 @@
 package evensun.cli;
 
 import evensun.material.MaterialRecord;
+import evensun.report.text.Numbers;
 import java.util.List;
 import java.util.Locale;
 import java.util.function.ToDoubleBiFunction;
@@ -15,7 +16,7 @@ final class MaterialPage {
   private static final int LEFT = 64;
   private static final int BOTTOM = 40;
   private static final List<String> COLOURS =
-      List.of("#0b6e99", "#c2410c", "#3f7d20", "#7c3aed", "#a16207", "#be123c", "#334155");
+      List.of("#27619c", "#8a5406", "#7f3f75", "#1a6f65", "#97432e", "#4d55a6", "#334155");
   private static final List<String> DASHES = List.of("", "7 4", "2 3", "9 3 2 3");
 
   private MaterialPage() {}
@@ -28,14 +29,16 @@ final class MaterialPage {
         <html lang="en"><head><meta charset="utf-8">
         <meta http-equiv="Content-Security-Policy" content="default-src 'none'; style-src 'unsafe-inline'">
         <meta name="viewport" content="width=device-width, initial-scale=1">
+        <meta name="color-scheme" content="light">
         <title>Optical constants</title>
         <style>
-        body{font:16px/1.5 system-ui,sans-serif;margin:2rem auto;max-width:820px;padding:0 1rem;color:#1c1917;background:#fff}
+        body{font:16px/1.5 system-ui,sans-serif;margin:2rem auto;max-width:820px;padding:0 1rem;color:#18222d;background:#fbfaf6}
+        h1,h2{font-family:Charter,"Sitka Text","Palatino Linotype",Palatino,Georgia,serif;font-weight:600}
         svg{width:100%;height:auto} h2{margin:2rem 0 .3rem;font-size:1.1rem}
-        .axis{stroke:#57534e;fill:none} .grid{stroke:#e7e5e4} text{font-size:12px;fill:#44403c}
-        dl{display:grid;grid-template-columns:9rem 1fr;gap:.2rem .8rem} dt{color:#57534e} dd{margin:0}
-        table{border-collapse:collapse;font-variant-numeric:tabular-nums} td,th{padding:.15rem .8rem;text-align:right;border-bottom:1px solid #e7e5e4}
-        </style></head><body>
+        .axis{stroke:#535e6a;fill:none} .grid{stroke:#e9e5da} text{font-size:12px;fill:#535e6a}
+        dl{display:grid;grid-template-columns:9rem 1fr;gap:.2rem .8rem} dt{color:#535e6a} dd{margin:0}
+        table{border-collapse:collapse;font-variant-numeric:tabular-nums} td,th{padding:.15rem .8rem;text-align:right;border-bottom:1px solid #e9e5da}
+        </style></head><body><main>
         <h1>Optical constants</h1>
         """);
     chart(page, shown, "Refractive index n", false, (curves, w) -> curves.n().get(w));
@@ -44,7 +47,7 @@ final class MaterialPage {
     for (int i = 0; i < shown.size(); i++) {
       record(page, shown.get(i), COLOURS.get(i % COLOURS.size()));
     }
-    return page.append("</body></html>\n").toString();
+    return page.append("</main></body></html>\n").toString();
   }
 
   private static void chart(
@@ -138,7 +141,7 @@ final class MaterialPage {
       for (double value = low; value <= high + 1e-9; value += step) {
         String label =
             logarithmic
-                ? "1e" + Math.round(value)
+                ? Numbers.powerOfTen((int) Math.round(value))
                 : String.format(Locale.ROOT, "%.4g", value)
                     .replaceAll("(\\.\\d*?)0+$", "$1")
                     .replaceAll("\\.$", "");

@@ -80,7 +80,7 @@ public final class ComparisonPages {
   private static Section which(Comparison comparison) {
     Table.Builder table =
         new Table.Builder("table-runs", "The runs, and the letters they go by here")
-            .words("")
+            .words("letter")
             .words("run")
             .words("title")
             .words("started (UTC)")

@@ -21,18 +21,20 @@ public final class GapPage {
         <html lang="en"><head><meta charset="utf-8">
         <meta http-equiv="Content-Security-Policy" content="default-src 'none'; style-src 'unsafe-inline'; base-uri 'none'; form-action 'none'">
         <meta name="viewport" content="width=device-width, initial-scale=1">
+        <meta name="color-scheme" content="light">
         <title>Bandgap map</title>
         <style>
-        body{font:16px/1.5 system-ui,sans-serif;margin:2rem auto;max-width:820px;padding:0 1rem;color:#1c1917;background:#fff}
+        body{font:16px/1.5 system-ui,sans-serif;margin:2rem auto;max-width:820px;padding:0 1rem;color:#18222d;background:#fbfaf6}
+        h1,h2{font-family:Charter,"Sitka Text","Palatino Linotype",Palatino,Georgia,serif;font-weight:600}
         h1{font-size:1.5rem;line-height:1.25;margin-bottom:.4rem} h2{margin:2rem 0 .3rem;font-size:1.1rem}
-        svg{width:100%;height:auto} text{font-size:13px;fill:#44403c} .name{font-size:14px;fill:#1c1917}
-        .axis,.tick{stroke:#57534e;fill:none} .hatch{stroke:#a8a29e;stroke-width:2}
-        .line{fill:none;stroke:#0b5f86;stroke-width:1.5} .ridge{fill:#9ecae1;stroke:none}
-        .level{fill:#0b5f86;font-weight:600;paint-order:stroke;stroke:#fff;stroke-width:4px}
-        .note{fill:#57534e;paint-order:stroke;stroke:#fff;stroke-width:5px}
-        .best{stroke:#1c1917;stroke-width:2;fill:none} .best-name{fill:#1c1917;font-weight:700;paint-order:stroke;stroke:#fff;stroke-width:4px}
-        table{border-collapse:collapse;font-variant-numeric:tabular-nums} td,th{padding:.15rem .8rem;text-align:right;border-bottom:1px solid #d6d3d1} th{font-weight:600} .word{text-align:left}
-        .small{color:#57534e;font-size:.9rem}
+        svg{width:100%;height:auto} text{font-size:13px;fill:#535e6a} .name{font-size:14px;fill:#18222d}
+        .axis,.tick{stroke:#535e6a;fill:none} .hatch{stroke:#a8a29e;stroke-width:2}
+        .line{fill:none;stroke:#27619c;stroke-width:1.5} .ridge{fill:#9ecae1;stroke:none}
+        .level{fill:#27619c;font-weight:600;paint-order:stroke;stroke:#fbfaf6;stroke-width:4px}
+        .note{fill:#535e6a;paint-order:stroke;stroke:#fbfaf6;stroke-width:5px}
+        .best{stroke:#18222d;stroke-width:2;fill:none} .best-name{fill:#18222d;font-weight:700;paint-order:stroke;stroke:#fbfaf6;stroke-width:4px}
+        table{border-collapse:collapse;font-variant-numeric:tabular-nums} td,th{padding:.15rem .8rem;text-align:right;border-bottom:1px solid #d9d4c8} th{font-weight:600} .word{text-align:left}
+        .small{color:#535e6a;font-size:.9rem}
         </style></head><body><main>
         """);
     page.append("<h1>").append(headline(map)).append("</h1>\n");
