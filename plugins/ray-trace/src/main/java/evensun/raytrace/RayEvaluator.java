@@ -21,8 +21,6 @@ import java.util.Optional;
 /** Answers designs by re-weighting what rays do. */
 final class RayEvaluator implements Evaluator, ReflectanceParts, DepthProfile, RaySection {
 
-  private static final int MOST_KEPT = 16;
-
   private final Problem problem;
   private final Services services;
   private final Traces traces;
@@ -80,7 +78,7 @@ final class RayEvaluator implements Evaluator, ReflectanceParts, DepthProfile, R
 
   private void forgetOldest() {
     Iterator<LitDevice> oldest = devices.values().iterator();
-    while (devices.size() > MOST_KEPT && oldest.hasNext()) {
+    while (devices.size() > Traces.MOST_KEPT && oldest.hasNext()) {
       oldest.next().close();
       oldest.remove();
     }

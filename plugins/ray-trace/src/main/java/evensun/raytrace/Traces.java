@@ -21,7 +21,8 @@ import java.util.Map;
  */
 final class Traces {
 
-  private static final int MOST_KEPT = 16;
+  /** Traces kept for later. */
+  static final int MOST_KEPT = 16;
 
   private final Problem problem;
   private final int[] rays; // [w] of each replicate

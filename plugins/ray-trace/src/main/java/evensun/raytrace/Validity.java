@@ -42,6 +42,7 @@ final class Validity {
       face.relief().ifPresent(relief -> addRelief(relief, where));
       if (face.relief().isPresent()) {
         addFilms(b, face.relief().get());
+        addRetracing(b, where);
       }
     }
     for (int m = 1; m < traced.device().mediaCount() - 1; m++) {
@@ -94,6 +95,22 @@ final class Validity {
               Words.of(
                   "films of together %s nm follow shapes %s µm wide; beyond %s %% of the width, tips and valleys are no longer flat facets with films of one thickness",
                   total, relief.featureUm(), 100 * FILM_SHARE)));
+    }
+  }
+
+  private void addRetracing(int boundary, String where) {
+    boolean moved =
+        traced.device().boundaries().get(boundary).texture().stream()
+            .anyMatch(texture -> texture.facetAngleDeg().knob().isPresent());
+    if (moved) {
+      findings.add(
+          new Finding(
+              "facet-angle-retraced",
+              Severity.NOTE,
+              where,
+              Words.of(
+                  "every new facet angle is traced anew, with %s meetings of rays and facets, and takes as long as tens of designs; an angle with a step, of %s values at most, is traced once for each",
+                  traced.forest().meetings(), Traces.MOST_KEPT)));
     }
   }
 

@@ -243,6 +243,7 @@ class SamplingTest {
       design.knob[0] = 52;
       evaluator.evaluate(design, response);
       assertThat(response.sum[1]).isEqualTo(drawn.solve().sum[1]).isNotEqualTo(before);
+      assertThat(prepared.examine(design)).anyMatch(f -> f.code().equals("facet-angle-retraced"));
     }
   }
 
@@ -312,6 +313,29 @@ class SamplingTest {
       evaluator.evaluate(stack.design(), together);
       assertThat(together.sum).containsExactly(apart.sum, within(1e-12));
       assertThat(together.reflectance[0]).containsExactly(apart.reflectance[0], within(1e-12));
+    }
+  }
+
+  /** Witness: currents in between; what rays add to the change stays within their error. */
+  @Test
+  void currentsChangeSmoothlyWithTheFacetAngle() {
+    Stacks moved = PyramidTest.device(pyramids(true, 54)).rays(128);
+    Design design = moved.design();
+    design.knob[0] = 54;
+    try (PreparedSolver prepared =
+            new RayTraceSolver().prepare(moved.problem(), design, Stacks.services());
+        Evaluator evaluator = prepared.newEvaluator()) {
+      Response response = Stacks.wanted(moved.problem());
+      double[] current = new double[5];
+      for (int i = 0; i < current.length; i++) {
+        design.knob[0] = 53 + 0.5 * i;
+        evaluator.evaluate(design, response);
+        current[i] = response.sum[1];
+      }
+      for (int i = 1; i + 1 < current.length; i++) {
+        double between = (current[i - 1] + current[i + 1]) / 2;
+        assertThat(current[i]).isCloseTo(between, within(2 * response.sumStandardError[1]));
+      }
     }
   }
 }
