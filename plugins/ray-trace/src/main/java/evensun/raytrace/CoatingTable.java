@@ -34,7 +34,7 @@ final class CoatingTable implements AutoCloseable {
   private final int boundary;
   private final List<Integer> films;
   private final int[] wavelengths;
-  private final List<Question> questions = new ArrayList<>();
+  private final Question[] questions;
   private final Design films1;
   private final long[] seen; // [material of the question] revision
   private final double[] thickness; // [film] as answered last
@@ -70,13 +70,15 @@ final class CoatingTable implements AutoCloseable {
     rest = new double[wavelengths.length];
     from = boundary + (table.fromBelow() ? 1 : 0);
     Side side = table.fromBelow() ? Side.REAR : Side.FRONT;
+    questions = new Question[(cosines.length + NODES_PER_QUESTION - 1) / NODES_PER_QUESTION];
     for (int at = 0; at < cosines.length; at += NODES_PER_QUESTION) {
       int end = Math.min(cosines.length, at + NODES_PER_QUESTION);
       List<Incidence> incidences = incidences(Arrays.copyOfRange(cosines, at, end), side);
       PreparedSolver prepared =
           below.prepare(question.withIncidences(incidences), films1, services);
       Response answer = Response.spectra(incidences.size(), films.size(), wavelengths.length);
-      questions.add(new Question(at, end - at, prepared, prepared.newEvaluator(), answer));
+      questions[at / NODES_PER_QUESTION] =
+          new Question(at, end - at, prepared, prepared.newEvaluator(), answer);
     }
   }
 

@@ -6,8 +6,6 @@ import evensun.raytrace.trace.IdealShare;
 import evensun.spi.Design;
 import evensun.spi.Problem;
 import evensun.spi.Services;
-import java.util.ArrayList;
-import java.util.List;
 
 /** The coatings of all boundaries at the angles that occur. Owned by one thread. */
 final class Coatings implements AutoCloseable {
@@ -17,15 +15,16 @@ final class Coatings implements AutoCloseable {
 
   private final Device device;
   private final Angles angles;
-  private final List<CoatingTable> tables = new ArrayList<>(); // null where a boundary is ideal
+  private final CoatingTable[] tables; // null where a boundary is ideal
 
   Coatings(Problem problem, Device device, Angles angles, Services services) {
     this.device = device;
     this.angles = angles;
     coating = new double[problem.wavelengthCount()][Weighing.PER_NODE * (angles.count() + 1)];
-    for (int t = 0; t < angles.tables().size(); t++) {
+    tables = new CoatingTable[angles.tables().size()];
+    for (int t = 0; t < tables.length; t++) {
       Angles.Table table = angles.tables().get(t);
-      tables.add(boundary(t).isIdeal() ? null : new CoatingTable(problem, device, table, services));
+      tables[t] = boundary(t).isIdeal() ? null : new CoatingTable(problem, device, table, services);
     }
   }
 
@@ -35,11 +34,11 @@ final class Coatings implements AutoCloseable {
 
   /** Fills the tables for a design. */
   void refresh(Design design) {
-    for (int t = 0; t < tables.size(); t++) {
-      if (tables.get(t) == null) {
+    for (int t = 0; t < tables.length; t++) {
+      if (tables[t] == null) {
         fillIdeal(design, angles.tables().get(t));
       } else {
-        tables.get(t).refresh(design, coating);
+        tables[t].refresh(design, coating);
       }
     }
   }

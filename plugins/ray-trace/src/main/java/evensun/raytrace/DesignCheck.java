@@ -114,7 +114,8 @@ final class DesignCheck {
   }
 
   private void checkFilms(Design design, Device.Boundary boundary, double featureUm) {
-    for (int film : boundary.films()) {
+    for (int f = 0; f < boundary.films().size(); f++) {
+      int film = boundary.films().get(f);
       if (design.thicknessNm[film] > 1000 * featureUm) {
         throw failed(
             "layer \"%s\" is %s nm thick and follows a texture whose shapes are %s nm wide; a film must be thinner than the shapes it follows: make it thinner, or the texture coarser, or write coherence: incoherent if it fills the texture",

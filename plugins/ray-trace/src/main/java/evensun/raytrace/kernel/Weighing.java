@@ -6,8 +6,7 @@ public final class Weighing {
   /** Numbers per node of a coating: R and T, each for s and p. */
   public static final int PER_NODE = 4;
 
-  private double[] legS = new double[0];
-  private double[] legP = new double[0];
+  private double[] legs = new double[0]; // [2 · leg + polarisation] power at its start
 
   /** For the loop. */
   public Weighing() {}
@@ -38,9 +37,8 @@ public final class Weighing {
       double rootP,
       double[] booked,
       double[] met) {
-    if (legS.length < 2 * tree.count) {
-      legS = new double[2 * tree.count];
-      legP = new double[2 * tree.count];
+    if (legs.length < 4 * tree.count) {
+      legs = new double[4 * tree.count];
     }
     follow(
         from,
@@ -75,12 +73,11 @@ public final class Weighing {
       double rootP,
       double[] booked,
       double[] met) {
-    double[] s = legS;
-    double[] p = legP;
+    double[] power = legs;
     for (int e = from; e < to; e++) {
       int by = parent[e];
-      double s0 = by < 0 ? rootS : s[by];
-      double p0 = by < 0 ? rootP : p[by];
+      double s0 = by < 0 ? rootS : power[2 * by];
+      double p0 = by < 0 ? rootP : power[2 * by + 1];
       double turned = (1 - kept[e]) * (p0 - s0);
       double inS = arriving[e] * (s0 + turned);
       double inP = arriving[e] * (p0 - turned);
@@ -99,18 +96,17 @@ public final class Weighing {
       double throughS = lowS * coating[at + 2] + highS * coating[at + 6];
       double throughP = lowP * coating[at + 3] + highP * coating[at + 7];
       int leg = 2 * e;
-      s[leg] = reflectedS;
-      p[leg] = reflectedP;
+      power[2 * leg] = reflectedS;
+      power[2 * leg + 1] = reflectedP;
+      power[2 * leg + 2] = throughS;
+      power[2 * leg + 3] = throughP;
       booked[slot[leg]] += (reflectedS + reflectedP) * absorbed[leg];
-      leg++;
-      s[leg] = throughS;
-      p[leg] = throughP;
-      booked[slot[leg]] += (throughS + throughP) * absorbed[leg];
+      booked[slot[leg + 1]] += (throughS + throughP) * absorbed[leg + 1];
     }
   }
 
   /** Power at the start of a leg of the meetings followed last, both polarisations. */
   public double power(int leg) {
-    return legS[leg] + legP[leg];
+    return legs[2 * leg] + legs[2 * leg + 1];
   }
 }
