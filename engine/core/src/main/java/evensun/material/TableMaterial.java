@@ -79,7 +79,7 @@ public final class TableMaterial implements Material {
     findings.addAll(RecordFindings.of(record, wavelengthNm));
     double first = wavelengthNm[0];
     double last = wavelengthNm[wavelengthNm.length - 1];
-    if (first < table.fromNm() || last > table.toNm()) {
+    if (!table.covers(first, last)) {
       if (!hold) {
         throw new MaterialRangeException(
             Ranges.message(record.name(), table.fromNm(), table.toNm(), first, last),

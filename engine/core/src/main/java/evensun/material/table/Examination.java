@@ -29,6 +29,11 @@ public final class Examination {
   private static final double COARSE_N = 0.03;
   private static final double COARSE_K = 0.03;
 
+  /** Below this, absorption bends n by less than {@link #RISE_N}. */
+  private static final double CLEAR_K = 0.003;
+
+  private static final double RISE_N = 0.03;
+
   private final String name;
   private final Spectrum spectrum;
   private final List<Finding> findings = new ArrayList<>();
@@ -67,6 +72,7 @@ public final class Examination {
     examination.range(table, gridFromNm, gridToNm);
     examination.floor(table, gridToNm);
     examination.consistency(table);
+    examination.dispersion(table);
     examination.sampling(table);
     examination.jumps(table);
     examination.lowIndex(table);
@@ -75,22 +81,10 @@ public final class Examination {
 
   private void form(List<RawTable.Point> points) {
     double last = 0;
-    for (RawTable.Point point : points) {
-      boolean bad =
-          !(point.n() > 0)
-              || !(point.k() >= 0)
-              || Double.isInfinite(point.n())
-              || Double.isInfinite(point.k());
-      if (bad) {
-        findings.add(
-            new Finding(
-                "table-impossible-value",
-                Severity.SERIOUS,
-                name,
-                text(
-                    "line %d: n = %s, k = %s at %s; n must be greater than 0 and k at least 0: remove the"
-                        + " line or correct it",
-                    point.line(), point.n(), point.k(), nm(point.wavelengthNm()))));
+    for (int i = 0; i < points.size(); i++) {
+      RawTable.Point point = points.get(i);
+      if (impossible(point) && (i == 0 || !impossible(points.get(i - 1)))) {
+        impossibleFrom(points, i);
       }
       if (point.wavelengthNm() == last) {
         findings.add(
@@ -113,11 +107,42 @@ public final class Examination {
     }
   }
 
+  private static boolean impossible(RawTable.Point point) {
+    return !(point.n() > 0)
+        || !(point.k() >= 0)
+        || Double.isInfinite(point.n())
+        || Double.isInfinite(point.k());
+  }
+
+  /** One finding for impossible values that follow each other. */
+  private void impossibleFrom(List<RawTable.Point> points, int first) {
+    int last = first;
+    while (last + 1 < points.size() && impossible(points.get(last + 1))) {
+      last++;
+    }
+    RawTable.Point point = points.get(first);
+    String more =
+        last == first
+            ? ""
+            : text(
+                " (and %d more up to %s, line %d)",
+                last - first, nm(points.get(last).wavelengthNm()), points.get(last).line());
+    findings.add(
+        new Finding(
+            "table-impossible-value",
+            Severity.SERIOUS,
+            name,
+            text(
+                "line %d: n = %s, k = %s at %s%s; n must be greater than 0 and k at least 0: remove"
+                    + " the line or correct it",
+                point.line(), point.n(), point.k(), nm(point.wavelengthNm()), more)));
+  }
+
   private void range(OpticalTable table, double gridFromNm, double gridToNm) {
     double missing =
         spectrum.photonCurrentMaPerCm2(gridFromNm, Math.max(gridFromNm, table.fromNm()))
             + spectrum.photonCurrentMaPerCm2(Math.min(gridToNm, table.toNm()), gridToNm);
-    if (table.fromNm() > gridFromNm || table.toNm() < gridToNm) {
+    if (!table.covers(gridFromNm, gridToNm)) {
       findings.add(
           new Finding(
               "table-range",
@@ -181,6 +206,39 @@ public final class Examination {
                                 + " explained by any absorption outside the table, most (%.2f) near %s;"
                                 + " check that both come from one film and one fit",
                             residual.rms(), residual.largest(), nm(residual.atNm())))));
+  }
+
+  /**
+   * Where nothing absorbs, n falls with the wavelength: absorption at shorter and at longer waves
+   * both make it so (Kramers–Kronig).
+   */
+  private void dispersion(OpticalTable table) {
+    double[] nm = table.wavelengthNm();
+    double[] n = table.n();
+    double[] k = table.k();
+    int lowest = 0;
+    int from = 0;
+    int to = 0;
+    for (int i = 0; i < nm.length; i++) {
+      if (k[i] > CLEAR_K || k[Math.max(i - 1, 0)] > CLEAR_K || n[i] < n[lowest]) {
+        lowest = i;
+      }
+      if (n[i] - n[lowest] > n[to] - n[from]) {
+        from = lowest;
+        to = i;
+      }
+    }
+    if (n[to] - n[from] > RISE_N) {
+      findings.add(
+          new Finding(
+              "table-kramers-kronig",
+              Severity.WARNING,
+              name,
+              text(
+                  "n rises by %.2f from %s to %s although k stays below %s there: no absorption"
+                      + " anywhere makes it so; check the columns and the fit",
+                  n[to] - n[from], nm(nm[from]), nm(nm[to]), CLEAR_K)));
+    }
   }
 
   /** A point that the straight line between its neighbours misses by much. */

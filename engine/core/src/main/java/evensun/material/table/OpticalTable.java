@@ -9,6 +9,9 @@ import java.util.Arrays;
  */
 public final class OpticalTable {
 
+  /** What a photon energy of four digits leaves open at 1200 nm. */
+  private static final double END_NM = 0.1;
+
   private final double[] wavelengthNm;
   private final double[] n;
   private final double[] k;
@@ -71,6 +74,11 @@ public final class OpticalTable {
   /** Last wavelength in nm. */
   public double toNm() {
     return wavelengthNm[wavelengthNm.length - 1];
+  }
+
+  /** Whether wavelengths from one to another lie in the table, but for the rounding of its ends. */
+  public boolean covers(double fromNm, double toNm) {
+    return fromNm >= fromNm() - END_NM && toNm <= toNm() + END_NM;
   }
 
   /** [i] wavelengths in nm; a fresh array. */

@@ -50,6 +50,47 @@ class ExaminationTest {
     assertThat(codes(absorber(nm -> 0, nm -> 0))).isEmpty();
   }
 
+  // Law: outside absorption n falls with the wavelength (Kramers-Kronig, all oscillators of
+  // positive
+  // strength); a line that rises by 0.18 over 300 to 1200 nm cannot be.
+  @Test
+  void findsAnIndexThatRisesWhereNothingAbsorbs() {
+    double[] nm = new double[91];
+    double[] rising = new double[nm.length];
+    double[] falling = new double[nm.length];
+    double[] clear = new double[nm.length];
+    for (int i = 0; i < nm.length; i++) {
+      nm[i] = 300 + 10 * i;
+      rising[i] = 1.5 + 2e-4 * nm[i];
+      falling[i] = 1.5 + 6000 / (nm[i] * nm[i]);
+    }
+    assertThat(codes(OpticalTable.of(nm, rising, clear))).containsExactly("table-kramers-kronig");
+    assertThat(codes(OpticalTable.of(nm, falling, clear))).isEmpty();
+  }
+
+  // 4.1328 and 1.0332 eV, four digits, are 300.0003 and 1200.002 nm: hc/q = 1239.841984 eV nm.
+  @Test
+  void takesARoundedPhotonEnergyForTheEndOfTheGrid() {
+    double[] nm = {1239.841984 / 4.1328, 500, 700, 1239.841984 / 1.0332};
+    OpticalTable table = OpticalTable.of(nm, new double[] {2, 2, 2, 2}, new double[4]);
+    assertThat(table.covers(300, 1200)).isTrue();
+    assertThat(table.covers(299.8, 1200)).isFalse();
+    assertThat(table.covers(300, 1200.3)).isFalse();
+    assertThat(codes(table)).isEmpty();
+  }
+
+  @Test
+  void saysOnceWhatManyLinesInARowHaveWrong() {
+    String text = "wavelength_nm,n,k\n300,2,-1\n310,2,-1\n320,2,-1\n330,2,0\n340,2,-1\n";
+    List<Finding> findings =
+        Examination.form("film", OpticalTableReader.read(text, TableHints.NONE), LIGHT);
+    assertThat(findings).hasSize(2);
+    assertThat(findings.get(0).message())
+        .startsWith("line 2")
+        .contains("2 more up to 320 nm, line 4");
+    assertThat(findings.get(1).message()).startsWith("line 6").doesNotContain("more");
+  }
+
   // By hand: k = 0.02 in 500 nm absorbs 1 − exp(−4π·0.02·500/λ), near 0.15 at 800 nm; the light
   // from 0.10 eV below the gap (785 nm) to the end of the grid carries about 20 mA cm⁻².
   @Test
@@ -108,7 +149,9 @@ class ExaminationTest {
 
   @Test
   void findsImpossibleDoubledAndUnsortedPoints() {
-    assertThat(formCodes("wavelength_nm,n,k\n300,2,0\n300,2,-1\n280,2,nan\n400,0,0\n"))
+    assertThat(
+            formCodes(
+                "wavelength_nm,n,k\n300,2,0\n300,2,-1\n310,2,0\n280,2,nan\n330,2,0\n400,0,0\n"))
         .containsExactly(
             "table-impossible-value",
             "table-doubled-wavelength",
