@@ -150,9 +150,7 @@ public final class Outlook {
         .map(
             error ->
                 "Statistics: subcell currents carry ±"
-                    + Numbers.fixed(error, 3)
-                    + "\u00a0"
-                    + Numbers.MA
+                    + Numbers.withUnit(Numbers.fixed(error, 3), Numbers.MA)
                     + " (one standard error).");
   }
 
