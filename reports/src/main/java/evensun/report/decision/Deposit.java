@@ -57,6 +57,22 @@ final class Deposit {
     return there ? "" : choice.found();
   }
 
+  /**
+   * What varied, and what followed it: those of a design's values that did not vary by themselves.
+   */
+  static List<VariableRecord> withFollowers(
+      List<VariableRecord> variables, Map<String, Double> design) {
+    List<VariableRecord> all = new ArrayList<>(variables);
+    design.forEach(
+        (key, value) -> {
+          if (variables.stream().noneMatch(v -> v.key().equals(key))) {
+            String unit = Keys.isThickness(key) ? "nm" : "";
+            all.add(new VariableRecord(key, unit, value, value, 0, value, value, null, null, null));
+          }
+        });
+    return all;
+  }
+
   private static String layer(
       String layer, List<VariableRecord> values, @Nullable String material) {
     if (ChoiceRecord.ABSENT.equals(material)) {

@@ -30,7 +30,9 @@ public final class Sentence {
           + Numbers.count(search.evaluations(), "design")
           + " tried, all failed.";
     }
-    String what = Deposit.phrase(search.variables(), search.choices());
+    String what =
+        Deposit.phrase(
+            Deposit.withFollowers(search.variables(), result.found().design()), search.choices());
     String deposit = what.isEmpty() ? "Deposit the stack as listed" : "Deposit " + what;
     return deposit + ": " + gives(result, search) + GridWords.headline(search) + ".";
   }

@@ -5,6 +5,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 import evensun.result.SearchRecord.ChoiceRecord;
 import evensun.result.SearchRecord.VariableRecord;
 import java.util.List;
+import java.util.Map;
 import org.junit.jupiter.api.Test;
 
 /** What is said to deposit. Witness: the choices as written here. */
@@ -33,6 +34,15 @@ class DepositTest {
     assertThat(phrase(choice("contact.material", "tin", "zinc")))
         .isEqualTo("40\u00a0nm contact of zinc and 92\u00a0nm coating");
     assertThat(phrase(choice("contact.material", "tin", "tin"))).contains("contact of tin");
+  }
+
+  @Test
+  void whatFollowsAnotherValueIsNamedAsWell() {
+    Map<String, Double> design =
+        Map.of(
+            "coating.thicknessNm", 92.0, "contact.thicknessNm", 40.0, "spacer.thicknessNm", 46.0);
+    assertThat(Deposit.phrase(Deposit.withFollowers(VARIED, design), List.of()))
+        .isEqualTo("92\u00a0nm coating, 40\u00a0nm contact and 46\u00a0nm spacer");
   }
 
   @Test
