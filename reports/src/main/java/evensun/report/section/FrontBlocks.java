@@ -117,7 +117,9 @@ final class FrontBlocks {
   private List<String> row(int number, FrontPoint point, DesignColumns columns) {
     List<String> cells = new ArrayList<>();
     cells.add(FrontWords.name(front, number));
-    point.aims().forEach(aim -> cells.add(Numbers.significant(aim, 5)));
+    for (int aim = 0; aim < point.aims().size(); aim++) {
+      cells.add(Numbers.bare(point.aims().get(aim), front.units().get(aim)));
+    }
     cells.addAll(columns.cells(point.values(), point.choices()));
     return cells;
   }

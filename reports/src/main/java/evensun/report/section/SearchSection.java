@@ -24,7 +24,7 @@ import java.util.Optional;
 /** How the search found it. */
 public final class SearchSection {
 
-  private static final double LEAST_SHOWN = 5e-5;
+  private static final double LEAST_SHOWN = 5e-4;
 
   private SearchSection() {}
 
@@ -88,7 +88,7 @@ public final class SearchSection {
     Double refinement = search.refinementGain();
     if (refinement != null && refinement >= LEAST_SHOWN) {
       text.append("; the local refinement at the end added ")
-          .append(Numbers.withUnit(Numbers.fixed(refinement, 4), search.aimUnit()));
+          .append(Numbers.withUnit(Numbers.fixed(refinement, 3), search.aimUnit()));
     }
     if (search.failures() > 0) {
       text.append("; ")
@@ -103,7 +103,9 @@ public final class SearchSection {
         .map(
             cost ->
                 "Standing on the steps of the tool costs "
-                    + Numbers.withUnit(Numbers.fixed(cost, 4), search.aimUnit())
+                    + Numbers.withUnit(
+                        cost < LEAST_SHOWN ? "less than 0.001" : Numbers.fixed(cost, 3),
+                        search.aimUnit())
                     + " against the best design nearby that disregards them.");
   }
 
@@ -155,7 +157,7 @@ public final class SearchSection {
       Optimum optimum = search.optima().get(i);
       List<String> cells = new ArrayList<>();
       cells.add(i == 0 ? "found" : Integer.toString(i + 1));
-      cells.add(Numbers.fixed(optimum.aim(), 3));
+      cells.add(Numbers.bare(optimum.aim(), search.aimUnit()));
       cells.addAll(columns.cells(optimum.values(), optimum.choices()));
       table.row(cells);
     }
@@ -171,7 +173,7 @@ public final class SearchSection {
     for (ConstraintRecord c : search.constraints()) {
       table.row(
           c.text(),
-          Numbers.significant(c.value(), 5),
+          Numbers.significant(c.value(), 4),
           c.active() ? "active: it holds the design" : "slack");
     }
     return table.build();
