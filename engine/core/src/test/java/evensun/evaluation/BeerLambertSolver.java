@@ -122,6 +122,8 @@ final class BeerLambertSolver implements OpticalSolver {
     int channels = problem.layerCount();
     if (into.sum != null) {
       java.util.Arrays.fill(into.sum, 0);
+    }
+    if (into.sum != null && into.sumStandardError != null) {
       stateErrors(into, channels);
     }
     if (into.absorptanceStandardError != null) {

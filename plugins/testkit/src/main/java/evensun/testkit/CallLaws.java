@@ -84,8 +84,14 @@ final class CallLaws {
     for (int s = 0; s < weighted.sums(); s++) {
       double wanted = weighted.wanted(s);
       double is = weighted.response().sum[s];
-      if (!(Math.abs(is - wanted) <= Answer.EXACT * Math.max(1, Math.abs(wanted)))) {
+      double bare = weighted.withoutErrors()[s];
+      double allowed = Answer.EXACT * Math.max(1, Math.abs(wanted));
+      if (!(Math.abs(is - wanted) <= allowed)) {
         return Optional.of("sum " + s + " is " + is + ", its rows and weights make " + wanted);
+      }
+      if (!(Math.abs(bare - is) <= allowed)) {
+        return Optional.of(
+            "sum " + s + " is " + bare + " without its error but " + is + " with it");
       }
     }
     return Optional.empty();

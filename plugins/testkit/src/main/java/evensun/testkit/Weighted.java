@@ -9,10 +9,11 @@ import java.util.Arrays;
  * An evaluation with three weighted sums: the first and last channel apart, and everything together
  * with what is transmitted.
  *
- * @param response the filled response, spectra and sums
+ * @param response the filled response, spectra and sums with their errors
+ * @param withoutErrors the sums of a call that did not ask for errors
  * @param channels number of channels
  */
-record Weighted(Response response, int channels) {
+record Weighted(Response response, double[] withoutErrors, int channels) {
 
   private static final int SUMS = 3;
 
@@ -22,8 +23,12 @@ record Weighted(Response response, int channels) {
       Response response = subject.spectra(prepared, stack);
       int channels = prepared.channels().size();
       ask(response, channels, stack.wavelengthCount());
+      response.sumStandardError = null;
       evaluator.evaluate(stack.design(), response);
-      return new Weighted(response, channels);
+      double[] withoutErrors = response.sum;
+      ask(response, channels, stack.wavelengthCount());
+      evaluator.evaluate(stack.design(), response);
+      return new Weighted(response, withoutErrors, channels);
     }
   }
 
