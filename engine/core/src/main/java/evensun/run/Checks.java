@@ -42,12 +42,14 @@ record Checks(
    * Checks a design.
    *
    * @param asked whether a grid is to be tried whatever time it takes
+   * @param negligible gain in the unit of the aim that makes no other design
    * @param evaluations roughly the most that the cost of steps may take
    */
   static Checks of(
       Objective objective,
       Candidate best,
       boolean asked,
+      double negligible,
       int evaluations,
       int threads,
       BooleanSupplier cancelled) {
@@ -62,8 +64,8 @@ record Checks(
     }
     Exhaustive exhaustive = new Exhaustive(objective, threads, cancelled);
     ExhaustiveOutcome grid = exhaustive.run(exhaustive.points(asked ? ASKED_POINTS : USUAL_POINTS));
-    return new Checks(
-        grid, isBetter(grid.best(), best, objective.tieResolution()), asked, stepCost);
+    double alike = negligible + objective.tieResolution() + TOLERANCE * Math.abs(best.aim());
+    return new Checks(grid, isBetter(grid.best(), best, alike), asked, stepCost);
   }
 
   /** How long a usual grid takes on one thread. */
@@ -79,12 +81,11 @@ record Checks(
     return shortest * 1e-9 * USUAL_POINTS;
   }
 
-  private static boolean isBetter(@Nullable Candidate grid, Candidate best, double tie) {
+  private static boolean isBetter(@Nullable Candidate grid, Candidate best, double alike) {
     if (grid == null || !grid.isFeasible()) {
       return false;
     }
-    double tolerance = tie + TOLERANCE * Math.abs(best.aim());
-    return !best.isFeasible() || grid.aim() > best.aim() + tolerance;
+    return !best.isFeasible() || grid.aim() > best.aim() + alike;
   }
 
   SearchRecord.@Nullable Grid grid(SearchRecords records) {

@@ -22,6 +22,7 @@ import evensun.search.proof.Freedom;
 import evensun.search.proof.Proof;
 import evensun.spi.EvaluationFailed;
 import evensun.stack.ResolvedStack;
+import java.util.DoubleSummaryStatistics;
 import java.util.List;
 import java.util.OptionalInt;
 import java.util.Set;
@@ -35,6 +36,9 @@ import org.jspecify.annotations.Nullable;
 public final class DesignJob {
 
   private static final String POINT = "--point";
+
+  /** Designs of a front that differ by less than this part of its span are the same. */
+  private static final double FRONT_GRAIN = 5e-3;
 
   private final Preparation preparation;
   private final SearchSpec spec;
@@ -234,6 +238,13 @@ public final class DesignJob {
     List<Candidate> others() {
       return front.isEmpty() ? outcome.optima() : front;
     }
+
+    /** How far the front reaches in its first aim, 0 without one. */
+    double span() {
+      DoubleSummaryStatistics first =
+          front.stream().mapToDouble(Candidate::aim).summaryStatistics();
+      return front.isEmpty() ? 0 : first.getMax() - first.getMin();
+    }
   }
 
   /**
@@ -269,7 +280,9 @@ public final class DesignJob {
         best.isFeasible()
             ? proof.alternatives(centre, found.others().stream().map(seen).toList())
             : List.of();
-    Checks checks = Checks.of(around, centre, order.exhaustive(), evaluations, threads, cancelled);
+    double negligible = FRONT_GRAIN * found.span();
+    Checks checks =
+        Checks.of(around, centre, order.exhaustive(), negligible, evaluations, threads, cancelled);
     return new Look(freedoms, alternatives, checks);
   }
 }

@@ -53,8 +53,12 @@ class ChecksTest {
   }
 
   private static Checks check(double found) {
+    return check(found, 0);
+  }
+
+  private static Checks check(double found, double negligible) {
     Candidate candidate = new Candidate(List.of(found), hill(found));
-    return Checks.of(HILL, candidate, false, 1000, 1, () -> false);
+    return Checks.of(HILL, candidate, false, negligible, 1000, 1, () -> false);
   }
 
   @Test
@@ -71,24 +75,26 @@ class ChecksTest {
     assertThat(checks.outcome().best().values().get(0))
         .isCloseTo(3, org.assertj.core.api.Assertions.within(1e-3));
     assertThat(check(3.04).better()).isFalse(); // 0.0016 below
+    assertThat(check(3.1, 0.007).better()).isTrue(); // together 0.009
+    assertThat(check(3.1, 0.009).better()).isFalse(); // together 0.011
   }
 
   @Test
   void aSlowGridIsNotTriedUnasked() {
     Candidate best = new Candidate(List.of(3.0), hill(3));
-    assertThat(Checks.of(hill(0, 1), best, false, 1000, 1, () -> false).outcome()).isNull();
+    assertThat(Checks.of(hill(0, 1), best, false, 0, 1000, 1, () -> false).outcome()).isNull();
   }
 
   @Test
   void fiveVariablesAreTooMany() {
     Candidate best = new Candidate(List.of(3.0, 1.0, 1.0, 1.0, 1.0), hill(3));
-    assertThat(Checks.of(hill(4, 0), best, false, 1000, 1, () -> false).outcome()).isNull();
+    assertThat(Checks.of(hill(4, 0), best, false, 0, 1000, 1, () -> false).outcome()).isNull();
   }
 
   @Test
   void aGridThatIsStoppedProvesNothing() {
     Candidate best = new Candidate(List.of(3.0), hill(3));
-    Checks checks = Checks.of(HILL, best, true, 1000, 1, () -> true);
+    Checks checks = Checks.of(HILL, best, true, 0, 1000, 1, () -> true);
     assertThat(checks.outcome().complete()).isFalse();
     assertThat(checks.better()).isFalse();
   }

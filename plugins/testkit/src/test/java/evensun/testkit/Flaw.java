@@ -28,6 +28,7 @@ enum Flaw {
   REPLACES_ROWS("inputs-unwritten"),
   FORGETS_WHAT_IS_TRANSMITTED("weighted-sums"),
   ADDS_TO_OLD_SUMS("weighted-sums"),
+  SUMS_ONLY_WITH_ERRORS("weighted-sums"),
   TAKES_NAN_FOR_ZERO("nan"),
   IGNORES_UNKNOWN_OPTIONS("impossible-requests"),
   IGNORES_UNKNOWN_FEATURES("impossible-requests"),

@@ -183,6 +183,9 @@ final class TwoBeamEvaluator implements Evaluator {
     for (int l = 0; l < layers; l++) {
       copy(a[l], into.absorptance, l);
     }
+    if (flaw == Flaw.SUMS_ONLY_WITH_ERRORS && into.sumStandardError == null) {
+      return;
+    }
     for (int s = 0; into.sum != null && s < into.sum.length; s++) {
       double sum = flaw == Flaw.ADDS_TO_OLD_SUMS ? into.sum[s] : 0;
       for (int l = 0; l < layers; l++) {
