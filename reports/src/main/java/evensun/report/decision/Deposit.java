@@ -66,7 +66,7 @@ final class Deposit {
     design.forEach(
         (key, value) -> {
           if (variables.stream().noneMatch(v -> v.key().equals(key))) {
-            String unit = Keys.isThickness(key) ? "nm" : "";
+            String unit = Keys.unit(key);
             all.add(new VariableRecord(key, unit, value, value, 0, value, value, null, null, null));
           }
         });

@@ -37,14 +37,12 @@ final class DesignColumns {
     Map<String, String> known =
         search.variables().stream().collect(Collectors.toMap(VariableRecord::key, v -> v.unit()));
     search.variables().forEach(v -> units.put(v.key(), v.unit()));
+    // What the design found does not have, others may: the thickness of a layer left out.
     for (Map<String, Double> design : values) {
-      design.keySet().forEach(key -> units.putIfAbsent(key, known.getOrDefault(key, unit(key))));
+      design
+          .keySet()
+          .forEach(key -> units.putIfAbsent(key, known.getOrDefault(key, Keys.unit(key))));
     }
-  }
-
-  /** What the design found does not have, others may: the thickness of a layer left out. */
-  private static String unit(String key) {
-    return Keys.isThickness(key) ? "nm" : "";
   }
 
   void addTo(Table.Builder table) {

@@ -25,6 +25,17 @@ public final class Keys {
     return key.indexOf('.') < 0 ? property(key) : layer(key) + " " + property(key);
   }
 
+  /** The unit in which a key's name ends, as in results; empty for a fraction. */
+  public static String unit(String key) {
+    if (isThickness(key)) {
+      return "nm";
+    }
+    if (isBandgap(key)) {
+      return "eV";
+    }
+    return key.endsWith("AngleDeg") ? "°" : "";
+  }
+
   /** Whether a key names a thickness. */
   public static boolean isThickness(String key) {
     return key.endsWith(".thicknessNm");
