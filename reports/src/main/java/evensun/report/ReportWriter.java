@@ -1,5 +1,6 @@
 package evensun.report;
 
+import evensun.report.page.Assets;
 import evensun.report.page.ReportPage;
 import evensun.report.page.Section;
 import evensun.report.template.JtereportGenerated;

@@ -1,9 +1,5 @@
-package evensun.report;
+package evensun.report.chart;
 
-import evensun.report.chart.Axis;
-import evensun.report.chart.Chart;
-import evensun.report.chart.Mark;
-import evensun.report.chart.Series;
 import java.io.StringWriter;
 import java.util.List;
 import org.jspecify.annotations.Nullable;

@@ -1,4 +1,4 @@
-package evensun.report;
+package evensun.report.page;
 
 import evensun.report.text.Hashes;
 import gg.jte.Content;
@@ -28,7 +28,7 @@ public record Assets(String css, Content echarts, String script, String policy) 
   private static final Assets LOADED = load();
 
   /** The assets, read once. */
-  static Assets get() {
+  public static Assets get() {
     return LOADED;
   }
 
