@@ -6,7 +6,7 @@ public final class Permittivity {
   private Permittivity() {}
 
   /**
-   * Squares an index.
+   * Squares an index, in place where asked to.
    *
    * @param n [w] refractive index
    * @param k [w] extinction coefficient, at least 0
@@ -15,8 +15,10 @@ public final class Permittivity {
    */
   public static void ofIndex(double[] n, double[] k, double[] re, double[] im) {
     for (int w = 0; w < n.length; w++) {
-      re[w] = (n[w] - k[w]) * (n[w] + k[w]);
-      im[w] = 2 * n[w] * k[w];
+      double real = (n[w] - k[w]) * (n[w] + k[w]);
+      double imaginary = 2 * n[w] * k[w];
+      re[w] = real;
+      im[w] = imaginary;
     }
   }
 

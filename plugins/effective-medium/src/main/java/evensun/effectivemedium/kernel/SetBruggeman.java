@@ -101,7 +101,7 @@ public final class SetBruggeman {
    * @param fraction [c] volume fractions, at least 0, of sum 1
    * @param d (1 − P)/P, greater than 0; 2 for spheres
    * @param re [w] in: real part of a mean of the components to start from, best that of their
-   *     indices squared; out: of the effective permittivity
+   *     indices squared; out: of the effective permittivity, NaN where no root was reached
    * @param im [w] the imaginary part of the same
    */
   public void mix(
@@ -130,8 +130,9 @@ public final class SetBruggeman {
       System.arraycopy(safeRe, 0, rootRe, 0, open);
       System.arraycopy(safeIm, 0, rootIm, 0, open);
     }
-    for (int i = 0; i < open; i++) {
-      write(i, re, im);
+    for (int i = 0; i < open; i++) { // a start outside the cone; no number is better than a guess
+      re[place[i]] = Double.NaN;
+      im[place[i]] = Double.NaN;
     }
   }
 
